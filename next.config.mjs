@@ -1,0 +1,20 @@
+/** @type {import('next').NextConfig} */
+export default {
+  poweredByHeader: false,
+  reactStrictMode: true,
+  typedRoutes: true,
+  // Sequelize asks for its dialect modules by name at run time; sharp and argon2 are native.
+  serverExternalPackages: [
+    'sequelize',
+    'pg',
+    'pg-hstore',
+    'pg-boss',
+    'sharp',
+    '@node-rs/argon2',
+    'pino',
+  ],
+  experimental: {
+    // A CSV of 5,000 shades travels through a server action; photographs never do.
+    serverActions: { bodySizeLimit: '3mb' },
+  },
+}
