@@ -1,6 +1,12 @@
 /** The codes a command may answer with; each maps to one HTTP status. */
 export type ErrorCode =
-  'invalid' | 'unauthenticated' | 'forbidden' | 'not-found' | 'conflict' | 'too-many' | 'unavailable'
+  | 'invalid'
+  | 'unauthenticated'
+  | 'forbidden'
+  | 'not-found'
+  | 'conflict'
+  | 'too-many'
+  | 'unavailable'
 
 export const HTTP_STATUS: Record<ErrorCode, number> = {
   invalid: 422,

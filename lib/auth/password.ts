@@ -1,0 +1,29 @@
+import { Algorithm, hash, verify } from '@node-rs/argon2'
+
+/** OWASP's first choice for argon2id. @source OWASP Password Storage Cheat Sheet (2024) */
+const PARAMETERS = {
+  algorithm: 2 satisfies Algorithm.Argon2id,
+  memoryCost: 19_456,
+  timeCost: 2,
+  parallelism: 1,
+} as const
+
+/** The argon2id hash of a password, in PHC string format. */
+export function hashPassword(password: string): Promise<string> {
+  return hash(password, PARAMETERS)
+}
+
+let decoy: Promise<string> | undefined
+
+/**
+ * Whether the password fits the hash. Without a hash (nobody has that address) it does the same
+ * work and says no, so that the time taken does not tell who has an account.
+ */
+export async function verifyPassword(
+  passwordHash: string | undefined,
+  password: string,
+): Promise<boolean> {
+  decoy ??= hashPassword('nobody has this password')
+  const fits = await verify(passwordHash ?? (await decoy), password)
+  return fits && passwordHash !== undefined
+}

@@ -1,0 +1,53 @@
+import PgBoss from 'pg-boss'
+import type { Transaction } from 'sequelize'
+
+/**
+ * The queues by name and what one of their jobs carries: ids only. A job is done at least once, so
+ * its handler is idempotent.
+ */
+export interface JobData {
+  'read-photograph': { photographId: string }
+  'sweep-uploads': Record<string, never>
+}
+/** One of the queues. */
+export type JobName = keyof JobData
+
+/**
+ * How often a job is tried again, after how long (seconds, doubling), and how long one try may take
+ * before it counts as dead and is given to another process.
+ */
+export const QUEUES: Record<
+  JobName,
+  { retryLimit: number; retryDelay: number; expireInSeconds: number }
+> = {
+  'read-photograph': { retryLimit: 4, retryDelay: 2, expireInSeconds: 90 },
+  'sweep-uploads': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
+}
+
+// Never started and never connected: it only words the insert, which runs in our transaction.
+let sender: PgBoss | undefined
+const unconnected = {
+  executeSql: () => Promise.reject(new Error('A job is enqueued within a transaction.')),
+}
+
+/**
+ * Enqueues a job in the transaction of the row it is about: both are there after commit, or neither.
+ */
+export async function enqueue<Name extends JobName>(
+  name: Name,
+  data: JobData[Name],
+  transaction: Transaction,
+): Promise<void> {
+  sender ??= new PgBoss({ db: unconnected })
+  const connection = (transaction as unknown as { connection: PgConnection }).connection
+  const id = await sender.send(name, data, {
+    ...QUEUES[name],
+    retryBackoff: true,
+    db: { executeSql: (text, values) => connection.query(text, values) },
+  })
+  if (!id) throw new Error(`No queue named ${name}: run the migrations.`)
+}
+
+interface PgConnection {
+  query(text: string, values: unknown[]): Promise<{ rows: unknown[] }>
+}

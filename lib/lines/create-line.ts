@@ -1,0 +1,54 @@
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { ConflictError } from '@/lib/errors'
+import { inTransaction, Line } from '@/models'
+
+import { canCreateLine } from './policy'
+import { LINE_LIMITS, type CreateLineInput } from './schema'
+
+/** "Heronsway DK" → "heronsway-dk"; "line" when nothing of the name can stand in an address. */
+export function slugify(name: string): string {
+  const slug = name
+    .normalize('NFKD')
+    .replace(/[\u0300-\u036f]/g, '')
+    .toLowerCase()
+    .replace(/[^a-z0-9]+/g, '-')
+    .replace(/^-+|-+$/g, '')
+  return slug || 'line'
+}
+
+/**
+ * Makes a line. The same `requestKey` again gives the line it made the first time.
+ * @throws ConflictError when the brand has a line of that name
+ */
+export async function createLine(actor: Actor, input: CreateLineInput): Promise<Line> {
+  authorize(actor, canCreateLine)
+  const { requestKey, price, ...fields } = input
+  return inTransaction(async (transaction) => {
+    const lines = await Line.findAll({
+      where: { brandId: actor.brandId },
+      attributes: ['id', 'name', 'slug', 'requestKey'],
+      transaction,
+    })
+    if (lines.length >= LINE_LIMITS.perBrand) {
+      throw new ConflictError(`A brand holds at most ${LINE_LIMITS.perBrand} lines.`)
+    }
+    const slug = slugify(input.name)
+    const same = lines.find((line) => line.slug === slug && line.requestKey !== requestKey)
+    if (same) {
+      const message = `There is a line called ${same.name} already.`
+      throw new ConflictError(message, { name: [message] })
+    }
+    const [line] = await Line.findOrCreate({
+      where: { brandId: actor.brandId, requestKey },
+      defaults: {
+        ...fields,
+        slug,
+        brandId: actor.brandId,
+        priceMinor: Math.round(price * 100),
+        requestKey,
+      },
+      transaction,
+    })
+    return line
+  })
+}

@@ -1,0 +1,18 @@
+import { z } from 'zod'
+
+/** What a person may be in a brand. */
+export const ROLES = ['owner', 'marketer', 'designer', 'dyer'] as const
+/** One of ROLES. */
+export type Role = (typeof ROLES)[number]
+
+/** The sign-in form. The password is bounded so that nobody can make us hash a novel. */
+export const signInSchema = z.object({
+  email: z
+    .email('Write your e-mail address, like name@brand.example.')
+    .trim()
+    .toLowerCase()
+    .max(254),
+  password: z.string().min(1, 'Write your password.').max(256),
+})
+/** A parsed sign-in form. */
+export type SignInInput = z.infer<typeof signInSchema>

@@ -1,0 +1,33 @@
+import {
+  DataTypes,
+  Model,
+  type CreationOptional,
+  type InferAttributes,
+  type InferCreationAttributes,
+  type NonAttribute,
+} from 'sequelize'
+
+import { idColumn } from './columns'
+import type { Person } from './Person'
+import { sequelize } from './sequelize'
+
+/** A signed-in browser. The cookie only names this row; ending the row ends the session. */
+export class Session extends Model<InferAttributes<Session>, InferCreationAttributes<Session>> {
+  declare id: CreationOptional<string>
+  declare personId: string
+  declare expiresAt: Date
+  declare lastSeenAt: CreationOptional<Date>
+  declare createdAt: CreationOptional<Date>
+  declare person?: NonAttribute<Person>
+}
+
+Session.init(
+  {
+    id: idColumn,
+    personId: { type: DataTypes.UUID, allowNull: false },
+    expiresAt: { type: DataTypes.DATE, allowNull: false },
+    lastSeenAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
+    createdAt: DataTypes.DATE,
+  },
+  { sequelize: sequelize(), tableName: 'sessions', updatedAt: false },
+)

@@ -1,0 +1,41 @@
+import { Brand } from './Brand'
+import { Combination } from './Combination'
+import { CombinationPlace } from './CombinationPlace'
+import { Line } from './Line'
+import { Membership } from './Membership'
+import { Person } from './Person'
+import { Photograph } from './Photograph'
+import { Reading } from './Reading'
+import { Session } from './Session'
+import { Shade } from './Shade'
+
+Membership.belongsTo(Brand, { as: 'brand', foreignKey: 'brandId' })
+Membership.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
+Session.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
+Person.hasMany(Membership, { as: 'memberships', foreignKey: 'personId' })
+
+Line.hasMany(Shade, { as: 'shades', foreignKey: 'lineId' })
+Line.hasMany(Photograph, { as: 'photographs', foreignKey: 'lineId' })
+Line.hasMany(Combination, { as: 'combinations', foreignKey: 'lineId' })
+
+Photograph.hasOne(Reading, { as: 'reading', foreignKey: 'photographId' })
+
+Combination.hasMany(CombinationPlace, { as: 'places', foreignKey: 'combinationId' })
+Combination.belongsTo(Photograph, { as: 'photograph', foreignKey: 'photographId' })
+CombinationPlace.belongsTo(Shade, { as: 'shade', foreignKey: 'shadeId' })
+CombinationPlace.belongsTo(Combination, { as: 'combination', foreignKey: 'combinationId' })
+
+export {
+  Brand,
+  Combination,
+  CombinationPlace,
+  Line,
+  Membership,
+  Person,
+  Photograph,
+  Reading,
+  Session,
+  Shade,
+}
+export { inTransaction, sequelize } from './sequelize'
+export { updateVersioned } from './update-versioned'

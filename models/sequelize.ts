@@ -1,0 +1,44 @@
+import { Sequelize, type Transaction } from 'sequelize'
+
+import { building, env } from '@/lib/env'
+
+const shared = globalThis as typeof globalThis & { woadmapSequelize?: Sequelize }
+
+/** How long anything may wait for the database before it is given up, in milliseconds. */
+const WAIT = { connect: 3_000, acquire: 4_000, statement: 10_000, lock: 4_000 } as const
+
+/**
+ * The one Sequelize instance. It lives on globalThis so that a hot reload keeps its pool; the
+ * models are initialised at every evaluation so that it sees edits. No connection is made before
+ * the first query.
+ */
+export function sequelize(): Sequelize {
+  return (shared.woadmapSequelize ??= new Sequelize(
+    building ? 'postgres://127.0.0.1/none' : env().DATABASE_URL,
+    {
+      dialect: 'postgres',
+      logging: false,
+      define: { underscored: true, freezeTableName: true },
+      pool: {
+        max: building ? 1 : env().DATABASE_POOL_MAX,
+        min: 0,
+        acquire: WAIT.acquire,
+        idle: 10_000,
+      },
+      dialectOptions: {
+        connectionTimeoutMillis: WAIT.connect,
+        query_timeout: WAIT.statement,
+        statement_timeout: WAIT.statement,
+        lock_timeout: WAIT.lock,
+        idle_in_transaction_session_timeout: 30_000,
+        keepAlive: true,
+        application_name: 'woadmap',
+      },
+    },
+  ))
+}
+
+/** Runs `work` in one transaction: committed when it returns, rolled back when it throws. */
+export function inTransaction<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
+  return sequelize().transaction(work)
+}
