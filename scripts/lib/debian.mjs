@@ -1,0 +1,60 @@
+import { existsSync, mkdirSync, writeFileSync } from 'node:fs'
+import { dirname } from 'node:path'
+
+import { Refusal, say } from './say.mjs'
+
+const NO_MAIN_CLUSTER = '/etc/postgresql-common/createcluster.d/no-main.conf'
+const SETTING = 'create_main_cluster = false'
+
+/**
+ * Installs the Debian packages that are missing: as root by itself, otherwise by telling the exact
+ * command.
+ * @param {{name: string, isPresent: () => boolean}[]} wanted
+ * @throws {Refusal} when the person has to do it, or when apt fails
+ */
+export async function ensureDebianPackages(fleet, wanted, env) {
+  const missing = wanted.filter((each) => !each.isPresent()).map((each) => each.name)
+  if (missing.length === 0) return
+  if (process.getuid() !== 0) throw new Refusal(sudoSentence(missing))
+  if (!existsSync('/usr/bin/apt-get')) {
+    throw new Refusal(
+      `Not found on this system: ${missing.join(', ')}. Install them, then start again.`,
+    )
+  }
+  say(`Installing from Debian: ${missing.join(', ')}`)
+  if (missing.includes('postgresql')) preventMainCluster()
+  const aptEnv = { ...env, DEBIAN_FRONTEND: 'noninteractive' }
+  // A list that could not be refreshed may still be good enough; the installation decides.
+  await fleet.run({ command: 'apt-get', args: ['update', '-qq'], env: aptEnv })
+  const code = await fleet.run({
+    command: 'apt-get',
+    args: ['install', '-y', '-qq', '--no-install-recommends', ...missing],
+    env: aptEnv,
+  })
+  const absent = wanted.filter((each) => !each.isPresent()).map((each) => each.name)
+  if (code !== 0 || absent.length > 0) {
+    throw new Refusal(`apt-get could not install ${missing.join(', ')}; what it said is above.`)
+  }
+}
+
+/** The sentence that tells an ordinary user what to run. */
+export function sudoSentence(missing) {
+  const steps = [
+    ...(missing.includes('postgresql')
+      ? [`mkdir -p ${dirname(NO_MAIN_CLUSTER)}`, `echo "${SETTING}" > ${NO_MAIN_CLUSTER}`]
+      : []),
+    'apt-get update',
+    `apt-get install -y --no-install-recommends ${missing.join(' ')}`,
+  ]
+  return (
+    `Debian's ${missing.join(', ')} must be installed, which needs an administrator. Run\n\n` +
+    `    sudo sh -c '${steps.join(' && ')}'\n\nand start again.`
+  )
+}
+
+// Debian would otherwise make and start a second cluster of its own on port 5432.
+function preventMainCluster() {
+  if (existsSync(NO_MAIN_CLUSTER)) return
+  mkdirSync(dirname(NO_MAIN_CLUSTER), { recursive: true })
+  writeFileSync(NO_MAIN_CLUSTER, `${SETTING}\n`)
+}
