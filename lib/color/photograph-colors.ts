@@ -1,0 +1,204 @@
+import { ciede2000 } from './ciede2000'
+import { displayP3ToLab, srgbToLab } from './srgb'
+import { chromaOf, type Lab, type PixelImage } from './types'
+
+export type { PixelImage } from './types'
+
+/** One colour of a photograph. */
+export interface PhotographCell {
+  /** Area-weighted mean, D65. */
+  lab: Lab
+  /** Share of the visible pixels; the cells of a photograph sum to 1. */
+  area: number
+}
+
+/** A photograph as the colours it is made of, and where each of them lies. */
+export interface PhotographColors {
+  /** At most {@link MAX_CELLS}, largest first. */
+  cells: PhotographCell[]
+  width: number
+  height: number
+  /** One byte a pixel, row-major: the index of its cell, or {@link NO_CELL}. */
+  cellMap: Uint8Array
+}
+
+/** In a cell map: this pixel is transparent. */
+export const NO_CELL = 255
+/** What one byte a pixel can tell apart, less the mark for none. */
+export const MAX_CELLS = 255
+
+const BINS = 1 << 15
+const EDGES = [4, 5, 6, 7, 8, 10, 12, 15, 20, 30, 60]
+
+interface Bins {
+  /** The occupied bins, ascending. */
+  keys: number[]
+  labs: Lab[]
+  counts: Uint32Array
+  /** One a pixel: its bin, or −1 where nothing is visible. */
+  binOfPixel: Int16Array
+  visible: number
+}
+
+/** 5 bits a channel, each bin standing for the mean of what fell into it. */
+function binPixels({ data, width, height, space }: PixelImage): Bins {
+  const wide = data instanceof Uint16Array
+  const shift = wide ? 11 : 3
+  const full = wide ? 65535 : 255
+  const half = (full + 1) / 2
+  const counts = new Uint32Array(BINS)
+  const sums = new Float64Array(BINS * 3)
+  const binOfPixel = new Int16Array(width * height).fill(-1)
+  let visible = 0
+  for (let pixel = 0, at = 0; pixel < binOfPixel.length; pixel++, at += 4) {
+    if (data[at + 3]! < half) continue
+    const r = data[at]!
+    const g = data[at + 1]!
+    const b = data[at + 2]!
+    const bin = ((r >> shift) << 10) | ((g >> shift) << 5) | (b >> shift)
+    binOfPixel[pixel] = bin
+    counts[bin]!++
+    sums[bin * 3]! += r
+    sums[bin * 3 + 1]! += g
+    sums[bin * 3 + 2]! += b
+    visible++
+  }
+  const toLab = space === 'display-p3' ? displayP3ToLab : srgbToLab
+  const keys: number[] = []
+  const labs: Lab[] = []
+  for (let bin = 0; bin < BINS; bin++) {
+    const count = counts[bin]!
+    if (count === 0) continue
+    const scale = 1 / (count * full)
+    keys.push(bin)
+    labs.push(toLab(sums[bin * 3]! * scale, sums[bin * 3 + 1]! * scale, sums[bin * 3 + 2]! * scale))
+  }
+  return { keys, labs, counts, binOfPixel, visible }
+}
+
+/** Which cube of a grid of this edge a colour falls into; neutrals lie in the middle of theirs. */
+const cubeOf = (lab: Lab, edge: number): number =>
+  (Math.floor(lab[0] / edge) * 128 + Math.round(lab[1] / edge) + 64) * 128 +
+  Math.round(lab[2] / edge) +
+  64
+
+const round = (value: number): number => Math.round(value * 1e4) / 1e4
+
+/**
+ * The colours of a photograph: 5-bit bins merged into the finest CIELAB grid of at most
+ * {@link MAX_CELLS} cells. Deterministic. Pixels less than half opaque are left out; throws
+ * RangeError when none remain.
+ * @source bins and grid: measured on 28 photographs; more cells change a match by under 0.1 %
+ */
+export function readPhotographColors(image: PixelImage): PhotographColors {
+  const { width, height } = image
+  if (image.data.length !== width * height * 4)
+    throw new RangeError(`Expected ${width * height * 4} channel values, got ${image.data.length}.`)
+  const bins = binPixels(image)
+  if (bins.visible === 0) throw new RangeError('no visible pixels')
+
+  let cubes: number[] = []
+  let distinct = new Set<number>()
+  for (const edge of EDGES) {
+    cubes = bins.labs.map((lab) => cubeOf(lab, edge))
+    distinct = new Set(cubes)
+    if (distinct.size <= MAX_CELLS) break
+  }
+
+  const sums = new Map<number, [l: number, a: number, b: number, count: number]>()
+  bins.labs.forEach((lab, index) => {
+    const cube = cubes[index]!
+    const count = bins.counts[bins.keys[index]!]!
+    const sum = sums.get(cube) ?? [0, 0, 0, 0]
+    for (let axis = 0; axis < 3; axis++) sum[axis]! += lab[axis]! * count
+    sum[3] += count
+    sums.set(cube, sum)
+  })
+  const ordered = [...sums].sort(([cubeA, a], [cubeB, b]) => b[3] - a[3] || cubeA - cubeB)
+  const cells = ordered.map(([, [l, a, b, count]]) => ({
+    lab: [round(l / count), round(a / count), round(b / count)] as const,
+    area: count / bins.visible,
+  }))
+
+  const cellOfCube = new Map(ordered.map(([cube], cell) => [cube, cell]))
+  const cellOfBin = new Uint8Array(BINS)
+  bins.keys.forEach((bin, index) => {
+    cellOfBin[bin] = cellOfCube.get(cubes[index]!)!
+  })
+  const cellMap = new Uint8Array(width * height)
+  for (let pixel = 0; pixel < cellMap.length; pixel++) {
+    const bin = bins.binOfPixel[pixel]!
+    cellMap[pixel] = bin < 0 ? NO_CELL : cellOfBin[bin]!
+  }
+  return { cells, width, height, cellMap }
+}
+
+/** How much a cell asks for a shade of its own, beside the area it covers. */
+interface AccentShares {
+  /** Sum to 1, or all 0 where nothing is vivid and apart. */
+  shares: Float64Array
+  /** The sum before it was scaled: how much accent the photograph has. */
+  total: number
+  /** How vivid each cell is and how far from the rest, whatever it covers: 0–0.95. */
+  strength: Float64Array
+  /** Area within about 7 ΔE00 of each cell. */
+  neighborhood: Float64Array
+}
+
+/**
+ * The accent share of each cell: vivid colours that stand apart from the rest of the picture and
+ * cover more than a speck of it. Quadratic in the cells (255: about 32,000 ΔE00).
+ * @source common practice of this product, measured on 28 photographs
+ */
+export function accentShares(cells: readonly PhotographCell[]): AccentShares {
+  const n = cells.length
+  const neighborhood = new Float64Array(n)
+  const apart = new Float64Array(n)
+  for (let i = 0; i < n; i++) {
+    const [L, a, b] = cells[i]!.lab
+    const area = cells[i]!.area
+    neighborhood[i]! += area
+    for (let j = i + 1; j < n; j++) {
+      const other = cells[j]!
+      const distance = ciede2000(L, a, b, other.lab[0], other.lab[1], other.lab[2])
+      const reach = Math.min(1, distance / 40)
+      apart[i]! += other.area * reach
+      apart[j]! += area * reach
+      if (distance < 42) {
+        const near = Math.exp(-((distance / 7) ** 2))
+        neighborhood[i]! += other.area * near
+        neighborhood[j]! += area * near
+      }
+    }
+  }
+  const shares = new Float64Array(n)
+  const strength = new Float64Array(n)
+  let total = 0
+  for (let i = 0; i < n; i++) {
+    const { lab, area } = cells[i]!
+    const vivid = Math.max(0, Math.min(1, chromaOf(lab) / 45) - 0.05)
+    const enough = Math.min(1, neighborhood[i]! / 0.003) ** 2
+    strength[i] = apart[i]! ** 2 * vivid
+    shares[i] = (area / neighborhood[i]!) * enough * strength[i]!
+    total += shares[i]!
+  }
+  if (total > 0) for (let i = 0; i < n; i++) shares[i]! /= total
+  return { shares, total, strength, neighborhood }
+}
+
+/**
+ * What each cell counts for in a match; sums to 1. The area it covers, mixed with up to a quarter
+ * of accent, and near-blacks held down: three of them are no palette.
+ * @source common practice of this product, measured on 28 photographs
+ */
+export function cellWeights(cells: readonly PhotographCell[]): number[] {
+  const { shares, total } = accentShares(cells)
+  const mix = 0.25 * Math.min(1, total / 3)
+  const weights = cells.map(({ lab, area }, i) => {
+    const t = Math.min(1, Math.max(0, (lab[0] - 6) / 24))
+    const light = 0.4 + 0.6 * t * t * (3 - 2 * t)
+    return light * ((1 - mix) * area + mix * shares[i]!)
+  })
+  const sum = weights.reduce((a, b) => a + b, 0)
+  return weights.map((weight) => weight / sum)
+}
