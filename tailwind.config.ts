@@ -35,7 +35,7 @@ export default {
     },
     borderRadius: { none: '0', DEFAULT: '2px', full: '9999px' },
     boxShadow: { none: 'none', dragged: '0 6px 18px rgb(0 0 0 / 0.22)' },
-    screens: { sm: '30rem', md: '45rem', margins: '56.25rem', lg: '68rem', xl: '84rem' },
+    screens: { sm: '30rem', md: '45rem', margins: '56.25rem', lg: '72rem' },
     extend: {
       maxWidth: { measure: '64ch' },
       keyframes: {
