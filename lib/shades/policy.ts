@@ -1,0 +1,8 @@
+import { allow } from '@/lib/auth/actor'
+
+/** Everybody in the brand sees a line's shades and takes them away as CSV. */
+export const canReadShades = allow('owner', 'marketer', 'designer', 'dyer')
+/** Adds, changes, orders, imports and deletes shades. */
+export const canEditShades = allow('owner', 'designer')
+/** Sees in which combinations a shade stands; a dyer works with shades alone. */
+export const canReadShadeUses = allow('owner', 'marketer', 'designer')
