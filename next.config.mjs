@@ -1,5 +1,7 @@
 /** @type {import('next').NextConfig} */
 export default {
+  // `npm test` builds beside a product that may be running from .next.
+  distDir: process.env.WOADMAP_DIST_DIR ?? '.next',
   poweredByHeader: false,
   reactStrictMode: true,
   typedRoutes: true,

@@ -7,17 +7,16 @@
 import { join } from 'node:path'
 
 import { ensureBuild } from './lib/build.mjs'
-import { ensureDebianPackages } from './lib/debian.mjs'
+import { DEBIAN, ensureDebianPackages } from './lib/debian.mjs'
 import { demoAccountsTable } from './lib/demo-accounts.mjs'
 import { readEnvironment } from './lib/env-file.mjs'
 import { launch } from './lib/launcher.mjs'
 import { ensurePackages, requireNode } from './lib/packages.mjs'
-import { NEXT, ROOT } from './lib/paths.mjs'
-import { findPostgres } from './lib/postgres-binaries.mjs'
-import { Refusal, say, sayError } from './lib/say.mjs'
+import { ROOT } from './lib/paths.mjs'
+import { migrate, seed, startJobs, startWeb } from './lib/product.mjs'
+import { say, sayError } from './lib/say.mjs'
 import { localServices, requirePorts, startServices } from './lib/services.mjs'
 import { readSettings } from './lib/settings.mjs'
-import { waitForPort } from './lib/ports.mjs'
 
 const dev = process.argv.includes('--dev')
 
@@ -36,7 +35,7 @@ async function start(fleet, stopped, env, settings) {
   await requirePorts(env, settings)
   await Promise.all([
     ensurePackages(fleet, ROOT, env),
-    localServices(env).database && ensureDebianPackages(fleet, [POSTGRES], env),
+    localServices(env).database && ensureDebianPackages(fleet, [DEBIAN.postgresql], env),
   ])
   const productEnv = await startServices(fleet, env, settings, dev ? 'development' : 'production')
   await Promise.all([
@@ -48,49 +47,14 @@ async function start(fleet, stopped, env, settings) {
   return 0
 }
 
-const POSTGRES = { name: 'postgresql', isPresent: () => findPostgres().length > 0 }
-
 async function prepareDatabase(fleet, env, { seedDemo }) {
-  await script(fleet, env, ['migrations/umzug.ts', 'up'], 'The database could not be migrated')
-  if (seedDemo) await script(fleet, env, ['seeders/seed.ts'], 'The demo could not be seeded')
-}
-
-async function script(fleet, env, [file, ...args], problem) {
-  const code = await fleet.run({
-    command: process.execPath,
-    args: ['--import', 'tsx', file, ...args],
-    cwd: ROOT,
-    env,
-  })
-  if (code !== 0) throw new Refusal(`${problem}; why is written above.`)
+  await migrate(fleet, env)
+  if (seedDemo) await seed(fleet, env)
 }
 
 async function serve(fleet, env, { host, port, appOrigin, seedDemo }) {
-  await fleet.start({
-    name: 'jobs',
-    command: process.execPath,
-    args: ['--import', 'tsx', 'worker.ts'],
-    cwd: ROOT,
-    env,
-    show: true,
-    restart: true,
-    stopWithin: 8000,
-  })
-  await fleet.start({
-    name: 'web',
-    command: process.execPath,
-    args: [NEXT, dev ? 'dev' : 'start', '-p', String(port), '-H', host],
-    cwd: ROOT,
-    env,
-    show: true,
-    stopWithin: 4000,
-  })
-  const at = host === '0.0.0.0' || host === '::' ? '127.0.0.1' : host
-  if (
-    !(await waitForPort(port, { host: at, within: 90_000, alive: () => fleet.isRunning('web') }))
-  ) {
-    throw new Refusal(`The web server did not start.\n${fleet.tail('web')}`)
-  }
+  await startJobs(fleet, env, { show: true })
+  await startWeb(fleet, env, { host, port, dev, show: true })
   say(`Woadmap is at ${appOrigin}`)
   const accounts = seedDemo && demoAccountsTable(join(ROOT, 'seeders/demo-accounts.json'))
   if (accounts)

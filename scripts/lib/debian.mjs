@@ -1,7 +1,19 @@
 import { existsSync, mkdirSync, writeFileSync } from 'node:fs'
 import { dirname } from 'node:path'
 
+import { findPostgres } from './postgres-binaries.mjs'
 import { Refusal, say } from './say.mjs'
+
+/** What Woadmap and its tests need from Debian, and how to tell that it is there. */
+export const DEBIAN = {
+  postgresql: { name: 'postgresql', isPresent: () => findPostgres().length > 0 },
+  chromium: { name: 'chromium', isPresent: () => existsSync('/usr/bin/chromium') },
+  // Photographs to measure the match on; too large to be kept in the repository.
+  backgrounds: {
+    name: 'mate-backgrounds',
+    isPresent: () => existsSync('/usr/share/backgrounds/mate'),
+  },
+}
 
 const NO_MAIN_CLUSTER = '/etc/postgresql-common/createcluster.d/no-main.conf'
 const SETTING = 'create_main_cluster = false'

@@ -1,35 +1,51 @@
 import { execFileSync } from 'node:child_process'
+import { createHash } from 'node:crypto'
 import { existsSync, statSync } from 'node:fs'
-import { dirname } from 'node:path'
+import { dirname, join } from 'node:path'
 
-import { Refusal } from './say.mjs'
+import { Refusal, say } from './say.mjs'
+
+const ELSEWHERE = '/var/lib/woadmap'
 
 /**
- * As whom PostgreSQL must run, since it refuses to run as root: the owner of the data folder when
- * there is one, otherwise ourselves or, for root, the user `postgres`.
- * @returns {{uid: number, gid: number} | undefined} undefined means as we are
- * @throws {Refusal} when that user cannot be, or cannot get at the folder
+ * Where the cluster is and as whom it runs. PostgreSQL refuses to run as root, so root runs it as
+ * the owner of the data folder or, for a new one, as the user `postgres`; and when that user may
+ * not enter our local folder (a checkout under /root, say), its cluster is kept under /var/lib.
+ * @param {string} local the folder of local services
+ * @returns {{home: string, data: string, owner?: {uid: number, gid: number}}} no owner: as we are
+ * @throws {Refusal} when the data folder belongs to another user
  */
-export function postgresOwner(dataFolder, uid = process.getuid()) {
-  const owner = existsSync(dataFolder) ? statSync(dataFolder) : undefined
+export function placePostgres(local, uid = process.getuid()) {
+  const here = placeIn(join(local, 'postgres'))
+  const made = statSync(here.data, { throwIfNoEntry: false })
   if (uid !== 0) {
-    if (owner && owner.uid !== uid) {
-      throw new Refusal(
-        `The database folder ${dataFolder} belongs to another user. ` +
-          'Start as that user, or set WOADMAP_LOCAL=<folder of your own>.',
-      )
-    }
-    return undefined
+    if (made && made.uid !== uid) throw foreign(here.data)
+    return here
   }
-  const identity = owner && owner.uid !== 0 ? { uid: owner.uid, gid: owner.gid } : userPostgres()
-  const blocked = blockedAncestor(dirname(dataFolder), identity)
-  if (blocked) {
+  const owner = made && made.uid !== 0 ? { uid: made.uid, gid: made.gid } : userPostgres()
+  const blocked = blockedAncestor(local, owner)
+  if (!blocked) return { ...here, owner }
+  if (made) {
     throw new Refusal(
-      `PostgreSQL does not run as root, and the user it runs as may not enter ${blocked}. ` +
-        `Allow that (chmod o+x ${blocked}), or set WOADMAP_LOCAL=<folder it can enter, such as /var/lib/woadmap>.`,
+      `The database in ${here.data} cannot be reached by the user it runs as, who may not enter ` +
+        `${blocked}. Allow that (chmod o+x ${blocked}), or set WOADMAP_LOCAL=<another folder>.`,
     )
   }
-  return identity
+  const name = createHash('sha256').update(local).digest('hex').slice(0, 12)
+  const there = placeIn(join(ELSEWHERE, name))
+  say(`PostgreSQL may not enter ${blocked}, so its data is kept in ${there.home}`)
+  return { ...there, owner }
+}
+
+function placeIn(home) {
+  return { home, data: join(home, 'data') }
+}
+
+function foreign(data) {
+  return new Refusal(
+    `The database folder ${data} belongs to another user. ` +
+      'Start as that user, or set WOADMAP_LOCAL=<folder of your own>.',
+  )
 }
 
 /**

@@ -14,7 +14,7 @@ import { setTimeout as sleep } from 'node:timers/promises'
 
 import { folderOf } from './identity.mjs'
 import { choosePostgres, findPostgres } from './postgres-binaries.mjs'
-import { postgresOwner } from './postgres-owner.mjs'
+import { placePostgres } from './postgres-owner.mjs'
 import { stopStranger } from './processes.mjs'
 import { Refusal, say } from './say.mjs'
 import { keepSecret } from './secrets.mjs'
@@ -31,10 +31,8 @@ const ROLE = 'woadmap'
  *   renewDatabase: (name: string) => Promise<void>}>}
  */
 export async function startPostgres(fleet, { local, port, durable = true }) {
-  const home = join(local, 'postgres')
-  const data = join(home, 'data')
+  const { home, data, owner } = placePostgres(local)
   mkdirSync(home, { recursive: true })
-  const owner = postgresOwner(data)
   const password = keepSecret(join(home, 'password'))
   const { folder: programs } = choosePostgres(findPostgres(), versionOf(data), data)
 

@@ -46,6 +46,11 @@ export class Fleet {
     await this.#launch({ stopSignal: 'SIGTERM', stopWithin: 5000, ...spec }, 0)
   }
 
+  /** Whether everything is being stopped: what fails from now on fails for that reason. */
+  get isStopping() {
+    return this.#stopping
+  }
+
   /** Whether the named process runs at this moment. */
   isRunning(name) {
     const service = this.#services.get(name)
@@ -194,7 +199,7 @@ export async function stopStranger(pid, within = 8000) {
   trySignal(pid, 'SIGINT')
   const deadline = Date.now() + within
   while (beginningOf(pid) === beginning && beginning !== undefined) {
-    if (Date.now() > deadline) trySignal(-pid, 'SIGKILL') || trySignal(pid, 'SIGKILL')
+    if (Date.now() > deadline) trySignal(-pid, 'SIGKILL')
     await sleep(50)
     if (Date.now() > deadline + 2000) {
       throw new Refusal(

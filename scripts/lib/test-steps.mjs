@@ -1,0 +1,109 @@
+import { join } from 'node:path'
+
+import { NEXT, ROOT } from './paths.mjs'
+import { migrate, seed, startJobs, startWeb } from './product.mjs'
+import { DEBIAN } from './debian.mjs'
+import { clearReport, readPlaywright, readVitest, tallyOfCheck, tallyOfReport } from './tally.mjs'
+
+/** No step may take longer, in milliseconds. */
+const LIMIT = 9 * 60_000
+
+const bin = (path) => join(ROOT, 'node_modules', path)
+
+/**
+ * The steps of `npm test`, in order. `debian` is what a step needs installed, `world` whether it
+ * stands on services, `after` the step without which it cannot run. `run` gives its tally; the
+ * context is {fleet, env, world, local, filters}.
+ */
+export const STEPS = [
+  {
+    name: 'lint',
+    run: async ({ fleet, env }) =>
+      tallyOfCheck(await node(fleet, env, [bin('eslint/bin/eslint.js'), '.', '--max-warnings=0'])),
+  },
+  {
+    name: 'typecheck',
+    run: async ({ fleet, env }) => {
+      const types = await node(fleet, env, [NEXT, 'typegen'])
+      return tallyOfCheck(
+        types || (await node(fleet, env, [bin('typescript/bin/tsc'), '--noEmit'])),
+      )
+    },
+  },
+  {
+    name: 'unit',
+    debian: [DEBIAN.backgrounds],
+    run: (context) => vitest(context, { ...context.env, NODE_ENV: 'test' }, ['unit', 'unit-dom']),
+  },
+  {
+    name: 'integration',
+    debian: [DEBIAN.postgresql, DEBIAN.backgrounds],
+    world: true,
+    run: async (context) => {
+      const env = context.world.environment('integration', 'test')
+      await context.world.renew('integration')
+      await migrate(context.fleet, env)
+      return vitest(context, env, ['integration'])
+    },
+  },
+  {
+    name: 'build',
+    run: async ({ fleet, env, local }) => {
+      const buildEnv = { ...env, ...distOf(local), NODE_ENV: 'production' }
+      return tallyOfCheck(await node(fleet, buildEnv, [NEXT, 'build']))
+    },
+  },
+  {
+    name: 'e2e',
+    debian: [DEBIAN.postgresql, DEBIAN.chromium, DEBIAN.backgrounds],
+    world: true,
+    after: 'build',
+    run: async (context) => {
+      const { fleet, world, local } = context
+      const env = { ...world.environment('e2e', 'production'), ...distOf(local) }
+      await world.renew('e2e')
+      await migrate(fleet, env)
+      await seed(fleet, env)
+      await startJobs(fleet, env)
+      await startWeb(fleet, env, { host: '127.0.0.1', port: world.port })
+      return playwright(context, { ...env, NODE_ENV: 'test' })
+    },
+  },
+]
+
+async function vitest({ fleet, local, filters }, env, projects) {
+  const report = join(local, `${projects[0]}.json`)
+  clearReport(report)
+  const code = await node(fleet, env, [
+    bin('vitest/vitest.mjs'),
+    'run',
+    ...projects.flatMap((name) => ['--project', name]),
+    '--allowOnly=false',
+    '--reporter=default',
+    '--reporter=json',
+    `--outputFile.json=${report}`,
+    ...filters,
+  ])
+  return tallyOfReport(code, report, readVitest)
+}
+
+async function playwright({ fleet, local, filters }, env) {
+  const report = join(local, 'e2e.json')
+  clearReport(report)
+  const code = await node(fleet, { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: report }, [
+    bin('@playwright/test/cli.js'),
+    'test',
+    '--reporter=list,json',
+    ...filters,
+  ])
+  return tallyOfReport(code, report, readPlaywright)
+}
+
+function node(fleet, env, args) {
+  return fleet.run({ command: process.execPath, args, cwd: ROOT, env, within: LIMIT })
+}
+
+// Apart from .next, which a running product may be serving from.
+function distOf(local) {
+  return { WOADMAP_DIST_DIR: join(local, 'next').slice(ROOT.length + 1) }
+}
