@@ -18,5 +18,7 @@ export default {
   experimental: {
     // A CSV of 5,000 shades travels through a server action; photographs never do.
     serverActions: { bodySizeLimit: '3mb' },
+    // forbidden() answers 403 with app/forbidden.tsx.
+    authInterrupts: true,
   },
 }

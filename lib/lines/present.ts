@@ -26,11 +26,13 @@ export interface LineView {
   gauge: string
   /** "£21.50". */
   price: string
+  /** "20 March 2027", or null while undecided. */
   launchDate: string | null
   /** The form's values as they stand. */
   values: Omit<CreateLineValues, 'requestKey'>
 }
 
+const longDate = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' })
 const twoPlaces = (value: number) => Number(value.toFixed(2)).toString()
 
 /** A line row as its view. */
@@ -50,7 +52,7 @@ export function presentLine(line: Line): LineView {
     price: new Intl.NumberFormat('en-GB', { style: 'currency', currency: line.currency }).format(
       line.priceMinor / 100,
     ),
-    launchDate: line.launchDate,
+    launchDate: line.launchDate && longDate.format(new Date(line.launchDate)),
     values: {
       name: line.name,
       fibres: line.fibres,
@@ -66,5 +68,35 @@ export function presentLine(line: Line): LineView {
       price: line.priceMinor / 100,
       launchDate: line.launchDate ?? '',
     },
+  }
+}
+
+/** A line's place in the left margin: itself, its sisters, and the chapters this role may open. */
+export interface LineChapters {
+  line: { name: string; href: string }
+  lines: { name: string; href: string }[]
+  chapters: { label: string; href: string; note: string }[]
+}
+
+/** The chapters of a line with how much stands in each. @param lines all lines of the brand */
+export function presentChapters(
+  brandSlug: string,
+  line: Pick<Line, 'slug' | 'name'>,
+  lines: readonly Pick<Line, 'slug' | 'name'>[],
+  counts: { shades: number; photographs?: number; combinations?: number },
+): LineChapters {
+  const hrefOf = (slug: string) => `/${brandSlug}/lines/${slug}`
+  const home = hrefOf(line.slug)
+  const chapters = [
+    { label: 'Shades', at: 'shades', count: counts.shades },
+    { label: 'Photographs', at: 'photographs', count: counts.photographs },
+    { label: 'Combinations', at: 'combinations', count: counts.combinations },
+  ]
+  return {
+    line: { name: line.name, href: home },
+    lines: lines.map(({ slug, name }) => ({ name, href: hrefOf(slug) })),
+    chapters: chapters
+      .filter(({ count }) => count !== undefined)
+      .map(({ label, at, count }) => ({ label, href: `${home}/${at}`, note: String(count) })),
   }
 }

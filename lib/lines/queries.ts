@@ -1,7 +1,9 @@
-import type { Transaction } from 'sequelize'
+import { Op, type Transaction } from 'sequelize'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
+import { canReadCombinations } from '@/lib/combinations/policy'
 import { NotFoundError } from '@/lib/errors'
+import { canReadPhotographs } from '@/lib/photographs/policy'
 import { Combination, Line, Photograph, Shade } from '@/models'
 
 import { canReadLines } from './policy'
@@ -50,17 +52,33 @@ export async function getLine(
   return line
 }
 
-/** How much stands in each chapter of a line, for its margin. Three counts at once. */
+/** The names and addresses of all the brand's lines, for the switch between them. */
+export async function listLineNames(actor: Actor): Promise<Pick<Line, 'slug' | 'name'>[]> {
+  authorize(actor, canReadLines)
+  return Line.findAll({
+    where: { brandId: actor.brandId },
+    attributes: ['slug', 'name'],
+    order: [['name', 'ASC']],
+  })
+}
+
+/** How much stands in each chapter of a line that this role may open. At most three counts. */
 export async function countChapters(
   actor: Actor,
   line: Line,
-): Promise<{ shades: number; photographs: number; combinations: number }> {
+): Promise<{ shades: number; photographs?: number; combinations?: number }> {
   authorize(actor, canReadLines)
   const where = { brandId: actor.brandId, lineId: line.id }
+  const countPhotographs = () =>
+    Photograph.count({ where: { ...where, state: { [Op.ne]: 'pending' } } })
   const [shades, photographs, combinations] = await Promise.all([
     Shade.count({ where }),
-    Photograph.count({ where: { ...where, state: ['waiting', 'reading', 'ready', 'failed'] } }),
-    Combination.count({ where }),
+    canReadPhotographs(actor) ? countPhotographs() : undefined,
+    canReadCombinations(actor) ? Combination.count({ where }) : undefined,
   ])
-  return { shades, photographs, combinations }
+  return {
+    shades,
+    ...(photographs !== undefined && { photographs }),
+    ...(combinations !== undefined && { combinations }),
+  }
 }

@@ -1,0 +1,24 @@
+import type { Metadata } from 'next'
+import { redirect } from 'next/navigation'
+
+import { PlainPage } from '@/components/layout/plain-page'
+import { SignInForm } from '@/components/people/sign-in-form'
+import { getPerson } from '@/lib/auth/get-actor'
+
+export const metadata: Metadata = { title: 'Sign in' }
+
+/** Only an address of our own may be gone to after signing in. */
+function withinWoadmap(next: string | string[] | undefined): string {
+  return typeof next === 'string' && /^\/(?![/\\])[\w\-./?=&%]*$/.test(next) ? next : '/'
+}
+
+export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>) {
+  const next = withinWoadmap((await searchParams).next)
+  if (await getPerson()) redirect('/')
+  return (
+    <PlainPage homeHref="/">
+      <h1 className="mb-6 text-2xl">Sign in</h1>
+      <SignInForm next={next} />
+    </PlainPage>
+  )
+}

@@ -1,0 +1,41 @@
+import type { ReactNode } from 'react'
+
+import { StudioShell } from '@/components/layout/studio-shell'
+import { SignOutButton } from '@/components/people/sign-out-button'
+import type { Actor } from '@/lib/auth/actor'
+import { getPerson } from '@/lib/auth/get-actor'
+import type { LineChapters } from '@/lib/lines/present'
+
+const ROLE_WORDS = {
+  owner: 'Owner',
+  marketer: 'Marketer',
+  designer: 'Designer',
+  dyer: 'Dye house',
+} as const
+
+/** The studio's frame for one brand and, within a line, its chapters. */
+export async function Shell({
+  actor,
+  chapters,
+  children,
+}: {
+  actor: Actor
+  chapters?: LineChapters
+  children: ReactNode
+}) {
+  const person = await getPerson()
+  return (
+    <StudioShell
+      brand={{ name: actor.brandName, href: `/${actor.brandSlug}` }}
+      brands={person?.memberships.map(({ brandName, brandSlug }) => ({
+        name: brandName,
+        href: `/${brandSlug}`,
+      }))}
+      person={{ name: actor.personName, role: ROLE_WORDS[actor.role] }}
+      signOut={<SignOutButton />}
+      {...chapters}
+    >
+      {children}
+    </StudioShell>
+  )
+}

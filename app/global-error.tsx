@@ -1,0 +1,16 @@
+'use client'
+
+/** The last resort, when even the layout could not be drawn. */
+export default function GlobalError({ reset }: { reset: () => void }) {
+  return (
+    <html lang="en-GB">
+      <body style={{ fontFamily: 'sans-serif', margin: '3rem', maxWidth: '36rem' }}>
+        <h1>Woadmap could not be drawn</h1>
+        <p>Everything that was saved is still saved.</p>
+        <button type="button" onClick={reset}>
+          Try again
+        </button>
+      </body>
+    </html>
+  )
+}

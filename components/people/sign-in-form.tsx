@@ -1,0 +1,57 @@
+'use client'
+
+import { zodResolver } from '@hookform/resolvers/zod'
+import { signIn } from 'next-auth/react'
+import { useState } from 'react'
+import { useForm } from 'react-hook-form'
+
+import { Field } from '@/components/ui/field'
+import { Input } from '@/components/ui/input'
+import { Notice } from '@/components/ui/notice'
+import { SubmitButton } from '@/components/ui/submit-button'
+import { signInSchema, type SignInInput } from '@/lib/people/schema'
+
+/** E-mail and password; on success goes to `next`, an address within Woadmap. */
+export function SignInForm({ next }: { next: string }) {
+  const [problem, setProblem] = useState<string>()
+  const { register, handleSubmit, formState } = useForm<SignInInput>({
+    resolver: zodResolver(signInSchema),
+    defaultValues: { email: '', password: '' },
+  })
+
+  async function onSubmit(input: SignInInput) {
+    setProblem(undefined)
+    try {
+      const answer = await signIn('credentials', { ...input, redirect: false })
+      // A whole page load, so that nothing rendered for the previous person is kept.
+      if (answer?.ok && !answer.error) return window.location.assign(next)
+      setProblem(
+        answer?.status === 401 || answer?.error === 'CredentialsSignin'
+          ? 'That e-mail and password do not fit together. Check both and sign in again.'
+          : 'Signing in did not work just now; nothing you typed is wrong. Try again in a moment.',
+      )
+    } catch {
+      setProblem('Woadmap could not be reached. Check the connection and sign in again.')
+    }
+  }
+
+  return (
+    <form
+      noValidate
+      method="post"
+      className="space-y-5"
+      onSubmit={(event) => void handleSubmit(onSubmit)(event)}
+    >
+      {problem ? <Notice kind="error">{problem}</Notice> : null}
+      <Field label="E-mail" required error={formState.errors.email?.message}>
+        <Input type="email" autoComplete="username" {...register('email')} />
+      </Field>
+      <Field label="Password" required error={formState.errors.password?.message}>
+        <Input type="password" autoComplete="current-password" {...register('password')} />
+      </Field>
+      <SubmitButton pending={formState.isSubmitting} pendingLabel="Signing in…">
+        Sign in
+      </SubmitButton>
+    </form>
+  )
+}
