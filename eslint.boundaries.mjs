@@ -68,7 +68,7 @@ export const importTable = {
     from('env', packages('zod')),
     from('logger', local('env'), packages('pino')),
 
-    from('components', local('components', 'color', 'schema'), types('present'), anyPackage()),
+    from('components', local('components', 'color', 'schema'), types('present', 'errors'), anyPackage()),
     from(
       'app',
       local('app', 'noun', 'schema', 'present', 'auth', 'server', 'components'),

@@ -75,3 +75,14 @@ export class UnavailableError extends AppError {
     super('unavailable', message, undefined, options)
   }
 }
+
+/** What a failed command or route answers; the message is written for people. */
+export interface Failure {
+  ok: false
+  code: ErrorCode | 'unexpected'
+  message: string
+  fieldErrors?: FieldErrors
+}
+
+/** What every action answers. */
+export type ActionResult<Data> = { ok: true; data: Data } | Failure

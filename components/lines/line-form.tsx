@@ -24,7 +24,7 @@ import {
   type UpdateLineValues,
 } from '@/lib/lines/schema'
 import type { LineView } from '@/lib/lines/present'
-import type { ActionResult } from '@/lib/server/result'
+import type { ActionResult } from '@/lib/errors'
 
 type Save<Values> = (brand: string, values: Values) => Promise<ActionResult<{ slug: string }>>
 

@@ -5,9 +5,9 @@ import type { z } from 'zod'
 
 import type { Actor } from '@/lib/auth/actor'
 import { getActor } from '@/lib/auth/get-actor'
+import type { ActionResult } from '@/lib/errors'
 
 import { failureOf } from './map-error'
-import type { ActionResult } from './result'
 import { requireSameOrigin } from './same-origin'
 
 /** What a page hands to a form: the action of one brand. */

@@ -3,9 +3,9 @@ import { z } from 'zod'
 
 import type { Actor } from '@/lib/auth/actor'
 import { getActor } from '@/lib/auth/get-actor'
-import { HTTP_STATUS, InvalidError } from '@/lib/errors'
+import { HTTP_STATUS, InvalidError, type Failure } from '@/lib/errors'
 
-import { failureOf, type Failure } from './map-error'
+import { failureOf } from './map-error'
 import { requireSameOrigin } from './same-origin'
 
 type Params = { brand: string } & Record<string, string>

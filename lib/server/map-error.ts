@@ -12,18 +12,10 @@ import {
   AppError,
   InvalidError,
   UnavailableError,
-  type ErrorCode,
+  type Failure,
   type FieldErrors,
 } from '@/lib/errors'
 import { logger } from '@/lib/logger'
-
-/** What a failed command or route answers; the message is written for people. */
-export interface Failure {
-  ok: false
-  code: ErrorCode | 'unexpected'
-  message: string
-  fieldErrors?: FieldErrors
-}
 
 /** PostgreSQL's classes for "I am going", "too many", "cannot reach": worth trying again. */
 const PASSING = /^(57P0[1-4]|57014|53\d{3}|08\w{3}|55P03|40001|40P01|25P03)$/
