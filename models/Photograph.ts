@@ -7,7 +7,7 @@ import {
   type NonAttribute,
 } from 'sequelize'
 
-import type { Licence, PhotographState } from '@/lib/photographs/schema'
+import type { Derivative, Licence, PhotographState } from '@/lib/photographs/schema'
 
 import { idColumn, versionColumn } from './columns'
 import type { Reading } from './Reading'
@@ -37,6 +37,8 @@ export class Photograph extends Model<
   /** Pixels after orientation; null until read. */
   declare width: CreationOptional<number | null>
   declare height: CreationOptional<number | null>
+  /** The copies that are in the object store, WebP before AVIF, narrow before wide. */
+  declare derivatives: CreationOptional<Derivative[]>
   declare state: CreationOptional<PhotographState>
   /** Why the reading failed, in words for the person who uploaded. */
   declare failure: CreationOptional<string | null>
@@ -67,6 +69,7 @@ Photograph.init(
     sha256: { type: DataTypes.TEXT, allowNull: false },
     width: { type: DataTypes.INTEGER },
     height: { type: DataTypes.INTEGER },
+    derivatives: { type: DataTypes.JSONB, allowNull: false, defaultValue: [] },
     state: { type: DataTypes.TEXT, allowNull: false, defaultValue: 'pending' },
     failure: { type: DataTypes.TEXT },
     uploadedById: { type: DataTypes.UUID },

@@ -37,5 +37,6 @@ export {
   Session,
   Shade,
 }
+export { createOnce } from './create-once'
 export { inTransaction, sequelize } from './sequelize'
 export { updateVersioned } from './update-versioned'

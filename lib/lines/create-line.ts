@@ -1,6 +1,6 @@
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { ConflictError } from '@/lib/errors'
-import { inTransaction, Line } from '@/models'
+import { createOnce, inTransaction, Line } from '@/models'
 
 import { canCreateLine } from './policy'
 import { LINE_LIMITS, type CreateLineInput } from './schema'
@@ -24,31 +24,17 @@ export async function createLine(actor: Actor, input: CreateLineInput): Promise<
   authorize(actor, canCreateLine)
   const { requestKey, price, ...fields } = input
   return inTransaction(async (transaction) => {
-    const lines = await Line.findAll({
-      where: { brandId: actor.brandId },
-      attributes: ['id', 'name', 'slug', 'requestKey'],
-      transaction,
-    })
-    if (lines.length >= LINE_LIMITS.perBrand) {
+    const { brandId } = actor
+    if ((await Line.count({ where: { brandId }, transaction })) >= LINE_LIMITS.perBrand) {
       throw new ConflictError(`A brand holds at most ${LINE_LIMITS.perBrand} lines.`)
     }
     const slug = slugify(input.name)
-    const same = lines.find((line) => line.slug === slug && line.requestKey !== requestKey)
-    if (same) {
-      const message = `There is a line called ${same.name} already.`
+    const values = { ...fields, brandId, slug, requestKey, priceMinor: Math.round(price * 100) }
+    const made = await createOnce(Line, values, transaction)
+    if (!made) {
+      const message = 'There is a line of that name already.'
       throw new ConflictError(message, { name: [message] })
     }
-    const [line] = await Line.findOrCreate({
-      where: { brandId: actor.brandId, requestKey },
-      defaults: {
-        ...fields,
-        slug,
-        brandId: actor.brandId,
-        priceMinor: Math.round(price * 100),
-        requestKey,
-      },
-      transaction,
-    })
-    return line
+    return made.row
   })
 }
