@@ -17,11 +17,13 @@ export const zones = [
   zone('env', 'lib/env.ts'),
   zone('errors', 'lib/errors.ts'),
   zone('logger', 'lib/logger.ts'),
-  zone('schema', 'lib/*/schema.ts'),
+  zone('schema', ['lib/*/schema.ts', 'lib/*/formats.ts']),
   zone('present', 'lib/*/present.ts', { more: true }),
   zone('noun', 'lib/*/**'),
   zone('models', 'models/**'),
   zone('components', 'components/**'),
+  // A file of lib/ that the table does not know may neither import nor be imported.
+  zone('unplaced', 'lib/*'),
   zone('app', ['app/**', 'proxy.ts', 'instrumentation.ts']),
 ]
 
@@ -47,9 +49,10 @@ export const importTable = {
       local('models', 'env', 'errors'),
       types('color', 'schema'),
       packages('sequelize'),
+      node(),
     ),
 
-    // A schema is sent to the browser, whatever else its folder holds.
+    // A schema, and the formats it speaks of, are sent to the browser, whatever else is beside them.
     from('schema', local('schema', 'color'), packages('zod')),
     from(
       'noun',
@@ -68,7 +71,12 @@ export const importTable = {
     from('env', packages('zod')),
     from('logger', local('env'), packages('pino')),
 
-    from('components', local('components', 'color', 'schema'), types('present', 'errors'), anyPackage()),
+    from(
+      'components',
+      local('components', 'color', 'schema'),
+      types('present', 'errors'),
+      anyPackage(),
+    ),
     from(
       'app',
       local('app', 'noun', 'schema', 'present', 'auth', 'server', 'components'),

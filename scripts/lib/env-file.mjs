@@ -5,7 +5,7 @@ import { parseEnv } from 'node:util'
  * The environment with what `.env` adds to it. What is already set wins; an empty value, in either
  * place, means "not set".
  * @param {string} path the .env file; need not exist
- * @param {NodeJS.ProcessEnv} given the environment we were started with
+ * @param {Record<string, string | undefined>} given the environment we were started with
  */
 export function readEnvironment(path, given = process.env) {
   return { ...withoutEmpty(parseFile(path)), ...withoutEmpty(given) }

@@ -53,7 +53,11 @@ function openAnywhere() {
   })
 }
 
-/** Waits until something accepts connections on the port; false when `alive` says to give up. */
+/**
+ * Waits until something accepts connections on the port; false when `alive` says to give up.
+ * @param {number} port
+ * @param {{host?: string, within?: number, alive?: () => boolean}} [options] `within` in milliseconds
+ */
 export async function waitForPort(port, { host = '127.0.0.1', within = 30_000, alive } = {}) {
   const deadline = Date.now() + within
   while (Date.now() < deadline && (alive?.() ?? true)) {

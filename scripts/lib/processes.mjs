@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process'
-import { createWriteStream, mkdirSync, readFileSync, readdirSync } from 'node:fs'
+import { createWriteStream, mkdirSync, openSync, readFileSync, readdirSync } from 'node:fs'
 import { join } from 'node:path'
 import { setTimeout as sleep } from 'node:timers/promises'
 
@@ -38,7 +38,7 @@ export class Fleet {
 
   /**
    * Starts a process that is to stay.
-   * @param {{name: string, command: string, args: string[], env?: object, cwd?: string, uid?: number,
+   * @param {{name: string, command: string, args: string[], env?: NodeJS.ProcessEnv, cwd?: string, uid?: number,
    *   gid?: number, show?: boolean, restart?: boolean, stopSignal?: NodeJS.Signals, stopWithin?: number}} spec
    *   `show` also prints its output; `restart` starts it again, ever more slowly, when it dies
    */
@@ -59,6 +59,7 @@ export class Fleet {
 
   /**
    * Runs a command to its end.
+   * @param {{command: string, args: string[], env?: NodeJS.ProcessEnv, cwd?: string, within?: number}} spec
    * @returns {Promise<number>} its exit code; 1 when a signal or `within` milliseconds ended it
    */
   async run({ command, args, env, cwd, within }) {
@@ -116,9 +117,7 @@ export class Fleet {
   async #launch(spec, deaths) {
     this.#refuseWhileStopping()
     const { name, command, args, env, cwd, uid, gid } = spec
-    const log = createWriteStream(join(this.logFolder, `${name}.log`), {
-      flags: deaths ? 'a' : 'w',
-    })
+    const log = openLog(join(this.logFolder, `${name}.log`), deaths > 0)
     const child = spawn(command, args, {
       env,
       cwd,
@@ -131,6 +130,9 @@ export class Fleet {
       stream.on('data', (chunk) => log.write(chunk))
       if (spec.show) printLines(stream, name)
     }
+    // Before anything is waited for, so that stopping finds it.
+    this.#services.set(name, { spec, child })
+    child.once('close', () => log.end())
     await new Promise((done, fail) => {
       child.once('spawn', done)
       child.once('error', (error) =>
@@ -138,9 +140,7 @@ export class Fleet {
       )
     })
     const began = Date.now()
-    this.#services.set(name, { spec, child })
     writeIdentity(this.#identityFile(name), child.pid)
-    child.once('close', () => log.end())
     child.once('exit', (code, signal) => {
       if (this.#stopping) return
       const inARow = Date.now() - began > RECOVERED_AFTER ? 1 : deaths + 1
@@ -233,6 +233,13 @@ function trySignal(pid, signal) {
   } catch {
     return false
   }
+}
+
+function openLog(path, append) {
+  const log = createWriteStream(path, { fd: openSync(path, append ? 'a' : 'w') })
+  // A full disk loses words, not the product.
+  log.on('error', () => {})
+  return log
 }
 
 function printLines(stream, name) {

@@ -8,7 +8,7 @@ import { keepSecret } from './secrets.mjs'
 
 /**
  * The services that no setting points elsewhere for, and so are to run on this machine.
- * @param {object} env as readEnvironment gives it
+ * @param {Record<string, string | undefined>} env as readEnvironment gives it
  */
 export function localServices(env) {
   return { database: !env.DATABASE_URL, objectStore: !env.S3_ENDPOINT, mail: !env.SMTP_URL }

@@ -4,7 +4,7 @@ import { Refusal } from './say.mjs'
 
 /**
  * What the launcher itself needs to know, out of the environment.
- * @param {NodeJS.ProcessEnv} env as readEnvironment gives it
+ * @param {Record<string, string | undefined>} env as readEnvironment gives it
  * @param {string} root what relative folders are relative to
  * @throws {Refusal} naming the setting that does not fit
  */

@@ -47,7 +47,10 @@ export function readPlaywright({ stats, errors }) {
   }
 }
 
-/** Adds up what the steps came to. */
+/**
+ * Adds up what the steps came to.
+ * @param {{passed: number, failed: number, skipped: number}[]} tallies
+ */
 export function sum(tallies) {
   return tallies.reduce(
     (all, each) => ({
@@ -64,7 +67,10 @@ export function lastLine({ passed, failed }) {
   return `${passed} passed, ${failed} failed`
 }
 
-/** Whether a test run may call itself good: something ran, and nothing failed. */
+/**
+ * Whether a test run may call itself good: something ran, and nothing failed.
+ * @param {{passed: number, failed: number}} total
+ */
 export function isGood({ passed, failed }) {
   return failed === 0 && passed > 0
 }
