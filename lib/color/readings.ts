@@ -41,7 +41,7 @@ const FAMILY_REACH = 28
 /** Below this a hue is a matter of a unit of a* or b*, and no family shows. */
 const HUE_SHOWS = 6
 
-const isPaleNeutral = (lab: Lab): boolean => lab[0] >= 70 && chromaOf(lab) < 12
+const isPaleNeutral = (lab: Lab): boolean => lab[0] >= 70 && chromaOf(lab) < 8
 
 const hueApart = (a: number, b: number): number => {
   const apart = Math.abs(a - b) % 360
@@ -113,6 +113,21 @@ export function recipeOf(kind: ReadingKind, cells: readonly PhotographCell[]): R
   }
 }
 
+/** Least area of an accent: 0.15 %. */
+const ACCENT_AREA = 0.0015
+/** Below this a colour is neither vivid nor apart enough to be one. */
+const ACCENT_SHOWS = 0.1
+/** ΔE00 at kL = 2 beyond which a shade is another colour than the accent. */
+const ACCENT_NEAR = 12
+
+/** The area of a colour with its own lights and shadows: within about 8 ΔE00 at kL = 3. */
+function extentOf({ lab: [L, a, b] }: PhotographCell, cells: readonly PhotographCell[]): number {
+  let extent = 0
+  for (const { lab, area } of cells)
+    extent += area * Math.exp(-((ciede2000(L, a, b, lab[0], lab[1], lab[2], 3) / 8) ** 2))
+  return extent
+}
+
 /**
  * The shade to lock for the accent: the nearest, hue and chroma leading (kL = 2), to the most
  * striking cell that the true five leave out. Null when they leave none, or the line has no shade
@@ -125,10 +140,13 @@ export function accentShade(
   candidates: readonly MatchShade[],
 ): MatchShade | null {
   const { strength, neighborhood } = accentShares(cells)
-  const scores = cells.map((_, i) =>
-    neighborhood[i]! >= 0.0015 ? strength[i]! * Math.min(1, Math.max(0, left[i]! - 8) / 20) : 0,
-  )
-  const order = cells.map((_, i) => i).filter((i) => scores[i]! > 0.01)
+  const scores = cells.map((cell, i) => {
+    const score = strength[i]! * Math.min(1, Math.max(0, left[i]! - 10) / 20)
+    if (score < ACCENT_SHOWS || extentOf(cell, cells) < ACCENT_AREA) return 0
+    // Of the lights and shadows of one colour, the one that most of it has.
+    return score * Math.sqrt(Math.min(1, neighborhood[i]! / 0.005))
+  })
+  const order = cells.map((_, i) => i).filter((i) => scores[i]! > 0)
   order.sort((a, b) => scores[b]! - scores[a]! || a - b)
   for (const cell of order) {
     const [L, a, b] = cells[cell]!.lab
@@ -142,6 +160,7 @@ export function accentShade(
       }
     }
     if (!nearest) return null
+    if (least > ACCENT_NEAR) continue
     if (ciede2000(L, a, b, nearest.lab[0], nearest.lab[1], nearest.lab[2]) <= left[cell]! - 3)
       return nearest
   }

@@ -40,33 +40,42 @@ function fullest(hue: number): { lightness: number; chroma: number } {
   return { lightness: l0 + t * (l1 - l0), chroma: c0 + t * (c1 - c0) }
 }
 
+/** How a shade lies to the fullest of its hue: L* moved this far to white or black, chroma kept. */
+const DEPTHS: [toWhite: number, toBlack: number, chroma: number][] = [
+  [0, 0, 0.95], // clear
+  [0.55, 0, 0.5], // pale
+  [0, 0.5, 0.55], // deep
+  [0.1, 0.1, 0.45], // saddened
+]
+
 /**
  * A line of `size` shades as a dyer builds one, the same for the same seed: one in eight neutral
- * from bleached to black, the rest round the hue circle in pale, mid and deep, clear and saddened.
- * No two nearer than a just visible step (for 500, half of one).
+ * from bleached to black, the rest round the hue circle clear, pale, deep and saddened, each a
+ * little off its mark. No two nearer than a visible step (for 500, half of one).
  */
 export function dyedLine(size: number, seed = 7): MatchShade[] {
   const random = seededRandom(seed)
   const labs: Lab[] = []
   const neutrals = Math.round(size / 8)
-  const step = size > 100 ? 1.2 : 2.5
+  const step = size > 100 ? 1 : 2.5
+  const spread = size > 100 ? 0.35 : 0.12
   for (let n = 0; n < neutrals; n++) {
     const L = 92 - (78 * n) / Math.max(1, neutrals - 1)
     labs.push([L, random() * 2 - 0.5, 2 + random() * 6 * (L / 92)])
   }
-  for (let tries = 0; labs.length < size; tries++) {
-    // The golden angle spreads the hues evenly at any size.
-    const hue = (labs.length * 137.508 + random() * 24) % 360
+  while (labs.length < size) {
+    const made = labs.length - neutrals
+    // The golden angle spreads the hues of each depth evenly at any size.
+    const hue = (Math.floor(made / 4) * 137.508 + (made % 4) * 34 + random() * 20) % 360
+    const [toWhite, toBlack, keep] = DEPTHS[made % 4]!
     const { lightness, chroma } = fullest(hue)
-    const L = 20 + 68 * random()
-    const reach = L > lightness ? (96 - L) / (96 - lightness) : (L - 4) / (lightness - 4)
-    const C = chroma * Math.min(1, Math.max(0.12, reach)) * (0.3 + 0.7 * Math.sqrt(random()))
-    const lab: Lab = [
-      L,
-      C * Math.cos((hue * Math.PI) / 180),
-      C * Math.sin((hue * Math.PI) / 180),
-    ]
-    if (tries > size * 200 || labs.every((other) => deltaE00(lab, other) >= step)) labs.push(lab)
+    const off = () => (random() - 0.5) * 2 * spread
+    const L =
+      lightness + (95 - lightness) * (toWhite + off()) - (lightness - 12) * (toBlack + off())
+    const C = Math.max(2, chroma * (keep + off()))
+    const turn = (hue * Math.PI) / 180
+    const lab: Lab = [Math.min(94, Math.max(13, L)), C * Math.cos(turn), C * Math.sin(turn)]
+    if (labs.every((other) => deltaE00(lab, other) >= step)) labs.push(lab)
   }
   return labs
     .sort((a, b) => hueOf(a) - hueOf(b) || b[0] - a[0])
