@@ -26,7 +26,9 @@ const chosen = names.length > 0 ? STEPS.filter(({ name }) => names.includes(name
 async function main() {
   requireNode(ROOT)
   const owner = { what: 'A test run in this folder' }
-  await launch({ local: LOCAL, lock: join(LOCAL, 'test.lock'), owner }, (fleet) => test(fleet))
+  const lock = join(LOCAL, 'test.lock')
+  // Half a test run is no success. What is lost during it fails the tests that stand on it.
+  await launch({ local: LOCAL, lock, owner, whenStopped: 130, onLoss: sayError }, test)
 }
 
 async function test(fleet) {

@@ -11,6 +11,8 @@ const SOURCES = [
   'lib',
   'models',
   'public',
+  'proxy.ts',
+  'instrumentation.ts',
   'next.config.mjs',
   'postcss.config.mjs',
   'tailwind.config.ts',
@@ -20,15 +22,34 @@ const SOURCES = [
 
 /** Builds the product for production when its sources have changed since it was last built. */
 export async function ensureBuild(fleet, root, env) {
+  const { dist, stamp } = placesOf(root, env)
+  if (existsSync(join(dist, 'BUILD_ID')) && readStamp(stamp) === sourcesOf(root, env)) return
+  say('Building; this takes a minute the first time')
+  if ((await build(fleet, root, env)) !== 0) {
+    throw new Refusal('The build did not succeed; what it said is above.')
+  }
+}
+
+/**
+ * Builds the product for production.
+ * @returns {Promise<number>} the builder's exit code
+ */
+export async function build(fleet, root, env) {
+  // Taken before: what changes while it is being built is not in it.
+  const sources = sourcesOf(root, env)
+  const code = await fleet.run({ command: process.execPath, args: [NEXT, 'build'], cwd: root, env })
+  if (code === 0) writeFileSync(placesOf(root, env).stamp, sources)
+  return code
+}
+
+function placesOf(root, env) {
   const dist = join(root, env.WOADMAP_DIST_DIR ?? '.next')
   // Inside what it vouches for: whoever removes the build removes the stamp.
-  const stamp = join(dist, 'woadmap-sources')
-  const sources = fingerprint(root, SOURCES, publicSettings(env))
-  if (existsSync(join(dist, 'BUILD_ID')) && readStamp(stamp) === sources) return
-  say('Building; this takes a minute the first time')
-  const code = await fleet.run({ command: process.execPath, args: [NEXT, 'build'], cwd: root, env })
-  if (code !== 0) throw new Refusal('The build did not succeed; what it said is above.')
-  writeFileSync(stamp, sources)
+  return { dist, stamp: join(dist, 'woadmap-sources') }
+}
+
+function sourcesOf(root, env) {
+  return fingerprint(root, SOURCES, publicSettings(env))
 }
 
 // Next.js writes settings with this prefix into the pages' code.

@@ -11,17 +11,19 @@ const DEADLINE = 25_000
  * Runs `work` with a fleet of processes in a local folder that nobody else uses meanwhile, and
  * stops all of them when it ends, fails, a process that matters is lost, or somebody says stop
  * (Ctrl-C, SIGTERM, a closed terminal). Ends this process.
- * @param {{local: string, lock: string, owner: {what: string, address?: string}}} options
+ * @param {{local: string, lock: string, owner: {what: string, address?: string}, whenStopped?: number,
+ *   onLoss?: (error: Error) => void}} options `whenStopped` is the exit code when somebody says stop;
+ *   `onLoss` is told of a lost process in place of ending everything
  * @param {(fleet: Fleet, untilStopped: Promise<void>) => Promise<number>} work gives the exit code
  */
-export async function launch({ local, lock, owner }, work) {
+export async function launch({ local, lock, owner, whenStopped = 0, onLoss }, work) {
   requireWritable(local)
   const release = takeLock(lock, owner)
   let stop
   const stopped = new Promise((done, fail) => {
     stop = { quietly: done, because: fail }
   })
-  const fleet = new Fleet({ local, onLoss: (error) => stop.because(error) })
+  const fleet = new Fleet({ local, onLoss: onLoss ?? stop.because })
   let signalled = false
   for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) {
     process.on(signal, () => {
@@ -37,7 +39,7 @@ export async function launch({ local, lock, owner }, work) {
     for (const name of await stopLeftovers(local)) say(`Stopped ${name}, left by an earlier run`)
     const running = work(fleet, stopped)
     running.catch(() => {})
-    code = (await Promise.race([running, stopped])) ?? 0
+    code = (await Promise.race([running, stopped])) ?? whenStopped
   } catch (error) {
     code = 1
     if (!signalled) sayError(error)

@@ -73,10 +73,14 @@ export class Fleet {
     this.#tasks.add(child)
     const timer = within && setTimeout(() => signalGroup(child, 'SIGKILL'), within)
     try {
-      return await new Promise((done, fail) => {
-        child.once('error', fail)
-        child.once('exit', (code) => done(code ?? 1))
+      const code = await new Promise((done, fail) => {
+        child.once('error', (error) =>
+          fail(new Refusal(`${command} could not be run: ${error.message}`)),
+        )
+        child.once('exit', (exitCode) => done(exitCode ?? 1))
       })
+      this.#refuseWhileStopping()
+      return code
     } finally {
       clearTimeout(timer)
       this.#tasks.delete(child)

@@ -1,5 +1,6 @@
 import { join } from 'node:path'
 
+import { build, ensureBuild } from './build.mjs'
 import { NEXT, ROOT } from './paths.mjs'
 import { migrate, seed, startJobs, startWeb } from './product.mjs'
 import { DEBIAN } from './debian.mjs'
@@ -50,7 +51,7 @@ export const STEPS = [
     name: 'build',
     run: async ({ fleet, env, local }) => {
       const buildEnv = { ...env, ...distOf(local), NODE_ENV: 'production' }
-      return tallyOfCheck(await node(fleet, buildEnv, [NEXT, 'build']))
+      return tallyOfCheck(await build(fleet, ROOT, buildEnv))
     },
   },
   {
@@ -61,6 +62,7 @@ export const STEPS = [
     run: async (context) => {
       const { fleet, world, local } = context
       const env = { ...world.environment('e2e', 'production'), ...distOf(local) }
+      await ensureBuild(fleet, ROOT, env)
       await world.renew('e2e')
       await migrate(fleet, env)
       await seed(fleet, env)
