@@ -2,7 +2,5 @@ import { allow } from '@/lib/auth/actor'
 
 /** Everybody in the brand sees a line's shades and takes them away as CSV. */
 export const canReadShades = allow('owner', 'marketer', 'designer', 'dyer')
-/** Adds, changes, orders, imports and deletes shades. */
+/** Adds, changes, orders, imports and deletes shades, and takes a deletion back. */
 export const canEditShades = allow('owner', 'designer')
-/** Sees in which combinations a shade stands; a dyer works with shades alone. */
-export const canReadShadeUses = allow('owner', 'marketer', 'designer')

@@ -2,7 +2,10 @@ import { screenColor } from '@/lib/color/gamut'
 import type { Lab, Observer } from '@/lib/color/types'
 import type { Shade } from '@/models'
 
-import type { ShadeStatus } from './schema'
+import { describeColor } from './color'
+import { describeError } from './csv'
+import type { ImportCounts, PlannedField, PlannedRow, PlannedShade } from './plan-import'
+import type { CsvMapping, ShadeStatus } from './schema'
 
 /** A shade as it leaves the server. */
 export interface ShadeView {
@@ -71,4 +74,100 @@ export function presentShade(shade: ShadeRow): ShadeView {
     position: shade.position,
     version: shade.version,
   }
+}
+
+/** A kept combination that shades stand in. */
+export interface ShadeUse {
+  combinationId: string
+  title: string
+}
+
+/** Where shades are used: the first few by title, and how many there are in all. */
+export interface ShadeUses {
+  combinations: ShadeUse[]
+  total: number
+  /** Which of the shades asked about are used. */
+  shadeIds: string[]
+}
+
+/** The answer to a deletion: done, or first where the shades are used. */
+export type DeleteShadesAnswer =
+  { deleted: true; shadeIds: string[] } | { deleted: false; uses: ShadeUses }
+
+/** One row of an import's preview. */
+export interface ImportPreviewRow {
+  /** As a spreadsheet counts, the header being row 1. */
+  row: number
+  outcome: PlannedRow['outcome']
+  number: string
+  name: string | null
+  /** Null for a bad row. */
+  status: ShadeStatus | null
+  /** Null for a bad row. */
+  color: { hex: string; inGamut: boolean; words: string } | null
+  /** What would be different: "name: “Moss” → “Deep Moss”". */
+  changes: string[]
+  /** What is wrong, by row and column. */
+  errors: string[]
+  note: string | null
+}
+
+/** What importing a file would do. */
+export interface ImportPreview {
+  header: string[]
+  /** The first rows as they stand in the file. */
+  examples: string[][]
+  rowCount: number
+  mapping: CsvMapping
+  /** What must be settled before anything can be saved, in words. */
+  problems: string[]
+  counts: ImportCounts
+  rows: ImportPreviewRow[]
+  /** The bad rows with their reasons, to take away. */
+  badCsv: string | null
+  shadesRevision: number
+}
+
+/** A planned row as the preview shows it. */
+export function presentPlannedRow(planned: PlannedRow): ImportPreviewRow {
+  const { row } = planned
+  const base = { row: row.row, outcome: planned.outcome, errors: [], note: row.note ?? null }
+  if (planned.outcome === 'bad') {
+    return {
+      ...base,
+      number: row.number,
+      name: row.name,
+      status: null,
+      color: null,
+      changes: [],
+      errors: row.errors.map((error) => describeError(row.row, error)),
+    }
+  }
+  const shade = planned.outcome === 'unchanged' ? planned.before : planned.shade
+  return {
+    ...base,
+    number: shade.number,
+    name: shade.name,
+    status: shade.status,
+    color: {
+      ...screenColor([shade.labL, shade.labA, shade.labB]),
+      words: describeColor(shade),
+    },
+    changes:
+      planned.outcome === 'changed'
+        ? planned.fields.map((field) => describeChange(field, planned.before, planned.shade))
+        : [],
+  }
+}
+
+function describeChange(field: PlannedField, before: ShadeRow, after: PlannedShade): string {
+  const say = (shade: ShadeRow | PlannedShade) =>
+    ({
+      number: shade.number,
+      name: shade.name ? `“${shade.name}”` : 'none',
+      status: shade.status,
+      color: describeColor(shade),
+      order: String(shade.position + 1),
+    })[field]
+  return `${field === 'color' ? 'colour' : field}: ${say(before)} → ${say(after)}`
 }

@@ -1,0 +1,96 @@
+import { CsvError, parse } from 'csv-parse/sync'
+
+import { InvalidError } from '@/lib/errors'
+
+import { SHADE_LIMITS } from './schema'
+
+/** What may stand between the cells of a row. */
+export const DELIMITERS = [',', ';', '\t'] as const
+/** One of DELIMITERS. */
+export type Delimiter = (typeof DELIMITERS)[number]
+
+/** A CSV file as a sheet: the first row is the header. */
+export interface Sheet {
+  delimiter: Delimiter
+  header: string[]
+  /** The rows with something in them; `row` counts as a spreadsheet does, the header being row 1. */
+  rows: { row: number; cells: string[] }[]
+}
+
+/** The delimiter that stands most often in the header outside quotes; a comma when none does. */
+export function sniffDelimiter(text: string): Delimiter {
+  const counts = new Map<string, number>(DELIMITERS.map((delimiter) => [delimiter, 0]))
+  let quoted = false
+  for (const character of text) {
+    if (character === '"') quoted = !quoted
+    else if (!quoted && (character === '\n' || character === '\r')) break
+    else if (!quoted && counts.has(character)) counts.set(character, counts.get(character)! + 1)
+  }
+  return DELIMITERS.reduce((best, one) => (counts.get(one)! > counts.get(best)! ? one : best))
+}
+
+/**
+ * Reads CSV text (RFC 4180; also semicolons, tabs, a byte-order mark, any line ends).
+ * @throws InvalidError in words: empty, a quote that does not close, too many rows
+ */
+export function parseSheet(text: string): Sheet {
+  const content = text.replace(/^\uFEFF/, '')
+  const delimiter = sniffDelimiter(content)
+  const records = parseRecords(content, delimiter).map((cells) => cells.map(restoreCell))
+  const [header, ...others] = records
+  if (!header || isBlank(header)) {
+    throw new InvalidError(
+      'The first row is empty. It must name the columns, such as number, L, a, b.',
+    )
+  }
+  const rows = others
+    .map((cells, index) => ({ row: index + 2, cells }))
+    .filter(({ cells }) => !isBlank(cells))
+  if (rows.length === 0) throw new InvalidError('There is no shade in it, only the header row.')
+  if (rows.length > SHADE_LIMITS.importRows) {
+    throw new InvalidError(
+      `The file has more than ${SHADE_LIMITS.importRows.toLocaleString('en-GB')} rows, which is the most a line holds. Import it in smaller parts.`,
+    )
+  }
+  return { delimiter, header: header.map((cell) => cell.trim()), rows }
+}
+
+function parseRecords(content: string, delimiter: Delimiter): string[][] {
+  try {
+    return parse(content, {
+      delimiter,
+      relax_column_count: true,
+      record_delimiter: ['\r\n', '\n', '\r'],
+    })
+  } catch (error) {
+    if (!(error instanceof CsvError)) throw error
+    const line = typeof error.lines === 'number' ? ` near line ${error.lines}` : ''
+    throw new InvalidError(
+      `The quotation marks do not match${line}: a cell that begins with " must end with ", and a " within it is doubled.`,
+    )
+  }
+}
+
+const isBlank = (cells: readonly string[]) => cells.every((cell) => cell.trim() === '')
+
+/*
+ * A spreadsheet takes a cell that begins with = + - or @ for a formula. Such text goes out with an
+ * apostrophe before it, and so does text that already looks like one that went out: each export
+ * adds exactly one apostrophe and each import takes exactly one away.
+ */
+const LOOKS_LIKE_FORMULA = /^'*[=+\-@]/
+const WENT_OUT = /^'+[=+\-@]/
+
+/** Text for a cell, such that no spreadsheet runs it. {@link restoreCell} gives it back. */
+export const neutraliseCell = (text: string): string =>
+  LOOKS_LIKE_FORMULA.test(text) ? `'${text}` : text
+
+/** The text that {@link neutraliseCell} was given. */
+export const restoreCell = (cell: string): string => (WENT_OUT.test(cell) ? cell.slice(1) : cell)
+
+/** Rows as CSV (RFC 4180, CRLF), with a byte-order mark so that spreadsheets read it as UTF-8. */
+export function writeCsv(rows: readonly (readonly string[])[]): string {
+  const quote = (cell: string) =>
+    /[",;\t\r\n]|^\s|\s$/.test(cell) ? `"${cell.replaceAll('"', '""')}"` : cell
+  return `\uFEFF${rows.map((row) => row.map(quote).join(',')).join('\r\n')}\r\n`
+}
