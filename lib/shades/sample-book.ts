@@ -17,7 +17,7 @@ const HUE_FAMILIES: readonly (readonly [end: number, name: string])[] = [
   [225, 'Turquoises'],
   [280.5, 'Blues'],
   [349.5, 'Violets'],
-  [360, 'Reds'],
+  [Infinity, 'Reds'],
 ]
 
 /** The families of the sample book, in its order. */
