@@ -38,7 +38,7 @@ export const umzug = new Umzug({
   context: () => sequelize().getQueryInterface(),
   storage: new SequelizeStorage({ sequelize: sequelize(), tableName: 'migrations' }),
   logger: {
-    info: ({ event, name }) => console.log(`${event}: ${name}`),
+    info: ({ event, name }) => name && console.log(`${event}: ${name}`),
     warn: console.warn,
     error: console.error,
     debug: () => {},

@@ -1,4 +1,4 @@
-import { Algorithm, hash, verify } from '@node-rs/argon2'
+import { hash, verify, type Algorithm } from '@node-rs/argon2'
 
 /** OWASP's first choice for argon2id. @source OWASP Password Storage Cheat Sheet (2024) */
 const PARAMETERS = {
