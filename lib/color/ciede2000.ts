@@ -31,88 +31,120 @@ const hueOf = (x: number, y: number): number => {
   return angle < 0 ? angle + 2 * Math.PI : angle
 }
 
+/** Colours side by side, n×3 row-major L*, a*, b*, as {@link deltaE00Row} takes them. */
+export function packLabs(labs: readonly Lab[]): Float64Array {
+  const packed = new Float64Array(labs.length * 3)
+  labs.forEach((lab, index) => packed.set(lab, index * 3))
+  return packed
+}
+
 /**
- * CIEDE2000 colour difference of two colours given by their coordinates, both relative to the same
- * white. Symmetric, ≥ 0. Takes numbers rather than arrays because it is called some hundred
- * thousand times for one match; {@link deltaE00} is the comfortable form.
+ * CIEDE2000 colour differences from one colour to each of n, all relative to the same white, into
+ * `out` from `offset` on. Symmetric, ≥ 0. A row at a time because calls with numbers are what costs:
+ * one match takes some hundred thousand differences.
  * @source CIE 142-2001; Sharma, Wu & Dalal (2005) Color Res. Appl. 30(1):21–30, eqs 2–22
  */
-export function ciede2000(
+export function deltaE00Row(
+  from: Lab,
+  to: Float64Array,
+  out: Float64Array,
+  offset = 0,
+  { kL = 1, kC = 1, kH = 1 }: Ciede2000Factors = {},
+): void {
+  const [L1, a1, b1] = from
+  const chroma1 = Math.sqrt(a1 * a1 + b1 * b1)
+  for (let next = 0, at = offset; next < to.length; next += 3, at++) {
+    const L2 = to[next]!
+    const a2 = to[next + 1]!
+    const b2 = to[next + 2]!
+    const G = pow7OverSum((chroma1 + Math.sqrt(a2 * a2 + b2 * b2)) / 2)
+    const stretch = 1 + 0.5 * (1 - G)
+    const x1 = a1 * stretch
+    const x2 = a2 * stretch
+    const C1 = Math.sqrt(x1 * x1 + b1 * b1)
+    const C2 = Math.sqrt(x2 * x2 + b2 * b2)
+    const meanC = (C1 + C2) / 2
+    const meanL50 = (L1 + L2) / 2 - 50
+    const meanL50Squared = meanL50 * meanL50
+    const dL = (L2 - L1) / (kL * (1 + (0.015 * meanL50Squared) / Math.sqrt(20 + meanL50Squared)))
+    const dC = (C2 - C1) / (kC * (1 + 0.045 * meanC))
+    // With a neutral on either side there is no hue difference, whatever the other's hue.
+    if (C1 * C2 === 0) {
+      out[at] = Math.sqrt(dL * dL + dC * dC)
+      continue
+    }
+
+    // Hue as unit vectors: their sum points along the mean hue of the shorter way round and their
+    // difference is 2 sin(Δh/2), so that most pairs need no trigonometry at all.
+    const per1 = 1 / C1
+    const per2 = 1 / C2
+    const ux1 = x1 * per1
+    const uy1 = b1 * per1
+    const ux2 = x2 * per2
+    const uy2 = b2 * per2
+    let c = ux1 + ux2
+    let s = uy1 + uy2
+    const length = Math.sqrt(c * c + s * s)
+    if (length > 1e-7) {
+      c /= length
+      s /= length
+    } else {
+      // Opposite hues have no shorter way: the standard takes the half of h₁ + h₂, each 0–360°.
+      const mean = (hueOf(x1, b1) + hueOf(x2, b2)) / 2
+      c = Math.cos(mean)
+      s = Math.sin(mean)
+    }
+    const vx = ux2 - ux1
+    const vy = uy2 - uy1
+
+    // The cosines of the multiples of the mean hue, from one cosine and one sine.
+    const c2 = c * c - s * s
+    const s2 = 2 * s * c
+    const c3 = c2 * c - s2 * s
+    const s3 = s2 * c + c2 * s
+    const c4 = c2 * c2 - s2 * s2
+    const s4 = 2 * s2 * c2
+    const T =
+      1 -
+      0.17 * (c * COS_30 + s * SIN_30) +
+      0.24 * c2 +
+      0.32 * (c3 * COS_6 - s3 * SIN_6) -
+      0.2 * (c4 * COS_63 + s4 * SIN_63)
+    const SH = kH * (1 + 0.015 * meanC * T)
+    const dH2 = (C1 * C2 * (vx * vx + vy * vy)) / (SH * SH)
+    // Only blues turn the ellipse: 125° and more away from hue 275° the term is below 1e-10.
+    let turned = 0
+    if (c * COS_275 + s * SIN_275 > COS_125) {
+      const blue = (hueOf(c, s) / DEGREE - 275) / 25
+      const RT = -2 * pow7OverSum(meanC) * Math.sin(60 * DEGREE * Math.exp(-blue * blue))
+      turned = RT * dC * (ux1 * uy2 - uy1 * ux2 < 0 ? -Math.sqrt(dH2) : Math.sqrt(dH2))
+    }
+    out[at] = Math.sqrt(Math.max(0, dL * dL + dC * dC + dH2 + turned))
+  }
+}
+
+const oneLab = new Float64Array(3)
+const oneOut = new Float64Array(1)
+
+/**
+ * CIEDE2000 colour difference of two Lab colours of the same white. Symmetric, ≥ 0.
+ * @source CIE 142-2001; Sharma, Wu & Dalal (2005) Color Res. Appl. 30(1):21–30
+ */
+export function deltaE00(from: Lab, to: Lab, factors?: Ciede2000Factors): number {
+  oneLab.set(to)
+  deltaE00Row(from, oneLab, oneOut, 0, factors)
+  return oneOut[0]!
+}
+
+/**
+ * {@link deltaE00} for coordinates that lie in separate columns. Symmetric, ≥ 0.
+ * @source CIE 142-2001
+ */
+export const ciede2000 = (
   L1: number,
   a1: number,
   b1: number,
   L2: number,
   a2: number,
   b2: number,
-  kL = 1,
-  kC = 1,
-  kH = 1,
-): number {
-  const G = pow7OverSum((Math.sqrt(a1 * a1 + b1 * b1) + Math.sqrt(a2 * a2 + b2 * b2)) / 2)
-  const stretch = 1 + 0.5 * (1 - G)
-  const x1 = a1 * stretch
-  const x2 = a2 * stretch
-  const C1 = Math.sqrt(x1 * x1 + b1 * b1)
-  const C2 = Math.sqrt(x2 * x2 + b2 * b2)
-  const meanC = (C1 + C2) / 2
-  const meanL50 = (L1 + L2) / 2 - 50
-  const meanL50Squared = meanL50 * meanL50
-  const dL = (L2 - L1) / (kL * (1 + (0.015 * meanL50Squared) / Math.sqrt(20 + meanL50Squared)))
-  const dC = (C2 - C1) / (kC * (1 + 0.045 * meanC))
-  // With a neutral on either side there is no hue difference, whatever the other's hue.
-  if (C1 * C2 === 0) return Math.sqrt(dL * dL + dC * dC)
-
-  // Hue as unit vectors: their sum points along the mean hue of the shorter way round and their
-  // difference is 2 sin(Δh/2), so that most pairs need no trigonometry at all.
-  const ux1 = x1 / C1
-  const uy1 = b1 / C1
-  const ux2 = x2 / C2
-  const uy2 = b2 / C2
-  let c = ux1 + ux2
-  let s = uy1 + uy2
-  const length = Math.sqrt(c * c + s * s)
-  if (length > 1e-7) {
-    c /= length
-    s /= length
-  } else {
-    // Opposite hues have no shorter way: the standard takes the half of h₁ + h₂, each 0–360°.
-    const mean = (hueOf(x1, b1) + hueOf(x2, b2)) / 2
-    c = Math.cos(mean)
-    s = Math.sin(mean)
-  }
-  const vx = ux2 - ux1
-  const vy = uy2 - uy1
-  const chord =
-    ux1 * uy2 - uy1 * ux2 < 0 ? -Math.sqrt(vx * vx + vy * vy) : Math.sqrt(vx * vx + vy * vy)
-
-  // The cosines of the multiples of the mean hue, from one cosine and one sine.
-  const c2 = c * c - s * s
-  const s2 = 2 * s * c
-  const c3 = c2 * c - s2 * s
-  const s3 = s2 * c + c2 * s
-  const c4 = c2 * c2 - s2 * s2
-  const s4 = 2 * s2 * c2
-  const T =
-    1 -
-    0.17 * (c * COS_30 + s * SIN_30) +
-    0.24 * c2 +
-    0.32 * (c3 * COS_6 - s3 * SIN_6) -
-    0.2 * (c4 * COS_63 + s4 * SIN_63)
-  const dH = (Math.sqrt(C1 * C2) * chord) / (kH * (1 + 0.015 * meanC * T))
-  // Only blues turn the ellipse: 125° and more away from hue 275° the term is below 1e-10.
-  let RT = 0
-  if (c * COS_275 + s * SIN_275 > COS_125) {
-    const blue = (hueOf(c, s) / DEGREE - 275) / 25
-    RT = -2 * pow7OverSum(meanC) * Math.sin(60 * DEGREE * Math.exp(-blue * blue))
-  }
-  return Math.sqrt(Math.max(0, dL * dL + dC * dC + dH * dH + RT * dC * dH))
-}
-
-/**
- * CIEDE2000 colour difference of two Lab colours of the same white. Symmetric, ≥ 0.
- * @source CIE 142-2001; Sharma, Wu & Dalal (2005) Color Res. Appl. 30(1):21–30
- */
-export function deltaE00(from: Lab, to: Lab, factors: Ciede2000Factors = {}): number {
-  const { kL = 1, kC = 1, kH = 1 } = factors
-  return ciede2000(from[0], from[1], from[2], to[0], to[1], to[2], kL, kC, kH)
-}
+): number => deltaE00([L1, a1, b1], [L2, a2, b2])

@@ -1,4 +1,4 @@
-import { ciede2000 } from './ciede2000'
+import { deltaE00, deltaE00Row, packLabs } from './ciede2000'
 import { cellWeights, type PhotographColors } from './photograph-colors'
 import { accentShade, recipeOf, type MatchShade, type ReadingKind, type Recipe } from './readings'
 import { solveChoice, type Choice, type ChoiceProblem, type SolveLimit } from './solve'
@@ -86,12 +86,8 @@ function drawSheet(recipe: Recipe, shades: readonly MatchShade[]): Sheet {
   const { cells } = recipe
   const m = cells.length
   const distance = new Float64Array(shades.length * m)
-  shades.forEach(({ lab: [L, a, b] }, s) => {
-    for (let i = 0; i < m; i++) {
-      const lab = cells[i]!.lab
-      distance[s * m + i] = ciede2000(L, a, b, lab[0], lab[1], lab[2])
-    }
-  })
+  const packed = packLabs(cells.map(({ lab }) => lab))
+  shades.forEach(({ lab }, s) => deltaE00Row(lab, packed, distance, s * m))
   const presence = shades.map((_, s) => {
     const row = distance.subarray(s * m, (s + 1) * m)
     return quantile(row, cells, 0.01)
@@ -99,19 +95,32 @@ function drawSheet(recipe: Recipe, shades: readonly MatchShade[]): Sheet {
   return { recipe, shades, distance, presence, weights: cellWeights(cells) }
 }
 
-/** The value that at least this share of the area does not exceed. */
+const BUCKETS = 512
+
+/**
+ * The least of these values (≥ 0) that at least this share of the area does not exceed. Linear: one
+ * histogram, and a sort of the one bucket that matters.
+ */
 function quantile(
   values: ArrayLike<number>,
   cells: readonly { area: number }[],
   share: number,
 ): number {
-  const order = cells.map((_, i) => i).sort((a, b) => values[a]! - values[b]! || a - b)
-  let area = 0
-  for (const i of order) {
-    area += cells[i]!.area
-    if (area >= share - 1e-12) return values[i]!
+  const bucketOf = (value: number) => Math.min(BUCKETS - 1, Math.floor(value * 4))
+  const areas = new Float64Array(BUCKETS)
+  for (let i = 0; i < cells.length; i++) areas[bucketOf(values[i]!)]! += cells[i]!.area
+  let bucket = 0
+  let below = 0
+  while (bucket < BUCKETS - 1 && below + areas[bucket]! < share - 1e-12) below += areas[bucket++]!
+  const inside = cells
+    .map(({ area }, i) => ({ value: values[i]!, area }))
+    .filter(({ value }) => bucketOf(value) === bucket)
+    .sort((a, b) => a.value - b.value)
+  for (const { value, area } of inside) {
+    below += area
+    if (below >= share - 1e-12) return value
   }
-  return values[order.at(-1)!]!
+  return inside.at(-1)!.value
 }
 
 function problemOf(
@@ -121,10 +130,11 @@ function problemOf(
   apart: number,
   relax: number,
 ): ChoiceProblem {
-  const { cells, presenceWeight, reward, admits, clash, lightnessGap } = recipe
+  const { cells, presenceWeight, reward, admits, lightnessGap } = recipe
   const m = cells.length
   const n = shades.length
-  const cost = distance.map((d, at) => d * weights[at % m]!)
+  const cost = new Float64Array(distance.length)
+  for (let at = 0; at < cost.length; at++) cost[at] = distance[at]! * weights[at % m]!
   const chromas = cells.map(({ lab }) => chromaOf(lab))
   const chromaLimit = quantile(chromas, cells, 0.99) + 3
   const unary = Float64Array.from(
@@ -132,11 +142,7 @@ function problemOf(
     ({ lab }, s) =>
       presenceWeight * presence[s]! + 0.05 * Math.max(0, chromaOf(lab) - chromaLimit) - reward(lab),
   )
-  const conflicts = new Uint8Array(n * n)
-  for (let a = 0; a < n; a++)
-    for (let b = a + 1; b < n; b++)
-      if (tooClose(shades[a]!.lab, shades[b]!.lab, apart * relax, lightnessGap * relax, clash))
-        conflicts[a * n + b] = conflicts[b * n + a] = 1
+  const conflicts = conflictsOf(recipe, shades, apart * relax, lightnessGap * relax)
   const out: number[] = []
   shades.forEach(({ id, lab }, s) => {
     if (excluded.has(id) || (!admits(lab) && !locked.includes(s))) out.push(s)
@@ -144,13 +150,31 @@ function problemOf(
   return { cells: m, options: n, cost, unary, conflicts, count: PLACES, locked, excluded: out }
 }
 
-function tooClose(a: Lab, b: Lab, apart: number, gap: number, clash: Recipe['clash']): boolean {
-  const dL = Math.abs(a[0] - b[0])
-  if (dL < gap) return true
-  // S_L never exceeds 1.75, so that a difference in lightness alone can settle it.
-  if (apart > 0 && dL < 1.75 * apart)
-    if (ciede2000(a[0], a[1], a[2], b[0], b[1], b[2]) < apart) return true
-  return clash(a, b)
+function conflictsOf(
+  { clash }: Recipe,
+  shades: readonly MatchShade[],
+  apart: number,
+  gap: number,
+): Uint8Array {
+  const n = shades.length
+  const conflicts = new Uint8Array(n * n)
+  const row = new Float64Array(n)
+  for (let a = 0; a < n; a++) {
+    const { lab } = shades[a]!
+    const unsure: number[] = []
+    for (let b = a + 1; b < n; b++) {
+      const other = shades[b]!.lab
+      const dL = Math.abs(lab[0] - other[0])
+      if (dL < gap || clash(lab, other)) conflicts[a * n + b] = conflicts[b * n + a] = 1
+      // S_L never exceeds 1.75: a difference in lightness alone can settle that they are apart.
+      else if (dL < 1.75 * apart) unsure.push(b)
+    }
+    deltaE00Row(lab, packLabs(unsure.map((b) => shades[b]!.lab)), row)
+    unsure.forEach((b, index) => {
+      if (row[index]! < apart) conflicts[a * n + b] = conflicts[b * n + a] = 1
+    })
+  }
+  return conflicts
 }
 
 /** The choice under the wish to keep the five apart, given way to where it leaves none. */
@@ -202,7 +226,7 @@ export function matchPhotograph(
       left,
       shades.filter(({ id, lab }, s) => {
         if (excluded.has(id) || chosen.includes(s)) return false
-        return !locked.some((lock) => tooClose(shades[lock]!.lab, lab, apart, 0, () => false))
+        return !locked.some((lock) => deltaE00(shades[lock]!.lab, lab) < apart)
       }),
     )
     if (!shade) return none('The true reading already holds every striking colour of it.')
@@ -303,10 +327,7 @@ export function nearestShades(
   count: number,
 ): { shadeId: string; deltaE: number }[] {
   return shades
-    .map(({ id, lab: [L, a, b] }) => ({
-      shadeId: id,
-      deltaE: ciede2000(lab[0], lab[1], lab[2], L, a, b),
-    }))
+    .map((shade) => ({ shadeId: shade.id, deltaE: deltaE00(lab, shade.lab) }))
     .sort((a, b) => a.deltaE - b.deltaE)
     .slice(0, count)
 }

@@ -1,4 +1,4 @@
-import { ciede2000 } from './ciede2000'
+import { deltaE00Row, packLabs } from './ciede2000'
 import { displayP3ToLab, srgbToLab } from './srgb'
 import { chromaOf, type Lab, type PixelImage } from './types'
 
@@ -97,34 +97,45 @@ export function readPhotographColors(image: PixelImage): PhotographColors {
   const bins = binPixels(image)
   if (bins.visible === 0) throw new RangeError('no visible pixels')
 
-  let cubes: number[] = []
-  let distinct = new Set<number>()
+  const cubes = new Int32Array(bins.keys.length)
+  const cubeIndex = new Map<number, number>()
   for (const edge of EDGES) {
-    cubes = bins.labs.map((lab) => cubeOf(lab, edge))
-    distinct = new Set(cubes)
-    if (distinct.size <= MAX_CELLS) break
+    cubeIndex.clear()
+    for (let bin = 0; bin < cubes.length && cubeIndex.size <= MAX_CELLS; bin++) {
+      const cube = cubeOf(bins.labs[bin]!, edge)
+      const known = cubeIndex.get(cube)
+      cubes[bin] = known ?? cubeIndex.size
+      if (known === undefined) cubeIndex.set(cube, cubeIndex.size)
+    }
+    if (cubeIndex.size <= MAX_CELLS) break
   }
 
-  const sums = new Map<number, [l: number, a: number, b: number, count: number]>()
-  bins.labs.forEach((lab, index) => {
-    const cube = cubes[index]!
-    const count = bins.counts[bins.keys[index]!]!
-    const sum = sums.get(cube) ?? [0, 0, 0, 0]
-    for (let axis = 0; axis < 3; axis++) sum[axis]! += lab[axis]! * count
-    sum[3] += count
-    sums.set(cube, sum)
+  const sums = [...cubeIndex.keys()].map((cube) => ({ cube, l: 0, a: 0, b: 0, count: 0 }))
+  for (let bin = 0; bin < cubes.length; bin++) {
+    const sum = sums[cubes[bin]!]!
+    const [l, a, b] = bins.labs[bin]!
+    const count = bins.counts[bins.keys[bin]!]!
+    sum.l += l * count
+    sum.a += a * count
+    sum.b += b * count
+    sum.count += count
+  }
+  const order = sums.map((_, index) => index)
+  order.sort((x, y) => sums[y]!.count - sums[x]!.count || sums[x]!.cube - sums[y]!.cube)
+  const cells = order.map((index): PhotographCell => {
+    const { l, a, b, count } = sums[index]!
+    return {
+      lab: [round(l / count), round(a / count), round(b / count)],
+      area: count / bins.visible,
+    }
   })
-  const ordered = [...sums].sort(([cubeA, a], [cubeB, b]) => b[3] - a[3] || cubeA - cubeB)
-  const cells = ordered.map(([, [l, a, b, count]]) => ({
-    lab: [round(l / count), round(a / count), round(b / count)] as const,
-    area: count / bins.visible,
-  }))
 
-  const cellOfCube = new Map(ordered.map(([cube], cell) => [cube, cell]))
-  const cellOfBin = new Uint8Array(BINS)
-  bins.keys.forEach((bin, index) => {
-    cellOfBin[bin] = cellOfCube.get(cubes[index]!)!
+  const cellOfCube = new Uint8Array(sums.length)
+  order.forEach((index, cell) => {
+    cellOfCube[index] = cell
   })
+  const cellOfBin = new Uint8Array(BINS)
+  for (let bin = 0; bin < cubes.length; bin++) cellOfBin[bins.keys[bin]!] = cellOfCube[cubes[bin]!]!
   const cellMap = new Uint8Array(width * height)
   for (let pixel = 0; pixel < cellMap.length; pixel++) {
     const bin = bins.binOfPixel[pixel]!
@@ -154,19 +165,22 @@ export function accentShares(cells: readonly PhotographCell[]): AccentShares {
   const n = cells.length
   const neighborhood = new Float64Array(n)
   const apart = new Float64Array(n)
+  const packed = packLabs(cells.map(({ lab }) => lab))
+  const row = new Float64Array(n)
   for (let i = 0; i < n; i++) {
-    const [L, a, b] = cells[i]!.lab
-    const area = cells[i]!.area
+    const { lab, area } = cells[i]!
     neighborhood[i]! += area
+    deltaE00Row(lab, packed.subarray((i + 1) * 3), row)
     for (let j = i + 1; j < n; j++) {
-      const other = cells[j]!
-      const distance = ciede2000(L, a, b, other.lab[0], other.lab[1], other.lab[2])
+      const distance = row[j - i - 1]!
+      const other = cells[j]!.area
       const reach = Math.min(1, distance / 40)
-      apart[i]! += other.area * reach
+      apart[i]! += other * reach
       apart[j]! += area * reach
-      if (distance < 42) {
+      // Beyond 28 ΔE00 the Gaussian is below 2e-7.
+      if (distance < 28) {
         const near = Math.exp(-((distance / 7) ** 2))
-        neighborhood[i]! += other.area * near
+        neighborhood[i]! += other * near
         neighborhood[j]! += area * near
       }
     }

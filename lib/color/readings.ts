@@ -1,5 +1,5 @@
 import { accentShares, type PhotographCell } from './photograph-colors'
-import { ciede2000 } from './ciede2000'
+import { deltaE00 } from './ciede2000'
 import { chromaOf, hueOf, type Lab } from './types'
 
 /** The ways one photograph is read. */
@@ -121,10 +121,10 @@ const ACCENT_SHOWS = 0.1
 const ACCENT_NEAR = 12
 
 /** The area of a colour with its own lights and shadows: within about 8 ΔE00 at kL = 3. */
-function extentOf({ lab: [L, a, b] }: PhotographCell, cells: readonly PhotographCell[]): number {
+function extentOf({ lab: own }: PhotographCell, cells: readonly PhotographCell[]): number {
   let extent = 0
   for (const { lab, area } of cells)
-    extent += area * Math.exp(-((ciede2000(L, a, b, lab[0], lab[1], lab[2], 3) / 8) ** 2))
+    extent += area * Math.exp(-((deltaE00(own, lab, { kL: 3 }) / 8) ** 2))
   return extent
 }
 
@@ -149,11 +149,11 @@ export function accentShade(
   const order = cells.map((_, i) => i).filter((i) => scores[i]! > 0)
   order.sort((a, b) => scores[b]! - scores[a]! || a - b)
   for (const cell of order) {
-    const [L, a, b] = cells[cell]!.lab
+    const { lab } = cells[cell]!
     let nearest: MatchShade | null = null
     let least = Infinity
     for (const shade of candidates) {
-      const distance = ciede2000(L, a, b, shade.lab[0], shade.lab[1], shade.lab[2], 2)
+      const distance = deltaE00(lab, shade.lab, { kL: 2 })
       if (distance < least) {
         least = distance
         nearest = shade
@@ -161,8 +161,7 @@ export function accentShade(
     }
     if (!nearest) return null
     if (least > ACCENT_NEAR) continue
-    if (ciede2000(L, a, b, nearest.lab[0], nearest.lab[1], nearest.lab[2]) <= left[cell]! - 3)
-      return nearest
+    if (deltaE00(lab, nearest.lab) <= left[cell]! - 3) return nearest
   }
   return null
 }

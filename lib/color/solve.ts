@@ -51,6 +51,8 @@ interface Bound {
 
 const ROOT_STEPS = 400
 const DEEP_STEPS = [0, 0, 12, 30, 60]
+/** So few candidates beyond those needed are enumerated sooner than bounded further. */
+const FEW = 15
 /** A conflict-free set that takes longer than this to find is bounded by the cheapest of any. */
 const SET_VISITS = 400
 
@@ -104,8 +106,10 @@ class Search {
     if (root.need === 1) this.tryLast(root)
     else if (root.need > 1) {
       const u = new Float64Array(cells)
-      for (let i = 0; i < cells; i++)
-        u[i] = Math.min(...start.map((option) => cost[option * cells + i]!))
+      u.set(served)
+      for (const option of start)
+        for (let i = 0, at = option * cells; i < cells; i++, at++)
+          if (cost[at]! < u[i]!) u[i] = cost[at]!
       const bound = this.bound(root, u, ROOT_STEPS)
       rootBound = bound.value
       // A last look around the best choice of the dual, before anything is enumerated.
@@ -153,6 +157,7 @@ class Search {
     const reduced = new Float64Array(this.problem.options)
     let candidates = node.candidates
     let best: Bound = { value: -Infinity, candidates, reduced, sumU: 0, u }
+    const slope = new Int8Array(cells)
     let theta = 1.5
     let idle = 0
     for (let step = 0; ; step++) {
@@ -170,7 +175,7 @@ class Search {
       sortByValue(candidates, reduced)
       const set = this.cheapestSet(candidates, reduced, need)
       const value = sumU + set.sum
-      if (value > best.value + 1e-6) idle = 0
+      if (value > best.value + 0.01 * (this.objective - best.value)) idle = 0
       else if (++idle >= 6) {
         idle = 0
         theta /= 2
@@ -187,18 +192,18 @@ class Search {
       }
       if (set.chosen) this.offer([...node.taken, ...set.chosen])
       if (step >= steps || theta < 0.01 || best.value >= this.ceiling) break
-      if (candidates.length < need || (step % 16 === 15 && this.outOfTime())) break
+      if (candidates.length <= need + FEW || (step % 16 === 15 && this.outOfTime())) break
 
       const chosen = set.chosen ?? Array.from(candidates.subarray(0, need))
       let norm = 0
-      const slope = new Int8Array(cells)
+      slope.fill(1)
+      for (let k = 0; k < need; k++)
+        for (let i = 0, at = chosen[k]! * cells; i < cells; i++, at++)
+          if (cost[at]! < u[i]!) slope[i]!--
       for (let i = 0; i < cells; i++) {
-        let s = 1
-        for (const option of chosen) if (cost[option * cells + i]! < u[i]!) s--
         // Where u already stands at what is served, it cannot rise.
-        if (s > 0 && u[i]! >= served[i]!) s = 0
-        slope[i] = s
-        norm += s * s
+        if (slope[i]! > 0 && u[i]! >= served[i]!) slope[i] = 0
+        norm += slope[i]! * slope[i]!
       }
       if (norm === 0) break
       const stride = (theta * (this.objective - value)) / norm
