@@ -83,17 +83,11 @@ export async function findNumberHolder(
   })
 }
 
-/** @throws ConflictError when another shade of the line has the number */
-export async function requireFreeNumber(
-  line: Line,
-  number: string,
-  transaction: Transaction,
-  exceptId?: string,
-): Promise<void> {
-  const holder = await findNumberHolder(line, [number], transaction, exceptId)
-  if (!holder) return
-  const message = `No. ${holder.number} is taken${holder.name ? ` by ${holder.name}` : ''}. Choose another number.`
-  throw new ConflictError(message, { number: [message] })
+/** The conflict that says who has the number. */
+export function numberTaken(holder: Pick<Shade, 'number' | 'name'>): ConflictError {
+  const by = holder.name ? ` by ${holder.name}` : ''
+  const message = `No. ${holder.number} is taken${by}. Choose another number.`
+  return new ConflictError(message, { number: [message] })
 }
 
 /** @throws ConflictError when the line cannot take so many more shades */

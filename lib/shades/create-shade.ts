@@ -1,7 +1,7 @@
 import type { Actor } from '@/lib/auth/actor'
-import { Shade } from '@/models'
+import { createOnce, Shade } from '@/models'
 
-import { changeShades, requireFreeNumber, requireRoom } from './change-shades'
+import { changeShades, findNumberHolder, numberTaken, requireRoom } from './change-shades'
 import { colorColumns } from './color'
 import type { CreateShadeInput } from './schema'
 
@@ -13,26 +13,16 @@ import type { CreateShadeInput } from './schema'
 export async function createShade(actor: Actor, input: CreateShadeInput): Promise<Shade> {
   const { lineSlug, requestKey, color, ...fields } = input
   return changeShades(actor, lineSlug, async (line, transaction) => {
-    const made = await Shade.findOne({
-      where: { brandId: actor.brandId, lineId: line.id, requestKey },
-      paranoid: false,
-      transaction,
-    })
-    if (made) return { answer: made, changed: false }
-    await requireFreeNumber(line, fields.number, transaction)
     const where = { brandId: actor.brandId, lineId: line.id }
-    requireRoom(await Shade.count({ where, transaction }), 1)
+    const held = await Shade.count({ where, transaction })
     const last = await Shade.max<number | null, Shade>('position', { where, transaction })
-    const shade = await Shade.create(
-      {
-        ...where,
-        ...fields,
-        ...colorColumns(color),
-        position: (last ?? -1) + 1,
-        requestKey,
-      },
-      { transaction },
-    )
-    return { answer: shade, changed: true }
+    const values = { ...where, ...fields, ...colorColumns(color), position: (last ?? -1) + 1 }
+    const made = await createOnce(Shade, { ...values, requestKey }, transaction)
+    if (!made) {
+      const holder = await findNumberHolder(line, [fields.number], transaction)
+      throw numberTaken(holder ?? fields)
+    }
+    if (made.created) requireRoom(held, 1)
+    return { answer: made.row, changed: made.created }
   })
 }

@@ -2,7 +2,7 @@ import { literal, Op, type Order, type WhereOptions } from 'sequelize'
 import { z } from 'zod'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
-import { ciede2000 } from '@/lib/color/ciede2000'
+import { deltaE00 } from '@/lib/color/ciede2000'
 import { screenColor } from '@/lib/color/gamut'
 import type { Lab } from '@/lib/color/types'
 import { canReadCombinations } from '@/lib/combinations/policy'
@@ -185,9 +185,7 @@ export async function getShade(
     .filter(({ id }) => id !== shade.id)
     .map((other) => ({
       id: other.id,
-      difference: ciede2000(
-        ...([shade.labL, shade.labA, shade.labB, other.labL, other.labA, other.labB] as const),
-      ),
+      difference: deltaE00(labOf(shade), labOf(other)),
     }))
     .sort((one, other) => one.difference - other.difference)
     .slice(0, NEIGHBOURS)

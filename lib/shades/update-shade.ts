@@ -2,7 +2,7 @@ import type { Actor } from '@/lib/auth/actor'
 import { ConflictError, NotFoundError, type FieldErrors } from '@/lib/errors'
 import { Shade, updateVersioned } from '@/models'
 
-import { changeShades, requireFreeNumber } from './change-shades'
+import { changeShades, findNumberHolder, numberTaken } from './change-shades'
 import { colorColumns, describeColor, isSameColor } from './color'
 import type { UpdateShadeInput } from './schema'
 
@@ -22,7 +22,8 @@ export async function updateShade(actor: Actor, input: UpdateShadeInput): Promis
     if (!shade) throw new NotFoundError()
     if (shade.version !== version) throw savedFirst(shade, input)
     if (fields.number !== undefined) {
-      await requireFreeNumber(line, fields.number, transaction, shade.id)
+      const holder = await findNumberHolder(line, [fields.number], transaction, shade.id)
+      if (holder) throw numberTaken(holder)
     }
     await updateVersioned(
       Shade,

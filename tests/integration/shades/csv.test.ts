@@ -34,12 +34,11 @@ const save = async (text: string, terms: ReadingTerms | null = null) =>
     ...file(text, terms),
     shadesRevision: (await line.reload()).shadesRevision,
   })
+/** What an import makes of a line's shades: all but the ids, the line and the times. */
 const rowsOf = async (of: Line) => {
-  const shades = await Shade.findAll({ where: { lineId: of.id }, order: ['position', 'number'] })
-  return shades.map((shade) => {
-    const { id: _id, lineId: _line, createdAt: _made, updatedAt: _saved, ...kept } = shade.get()
-    return kept
-  })
+  const attributes = { exclude: ['id', 'lineId', 'createdAt', 'updatedAt'] }
+  const order = ['position', 'number']
+  return Shade.findAll({ attributes, where: { lineId: of.id }, order, raw: true })
 }
 
 const HEAD = 'number,name,status,L,a,b,illuminant,observer,hex,order\r\n'

@@ -76,7 +76,7 @@ describe('the table', () => {
 })
 
 describe('a page takes as many queries for 50 shades as for 5', () => {
-  const reads = {
+  const reads: Record<string, (slug: string) => Promise<unknown>> = {
     'the table': (slug: string) => listShadeTable(owner, slug, shadeTableSchema.parse({})),
     'what no screen shows': (slug: string) =>
       listShadeTable(owner, slug, shadeTableSchema.parse({ outside: '1' })),
