@@ -1,4 +1,4 @@
-import { threadColors, VEILS, type ThreadColors } from './thread-model'
+import { threadColors, TURN, VEILS, type ThreadColors } from './thread-model'
 
 /** Where a block of threads lies; lengths in the picture's own units. */
 export interface ThreadBlock {
@@ -19,11 +19,19 @@ const round = (value: number): string => String(Math.round(value * 10) / 10)
 const SLANT = 42
 const TAN = Math.tan((SLANT * Math.PI) / 180)
 
+/** How far the veils reach into the rounded ends, in thread heights. */
+const OVER = 0.2
+
 /** One subpath a thread, all at the same height within their threads. */
-function lines({ x, y, width, pitch, rise }: ThreadBlock, at: number, rows: readonly number[]) {
-  return rows
-    .map((row) => `M${round(x)} ${round(y + (row + at) * pitch)}l${round(width)} ${round(-rise)}`)
-    .join('')
+function lines(
+  { x, y, width, pitch, rise }: ThreadBlock,
+  at: number,
+  rows: readonly number[],
+  over = 0,
+) {
+  const left = round(x - over * pitch)
+  const run = `l${round(width + 2 * over * pitch)} ${round(-rise)}`
+  return rows.map((row) => `M${left} ${round(y + (row + at) * pitch)}${run}`).join('')
 }
 
 /**
@@ -35,10 +43,10 @@ function turns(block: ThreadBlock, at: number, rows: readonly number[], turn: nu
   return rows
     .map((row) => {
       const top = y + (row + at) * pitch
-      const start = (((row + offset) * 0.618) % 1) * turn
+      const start = (((row + offset) * 0.618) % 1) * turn - pitch * OVER
       // The slant moves a point by its height; moving it back keeps the thread inside the block.
-      const left = x + top * TAN
-      return `M${round(left - start)} ${round(top)}l${round(width + start - rise * TAN)} ${round(-rise)}`
+      const left = x + top * TAN + start
+      return `M${round(left)} ${round(top)}l${round(width + pitch * OVER - start - rise * TAN)} ${round(-rise)}`
     })
     .join('')
 }
@@ -48,7 +56,7 @@ function turns(block: ThreadBlock, at: number, rows: readonly number[], turn: nu
  * its size. The mean of what it draws is the shade (tests/unit/components/wound-sample.test.tsx).
  */
 export function Threads({ hex, block }: { hex: string; block: ThreadBlock }) {
-  const colors = threadColors(hex)
+  const colors = threadColors(hex, block.pitch)
   const { x, y, width, pitch, count, rise } = block
   const rows = Array.from({ length: count }, (_, row) => row)
   const height = count * pitch
@@ -79,7 +87,7 @@ function Veils({
   colors: ThreadColors
 }) {
   const { pitch, offset = 0 } = block
-  const turn = pitch * 1.15
+  const turn = pitch * TURN
   return (
     <>
       {VEILS.map((veil, index) =>
@@ -97,7 +105,7 @@ function Veils({
         ) : (
           <path
             key={index}
-            d={lines(block, veil.at, rows)}
+            d={lines(block, veil.at, rows, OVER)}
             stroke={veil.tone}
             strokeOpacity={colors.opacities[index]}
             strokeWidth={round(veil.width * pitch)}
@@ -112,6 +120,7 @@ function Veils({
                 block,
                 0.5,
                 rows.filter((row) => ((row + offset) * 7) % 3 === index),
+                OVER,
               )}
               stroke={tone}
               strokeOpacity={colors.uneven}
