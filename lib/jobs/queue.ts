@@ -7,6 +7,7 @@ import type { Transaction } from 'sequelize'
  */
 export interface JobData {
   'read-photograph': { photographId: string }
+  'copy-photograph': { photographId: string }
   'sweep-uploads': Record<string, never>
 }
 /** One of the queues. */
@@ -21,6 +22,7 @@ export const QUEUES: Record<
   { retryLimit: number; retryDelay: number; expireInSeconds: number }
 > = {
   'read-photograph': { retryLimit: 4, retryDelay: 2, expireInSeconds: 90 },
+  'copy-photograph': { retryLimit: 4, retryDelay: 5, expireInSeconds: 120 },
   'sweep-uploads': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
 }
 

@@ -1,0 +1,21 @@
+import { copyPhotograph } from '@/lib/photographs/read-photograph'
+import { sweepUploads } from '@/lib/photographs/sweep'
+
+import type { JobData, JobName } from './queue'
+import { readPhotographJob } from './read-photograph.job'
+
+/** Does a job. What it returns is logged; what it throws has the job tried again. */
+export type JobHandler<Name extends JobName> = (
+  data: JobData[Name],
+  job: { isLastTry: boolean },
+) => Promise<unknown>
+
+/** The handler of each queue. */
+export const HANDLERS: { [Name in JobName]: JobHandler<Name> } = {
+  'read-photograph': readPhotographJob,
+  'copy-photograph': ({ photographId }) => copyPhotograph(photographId),
+  'sweep-uploads': () => sweepUploads(),
+}
+
+/** When the jobs that nobody asks for are done. @see crontab(5) */
+export const SCHEDULES: Partial<Record<JobName, string>> = { 'sweep-uploads': '*/5 * * * *' }

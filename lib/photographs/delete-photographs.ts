@@ -1,0 +1,55 @@
+import { Op, UniqueConstraintError } from 'sequelize'
+
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { ConflictError, NotFoundError } from '@/lib/errors'
+import { inTransaction, Photograph } from '@/models'
+
+import { canDeletePhotographs } from './policy'
+import { UNDO_WINDOW, type PhotographIdsInput } from './schema'
+
+/**
+ * Deletes photographs; for UNDO_WINDOW they can be brought back. Combinations made from them stay.
+ * All or none.
+ * @throws NotFoundError when one of them is not there
+ */
+export async function deletePhotographs(
+  actor: Actor,
+  { photographIds }: PhotographIdsInput,
+): Promise<{ count: number }> {
+  authorize(actor, canDeletePhotographs)
+  return inTransaction(async (transaction) => {
+    const count = await Photograph.destroy({
+      where: { id: photographIds, brandId: actor.brandId, state: { [Op.ne]: 'pending' } },
+      transaction,
+    })
+    if (count !== new Set(photographIds).size) throw new NotFoundError()
+    return { count }
+  })
+}
+
+/**
+ * Brings deleted photographs back. All or none; one that was not deleted counts as brought back.
+ * @throws NotFoundError when one of them is swept, ConflictError when its file was added anew
+ */
+export async function restorePhotographs(
+  actor: Actor,
+  { photographIds }: PhotographIdsInput,
+): Promise<{ count: number }> {
+  authorize(actor, canDeletePhotographs)
+  const { brandId } = actor
+  const mine = { id: photographIds, brandId, state: { [Op.ne]: 'pending' } }
+  try {
+    return await inTransaction(async (transaction) => {
+      await Photograph.restore({
+        where: { ...mine, deletedAt: { [Op.gt]: new Date(Date.now() - UNDO_WINDOW) } },
+        transaction,
+      })
+      const count = await Photograph.count({ where: mine, transaction })
+      if (count !== new Set(photographIds).size) throw new NotFoundError()
+      return { count }
+    })
+  } catch (error) {
+    if (!(error instanceof UniqueConstraintError)) throw error
+    throw new ConflictError('The same file was added again meanwhile, so it is there already.')
+  }
+}

@@ -1,0 +1,85 @@
+import type { Actor } from '@/lib/auth/actor'
+import type { Line, Photograph } from '@/models'
+
+import { derivativeName } from './keys'
+import { canDeletePhotographs, canEditPhotograph, canRereadPhotograph } from './policy'
+import type { Derivative, Licence, PhotographState } from './schema'
+
+/** One copy for a `srcset`. */
+export interface PictureSource {
+  src: string
+  /** Pixels. */
+  width: number
+}
+
+/** A photograph as the studio shows it. */
+export interface PhotographView {
+  id: string
+  title: string
+  photographer: string
+  licence: Licence | null
+  licenceNote: string
+  licenceUrl: string
+  sourceUrl: string
+  altText: string
+  fileName: string
+  state: PhotographState
+  /** Why it could not be read, in words. */
+  failure: string | null
+  /** Pixels of the original, upright; null until read. */
+  width: number | null
+  height: number | null
+  byteLength: number
+  /** ISO 8601. */
+  addedAt: string
+  /** Our own copies, narrow before wide; empty while there are none. */
+  sources: { avif: PictureSource[]; webp: PictureSource[] }
+  /** For a browser that takes neither list; null while there is no copy. */
+  fallbackSrc: string | null
+  version: number
+  /** The line's shades have changed since the stored matches were made. */
+  stale: boolean
+  canEdit: boolean
+  canDelete: boolean
+  canReread: boolean
+}
+
+/** A photograph with its reading's age, as its view. */
+export function presentPhotograph(
+  actor: Actor,
+  line: Line,
+  photograph: Photograph,
+): PhotographView {
+  const { id, reading, derivatives } = photograph
+  const path = `/api/brands/${actor.brandSlug}/photographs/${id}/derivatives/`
+  const sourcesOf = (format: Derivative['format']): PictureSource[] =>
+    derivatives
+      .filter((one) => one.format === format)
+      .sort((a, b) => a.width - b.width)
+      .map((one) => ({ src: path + derivativeName(photograph, one), width: one.width }))
+  const webp = sourcesOf('webp')
+  return {
+    id,
+    title: photograph.title,
+    photographer: photograph.photographer,
+    licence: photograph.licence,
+    licenceNote: photograph.licenceNote,
+    licenceUrl: photograph.licenceUrl,
+    sourceUrl: photograph.sourceUrl,
+    altText: photograph.altText,
+    fileName: photograph.fileName,
+    state: photograph.state,
+    failure: photograph.failure,
+    width: photograph.width,
+    height: photograph.height,
+    byteLength: photograph.byteLength,
+    addedAt: photograph.createdAt.toISOString(),
+    sources: { avif: sourcesOf('avif'), webp },
+    fallbackSrc: (webp.findLast(({ width }) => width <= 960) ?? webp[0])?.src ?? null,
+    version: photograph.version,
+    stale: reading ? reading.shadesRevision !== line.shadesRevision : false,
+    canEdit: canEditPhotograph(actor),
+    canDelete: canDeletePhotographs(actor),
+    canReread: canRereadPhotograph(actor),
+  }
+}

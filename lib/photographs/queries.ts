@@ -1,0 +1,159 @@
+import { literal, Op, type Transaction, type WhereOptions } from 'sequelize'
+
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { NotFoundError } from '@/lib/errors'
+import { getLine } from '@/lib/lines/queries'
+import { getObject } from '@/lib/storage/objects'
+import { Photograph, Reading, type Line } from '@/models'
+
+import { derivativeKey, derivativeName } from './keys'
+import { canReadPhotographs } from './policy'
+import {
+  PHOTOGRAPH_LIMITS,
+  type Derivative,
+  type GalleryFilter,
+  type PhotographStanding,
+} from './schema'
+
+const CONFIRMED = { [Op.ne]: 'pending' as const }
+const SHOWN: Record<NonNullable<GalleryFilter['state']>, string[]> = {
+  ready: ['ready'],
+  reading: ['waiting', 'reading'],
+  failed: ['failed'],
+}
+/** Only what tells whether a stored match is stale. */
+const READING_AGE = { model: Reading, as: 'reading', attributes: ['id', 'shadesRevision'] }
+
+function whereOf({ q, state, missing }: GalleryFilter): WhereOptions {
+  const like = { [Op.iLike]: `%${q.replace(/[\\%_]/g, '\\$&')}%` }
+  return {
+    ...(q && { [Op.or]: [{ title: like }, { photographer: like }, { altText: like }] }),
+    ...(missing === 'licence' && { licence: null }),
+    ...(missing === 'alt' && { altText: '' }),
+    state: state ? SHOWN[state] : CONFIRMED,
+  }
+}
+
+/** A page of a line's photographs, newest first. Two queries. */
+export async function listPhotographs(
+  actor: Actor,
+  line: Line,
+  filter: GalleryFilter,
+): Promise<{ photographs: Photograph[]; total: number }> {
+  authorize(actor, canReadPhotographs)
+  const { rows, count } = await Photograph.findAndCountAll({
+    where: { ...whereOf(filter), brandId: actor.brandId, lineId: line.id },
+    include: [READING_AGE],
+    order: [
+      ['createdAt', 'DESC'],
+      ['id', 'ASC'],
+    ],
+    limit: PHOTOGRAPH_LIMITS.perPage,
+    offset: (filter.page - 1) * PHOTOGRAPH_LIMITS.perPage,
+  })
+  return { photographs: rows, total: count }
+}
+
+/** How many photographs of a line stand how. */
+export interface PhotographCounts {
+  all: number
+  reading: number
+  failed: number
+  withoutLicence: number
+  withoutAltText: number
+}
+
+/** Counts a line's photographs. One query. */
+export async function countPhotographs(actor: Actor, line: Line): Promise<PhotographCounts> {
+  authorize(actor, canReadPhotographs)
+  const countWhere = (condition: string) => literal(`count(*) FILTER (WHERE ${condition})::int`)
+  const [counts] = (await Photograph.findAll({
+    attributes: [
+      [literal('count(*)::int'), 'all'],
+      [countWhere("state IN ('waiting', 'reading')"), 'reading'],
+      [countWhere("state = 'failed'"), 'failed'],
+      [countWhere('licence IS NULL'), 'withoutLicence'],
+      [countWhere("alt_text = ''"), 'withoutAltText'],
+    ],
+    where: { brandId: actor.brandId, lineId: line.id, state: CONFIRMED },
+    raw: true,
+  })) as unknown as PhotographCounts[]
+  return counts!
+}
+
+/**
+ * One photograph of a line, with what was read from it or only how old that is.
+ * @throws NotFoundError
+ */
+export async function getPhotograph(
+  actor: Actor,
+  lineSlug: string,
+  photographId: string,
+  { withReading = false, transaction }: { withReading?: boolean; transaction?: Transaction } = {},
+): Promise<{ line: Line; photograph: Photograph }> {
+  authorize(actor, canReadPhotographs)
+  const line = await getLine(actor, lineSlug, transaction)
+  const photograph = await Photograph.findOne({
+    where: {
+      id: uuidOrNone(photographId),
+      brandId: actor.brandId,
+      lineId: line.id,
+      state: CONFIRMED,
+    },
+    include: [withReading ? { model: Reading, as: 'reading' } : READING_AGE],
+    transaction: transaction ?? null,
+  })
+  if (!photograph) throw new NotFoundError()
+  return { line, photograph }
+}
+
+/** An address may hold anything; what is no uuid names nothing. @throws NotFoundError */
+export function uuidOrNone(id: string): string {
+  if (!/^[0-9a-f]{8}(-[0-9a-f]{4}){3}-[0-9a-f]{12}$/i.test(id)) throw new NotFoundError()
+  return id
+}
+
+/** Where these photographs stand; one that is gone is left out. One query. */
+export async function listStandings(
+  actor: Actor,
+  photographIds: readonly string[],
+): Promise<PhotographStanding[]> {
+  authorize(actor, canReadPhotographs)
+  const photographs = await Photograph.findAll({
+    attributes: ['id', 'state', 'failure'],
+    where: { id: [...photographIds], brandId: actor.brandId, state: CONFIRMED },
+  })
+  return photographs.map(({ id, state, failure }) => ({ id, state, failure }))
+}
+
+/**
+ * The bytes of a photograph's copy by its file name.
+ * @throws NotFoundError, UnavailableError when the store is away
+ */
+export async function getDerivative(
+  actor: Actor,
+  photographId: string,
+  name: string,
+): Promise<{ body: Buffer; format: Derivative['format'] }> {
+  authorize(actor, canReadPhotographs)
+  const photograph = await Photograph.findOne({
+    attributes: ['id', 'brandId', 'sha256', 'derivatives'],
+    where: { id: uuidOrNone(photographId), brandId: actor.brandId },
+  })
+  const derivative = photograph?.derivatives.find((one) => derivativeName(photograph, one) === name)
+  const body = derivative && (await getObject(derivativeKey(photograph!, derivative)))
+  if (!body) throw new NotFoundError()
+  return { body, format: derivative!.format }
+}
+
+/** The photograph of a line that holds the same file, if there is one. */
+export function findSameFile(
+  actor: Actor,
+  lineId: string,
+  sha256: string,
+): Promise<Photograph | null> {
+  return Photograph.findOne({
+    attributes: ['id', 'title'],
+    where: { brandId: actor.brandId, lineId, sha256, state: CONFIRMED },
+  })
+}

@@ -1,0 +1,108 @@
+import { promisify } from 'node:util'
+import { deflate } from 'node:zlib'
+
+import { Op, type Transaction } from 'sequelize'
+
+import { readPhotographColors } from '@/lib/color/photograph-colors'
+import { strikingColors } from '@/lib/color/striking'
+import { enqueue } from '@/lib/jobs/queue'
+import { BY_POSITION, MATCHABLE } from '@/lib/shades/queries'
+import { getObject } from '@/lib/storage/objects'
+import { inTransaction, Line, Photograph, Reading, Shade } from '@/models'
+
+import { computeMatches } from './compute-matches'
+import { decodePhotograph, PhotographError } from './decode'
+import { makeCopies } from './make-copies'
+
+const compress = promisify(deflate)
+
+/**
+ * The work of the job `read-photograph`: reads a photograph's colours, matches them to the line's
+ * shades, makes the first copies for the screen, and says that it is ready. Doing it twice ends the
+ * same. What is wrong with the picture itself becomes the photograph's failure, in words.
+ * @throws whatever may pass by itself (the store or the database away): the job is tried again
+ */
+export async function readPhotograph(photographId: string): Promise<void> {
+  const photograph = await Photograph.findByPk(photographId)
+  if (!photograph || photograph.state === 'pending' || photograph.state === 'ready') return
+  await setState(photographId, { state: 'reading', failure: null })
+  try {
+    const original = await getObject(photograph.objectKey)
+    if (!original) {
+      throw new PhotographError('empty', 'Its file is gone from the picture store. Add it again.')
+    }
+    const { image, width, height } = await decodePhotograph(original)
+    const colors = readPhotographColors(image)
+    // The line's revision before its shades: a change in between leaves the reading marked stale.
+    const line = await Line.findByPk(photograph.lineId, { rejectOnEmpty: true })
+    const shades = await listShadesToMatch(line)
+    const reading = {
+      brandId: photograph.brandId,
+      photographId,
+      cells: colors.cells,
+      cellMap: await compress(colors.cellMap),
+      mapWidth: colors.width,
+      mapHeight: colors.height,
+      striking: strikingColors(image),
+      matches: computeMatches(colors.cells, shades),
+      shadesRevision: line.shadesRevision,
+    }
+    const derivatives = await makeCopies(photograph, original, 'webp')
+    await inTransaction(async (transaction) => {
+      const [changed] = await setState(
+        photographId,
+        { state: 'ready', failure: null, width, height, derivatives },
+        transaction,
+      )
+      // Deleted meanwhile: nothing to keep.
+      if (changed === 0) return
+      await Reading.upsert(reading, { conflictFields: ['photographId'], transaction })
+      await enqueue('copy-photograph', { photographId }, transaction)
+    })
+  } catch (error) {
+    if (!isAboutThePicture(error)) throw error
+    await failReading(photographId, error.message)
+  }
+}
+
+/** Says why a photograph could not be read. */
+export async function failReading(photographId: string, failure: string): Promise<void> {
+  await setState(photographId, { state: 'failed', failure })
+}
+
+/** The work of the job `copy-photograph`: the copies in the slower, smaller format. */
+export async function copyPhotograph(photographId: string): Promise<void> {
+  const photograph = await Photograph.findByPk(photographId)
+  if (photograph?.state !== 'ready') return
+  const original = await getObject(photograph.objectKey)
+  if (!original) return
+  const copies = await makeCopies(photograph, original, 'avif')
+  const others = photograph.derivatives.filter(({ format }) => format !== 'avif')
+  await Photograph.update(
+    { derivatives: [...others, ...copies] },
+    { where: { id: photographId, state: 'ready', sha256: photograph.sha256 } },
+  )
+}
+
+function setState(
+  photographId: string,
+  values: Partial<Photograph['_creationAttributes']>,
+  transaction: Transaction | null = null,
+): Promise<[number]> {
+  return Photograph.update(values, {
+    where: { id: photographId, state: { [Op.ne]: 'pending' } },
+    transaction,
+  })
+}
+
+async function listShadesToMatch({ brandId, id: lineId }: Line) {
+  const shades = await Shade.findAll({
+    attributes: ['id', 'labL', 'labA', 'labB'],
+    where: { brandId, lineId, ...MATCHABLE },
+    order: BY_POSITION,
+  })
+  return shades.map(({ id, labL, labA, labB }) => ({ id, lab: [labL, labA, labB] as const }))
+}
+
+const isAboutThePicture = (error: unknown): error is PhotographError | RangeError =>
+  error instanceof PhotographError || error instanceof RangeError

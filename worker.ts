@@ -1,0 +1,59 @@
+import type PgBoss from 'pg-boss'
+
+import { createBoss } from '@/lib/jobs/boss'
+import { HANDLERS, SCHEDULES, type JobHandler } from '@/lib/jobs/handlers'
+import { QUEUES, type JobName } from '@/lib/jobs/queue'
+import { logger } from '@/lib/logger'
+import { warmUpReading } from '@/lib/photographs/warm-up'
+import { sequelize } from '@/models'
+
+/** How long jobs under way may take to end once the process is told to stop, in milliseconds. */
+const GRACE = 20_000
+
+async function workOff<Name extends JobName>(boss: PgBoss, name: Name): Promise<void> {
+  const handle = HANDLERS[name] as JobHandler<JobName>
+  await boss.work<object>(
+    name,
+    { batchSize: 1, pollingIntervalSeconds: 0.5, includeMetadata: true },
+    async ([job]) => {
+      const started = performance.now()
+      const log = logger().child({ job: job!.name, id: job!.id, data: job!.data })
+      try {
+        const isLastTry = job!.retryCount >= QUEUES[name].retryLimit
+        const result = await handle(job!.data as never, { isLastTry })
+        log.info({ result, ms: Math.round(performance.now() - started) }, 'job done')
+      } catch (error) {
+        log.warn({ err: error, retryCount: job!.retryCount }, 'job failed')
+        throw error
+      }
+    },
+  )
+}
+
+/** The job process: takes work from every queue until it is told to stop. */
+async function main(): Promise<void> {
+  const boss = createBoss({ supervise: true })
+  boss.on('error', (error) => logger().error({ err: error }, 'queue'))
+  await boss.start()
+  await warmUpReading()
+  for (const name of Object.keys(QUEUES) as JobName[]) await workOff(boss, name)
+  for (const [name, cron] of Object.entries(SCHEDULES)) await boss.schedule(name, cron)
+  logger().info('jobs ready')
+
+  let stopping = false
+  const stop = async () => {
+    if (stopping) return
+    stopping = true
+    setTimeout(() => process.exit(1), GRACE + 2_000).unref()
+    await boss.stop({ graceful: true, timeout: GRACE })
+    await sequelize().close()
+    process.exit(0)
+  }
+  for (const signal of ['SIGTERM', 'SIGINT'] as const) process.on(signal, () => void stop())
+}
+
+// Whatever starts this process starts it again.
+main().catch((error: unknown) => {
+  logger().fatal({ err: error }, 'jobs stopped')
+  process.exit(1)
+})
