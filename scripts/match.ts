@@ -43,8 +43,11 @@ export function readLine(path: string): MatchShade[] {
 /** A reading as it is printed: shade numbers instead of ids, and no map of the cells. */
 function present(reading: Match | NoMatch) {
   if (!isMatch(reading)) return reading
-  const { places, assignment: _, ...rest } = reading
-  return { ...rest, places: places.map(({ shadeId, ...place }) => ({ shade: shadeId, ...place })) }
+  return {
+    ...reading,
+    assignment: undefined,
+    places: reading.places.map(({ shadeId, ...place }) => ({ shade: shadeId, ...place })),
+  }
 }
 
 async function matchFile(path: string, line: MatchShade[], wishes: MatchWishes) {

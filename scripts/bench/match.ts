@@ -196,17 +196,40 @@ const farness = ({ cells }: PhotographColors, labs: Lab[]): number =>
     0,
   )
 
+/** What no five shades of the line can go below: mean ΔE00 alone minimised, without any wish. */
+function leastFarness({ cells }: PhotographColors, line: readonly MatchShade[]): number {
+  const options = line.length
+  const cost = new Float64Array(options * cells.length)
+  line.forEach(({ lab }, s) =>
+    cells.forEach((cell, i) => {
+      cost[s * cells.length + i] = cell.area * deltaE00(lab, cell.lab)
+    }),
+  )
+  return solveChoice({
+    cells: cells.length,
+    options,
+    cost,
+    unary: new Float64Array(options),
+    conflicts: new Uint8Array(options * options),
+    count: 5,
+    locked: [],
+    excluded: [],
+  })!.objective
+}
+
 async function againstVibrant(
   photos: Photograph[],
   lines: [MatchShade[], MatchShade[]],
 ): Promise<Figure[]> {
   const ratios: [number[], number[]] = [[], []]
+  const floors: [number[], number[]] = [[], []]
   const speeds: number[] = []
   for (const { bytes, colors, megapixels } of photos) {
     const vibrant = await vibrantFive(bytes, lines)
     lines.forEach((line, at) => {
-      const ours = farness(colors, labsOf(trueFive(colors, line), line))
-      ratios[at]!.push(ours / farness(colors, vibrant.labs[at]!))
+      const theirs = farness(colors, vibrant.labs[at]!)
+      ratios[at]!.push(farness(colors, labsOf(trueFive(colors, line), line)) / theirs)
+      floors[at]!.push(leastFarness(colors, line) / theirs)
     })
     if (megapixels >= 4) {
       const runs: number[] = []
@@ -221,7 +244,7 @@ async function againstVibrant(
   }
   const figure = (at: 0 | 1, bar: number): Figure => ({
     what: `ΔE00 against node-vibrant’s nearest shades, ${lines[at].length} shades`,
-    value: `mean ratio ${mean(ratios[at]).toFixed(3)}, worst ${Math.max(...ratios[at]).toFixed(3)}`,
+    value: `mean ratio ${mean(ratios[at]).toFixed(3)} (any five: ≥ ${mean(floors[at]).toFixed(3)}), worst ${Math.max(...ratios[at]).toFixed(3)}`,
     bar: `mean ≤ ${bar}, none over 1.02`,
     met: mean(ratios[at]) <= bar && Math.max(...ratios[at]) <= 1.02,
   })
