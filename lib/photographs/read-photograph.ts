@@ -56,7 +56,11 @@ export async function readPhotograph(photographId: string): Promise<void> {
       )
       // Deleted meanwhile: nothing to keep.
       if (changed === 0) return
-      await Reading.upsert(reading, { conflictFields: ['photographId'], transaction })
+      await Reading.bulkCreate([reading], {
+        conflictAttributes: ['photographId'],
+        updateOnDuplicate: [...(Object.keys(reading) as (keyof typeof reading)[]), 'updatedAt'],
+        transaction,
+      })
       await enqueue('copy-photograph', { photographId }, transaction)
     })
   } catch (error) {
