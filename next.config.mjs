@@ -4,6 +4,7 @@ export default {
   distDir: process.env.WOADMAP_DIST_DIR ?? '.next',
   poweredByHeader: false,
   reactStrictMode: true,
+  devIndicators: false,
   typedRoutes: true,
   // `npm test` and `npm run typecheck` check types; a first start need not wait for it again.
   typescript: { ignoreBuildErrors: true },

@@ -160,7 +160,7 @@ export function LineForm(props: LineFormProps) {
           <Field label="Length of a ball" required className="grow" error={error('length')}>
             <Input inputMode="decimal" {...register('length')} />
           </Field>
-          <Field label="Unit" className="w-28" error={error('lengthUnit')}>
+          <Field label="Unit" className="w-32" error={error('lengthUnit')}>
             <Select {...register('lengthUnit')}>
               <option value="m">metres</option>
               <option value="yd">yards</option>

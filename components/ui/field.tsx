@@ -86,6 +86,6 @@ export const controlClass = (className?: string): string =>
   cn(
     'border-rule bg-sheet text-ink w-full min-w-0 rounded border px-3 py-2 text-base max-md:text-[1rem]',
     'hover:border-ink focus-visible:border-focus focus-visible:outline-offset-0',
-    'aria-invalid:border-ink aria-invalid:border-2 disabled:bg-wash disabled:text-ink-faint read-only:bg-wash',
+    'aria-invalid:border-ink aria-invalid:border-2 disabled:bg-wash disabled:text-ink-faint [&:is(input,textarea):read-only]:bg-wash',
     className,
   )
