@@ -6,6 +6,8 @@ import { LinkButton } from '@/components/ui/link-button'
 import { SignOutButton } from '@/components/people/sign-out-button'
 import { getPerson } from '@/lib/auth/get-actor'
 
+import { signOutAction } from './(studio)/actions'
+
 /** The front door: who is signed in goes on to their brand. */
 export default async function FrontDoor() {
   const person = await getPerson()
@@ -14,7 +16,11 @@ export default async function FrontDoor() {
   if (person) {
     return (
       <PlainPage>
-        <EmptyState heading="h1" title="You belong to no brand yet" action={<SignOutButton />}>
+        <EmptyState
+          heading="h1"
+          title="You belong to no brand yet"
+          action={<SignOutButton signOut={signOutAction} />}
+        >
           <p>Once a brand’s owner has taken you in, its lines stand here.</p>
         </EmptyState>
       </PlainPage>

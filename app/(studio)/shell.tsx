@@ -6,6 +6,8 @@ import type { Actor } from '@/lib/auth/actor'
 import { getPerson } from '@/lib/auth/get-actor'
 import type { LineChapters } from '@/lib/lines/present'
 
+import { signOutAction } from './actions'
+
 const ROLE_WORDS = {
   owner: 'Owner',
   marketer: 'Marketer',
@@ -32,7 +34,7 @@ export async function Shell({
         href: `/${brandSlug}`,
       }))}
       person={{ name: actor.personName, role: ROLE_WORDS[actor.role] }}
-      signOut={<SignOutButton />}
+      signOut={<SignOutButton signOut={signOutAction} />}
       {...chapters}
     >
       {children}

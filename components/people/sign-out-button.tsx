@@ -1,24 +1,12 @@
-'use client'
+import { SubmitButton } from '@/components/ui/submit-button'
 
-import { signOut } from 'next-auth/react'
-import { useState } from 'react'
-
-import { Button } from '@/components/ui/button'
-
-/** Ends the session here and on the server, then shows the sign-in page. */
-export function SignOutButton() {
-  const [pending, setPending] = useState(false)
+/** Ends the session here and on the server. */
+export function SignOutButton({ signOut }: { signOut: () => Promise<void> }) {
   return (
-    <Button
-      variant="quiet"
-      size="small"
-      pending={pending}
-      onClick={() => {
-        setPending(true)
-        signOut({ callbackUrl: '/sign-in' }).catch(() => setPending(false))
-      }}
-    >
-      Sign out
-    </Button>
+    <form action={signOut}>
+      <SubmitButton variant="quiet" size="small">
+        Sign out
+      </SubmitButton>
+    </form>
   )
 }

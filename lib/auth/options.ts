@@ -4,7 +4,7 @@ import CredentialsProvider from 'next-auth/providers/credentials'
 import { env } from '@/lib/env'
 import { signInSchema } from '@/lib/people/schema'
 
-import { endSession, openSession, SESSION_LIFETIME } from './sessions'
+import { openSession, SESSION_LIFETIME } from './sessions'
 
 declare module 'next-auth' {
   interface User {
@@ -46,11 +46,6 @@ export function authOptions(): NextAuthOptions {
         expires: session.expires,
         sessionId: token.sessionId ?? '',
       }),
-    },
-    events: {
-      signOut: async ({ token }) => {
-        if (token.sessionId) await endSession(token.sessionId)
-      },
     },
   }
 }

@@ -1,0 +1,86 @@
+import { expect, test, type Page } from '@playwright/test'
+import pg from 'pg'
+
+import { BRAND, signIn } from './support/accounts'
+
+async function fillLine(page: Page, name: string) {
+  await page.goto(`/${BRAND}/lines/new`)
+  await page.getByLabel('Name', { exact: true }).fill(name)
+  await page.getByLabel('Fibre 1', { exact: true }).fill('wool')
+  await page.getByLabel('Per cent of fibre 1').fill('100')
+  const numbers = {
+    Ply: '3',
+    'Net weight of a ball, g': '100',
+    'Length of a ball': '225',
+    'Needle, mm': '4',
+    'Stitches to 10 cm': '22',
+    'Rows to 10 cm': '30',
+    'Price of a ball': '21.50',
+  }
+  for (const [label, value] of Object.entries(numbers)) await page.getByLabel(label).fill(value)
+}
+
+async function database() {
+  const client = new pg.Client({ connectionString: process.env.DATABASE_URL })
+  await client.connect()
+  return client
+}
+
+const countLines = async (client: pg.Client, name: string) =>
+  (await client.query('SELECT count(*)::int AS n FROM lines WHERE name = $1', [name])).rows[0].n
+
+test('the database going away during a save is told, keeps the form, and makes one row after all', async ({
+  page,
+}) => {
+  const name = 'Line of the lost connection'
+  await signIn(page, 'owner')
+  await fillLine(page, name)
+  const client = await database()
+  try {
+    await client.query('BEGIN; LOCK TABLE lines IN EXCLUSIVE MODE')
+    await page.getByRole('button', { name: 'Make line' }).click()
+    const waiting = `SELECT count(*)::int AS n FROM pg_stat_activity
+      WHERE wait_event_type = 'Lock' AND application_name = 'woadmap'`
+    await expect.poll(async () => (await client.query(waiting)).rows[0].n).toBeGreaterThan(0)
+    await client.query(`SELECT pg_terminate_backend(pid) FROM pg_stat_activity
+      WHERE application_name = 'woadmap' AND pid <> pg_backend_pid()`)
+    await client.query('ROLLBACK')
+    const told = page.getByRole('alert').filter({ hasText: 'database did not answer' })
+    await expect(told).toBeVisible()
+    await expect(page.getByLabel('Name', { exact: true })).toHaveValue(name)
+    expect(await countLines(client, name)).toBe(0)
+    await page.getByRole('button', { name: 'Make line' }).click()
+    await expect(page).toHaveURL(/\/lines\/line-of-the-lost-connection\/shades/)
+    expect(await countLines(client, name)).toBe(1)
+  } finally {
+    await client.end()
+  }
+})
+
+test('a save whose answer is lost makes one row, and saying it again gives that one', async ({
+  page,
+}) => {
+  const name = 'Line of the lost answer'
+  await signIn(page, 'owner')
+  await fillLine(page, name)
+  const client = await database()
+  try {
+    // The server does its work; the browser never hears of it.
+    await page.route('**/lines/new', async (route) => {
+      if (route.request().method() !== 'POST') return route.fallback()
+      await route.fetch()
+      await route.abort('connectionreset')
+    })
+    await page.getByRole('button', { name: 'Make line' }).click()
+    await expect(
+      page.getByRole('alert').filter({ hasText: 'Nothing you typed is lost' }),
+    ).toBeVisible()
+    expect(await countLines(client, name)).toBe(1)
+    await page.unroute('**/lines/new')
+    await page.getByRole('button', { name: 'Make line' }).click()
+    await expect(page).toHaveURL(/\/lines\/line-of-the-lost-answer\/shades/)
+    expect(await countLines(client, name)).toBe(1)
+  } finally {
+    await client.end()
+  }
+})

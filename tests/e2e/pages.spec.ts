@@ -1,0 +1,78 @@
+import { gzipSync } from 'node:zlib'
+
+import AxeBuilder from '@axe-core/playwright'
+import { expect, test, type Page } from '@playwright/test'
+
+import { signIn, type Who } from './support/accounts'
+import { PAGES } from './support/pages'
+
+const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']
+const ROLES: readonly Who[] = ['owner', 'marketer', 'designer', 'dyer']
+/** Bytes of script, gzipped, before a page answers. */
+const FIRST_LOAD = 200_000
+
+/** Addresses by the name of their page, looked up once as the owner. */
+const addresses = new Map<string, string>()
+
+test.beforeAll(async ({ browser }) => {
+  const page = await browser.newPage()
+  await signIn(page, 'owner')
+  for (const { name, find } of PAGES) addresses.set(name, await find(page))
+  await page.close()
+})
+
+async function violationsOf(page: Page): Promise<string[]> {
+  const { violations } = await new AxeBuilder({ page }).withTags(WCAG).analyze()
+  return violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(' | ')}`)
+}
+
+test('the pages before signing in are accessible', async ({ page }) => {
+  for (const address of ['/', '/sign-in']) {
+    await page.goto(address)
+    await expect(page.getByRole('heading', { level: 1 })).toBeVisible()
+    expect(await violationsOf(page), address).toEqual([])
+  }
+})
+
+for (const role of ROLES) {
+  test(`as ${role}, every page opens or says why not, is accessible, and fits a small phone`, async ({
+    page,
+  }) => {
+    test.setTimeout(240_000)
+    const problems: string[] = []
+    page.on('pageerror', (error) => problems.push(error.message))
+    await signIn(page, role)
+    for (const { name, roles } of PAGES) {
+      const address = addresses.get(name)!
+      await page.setViewportSize({ width: 1280, height: 900 })
+      const response = await page.goto(address)
+      expect(response!.status(), `${name} as ${role}`).toBe(roles.includes(role) ? 200 : 403)
+      await expect(page.getByRole('heading', { level: 1 }), name).toBeVisible()
+      expect(await violationsOf(page), `${name} as ${role}`).toEqual([])
+      await page.setViewportSize({ width: 320, height: 640 })
+      const overflow = await page.evaluate(
+        () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
+      )
+      expect(overflow, `${name} at 320 px`).toBeLessThanOrEqual(0)
+    }
+    expect(problems).toEqual([])
+  })
+}
+
+test('no page needs more than 200 kB of script, gzipped, to start', async ({ page, request }) => {
+  test.setTimeout(120_000)
+  await signIn(page, 'owner')
+  const sizes = new Map<string, number>()
+  for (const { name } of PAGES) {
+    const html = await (await page.request.get(addresses.get(name)!)).text()
+    const sources = [...html.matchAll(/<script[^>]+src="([^"]+)"/g)].map(([, source]) => source!)
+    expect(sources.length, name).toBeGreaterThan(0)
+    let total = 0
+    for (const source of new Set(sources)) {
+      const size = sizes.get(source) ?? gzipSync(await (await request.get(source)).body()).length
+      sizes.set(source, size)
+      total += size
+    }
+    expect(total, `${name}: ${Math.round(total / 1000)} kB`).toBeLessThanOrEqual(FIRST_LOAD)
+  }
+})

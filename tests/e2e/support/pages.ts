@@ -1,0 +1,51 @@
+import { expect, type Page } from '@playwright/test'
+
+import { BRAND, LINE, type Who } from './accounts'
+
+const STUDIO: readonly Who[] = ['owner', 'marketer', 'designer']
+const EDITORS: readonly Who[] = ['owner', 'designer']
+const EVERYBODY: readonly Who[] = [...STUDIO, 'dyer']
+
+/** A page of the studio and the roles it opens for. */
+export interface StudioPage {
+  name: string
+  roles: readonly Who[]
+  /** Its address, found by following the lists where it names a row. */
+  find: (page: Page) => Promise<string> | string
+}
+
+const firstLink = (list: string, address: RegExp) => async (page: Page) => {
+  await page.goto(`${LINE}/${list}`)
+  const links = page.locator('main a')
+  await expect(links.first()).toBeVisible()
+  const addresses = await links.evaluateAll((all) => all.map((a) => a.getAttribute('href') ?? ''))
+  const found = addresses.find((href) => address.test(href))
+  if (!found) throw new Error(`No link like ${address} on ${list}.`)
+  return found
+}
+const ID = '[0-9a-f-]{36}'
+
+/** Every page of the studio. */
+export const PAGES: readonly StudioPage[] = [
+  { name: 'lines', roles: EVERYBODY, find: () => `/${BRAND}` },
+  { name: 'a new line', roles: ['owner'], find: () => `/${BRAND}/lines/new` },
+  { name: 'a line', roles: EVERYBODY, find: () => LINE },
+  { name: 'changing a line', roles: ['owner'], find: () => `${LINE}/edit` },
+  { name: 'the sample book', roles: EVERYBODY, find: () => `${LINE}/shades` },
+  { name: 'the shade table', roles: EVERYBODY, find: () => `${LINE}/shades?view=table` },
+  { name: 'a shade', roles: EVERYBODY, find: firstLink('shades', new RegExp(`/shades/${ID}`)) },
+  { name: 'a new shade', roles: EDITORS, find: () => `${LINE}/shades/new` },
+  { name: 'importing shades', roles: EDITORS, find: () => `${LINE}/shades/import` },
+  { name: 'photographs', roles: STUDIO, find: () => `${LINE}/photographs` },
+  {
+    name: 'a photograph',
+    roles: STUDIO,
+    find: firstLink('photographs', new RegExp(`/photographs/${ID}`)),
+  },
+  { name: 'combinations', roles: STUDIO, find: () => `${LINE}/combinations` },
+  {
+    name: 'a combination',
+    roles: STUDIO,
+    find: firstLink('combinations', new RegExp(`/combinations/${ID}`)),
+  },
+]
