@@ -1,0 +1,44 @@
+import { chromium, type Page } from '@playwright/test'
+
+import accounts from '../seeders/demo-accounts.json' with { type: 'json' }
+import { chromium as launch } from '../tests/e2e/support/chromium'
+
+/**
+ * Takes the pictures of the README from a running product with the demo in it:
+ * `npm run pictures [-- http://localhost:3000]`.
+ */
+const origin = process.argv[2] ?? 'http://localhost:3000'
+const LINE = '/teasel-and-tarn/lines/heronsway-dk'
+const folder = new URL('../docs/pictures/', import.meta.url).pathname
+
+const browser = await chromium.launch(launch)
+const page = await browser.newPage({ baseURL: origin, viewport: { width: 1440, height: 1000 } })
+const owner = accounts.find(({ role }) => role === 'owner')!
+await page.goto('/sign-in')
+await page.getByLabel('E-mail').fill(owner.email)
+await page.getByLabel('Password').fill(owner.password)
+await page.getByRole('button', { name: 'Sign in' }).click()
+await page.waitForURL('**/teasel-and-tarn')
+
+async function take(name: string, address: string, of: Page = page): Promise<void> {
+  await of.goto(address, { waitUntil: 'networkidle' })
+  // The bands have wound on by then.
+  await of.waitForTimeout(1_000)
+  await of.screenshot({ path: `${folder}${name}.png` })
+  console.log(`${name}.png`)
+}
+
+async function first(chapter: string, text: string): Promise<string> {
+  await page.goto(`${LINE}/${chapter}`)
+  const link = page.locator('main').getByRole('link', { name: text }).first()
+  return (await link.getAttribute('href'))!
+}
+
+await take('sample-book', `${LINE}/shades`)
+await take('shade-table', `${LINE}/shades?view=table`)
+const photograph = await first('photographs', 'The tarn in bracken time')
+await take('match', photograph)
+await take('combination', await first('combinations', 'Low Sun, High Bracken'))
+await page.setViewportSize({ width: 390, height: 844 })
+await take('match-phone', photograph)
+await browser.close()
