@@ -113,7 +113,7 @@ describe('the exact solver', () => {
     // Both outcomes were really met.
     expect(impossible).toBeGreaterThan(100)
     expect(impossible).toBeLessThan(2000)
-  })
+  }, 60_000)
 
   test('equals HiGHS, an independent solver, on three dozen of middling size', async () => {
     const highs = await loadHighs()
