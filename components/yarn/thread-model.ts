@@ -22,12 +22,12 @@ export interface Veil {
 export const VEILS: readonly Veil[] = [
   { tone: 'black', alpha: 0.18, at: 0.8, width: 0.36 },
   { tone: 'white', alpha: 0.2, at: 0.34, width: 0.34, turn: { from: 0.3, to: 0.86 } },
-  { tone: 'black', alpha: 0.2, at: 0.48, width: 0.88, turn: { from: 0, to: 0.24 } },
-  { tone: 'black', alpha: 0.42, at: 0.91, width: 0.22 },
+  { tone: 'black', alpha: 0.18, at: 0.48, width: 0.88, turn: { from: 0, to: 0.24 } },
+  { tone: 'black', alpha: 0.38, at: 0.91, width: 0.22 },
 ]
 
 /** Every third thread lies a little deeper, every third a little higher: this veil says so. */
-export const UNEVEN = 0.055
+export const UNEVEN = 0.05
 
 /** The length of one turn of the plies, in thread heights. */
 export const TURN = 1.15

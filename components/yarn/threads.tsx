@@ -1,3 +1,4 @@
+import { hexToLab } from '@/lib/color/srgb'
 import { threadColors, TURN, VEILS, type ThreadColors } from './thread-model'
 
 /** Where a block of threads lies; lengths in the picture's own units. */
@@ -57,11 +58,22 @@ function turns(block: ThreadBlock, at: number, rows: readonly number[], turn: nu
  */
 export function Threads({ hex, block }: { hex: string; block: ThreadBlock }) {
   const colors = threadColors(hex, block.pitch)
+  const lightness = hexToLab(hex)[0]
   const { x, y, width, pitch, count, rise } = block
   const rows = Array.from({ length: count }, (_, row) => row)
   const height = count * pitch
   return (
     <>
+      {lightness > 90 || lightness < 10 ? (
+        // Else white yarn would vanish on the white ground, and black on the black one.
+        <path
+          data-rim=""
+          d={lines(block, 0.5, rows)}
+          stroke="var(--yarn-card-edge, #c4c2be)"
+          strokeWidth={round(pitch + 1.2)}
+          strokeLinecap="round"
+        />
+      ) : null}
       <path
         d={lines(block, 0.5, rows)}
         stroke={colors.base}

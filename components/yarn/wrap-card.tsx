@@ -72,12 +72,11 @@ export function WrapCard({
   const left = margin + 3
   const blockWidth = width - left - tooth * 0.7 - (compact ? 2 : 4)
   const top = head + (height - 2 * head - shape.threads * pitch) / 2 + rise / 2
-  let wound = 0
-  const blocks = bands.map((band, index) => {
-    const offset = wound
-    wound += counts[index] ?? 0
-    return { band, count: counts[index] ?? 0, offset }
-  })
+  const blocks = bands.map((band, index) => ({
+    band,
+    count: counts[index] ?? 0,
+    offset: counts.slice(0, index).reduce((sum, count) => sum + count, 0),
+  }))
   return (
     <svg
       viewBox={`0 0 ${width} ${height}`}

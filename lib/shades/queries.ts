@@ -29,6 +29,9 @@ export const BY_POSITION: [string, 'ASC'][] = [
   ['id', 'ASC'],
 ]
 
+/** What a photograph may be matched to: every shade that is still made, or will be. */
+export const MATCHABLE = { status: { [Op.ne]: 'retired' } }
+
 const VIEW = { attributes: [...SHADE_VIEW_COLUMNS] as string[], raw: true } as const
 const COLOR_COLUMNS = ['id', 'labL', 'labA', 'labB'] as string[]
 
@@ -43,7 +46,7 @@ export async function listMatchShades(actor: Actor, lineId: string): Promise<Sha
   authorize(actor, canReadShades)
   const rows = await Shade.findAll({
     ...VIEW,
-    where: { brandId: actor.brandId, lineId, status: { [Op.ne]: 'retired' } },
+    where: { brandId: actor.brandId, lineId, ...MATCHABLE },
     order: BY_POSITION,
   })
   return rows.map(presentShade)

@@ -1,0 +1,111 @@
+'use client'
+
+import {
+  columnFilteringFeature,
+  createColumnHelper,
+  rowPaginationFeature,
+  rowSelectionFeature,
+  rowSortingFeature,
+  tableFeatures,
+} from '@tanstack/react-table'
+
+import { Checkbox } from '@/components/ui/checkbox'
+import type { ShadeView } from '@/lib/shades/present'
+
+import {
+  NameCell,
+  NumberCell,
+  PlaceCell,
+  ReadingCell,
+  SampleCell,
+  StatusCell,
+  TermsCell,
+} from './shade-cells'
+
+/** What the table does; sorting, filtering and paging are the server's, by the address. */
+export const features = tableFeatures({
+  rowSortingFeature,
+  columnFilteringFeature,
+  rowPaginationFeature,
+  rowSelectionFeature,
+})
+
+const helper = createColumnHelper<typeof features, ShadeView>()
+
+/** Columns whose cells stand at the right. */
+export const NUMBER_COLUMNS: readonly string[] = ['L', 'a', 'b', 'order']
+
+/** The choice of rows, for those who edit. */
+const selectColumn = helper.display({
+  id: 'select',
+  header: ({ table }) => (
+    <Checkbox
+      hideLabel
+      label="Choose all shades of this page"
+      checked={table.getIsAllRowsSelected()}
+      onChange={table.getToggleAllRowsSelectedHandler()}
+    />
+  ),
+  cell: ({ row }) => (
+    <Checkbox
+      hideLabel
+      label={`Choose ${row.original.label}`}
+      checked={row.getIsSelected()}
+      onChange={row.getToggleSelectedHandler()}
+    />
+  ),
+})
+
+/** The columns of the shades; their ids are what the address sorts by. */
+function shadeColumns(edits: boolean) {
+  const sorted = { sortDescFirst: false } as const
+  const reading = (of: 'L' | 'a' | 'b', at: 0 | 1 | 2) =>
+    helper.accessor((shade) => shade.lab[at], {
+      ...sorted,
+      id: of,
+      header: `${of}*`,
+      cell: ({ row }) => <ReadingCell shade={row.original} edits={edits} of={of} />,
+    })
+  return helper.columns([
+    helper.display({
+      id: 'sample',
+      header: 'Sample',
+      cell: ({ row }) => <SampleCell shade={row.original} />,
+    }),
+    helper.accessor('number', {
+      ...sorted,
+      header: 'No.',
+      cell: ({ row }) => <NumberCell shade={row.original} edits={edits} />,
+    }),
+    helper.accessor('name', {
+      ...sorted,
+      header: 'Name',
+      cell: ({ row }) => <NameCell shade={row.original} edits={edits} />,
+    }),
+    helper.accessor('status', {
+      ...sorted,
+      header: 'Status',
+      cell: ({ row }) => <StatusCell shade={row.original} edits={edits} />,
+    }),
+    reading('L', 0),
+    reading('a', 1),
+    reading('b', 2),
+    helper.display({
+      id: 'terms',
+      header: 'Read under',
+      cell: ({ row }) => <TermsCell shade={row.original} />,
+    }),
+    helper.accessor('position', {
+      ...sorted,
+      id: 'order',
+      header: 'Place',
+      cell: ({ row }) => <PlaceCell shade={row.original} edits={edits} />,
+    }),
+  ])
+}
+
+/** The columns for those who read. */
+export const READ_COLUMNS = shadeColumns(false)
+
+/** The columns for those who edit. */
+export const EDIT_COLUMNS = helper.columns([selectColumn, ...shadeColumns(true)])

@@ -1,0 +1,21 @@
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { inTransaction } from '@/models'
+
+import { canDeleteCombination } from './policy'
+import { loadCombination } from './queries'
+import type { CombinationIdInput } from './schema'
+
+/**
+ * Takes a combination out of every list; `restoreCombination` brings it back.
+ * @throws NotFoundError
+ */
+export async function deleteCombination(
+  actor: Actor,
+  { combinationId }: CombinationIdInput,
+): Promise<void> {
+  authorize(actor, canDeleteCombination)
+  await inTransaction(async (transaction) => {
+    const combination = await loadCombination(actor, combinationId, { transaction })
+    await combination.destroy({ transaction })
+  })
+}

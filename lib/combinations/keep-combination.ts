@@ -1,0 +1,74 @@
+import { randomUUID } from 'node:crypto'
+
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { NotFoundError } from '@/lib/errors'
+import { getLine } from '@/lib/lines/queries'
+import { Combination, CombinationPlace, inTransaction, Photograph, Shade } from '@/models'
+
+import { canKeepCombination } from './policy'
+import type { KeepCombinationInput } from './schema'
+
+/**
+ * Keeps five shades of a line, in the order given, as they were matched to a photograph. The same
+ * `requestKey` again gives the combination it made the first time.
+ * @throws NotFoundError when the photograph or one of the shades is not in the line (any more)
+ */
+export async function keepCombination(
+  actor: Actor,
+  { lineSlug, photographId, reading, title, places, requestKey }: KeepCombinationInput,
+): Promise<Combination> {
+  authorize(actor, canKeepCombination)
+  const { brandId } = actor
+  return inTransaction(async (transaction) => {
+    const line = await getLine(actor, lineSlug, transaction)
+    const inLine = { brandId, lineId: line.id }
+    const photograph = await Photograph.findOne({
+      where: { ...inLine, id: photographId },
+      attributes: ['id'],
+      transaction,
+    })
+    if (!photograph) throw new NotFoundError()
+    const shadeIds = places.map(({ shadeId }) => shadeId)
+    const shades = await Shade.count({ where: { ...inLine, id: shadeIds }, transaction })
+    if (shades !== places.length) {
+      throw new NotFoundError(
+        'One of these five is not a shade of the line any more. Nothing was kept: read the photograph again, then keep the five it finds.',
+      )
+    }
+    const id = randomUUID()
+    // Waits for another submit of the same form, then leaves its row alone.
+    await Combination.bulkCreate(
+      [
+        {
+          ...inLine,
+          id,
+          title,
+          photographId,
+          reading,
+          createdById: actor.personId,
+          requestKey,
+        },
+      ],
+      { ignoreDuplicates: true, transaction },
+    )
+    const combination = await Combination.findOne({
+      where: { brandId, requestKey },
+      paranoid: false,
+      rejectOnEmpty: true,
+      transaction,
+    })
+    if (combination.id === id) {
+      await CombinationPlace.bulkCreate(
+        places.map(({ shadeId, share }, at) => ({
+          brandId,
+          combinationId: id,
+          place: at + 1,
+          shadeId,
+          share,
+        })),
+        { transaction },
+      )
+    }
+    return combination
+  })
+}

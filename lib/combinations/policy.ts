@@ -1,0 +1,12 @@
+import { allow } from '@/lib/auth/actor'
+
+/** Sees kept combinations. */
+export const canReadCombinations = allow('owner', 'designer', 'marketer')
+/** Keeps five shades as a combination. */
+export const canKeepCombination = allow('owner', 'designer')
+/** Changes a combination's title. */
+export const canRenameCombination = allow('owner', 'designer', 'marketer')
+/** Changes the order of the five. */
+export const canReorderCombination = allow('owner', 'designer')
+/** Deletes a combination, and takes that back. */
+export const canDeleteCombination = allow('owner', 'designer')

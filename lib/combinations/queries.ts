@@ -1,0 +1,110 @@
+import { literal, Op, type Transaction, type WhereOptions } from 'sequelize'
+import { z } from 'zod'
+
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { NotFoundError } from '@/lib/errors'
+import { getLine } from '@/lib/lines/queries'
+import { Combination, CombinationPlace, Person, Photograph, sequelize, Shade } from '@/models'
+
+import { canReadCombinations } from './policy'
+import { COMBINATION_LIMITS, type CombinationFilter } from './schema'
+
+/** A combination with its places, shades and photograph, and the name of who kept it. */
+export interface KeptCombination {
+  combination: Combination
+  /** Null when that person's account is gone. */
+  keptBy: string | null
+}
+
+/** The five places with their shades, deleted ones too, in order; loaded apart from the page. */
+const PLACES = {
+  model: CombinationPlace,
+  as: 'places',
+  separate: true,
+  order: [['place', 'ASC']] as [string, string][],
+  include: [{ model: Shade, as: 'shade', paranoid: false }],
+}
+
+/**
+ * A page of a line's combinations, newest first, of those whose title or one of whose shade names
+ * holds the words searched for. Five queries, however many there are.
+ */
+export async function listCombinations(
+  actor: Actor,
+  lineSlug: string,
+  { q, page }: CombinationFilter,
+): Promise<{ combinations: KeptCombination[]; total: number }> {
+  authorize(actor, canReadCombinations)
+  const line = await getLine(actor, lineSlug)
+  const where: WhereOptions = { brandId: actor.brandId, lineId: line.id }
+  const { rows, count } = await Combination.findAndCountAll({
+    where: q === '' ? where : { [Op.and]: [where, { [Op.or]: [titleHolds(q), shadeHolds(q)] }] },
+    include: [{ model: Photograph, as: 'photograph' }, PLACES],
+    order: [
+      ['createdAt', 'DESC'],
+      ['id', 'ASC'],
+    ],
+    limit: COMBINATION_LIMITS.perPage,
+    offset: (page - 1) * COMBINATION_LIMITS.perPage,
+  })
+  return { combinations: await withNames(rows), total: count }
+}
+
+const pattern = (q: string) => `%${q.replace(/[\\%_]/g, '\\$&')}%`
+
+const titleHolds = (q: string) => ({ title: { [Op.iLike]: pattern(q) } })
+
+const shadeHolds = (q: string) =>
+  literal(`EXISTS (SELECT 1 FROM combination_places AS held
+    JOIN shades AS named ON named.id = held.shade_id
+    WHERE held.combination_id = "Combination"."id"
+      AND named.name ILIKE ${sequelize().escape(pattern(q))})`)
+
+async function withNames(rows: Combination[]): Promise<KeptCombination[]> {
+  const ids = [...new Set(rows.flatMap(({ createdById }) => createdById ?? []))]
+  const people = await Person.findAll({ where: { id: ids }, attributes: ['id', 'name'] })
+  const names = new Map(people.map(({ id, name }) => [id, name]))
+  return rows.map((combination) => ({
+    combination,
+    keptBy: names.get(combination.createdById ?? '') ?? null,
+  }))
+}
+
+/**
+ * One combination of a line, with everything its page shows.
+ * @throws NotFoundError
+ */
+export async function getCombination(
+  actor: Actor,
+  lineSlug: string,
+  combinationId: string,
+): Promise<KeptCombination> {
+  authorize(actor, canReadCombinations)
+  if (!z.uuid().safeParse(combinationId).success) throw new NotFoundError()
+  const line = await getLine(actor, lineSlug)
+  const combination = await Combination.findOne({
+    where: { brandId: actor.brandId, lineId: line.id, id: combinationId },
+    include: [{ model: Photograph, as: 'photograph' }, PLACES],
+  })
+  if (!combination) throw new NotFoundError()
+  const [kept] = await withNames([combination])
+  return kept!
+}
+
+/**
+ * The row alone, for a command. Each command authorises for itself.
+ * @throws NotFoundError
+ */
+export async function loadCombination(
+  actor: Actor,
+  combinationId: string,
+  { transaction, deleted = false }: { transaction: Transaction; deleted?: boolean },
+): Promise<Combination> {
+  const combination = await Combination.findOne({
+    where: { brandId: actor.brandId, id: combinationId },
+    paranoid: !deleted,
+    transaction,
+  })
+  if (!combination) throw new NotFoundError()
+  return combination
+}

@@ -1,0 +1,21 @@
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { inTransaction } from '@/models'
+
+import { canDeleteCombination } from './policy'
+import { loadCombination } from './queries'
+import type { CombinationIdInput } from './schema'
+
+/**
+ * Brings a deleted combination back as it was; one that is not deleted stays as it is.
+ * @throws NotFoundError
+ */
+export async function restoreCombination(
+  actor: Actor,
+  { combinationId }: CombinationIdInput,
+): Promise<void> {
+  authorize(actor, canDeleteCombination)
+  await inTransaction(async (transaction) => {
+    const combination = await loadCombination(actor, combinationId, { transaction, deleted: true })
+    await combination.restore({ transaction })
+  })
+}
