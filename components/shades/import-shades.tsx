@@ -3,6 +3,7 @@
 import { useRouter } from 'next/navigation'
 import { useRef, useState } from 'react'
 
+import { reach } from '@/components/reach'
 import { SheetSection } from '@/components/layout/sheet-header'
 import { Button } from '@/components/ui/button'
 import { LiveRegion } from '@/components/ui/live-region'
@@ -15,7 +16,7 @@ import type { CsvMapping, ReadingTerms } from '@/lib/shades/schema'
 import { ImportColumns } from './import-columns'
 import { ImportRows } from './import-rows'
 import { ImportSource, type CsvSource } from './import-source'
-import { reach, shadesHref, type LinePlace, type ShadesActions } from './shades-actions'
+import { shadesHref, type LinePlace, type ShadesActions } from './shades-actions'
 
 /** A CSV file on its way into a line: chosen, its columns named, looked at, and only then saved. */
 export function ImportShades({

@@ -3,6 +3,7 @@
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 
+import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
 import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
@@ -12,7 +13,7 @@ import { toastDone, toastProblem } from '@/components/ui/toast'
 import { SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/schema'
 
 import { STATUS_WORDS } from './shade-words'
-import { reach, type LinePlace, type ShadesActions } from './shades-actions'
+import { type LinePlace, type ShadesActions } from './shades-actions'
 import { useDeleteShades } from './use-delete-shades'
 
 /** What can be done with the chosen shades of the table, on whichever page they stand. */

@@ -6,6 +6,7 @@ import { useRef, useState } from 'react'
 import { useForm, useWatch, type FieldPath } from 'react-hook-form'
 import { z } from 'zod'
 
+import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
 import { Field, FieldError } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
@@ -28,7 +29,7 @@ import {
 
 import { LiveSample } from './live-sample'
 import { STATUS_WORDS } from './shade-words'
-import { reach, shadesHref, type LinePlace, type ShadesActions } from './shades-actions'
+import { shadesHref, type LinePlace, type ShadesActions } from './shades-actions'
 
 /** What the form holds while it is being filled in. */
 export interface ShadeFormValues {

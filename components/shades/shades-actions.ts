@@ -38,12 +38,3 @@ export interface LinePlace {
 /** Where a line's shades, or a page under them, stand. */
 export const shadesHref = ({ brand, lineSlug }: LinePlace, under = ''): string =>
   `/${brand}/lines/${lineSlug}/shades${under}`
-
-/** What is said when no answer came at all. */
-const UNREACHED =
-  'Woadmap could not be reached. Nothing you typed is lost: check the connection and try again.'
-
-/** Waits for an action; no answer at all is a failure in words like any other. */
-export function reach<Data>(answer: Promise<ActionResult<Data>>): Promise<ActionResult<Data>> {
-  return answer.catch(() => ({ ok: false, code: 'unavailable', message: UNREACHED }))
-}

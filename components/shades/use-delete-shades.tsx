@@ -3,11 +3,12 @@
 import { useRouter } from 'next/navigation'
 import { useState, type ReactNode } from 'react'
 
+import { reach } from '@/components/reach'
 import { ConfirmDialog } from '@/components/ui/confirm-dialog'
 import { toastDone, toastProblem, toastUndo } from '@/components/ui/toast'
 import type { ShadeUses } from '@/lib/shades/present'
 
-import { reach, type LinePlace, type ShadesActions } from './shades-actions'
+import { type LinePlace, type ShadesActions } from './shades-actions'
 
 interface Asked {
   shadeIds: string[]

@@ -6,7 +6,8 @@ import { useEffect, useRef } from 'react'
 import type { ActionResult } from '@/lib/errors'
 import type { ShadeView } from '@/lib/shades/present'
 
-import { reach, type LinePlace, type ShadesActions } from './shades-actions'
+import { reach } from '@/components/reach'
+import { type LinePlace, type ShadesActions } from './shades-actions'
 
 type Change = Omit<Parameters<ShadesActions['update']>[1], 'lineSlug' | 'shadeId' | 'version'>
 

@@ -1,9 +1,14 @@
-import { randomUUID } from 'node:crypto'
-
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { NotFoundError } from '@/lib/errors'
 import { getLine } from '@/lib/lines/queries'
-import { Combination, CombinationPlace, inTransaction, Photograph, Shade } from '@/models'
+import {
+  Combination,
+  CombinationPlace,
+  createOnce,
+  inTransaction,
+  Photograph,
+  Shade,
+} from '@/models'
 
 import { canKeepCombination } from './policy'
 import type { KeepCombinationInput } from './schema'
@@ -35,33 +40,24 @@ export async function keepCombination(
         'One of these five is not a shade of the line any more. Nothing was kept: read the photograph again, then keep the five it finds.',
       )
     }
-    const id = randomUUID()
-    // Waits for another submit of the same form, then leaves its row alone.
-    await Combination.bulkCreate(
-      [
-        {
-          ...inLine,
-          id,
-          title,
-          photographId,
-          reading,
-          createdById: actor.personId,
-          requestKey,
-        },
-      ],
-      { ignoreDuplicates: true, transaction },
-    )
-    const combination = await Combination.findOne({
-      where: { brandId, requestKey },
-      paranoid: false,
-      rejectOnEmpty: true,
+    const made = await createOnce(
+      Combination,
+      {
+        ...inLine,
+        title,
+        photographId,
+        reading,
+        createdById: actor.personId,
+        requestKey,
+      },
       transaction,
-    })
-    if (combination.id === id) {
+    )
+    const { row: combination, created } = made!
+    if (created) {
       await CombinationPlace.bulkCreate(
         places.map(({ shadeId, share }, at) => ({
           brandId,
-          combinationId: id,
+          combinationId: combination.id,
           place: at + 1,
           shadeId,
           share,

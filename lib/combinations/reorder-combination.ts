@@ -19,12 +19,7 @@ export async function reorderCombination(
   const { brandId } = actor
   return inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction })
-    await updateVersioned(
-      Combination,
-      { id: combination.id, brandId, version },
-      {},
-      transaction,
-    )
+    await updateVersioned(Combination, { id: combination.id, brandId, version }, {}, transaction)
     for (const [at, shadeId] of shadeIds.entries()) {
       const [moved] = await CombinationPlace.update(
         { place: at + 1 },

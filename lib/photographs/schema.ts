@@ -1,5 +1,7 @@
 import { z } from 'zod'
 
+import { READING_KINDS } from '@/lib/color/readings'
+
 import { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from './formats'
 
 export { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES }
@@ -171,3 +173,27 @@ export interface PhotographStanding {
   state: PhotographState
   failure: string | null
 }
+
+/** The most ΔE00 that the five can be asked to stand apart. */
+export const MOST_APART = 25
+
+const shadeIds = z
+  .string()
+  .transform((ids) => ids.split(',').filter(Boolean))
+  .pipe(z.array(z.uuid()).max(500))
+  .default([])
+
+/** What a designer asks of a match, as it stands in an address. */
+export const matchWishesSchema = z.object({
+  reading: z.enum(READING_KINDS).default('true'),
+  lock: shadeIds,
+  exclude: shadeIds,
+  apart: z.coerce.number().min(0).max(MOST_APART).optional(),
+})
+/** Parsed wishes. */
+export type MatchWishes = z.output<typeof matchWishesSchema>
+
+/** A photograph in an address, with wishes for its match. */
+export const matchParamsSchema = matchWishesSchema
+  .extend({ photograph: z.string() })
+  .transform(({ photograph, ...wishes }) => ({ photographId: photograph, ...wishes }))
