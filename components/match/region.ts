@@ -1,0 +1,31 @@
+import { NO_CELL } from '@/lib/color/photograph-colors'
+
+/** Which cell each pixel of the small picture belongs to. */
+export interface CellMap {
+  width: number
+  height: number
+  /** One byte a pixel, row by row; NO_CELL where nothing is visible. */
+  cells: Uint8Array
+}
+
+/** The veil over what is not the region: the paper's own white, most of it. */
+const VEIL = [247, 246, 244, 214] as const
+
+/**
+ * A picture that veils everything but the region of one of the five.
+ * @param assignment per cell, the index of its place
+ * @returns `width`×`height` RGBA
+ */
+export function veilOutside(
+  { width, height, cells }: CellMap,
+  assignment: readonly number[],
+  place: number,
+): Uint8ClampedArray<ArrayBuffer> {
+  const veil = new Uint8ClampedArray(width * height * 4)
+  for (let at = 0; at < width * height; at++) {
+    const cell = cells[at]!
+    if (cell !== NO_CELL && assignment[cell] === place) continue
+    veil.set(VEIL, at * 4)
+  }
+  return veil
+}

@@ -1,0 +1,28 @@
+import { WoundSample } from '@/components/yarn/wound-sample'
+import type { ReactNode } from 'react'
+
+import type { MatchShadeView } from './types'
+
+/** A shade offered for a colour, with how far it is and what can be done with it. */
+export function ShadeChoice({
+  shade,
+  deltaE,
+  children,
+}: {
+  shade: MatchShadeView
+  deltaE: number
+  children: ReactNode
+}) {
+  return (
+    <li className="flex flex-wrap items-center gap-x-3 gap-y-1 py-2">
+      <WoundSample hex={shade.hex} className="h-8 w-auto" />
+      <span className="min-w-0 grow">
+        <span className="block font-title leading-tight">{shade.label}</span>
+        <span className="text-sm text-ink-faint">
+          {shade.name ? `No. ${shade.number} · ` : ''}ΔE00 {deltaE.toFixed(1)}
+        </span>
+      </span>
+      <span className="flex gap-1">{children}</span>
+    </li>
+  )
+}

@@ -1,0 +1,58 @@
+'use client'
+
+import { Lock } from 'lucide-react'
+
+import { screenColor } from '@/lib/color/gamut'
+import { nearestShades } from '@/lib/color/match'
+import type { StrikingColor } from '@/lib/color/striking'
+
+import type { MatchShadeView } from './types'
+import type { WishesControl } from './use-wishes'
+
+/** The picture's striking colours; pressing one locks the shade nearest to it. */
+export function StrikingChips({
+  colors,
+  shades,
+  control,
+}: {
+  colors: readonly StrikingColor[]
+  shades: readonly MatchShadeView[]
+  control: WishesControl
+}) {
+  if (colors.length === 0 || shades.length === 0) return null
+  const byId = new Map(shades.map((shade) => [shade.id, shade]))
+  return (
+    <section aria-labelledby="striking" className="print:hidden">
+      <h2 id="striking" className="text-lg">
+        Striking colours
+      </h2>
+      <p className="text-sm text-ink-faint">Press one to lock the shade nearest to it.</p>
+      <ul role="list" className="mt-2 flex flex-wrap gap-2">
+        {colors.map(({ lab }, at) => {
+          const [nearest] = nearestShades(lab, shades, 1)
+          const shade = byId.get(nearest!.shadeId)!
+          const locked = control.wishes.lock.includes(shade.id)
+          return (
+            <li key={at}>
+              <button
+                type="button"
+                aria-pressed={locked}
+                onClick={() => (locked ? control.unlock(shade.id) : control.lock(shade.id))}
+                className="inline-flex min-h-9 items-center gap-2 rounded border border-rule bg-sheet py-1 pr-3 pl-1.5 text-left text-sm hover:border-ink aria-pressed:border-woad aria-pressed:font-semibold pointer-coarse:min-h-11"
+              >
+                <svg width="30" height="24" viewBox="0 0 30 24" aria-hidden="true">
+                  <path d="M1 2h28v20H1z" fill={screenColor(lab).hex} />
+                  <path d="M15 2h14v20H15z" fill={shade.hex} />
+                </svg>
+                <span>
+                  {shade.label} <span className="text-ink-faint">{nearest!.deltaE.toFixed(1)}</span>
+                </span>
+                {locked ? <Lock aria-label="locked" className="size-3.5" /> : null}
+              </button>
+            </li>
+          )
+        })}
+      </ul>
+    </section>
+  )
+}

@@ -1,0 +1,82 @@
+'use client'
+
+import { usePathname, useSearchParams } from 'next/navigation'
+import { useMemo, useState } from 'react'
+
+import { DEFAULT_APART } from '@/lib/color/match'
+import { matchWishesSchema, type MatchWishes } from '@/lib/photographs/schema'
+
+/** What is asked of the match, and the ways to ask for something else. */
+export interface WishesControl {
+  wishes: MatchWishes
+  /** Anything besides which reading is shown. */
+  any: boolean
+  /** The query string that stands for them, empty when nothing is asked. */
+  query: string
+  change: (changes: Partial<MatchWishes>) => void
+  lock: (shadeId: string) => void
+  unlock: (shadeId: string) => void
+  exclude: (shadeId: string) => void
+  allow: (shadeId: string) => void
+  swap: (shadeId: string, forShadeId: string) => void
+  clear: () => void
+  /** Takes the last change back; absent when this page has made none. */
+  undo?: () => void
+}
+
+const without = (ids: readonly string[], id: string) => ids.filter((one) => one !== id)
+const including = (ids: readonly string[], id: string) => [...without(ids, id), id]
+
+/** The wishes as a query string, in one spelling. */
+export function wishesQuery({ reading, lock, exclude, apart }: MatchWishes): string {
+  const query = new URLSearchParams()
+  if (reading !== 'true') query.set('reading', reading)
+  if (lock.length > 0) query.set('lock', lock.join(','))
+  if (exclude.length > 0) query.set('exclude', exclude.join(','))
+  if (apart !== undefined && apart !== DEFAULT_APART) query.set('apart', String(apart))
+  return query.toString()
+}
+
+/**
+ * The wishes of the page's address. Each change is a step of the browser's history, so that going
+ * back undoes it and a reload keeps it.
+ */
+export function useWishes(): WishesControl {
+  const path = usePathname()
+  const search = useSearchParams()
+  const text = search.toString()
+  const wishes = useMemo(() => {
+    const parsed = matchWishesSchema.safeParse(Object.fromEntries(new URLSearchParams(text)))
+    return parsed.success ? parsed.data : matchWishesSchema.parse({})
+  }, [text])
+
+  const [steps, setSteps] = useState(0)
+  const change = (changes: Partial<MatchWishes>) => {
+    const query = wishesQuery({ ...wishes, ...changes })
+    window.history.pushState(null, '', query ? `${path}?${query}` : path)
+    setSteps(steps + 1)
+  }
+  const { reading, lock, exclude } = wishes
+  return {
+    wishes,
+    any: wishesQuery({ ...wishes, reading: 'true' }) !== '',
+    query: wishesQuery(wishes),
+    change,
+    lock: (id) => change({ lock: including(lock, id), exclude: without(exclude, id) }),
+    unlock: (id) => change({ lock: without(lock, id) }),
+    exclude: (id) => change({ exclude: including(exclude, id), lock: without(lock, id) }),
+    allow: (id) => change({ exclude: without(exclude, id) }),
+    swap: (id, forId) =>
+      change({
+        lock: including(without(lock, id), forId),
+        exclude: including(without(exclude, forId), id),
+      }),
+    clear: () => change({ lock: [], exclude: [], apart: undefined, reading }),
+    ...(steps > 0 && {
+      undo: () => {
+        setSteps(steps - 1)
+        window.history.back()
+      },
+    }),
+  }
+}
