@@ -1,0 +1,86 @@
+'use client'
+
+import { Pencil } from 'lucide-react'
+import { useState, type FormEvent, type KeyboardEvent } from 'react'
+
+import { reach } from '@/components/reach'
+import { Button } from '@/components/ui/button'
+import { Field } from '@/components/ui/field'
+import { IconButton } from '@/components/ui/icon-button'
+import { Input } from '@/components/ui/input'
+import { SubmitButton } from '@/components/ui/submit-button'
+import { toastDone } from '@/components/ui/toast'
+import type { CombinationView } from '@/lib/combinations/present'
+import { COMBINATION_LIMITS, type RenameCombinationValues } from '@/lib/combinations/schema'
+import type { ActionResult } from '@/lib/errors'
+
+/** The title, and the form that changes it: Enter saves, Escape leaves it as it was. */
+export function CombinationTitle({
+  brand,
+  combination: { id, title, version },
+  rename,
+}: {
+  brand: string
+  combination: Pick<CombinationView, 'id' | 'title' | 'version'>
+  rename: (brand: string, values: RenameCombinationValues) => Promise<ActionResult<unknown>>
+}) {
+  const [text, setText] = useState<string>()
+  const [problem, setProblem] = useState<string>()
+  const [pending, setPending] = useState(false)
+
+  if (text === undefined) {
+    return (
+      <>
+        {title}{' '}
+        <span className="print:hidden">
+          <IconButton label="Rename combination" icon={<Pencil />} onClick={() => setText(title)} />
+        </span>
+      </>
+    )
+  }
+
+  async function save(event: FormEvent) {
+    event.preventDefault()
+    if (pending) return
+    setPending(true)
+    const answer = await reach(rename(brand, { combinationId: id, version, title: text ?? '' }))
+    setPending(false)
+    if (!answer.ok) {
+      setProblem(answer.fieldErrors?.title?.[0] ?? answer.message)
+      return
+    }
+    setText(undefined)
+    setProblem(undefined)
+    toastDone('Title saved')
+  }
+
+  function onKeyDown(event: KeyboardEvent) {
+    if (event.key === 'Escape') setText(undefined)
+  }
+
+  return (
+    <form onSubmit={(event) => void save(event)} className="flex flex-wrap items-start gap-2">
+      <Field
+        hideLabel
+        label="Title"
+        error={problem}
+        className="font-sans w-full max-w-lg text-base"
+      >
+        <Input
+          autoFocus
+          value={text}
+          maxLength={COMBINATION_LIMITS.title}
+          autoComplete="off"
+          onChange={({ target }) => setText(target.value)}
+          onKeyDown={onKeyDown}
+        />
+      </Field>
+      <span className="font-sans flex gap-2">
+        <SubmitButton pending={pending} pendingLabel="Saving…">
+          Save title
+        </SubmitButton>
+        <Button onClick={() => setText(undefined)}>Leave it</Button>
+      </span>
+    </form>
+  )
+}

@@ -1,0 +1,104 @@
+'use client'
+
+import dynamic from 'next/dynamic'
+import { useState } from 'react'
+
+import { reach } from '@/components/reach'
+import { Button } from '@/components/ui/button'
+import { LedgerList } from '@/components/ui/ledger'
+import { Notice } from '@/components/ui/notice'
+import { toastDone } from '@/components/ui/toast'
+import type { CombinationView, PlaceView } from '@/lib/combinations/present'
+import type { ActionResult } from '@/lib/errors'
+
+import { PlaceRow } from './place-row'
+
+// Only those who change the order need what drags.
+const SortablePlaces = dynamic(() =>
+  import('./sortable-places').then(({ SortablePlaces: Places }) => Places),
+)
+
+/** The action that puts the five in a new order. */
+export type ReorderCombination = (
+  brand: string,
+  values: { combinationId: string; version: number; shadeIds: string[] },
+) => Promise<ActionResult<{ version: number }>>
+
+/** The five places in their order; changing it is kept until it is saved. */
+export function FivePlaces({
+  brand,
+  combination,
+  reorder,
+}: {
+  brand: string
+  combination: CombinationView
+  reorder: ReorderCombination
+}) {
+  const [places, setPlaces] = useState<PlaceView[]>(combination.places)
+  const [sorting, setSorting] = useState(false)
+  const [pending, setPending] = useState(false)
+  const [problem, setProblem] = useState<string>()
+  const changed = places.some((place, at) => place !== combination.places[at])
+
+  async function save() {
+    setPending(true)
+    setProblem(undefined)
+    const answer = await reach(
+      reorder(brand, {
+        combinationId: combination.id,
+        version: combination.version,
+        shadeIds: places.map(({ shade }) => shade.id),
+      }),
+    )
+    setPending(false)
+    if (answer.ok) toastDone('Order saved')
+    else setProblem(answer.message)
+  }
+
+  return (
+    <section aria-label="The five shades" className="min-w-0">
+      {sorting ? (
+        <SortablePlaces places={places} onChange={setPlaces} />
+      ) : (
+        <LedgerList>
+          {places.map((place, at) => (
+            <li key={place.shade.id}>
+              <PlaceRow place={place} at={at} />
+            </li>
+          ))}
+        </LedgerList>
+      )}
+      {combination.canReorder ? (
+        <div className="mt-4 space-y-3 print:hidden">
+          {problem ? <Notice kind="error">{problem}</Notice> : null}
+          <div className="flex flex-wrap gap-3">
+            {sorting ? (
+              <>
+                <Button
+                  variant="primary"
+                  disabled={!changed}
+                  pending={pending}
+                  pendingLabel="Saving order…"
+                  onClick={() => void save()}
+                >
+                  Save order
+                </Button>
+                <Button
+                  onClick={() => {
+                    setPlaces(combination.places)
+                    setSorting(false)
+                    setProblem(undefined)
+                  }}
+                >
+                  Leave it as it was
+                </Button>
+              </>
+            ) : (
+              <Button onClick={() => setSorting(true)}>Change order</Button>
+            )}
+          </div>
+        </div>
+      ) : null}
+    </section>
+  )
+}
