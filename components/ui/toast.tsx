@@ -14,6 +14,7 @@ export function Toaster() {
       duration={6000}
       gap={8}
       visibleToasts={3}
+      style={{ fontFamily: 'inherit' }}
       containerAriaLabel="Messages"
       icons={{
         success: <Check aria-hidden="true" className="size-[1.125rem]" />,

@@ -1,0 +1,9 @@
+'use server'
+
+import { deletePhotographs, restorePhotographs } from '@/lib/photographs/delete-photographs'
+import { photographIdsSchema } from '@/lib/photographs/schema'
+import { defineAction } from '@/lib/server/define-action'
+
+export const deletePhotographsAction = defineAction(photographIdsSchema, deletePhotographs)
+
+export const restorePhotographsAction = defineAction(photographIdsSchema, restorePhotographs)
