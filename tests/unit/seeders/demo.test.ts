@@ -1,0 +1,92 @@
+import { readFile } from 'node:fs/promises'
+
+import sharp, { type Sharp } from 'sharp'
+import { describe, expect, it } from 'vitest'
+
+import { deltaE00 } from '@/lib/color/ciede2000'
+import { hexToLab } from '@/lib/color/srgb'
+import type { Lab } from '@/lib/color/types'
+import { READING_KINDS } from '@/lib/color/readings'
+import { ROLES } from '@/lib/people/schema'
+import { demoAccounts } from '@/seeders/demo/accounts'
+import { demoBrands } from '@/seeders/demo/brands'
+import { demoCombinations } from '@/seeders/demo/combinations'
+import { demoPhotographs } from '@/seeders/demo/photographs'
+
+const [first, second] = demoBrands
+const lines = demoBrands.flatMap((brand) => brand.lines)
+
+describe('the demo', () => {
+  it('has one account a role in the first brand, and an owner in the second', () => {
+    const rolesOf = (brand: string) =>
+      demoAccounts.filter((account) => account.brand === brand).map(({ role }) => role)
+    expect(rolesOf(first!.slug).sort()).toEqual([...ROLES].sort())
+    expect(rolesOf(second!.slug)).toEqual(['owner'])
+    expect(new Set(demoAccounts.map(({ password }) => password)).size).toBe(demoAccounts.length)
+    for (const { password, email } of demoAccounts) {
+      expect(password.length).toBeGreaterThanOrEqual(12)
+      expect(email).toMatch(/\.example$/)
+    }
+  })
+
+  it('has fibres that come to 100 per cent, the largest first', () => {
+    for (const { fibers } of lines) {
+      const percents = fibers.map(({ percent }) => percent)
+      expect(percents.reduce((a, b) => a + b, 0)).toBe(100)
+      expect(percents).toEqual([...percents].sort((a, b) => b - a))
+    }
+  })
+
+  it('has forty shades in its first line, numbered and named once each, without near-twins', () => {
+    const { shades } = first!.lines[0]!
+    expect(shades).toHaveLength(40)
+    const names = shades.flatMap(({ name }) => name ?? [])
+    expect(new Set(shades.map(({ number }) => number)).size).toBe(40)
+    expect(new Set(names.map((name) => name.toLowerCase())).size).toBe(names.length)
+    const labs = shades.map(({ lab, hex }): Lab => (lab ? [lab.L, lab.a, lab.b] : hexToLab(hex!)))
+    for (const [at, lab] of labs.entries()) {
+      for (const other of labs.slice(at + 1)) expect(deltaE00(lab, other)).toBeGreaterThan(4)
+    }
+  })
+
+  it('keeps combinations of photographs that are there, each in one of the readings', () => {
+    const slugs = demoPhotographs.map(({ slug }) => slug)
+    for (const { photograph, reading } of demoCombinations) {
+      expect(slugs).toContain(photograph)
+      expect(READING_KINDS).toContain(reading)
+    }
+  })
+})
+
+describe.each(demoPhotographs)('the photograph "$title"', ({ file, altText, licence }) => {
+  const load = () => readFile(new URL(`../../../seeders/demo/photographs/${file}`, import.meta.url))
+
+  it('is large enough, says what can be seen, and is our own work without metadata', async () => {
+    const bytes = await load()
+    const { width, height, exif, format } = await sharp(bytes).metadata()
+    expect(format).toBe('jpeg')
+    expect(width).toBeGreaterThanOrEqual(2000)
+    expect(height).toBeGreaterThanOrEqual(1300)
+    expect(exif).toBeUndefined()
+    expect(altText.length).toBeGreaterThan(40)
+    expect(licence).toBe('own-work')
+  })
+
+  it('has the detail of a picture, which a gradient has not', async () => {
+    const small = sharp(await load()).resize(700)
+    const detailOf = async (picture: Sharp) => {
+      const edges = picture
+        .clone()
+        .greyscale()
+        .convolve({
+          width: 3,
+          height: 3,
+          kernel: [-1, -1, -1, -1, 8, -1, -1, -1, -1],
+          offset: 128,
+        })
+      return (await sharp(await edges.png().toBuffer()).stats()).channels[0]!.stdev
+    }
+    const smooth = sharp(await small.clone().blur(20).png().toBuffer())
+    expect(await detailOf(small)).toBeGreaterThan(6 * (await detailOf(smooth)))
+  })
+})
