@@ -6,5 +6,5 @@ export const demoCombinations: DemoCombination[] = [
   { title: 'Lamps Lit Early', photograph: 'heather-before-dark', reading: 'true' },
   { title: 'Pockets Full of Shore', photograph: 'pebbles-at-low-water', reading: 'contrast' },
   { title: 'Bring the Washing In', photograph: 'meadow-before-rain', reading: 'true' },
-  { title: 'One for the Blackbird', photograph: 'berries-in-frost', reading: 'accent' },
+  { title: 'Poppies Before the Downpour', photograph: 'meadow-before-rain', reading: 'accent' },
 ]

@@ -29,7 +29,7 @@ export const demoPhotographs: DemoPhotograph[] = [
     photographer,
     licence,
     altText:
-      'Wet grey, buff, russet and slate-blue pebbles on a beach, with the edge of a grey-green sea beyond.',
+      'Grey, buff, russet and slate-blue pebbles on a beach, the last of a grey-green wave running over the far corner.',
     file: 'pebbles-at-low-water.jpg',
   },
   {
@@ -38,7 +38,7 @@ export const demoPhotographs: DemoPhotograph[] = [
     photographer,
     licence,
     altText:
-      'A dry stone wall in low sunlight, its grey stones spotted with mustard, sage and white lichen, moss in the joints.',
+      'A dry stone wall in low sunlight, its grey and brown stones spotted with mustard, sage and white lichen, moss in the joints.',
     file: 'wall-with-lichen.jpg',
   },
   {
@@ -58,14 +58,5 @@ export const demoPhotographs: DemoPhotograph[] = [
     altText:
       'A sunlit meadow of yellow flowers with a few red poppies, under a heavy blue-grey storm cloud.',
     file: 'meadow-before-rain.jpg',
-  },
-  {
-    slug: 'berries-in-frost',
-    title: 'One sprig in the frost',
-    photographer,
-    licence,
-    altText:
-      'A single sprig of red berries edged with frost, sharp against a soft background of cold blue-grey and green.',
-    file: 'berries-in-frost.jpg',
   },
 ]

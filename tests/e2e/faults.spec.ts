@@ -1,7 +1,7 @@
 import { expect, test, type Page } from '@playwright/test'
 import pg from 'pg'
 
-import { BRAND, signIn } from './support/accounts'
+import { BRAND, LINE, signIn } from './support/accounts'
 
 async function fillLine(page: Page, name: string) {
   await page.goto(`/${BRAND}/lines/new`)
@@ -80,6 +80,34 @@ test('a save whose answer is lost makes one row, and saying it again gives that 
     await page.getByRole('button', { name: 'Make line' }).click()
     await expect(page).toHaveURL(/\/lines\/line-of-the-lost-answer\/shades/)
     expect(await countLines(client, name)).toBe(1)
+  } finally {
+    await client.end()
+  }
+})
+
+test('a store that breaks off mid-upload keeps the file in the list, and a retry brings it in once', async ({
+  page,
+}) => {
+  await signIn(page, 'designer')
+  await page.goto(`${LINE}/photographs`)
+  await page.route(`${process.env.S3_PUBLIC_ENDPOINT ?? process.env.S3_ENDPOINT}/**`, (route) =>
+    route.abort('connectionreset'),
+  )
+  const file = '/usr/share/backgrounds/mate/nature/Storm.jpg'
+  await page.getByLabel('Photographs from files').setInputFiles(file)
+  const rows = page.getByRole('region', { name: 'Files being added' })
+  await expect(rows.getByText('Sending broke off. The file is kept here')).toBeVisible()
+  await page.unrouteAll()
+  await rows.getByRole('button', { name: 'Retry Storm.jpg' }).click()
+  await expect(rows.getByRole('link', { name: 'Open photograph' })).toBeVisible({ timeout: 20_000 })
+  await page.getByLabel('Photographs from files').setInputFiles(file)
+  await expect(rows.getByText('The line has this file already')).toBeVisible()
+  const client = await database()
+  try {
+    const same = await client.query(
+      `SELECT count(*)::int AS n FROM photographs WHERE file_name = 'Storm.jpg' AND deleted_at IS NULL`,
+    )
+    expect(same.rows[0].n).toBe(1)
   } finally {
     await client.end()
   }
