@@ -26,5 +26,5 @@ Brand.init(
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'brands' },
+  { sequelize: sequelize(), modelName: 'Brand', tableName: 'brands' },
 )

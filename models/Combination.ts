@@ -51,5 +51,5 @@ Combination.init(
     updatedAt: DataTypes.DATE,
     deletedAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'combinations', paranoid: true },
+  { sequelize: sequelize(), modelName: 'Combination', tableName: 'combinations', paranoid: true },
 )

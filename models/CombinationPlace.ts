@@ -36,5 +36,10 @@ CombinationPlace.init(
     shadeId: { type: DataTypes.UUID, allowNull: false },
     share: { type: DataTypes.DOUBLE, allowNull: false },
   },
-  { sequelize: sequelize(), tableName: 'combination_places', timestamps: false },
+  {
+    sequelize: sequelize(),
+    modelName: 'CombinationPlace',
+    tableName: 'combination_places',
+    timestamps: false,
+  },
 )

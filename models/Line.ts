@@ -70,5 +70,5 @@ Line.init(
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'lines' },
+  { sequelize: sequelize(), modelName: 'Line', tableName: 'lines' },
 )

@@ -38,5 +38,5 @@ Membership.init(
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'memberships' },
+  { sequelize: sequelize(), modelName: 'Membership', tableName: 'memberships' },
 )

@@ -30,6 +30,7 @@ Person.init(
   },
   {
     sequelize: sequelize(),
+    modelName: 'Person',
     tableName: 'people',
     defaultScope: { attributes: { exclude: ['passwordHash'] } },
   },

@@ -78,5 +78,5 @@ Photograph.init(
     updatedAt: DataTypes.DATE,
     deletedAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'photographs', paranoid: true },
+  { sequelize: sequelize(), modelName: 'Photograph', tableName: 'photographs', paranoid: true },
 )

@@ -47,5 +47,5 @@ Reading.init(
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'readings' },
+  { sequelize: sequelize(), modelName: 'Reading', tableName: 'readings' },
 )

@@ -29,5 +29,5 @@ Session.init(
     lastSeenAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
     createdAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'sessions', updatedAt: false },
+  { sequelize: sequelize(), modelName: 'Session', tableName: 'sessions', updatedAt: false },
 )

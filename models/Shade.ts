@@ -56,5 +56,5 @@ Shade.init(
     updatedAt: DataTypes.DATE,
     deletedAt: DataTypes.DATE,
   },
-  { sequelize: sequelize(), tableName: 'shades', paranoid: true },
+  { sequelize: sequelize(), modelName: 'Shade', tableName: 'shades', paranoid: true },
 )
