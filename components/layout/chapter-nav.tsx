@@ -2,6 +2,7 @@
 
 import { usePathname } from 'next/navigation'
 import { AppLink } from '@/components/ui/app-link'
+import { LinkPending } from './link-pending'
 
 /** A chapter of the line in the left margin. */
 export interface Chapter {
@@ -30,7 +31,10 @@ export function ChapterNav({ chapters, label }: { chapters: readonly Chapter[]; 
                 aria-hidden="true"
                 className="absolute inset-y-1.5 -left-6 hidden w-[3px] bg-woad group-aria-[current=page]:block"
               />
-              <span className="group-hover:underline">{chapter.label}</span>
+              <span className="inline-flex items-center gap-2">
+                <span className="group-hover:underline">{chapter.label}</span>
+                <LinkPending />
+              </span>
               {chapter.note ? (
                 <span className="text-right text-sm font-normal text-ink-faint">
                   {chapter.note}

@@ -8,8 +8,8 @@ export interface CellMap {
   cells: Uint8Array
 }
 
-/** The veil over what is not the region: the paper's own white, most of it. */
-const VEIL = [247, 246, 244, 214] as const
+/** The veil over what is not the region: a neutral of L* 45, so that light and dark both show. */
+const VEIL = [107, 107, 107, 210] as const
 
 /**
  * A picture that veils everything but the region of one of the five.

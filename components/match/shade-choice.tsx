@@ -1,5 +1,6 @@
-import { WoundSample } from '@/components/yarn/wound-sample'
 import type { ReactNode } from 'react'
+
+import { WoundSample } from '@/components/yarn/wound-sample'
 
 import type { MatchShadeView } from './types'
 
@@ -14,15 +15,16 @@ export function ShadeChoice({
   children: ReactNode
 }) {
   return (
-    <li className="flex flex-wrap items-center gap-x-3 gap-y-1 py-2">
+    <li className="flex items-center gap-x-3 py-2">
       <WoundSample hex={shade.hex} className="h-8 w-auto" />
       <span className="min-w-0 grow">
-        <span className="block font-title leading-tight">{shade.label}</span>
+        <span className="block font-title leading-tight break-words">{shade.label}</span>
         <span className="text-sm text-ink-faint">
-          {shade.name ? `No. ${shade.number} · ` : ''}ΔE00 {deltaE.toFixed(1)}
+          {shade.name ? `No. ${shade.number} · ` : ''}
+          <span className="whitespace-nowrap">ΔE00 {deltaE.toFixed(1)}</span>
         </span>
       </span>
-      <span className="flex gap-1">{children}</span>
+      <span className="flex shrink-0 gap-1">{children}</span>
     </li>
   )
 }

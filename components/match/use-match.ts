@@ -18,10 +18,13 @@ export interface MatchState {
 }
 
 async function fetchMatch(url: string): Promise<Match | NoMatch> {
-  const answer = await fetch(url)
-  if (answer.ok) return (await answer.json()) as Match | NoMatch
-  const failure = (await answer.json().catch(() => null)) as Failure | null
-  throw new Error(failure?.message ?? 'Woadmap did not answer. The match shown is the one before.')
+  const answer = await fetch(url).catch(() => null)
+  if (answer?.ok) return (await answer.json()) as Match | NoMatch
+  const failure = (await answer?.json().catch(() => null)) as Failure | null | undefined
+  throw new Error(
+    failure?.message ??
+      'Woadmap could not be reached. Your wishes are kept in the address; the match shown is the one before.',
+  )
 }
 
 /**
@@ -44,8 +47,8 @@ export function useMatch(
     },
   )
   const plain = stored.find(({ kind }) => kind === wishes.reading)
-  // The first wish has no answer before it but the stored match.
-  const match = any ? (data ?? plain) : plain
+  // The first wish of a reading has no answer before it but the stored match.
+  const match = any && data?.kind === wishes.reading ? data : plain
   return {
     match,
     pending: any && isLoading,

@@ -50,17 +50,25 @@ export function useWishes(): WishesControl {
     return parsed.success ? parsed.data : matchWishesSchema.parse({})
   }, [text])
 
-  const [steps, setSteps] = useState(0)
-  const change = (changes: Partial<MatchWishes>) => {
-    const query = wishesQuery({ ...wishes, ...changes })
-    window.history.pushState(null, '', query ? `${path}?${query}` : path)
-    setSteps(steps + 1)
+  // What was asked before each change made here; going back in the browser leaves some behind.
+  const [before, setBefore] = useState<readonly MatchWishes[]>([])
+  const query = wishesQuery(wishes)
+  const go = (to: MatchWishes) => {
+    const next = wishesQuery(to)
+    window.history.pushState(null, '', next ? `${path}?${next}` : path)
   }
+  const change = (changes: Partial<MatchWishes>) => {
+    const to = { ...wishes, ...changes }
+    if (wishesQuery(to) === query) return
+    setBefore([...before, wishes])
+    go(to)
+  }
+  const last = before.findLastIndex((one) => wishesQuery(one) !== query)
   const { reading, lock, exclude } = wishes
   return {
     wishes,
     any: wishesQuery({ ...wishes, reading: 'true' }) !== '',
-    query: wishesQuery(wishes),
+    query,
     change,
     lock: (id) => change({ lock: including(lock, id), exclude: without(exclude, id) }),
     unlock: (id) => change({ lock: without(lock, id) }),
@@ -72,10 +80,10 @@ export function useWishes(): WishesControl {
         exclude: including(without(exclude, forId), id),
       }),
     clear: () => change({ lock: [], exclude: [], apart: undefined, reading }),
-    ...(steps > 0 && {
+    ...(last >= 0 && {
       undo: () => {
-        setSteps(steps - 1)
-        window.history.back()
+        setBefore(before.slice(0, last))
+        go(before[last]!)
       },
     }),
   }

@@ -1,5 +1,6 @@
-/** `npm run bench -- match`: prints each figure beside its bar; exits 1 when one misses. */
+/** `npm run bench -- match | pages`: prints each figure beside its bar; exits 1 when one misses. */
 import { benchMatch } from './match'
+import { benchPages } from './pages'
 
 /** One measured figure beside what it has to reach. */
 export interface Figure {
@@ -9,7 +10,10 @@ export interface Figure {
   met: boolean
 }
 
-const BENCHES: Record<string, () => Promise<Figure[]>> = { match: benchMatch }
+const BENCHES: Record<string, () => Promise<Figure[]>> = {
+  match: benchMatch,
+  pages: benchPages,
+}
 
 async function main(names: string[]): Promise<number> {
   const unknown = names.filter((name) => !(name in BENCHES))

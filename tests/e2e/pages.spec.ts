@@ -1,5 +1,3 @@
-import { gzipSync } from 'node:zlib'
-
 import AxeBuilder from '@axe-core/playwright'
 import { expect, test, type Page } from '@playwright/test'
 
@@ -8,8 +6,6 @@ import { PAGES } from './support/pages'
 
 const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']
 const ROLES: readonly Who[] = ['owner', 'marketer', 'designer', 'dyer']
-/** Bytes of script, gzipped, before a page answers. */
-const FIRST_LOAD = 200_000
 
 /** Addresses by the name of their page, looked up once as the owner. */
 const addresses = new Map<string, string>()
@@ -58,21 +54,3 @@ for (const role of ROLES) {
     expect(problems).toEqual([])
   })
 }
-
-test('no page needs more than 200 kB of script, gzipped, to start', async ({ page, request }) => {
-  test.setTimeout(120_000)
-  await signIn(page, 'owner')
-  const sizes = new Map<string, number>()
-  for (const { name } of PAGES) {
-    const html = await (await page.request.get(addresses.get(name)!)).text()
-    const sources = [...html.matchAll(/<script[^>]+src="([^"]+)"/g)].map(([, source]) => source!)
-    expect(sources.length, name).toBeGreaterThan(0)
-    let total = 0
-    for (const source of new Set(sources)) {
-      const size = sizes.get(source) ?? gzipSync(await (await request.get(source)).body()).length
-      sizes.set(source, size)
-      total += size
-    }
-    expect(total, `${name}: ${Math.round(total / 1000)} kB`).toBeLessThanOrEqual(FIRST_LOAD)
-  }
-})
