@@ -1,11 +1,10 @@
 'use client'
 
 import { Button } from '@/components/ui/button'
-import { Field } from '@/components/ui/field'
-import { Input } from '@/components/ui/input'
 import { LiveRegion } from '@/components/ui/live-region'
 import { nearestShades } from '@/lib/color/match'
 
+import { PercentField } from './percent-field'
 import { ShadeChoice } from './shade-choice'
 import type { Point } from './touch'
 import type { MatchShadeView, TouchedColor } from './types'
@@ -17,39 +16,28 @@ export interface DropperPanelProps {
   point: Point | null
   touched: TouchedColor | null
   onMove: (point: Point) => void
+  onAway: () => void
   control: WishesControl
 }
 
-const percent = (value: number) => String(Math.round(value * 1000) / 10)
+const OFFERED = 3
 
 /** Where the dropper is, and the three shades of the line nearest to what it touches. */
-export function DropperPanel({ shades, point, touched, onMove, control }: DropperPanelProps) {
+export function DropperPanel(props: DropperPanelProps) {
+  const { shades, point, touched, onMove, onAway, control } = props
   const { x, y } = point ?? { x: 0.5, y: 0.5 }
   const byId = new Map(shades.map((shade) => [shade.id, shade]))
-  const nearest = touched ? nearestShades(touched.lab, shades, 3) : []
-  const field = (label: string, value: number, to: (fraction: number) => Point) => (
-    <Field label={label} className="w-28">
-      <Input
-        type="number"
-        min={0}
-        max={100}
-        step={0.5}
-        value={percent(value)}
-        onChange={({ target }) => {
-          const fraction = target.valueAsNumber / 100
-          if (fraction >= 0 && fraction <= 1) onMove(to(fraction))
-        }}
-      />
-    </Field>
-  )
+  const nearest = touched ? nearestShades(touched.lab, shades, OFFERED) : []
   return (
     <section aria-label="Dropper" className="print:hidden">
-      <div className="flex flex-wrap items-end gap-3">
-        {field('Across, %', x, (fraction) => ({ x: fraction, y }))}
-        {field('Down, %', y, (fraction) => ({ x, y: fraction }))}
-        <p className="max-w-[22rem] pb-1 text-sm text-ink-faint">
-          Press the photograph to ask which shades are nearest there. The arrow keys move the cross.
+      <div className="flex flex-wrap items-end justify-between gap-x-6 gap-y-2">
+        <p className="min-w-40 flex-1 text-sm text-ink-faint">
+          Press the photograph to find the shades nearest there. The arrow keys move the cross.
         </p>
+        <div className="flex gap-3">
+          <PercentField label="Across, %" value={x} onChange={(to) => onMove({ x: to, y })} />
+          <PercentField label="Down, %" value={y} onChange={(to) => onMove({ x, y: to })} />
+        </div>
       </div>
       <LiveRegion>
         {nearest.length > 0
@@ -57,12 +45,17 @@ export function DropperPanel({ shades, point, touched, onMove, control }: Droppe
           : ''}
       </LiveRegion>
       {touched ? (
-        <div className="mt-3 flex gap-4">
-          <svg width="36" height="36" viewBox="0 0 36 36" className="mt-3 shrink-0">
-            <title>The colour there, on this screen</title>
-            <circle cx="18" cy="18" r="16" fill={touched.hex} stroke="var(--rule)" />
-          </svg>
-          <ul role="list" className="grow divide-y divide-hairline">
+        <div className="mt-2 border-y border-hairline">
+          <p className="flex items-center gap-2 pt-2 text-sm text-ink-soft">
+            <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true">
+              <circle cx="10" cy="10" r="9" fill={touched.hex} stroke="var(--rule)" />
+            </svg>
+            Nearest to the colour under the cross
+            <Button size="small" variant="quiet" className="ml-auto" onClick={onAway}>
+              Put dropper away
+            </Button>
+          </p>
+          <ul role="list" className="divide-y divide-hairline">
             {nearest.map(({ shadeId, deltaE }) => {
               const shade = byId.get(shadeId)!
               const locked = control.wishes.lock.includes(shadeId)
@@ -70,7 +63,6 @@ export function DropperPanel({ shades, point, touched, onMove, control }: Droppe
                 <ShadeChoice key={shadeId} shade={shade} deltaE={deltaE}>
                   <Button
                     size="small"
-                    aria-pressed={locked}
                     onClick={() => (locked ? control.unlock(shadeId) : control.lock(shadeId))}
                   >
                     {locked ? 'Unlock' : 'Lock'}

@@ -24,7 +24,7 @@ import { touchPicture, type Point } from './touch'
 import { TouchPicture } from './touch-picture'
 import { READING_WORDS, type MatchShadeView, type TouchedColor } from './types'
 import { useMatch, type MatchState } from './use-match'
-import { useWishes } from './use-wishes'
+import { useWishes, type WishesControl } from './use-wishes'
 import { WishesBar } from './wishes-bar'
 
 /** Props of {@link MatchSheet}. */
@@ -50,16 +50,26 @@ export function MatchSheet(props: MatchSheetProps) {
   const control = useWishes()
   const state = useMatch({ brand, photographId: photograph.id }, matches, control)
   const { reading } = control.wishes
-  const found = state.match && isMatch(state.match) ? state.match : null
+  const known = new Set(shades.map(({ id }) => id))
+  const matched = state.match && isMatch(state.match) ? state.match : null
+  const found = matched?.places.every(({ shadeId }) => known.has(shadeId)) ? matched : null
 
-  const [held, setHeld] = useState<number | null>(null)
+  const [held, setHeld] = useState<string | null>(null)
   const [pointed, setPointed] = useState<number | null>(null)
   const [point, setPoint] = useState<Point | null>(null)
   const [touched, setTouched] = useState<TouchedColor | null>(null)
   const picture = useRef<HTMLDivElement>(null)
-  const touch = (to: Point, color: TouchedColor | null) => {
+  const heldAt = found?.places.findIndex(({ shadeId }) => shadeId === held) ?? -1
+  const shown = pointed ?? (heldAt < 0 ? null : heldAt)
+
+  function touch(to: Point | null, color: TouchedColor | null) {
     setPoint(to)
     setTouched(color)
+  }
+  function hold(shadeId: string | null) {
+    setHeld(shadeId)
+    // On a phone the picture may have been scrolled past.
+    if (shadeId) picture.current?.scrollIntoView({ block: 'nearest' })
   }
 
   return (
@@ -67,35 +77,44 @@ export function MatchSheet(props: MatchSheetProps) {
       {head}
       <ReadingChoice
         reading={reading}
-        onChange={(kind) => {
-          setHeld(null)
-          control.change({ reading: kind })
-        }}
+        unavailable={new Set(matches.filter((one) => !isMatch(one)).map(({ kind }) => kind))}
+        onChange={(kind) => control.change({ reading: kind })}
       />
-      <div className="mt-5 grid gap-x-10 gap-y-8 lg:grid-cols-2">
+      <div className="mt-5 grid gap-x-10 gap-y-8 lg:grid-cols-2 lg:grid-rows-[auto_1fr] print:grid-cols-2">
         <div className="min-w-0 space-y-4">
           <div ref={picture}>
             <TouchPicture
               brand={brand}
               photograph={photograph}
               assignment={found?.assignment ?? []}
-              shown={found ? (pointed ?? held) : null}
+              shown={found ? shown : null}
               point={point}
               onTouch={touch}
             />
           </div>
+          <DropperPanel
+            shades={shades}
+            point={point}
+            touched={touched}
+            control={control}
+            onMove={(to) => {
+              const image = picture.current?.querySelector('img')
+              touch(to, image ? touchPicture(image, to) : null)
+            }}
+            onAway={() => touch(null, null)}
+          />
           {found ? <Wound match={found} shades={shades} title={photograph.title} /> : null}
         </div>
-        <div className="min-w-0 space-y-6">
+        <div className="min-w-0 space-y-5 lg:row-span-2">
           <p className="text-ink-soft">{READING_WORDS[reading]}</p>
-          <Answer state={state} shades={shades} />
+          <Answer state={state} found={found} shades={shades} control={control} />
           {found ? (
             <FiveRows
               match={found}
               shades={shades}
               control={control}
               held={held}
-              onHold={setHeld}
+              onHold={hold}
               onPoint={setPointed}
             />
           ) : null}
@@ -114,16 +133,6 @@ export function MatchSheet(props: MatchSheetProps) {
           <WishesBar control={control} shades={shades} held={found?.apart ?? null} />
         </div>
         <StrikingChips colors={striking} shades={shades} control={control} />
-        <DropperPanel
-          shades={shades}
-          point={point}
-          touched={touched}
-          control={control}
-          onMove={(to) => {
-            const image = picture.current?.querySelector('img')
-            touch(to, image ? touchPicture(image, to) : null)
-          }}
-        />
       </div>
       {foot}
     </Sheet>
@@ -165,31 +174,47 @@ function Wound({ title, ...of }: OfMatch & { title: string }) {
 /** Says which five there are, or why there are none. */
 function Answer({
   state: { match, pending, problem, retry },
+  found,
   shades,
+  control,
 }: {
   state: MatchState
+  /** The match, if all of its five are in the line still. */
+  found: Match | null
   shades: readonly MatchShadeView[]
+  control: WishesControl
 }) {
   const none = match && !isMatch(match) ? match.unavailable : null
-  const five = match && isMatch(match) ? bandsOf({ match, shades }) : []
+  const gone = match && isMatch(match) && !found
+  const five = found ? bandsOf({ match: found, shades }) : []
   return (
     <div aria-busy={pending}>
       <LiveRegion>
-        {pending ? '' : (none ?? `Five shades: ${five.map(({ name }) => name).join(', ')}`)}
+        {pending || gone ? '' : (none ?? `Five shades: ${five.map(({ name }) => name).join(', ')}`)}
       </LiveRegion>
       {problem ? (
         <Notice
           kind="error"
           actions={
-            <Button size="small" onClick={retry}>
-              Match again
-            </Button>
+            <>
+              <Button size="small" onClick={retry}>
+                Match again
+              </Button>
+              <Button size="small" variant="quiet" onClick={control.clear}>
+                Clear wishes
+              </Button>
+            </>
           }
         >
           {problem}
         </Notice>
       ) : null}
       {none ? <Notice title="Not for this photograph">{none}</Notice> : null}
+      {gone ? (
+        <Notice title="One of the five has left the line">
+          Read the photograph again to match it to the shades of now.
+        </Notice>
+      ) : null}
     </div>
   )
 }

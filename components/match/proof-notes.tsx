@@ -2,7 +2,7 @@ import { Note } from '@/components/layout/note'
 import { SCREEN_CAUTION } from '@/components/layout/screen-caution'
 import type { Match } from '@/lib/color/match'
 
-import type { MatchShadeView } from './types'
+import { READING_PROOF, type MatchShadeView } from './types'
 
 /** Under this many L* two yarns read as one in stranded work. Common practice; no source. */
 const MUDDY = 10
@@ -25,12 +25,13 @@ export function ProofNotes({
           <Note title={match.certified ? 'Proved best' : 'Best found'}>
             <p>
               {match.certified
-                ? `No other five of your ${shades.length} shades come closer to this photograph${asked ? ' under your wishes' : ''}, with every pair at least ΔE00 ${match.apart.toFixed(match.apart % 1 ? 1 : 0)} apart.`
+                ? `No other five of your ${shades.length} shades ${READING_PROOF[match.kind]}${asked ? ' under your wishes' : ''}, with ${apartInWords(match)}.`
                 : `The proof was cut off: these five are within ${(match.gap * 100).toFixed(1)} % of the best there can be.`}
             </p>
             <p>
-              Mean difference ΔE00 {match.meanDeltaE.toFixed(1)}; with all {shades.length} shades at
-              once it would be {match.leastMeanDeltaE.toFixed(1)}.
+              Mean difference ΔE00 {match.meanDeltaE.toFixed(1)}
+              {match.kind === 'quiet' ? ' to the quieted photograph' : ''}; with all {shades.length}{' '}
+              shades at once it would be {match.leastMeanDeltaE.toFixed(1)}.
             </p>
             <p className="text-sm text-ink-faint">
               Weighed {match.objective.toFixed(3)}, least possible {match.lowerBound.toFixed(3)}.
@@ -46,6 +47,12 @@ export function ProofNotes({
       </Note>
     </>
   )
+}
+
+/** Locked shades may stand as near to each other as they like. */
+function apartInWords({ apart, places }: Match): string {
+  const free = places.filter(({ locked }) => locked).length > 1 ? ' but the locked ones' : ''
+  return `every pair${free} at least ΔE00 ${apart.toFixed(apart % 1 ? 1 : 0)} apart`
 }
 
 function Steps({ match, shades }: { match: Match; shades: readonly MatchShadeView[] }) {

@@ -4,12 +4,14 @@ import { READING_KINDS, type ReadingKind } from '@/lib/color/readings'
 
 import { READING_LABELS } from './types'
 
-/** Chooses which of the five readings is shown. */
+/** Chooses which of the five readings is shown; one that this photograph does not give says so. */
 export function ReadingChoice({
   reading,
+  unavailable,
   onChange,
 }: {
   reading: ReadingKind
+  unavailable: ReadonlySet<ReadingKind>
   onChange: (reading: ReadingKind) => void
 }) {
   return (
@@ -30,6 +32,9 @@ export function ReadingChoice({
               className="absolute inset-0 cursor-pointer appearance-none opacity-0"
             />
             {READING_LABELS[kind]}
+            {unavailable.has(kind) ? (
+              <span className="ml-1.5 text-sm font-normal text-ink-faint">none here</span>
+            ) : null}
           </label>
         ))}
       </div>

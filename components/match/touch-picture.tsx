@@ -1,6 +1,6 @@
 'use client'
 
-import { useEffect, useRef, type KeyboardEvent, type PointerEvent } from 'react'
+import { useEffect, useRef, type KeyboardEvent, type MouseEvent } from 'react'
 import useSWRImmutable from 'swr/immutable'
 
 import { PhotographPicture } from '@/components/photographs/photograph-picture'
@@ -54,6 +54,7 @@ export function TouchPicture({
 }: TouchPictureProps) {
   const frame = useRef<HTMLDivElement>(null)
   const canvas = useRef<HTMLCanvasElement>(null)
+  const cross = point ?? { x: 0.5, y: 0.5 }
   const { data: map } = useSWRImmutable(
     shown === null ? null : `/api/brands/${brand}/photographs/${photograph.id}/cells`,
     fetchCells,
@@ -72,8 +73,10 @@ export function TouchPicture({
     onTouch(to, image ? touchPicture(image, to) : null)
   }
 
-  function press(event: PointerEvent<HTMLDivElement>) {
-    if (event.button !== 0) return
+  // On click, not on pointer down: a finger that scrolls the page past the picture asks for nothing.
+  function press(event: MouseEvent<HTMLDivElement>) {
+    // The cross pressed by keyboard stays where it is.
+    if (event.detail === 0) return touch(cross)
     const box = event.currentTarget.getBoundingClientRect()
     touch({
       x: keep((event.clientX - box.left) / box.width),
@@ -86,13 +89,11 @@ export function TouchPicture({
     if (!step) return
     event.preventDefault()
     const far = event.shiftKey ? 0.05 : 0.005
-    const from = point ?? { x: 0.5, y: 0.5 }
-    touch({ x: keep(from.x + step[0] * far), y: keep(from.y + step[1] * far) })
+    touch({ x: keep(cross.x + step[0] * far), y: keep(cross.y + step[1] * far) })
   }
 
-  const cross = point ?? { x: 0.5, y: 0.5 }
   return (
-    <div ref={frame} className="relative cursor-crosshair touch-manipulation" onPointerDown={press}>
+    <div ref={frame} className="relative cursor-crosshair touch-manipulation" onClick={press}>
       <PhotographPicture
         priority
         photograph={photograph}
@@ -110,10 +111,6 @@ export function TouchPicture({
           type="button"
           aria-label={`Dropper, ${Math.round(cross.x * 100)} % across, ${Math.round(cross.y * 100)} % down. Arrow keys move it, with Shift further.`}
           onKeyDown={move}
-          onClick={(event) => {
-            // A press on the cross itself is one on the picture, which has answered already.
-            if (event.detail === 0) touch(cross)
-          }}
           style={{ left: `${cross.x * 100}%`, top: `${cross.y * 100}%` }}
           className={`absolute size-8 -translate-x-1/2 -translate-y-1/2 cursor-crosshair rounded-full print:hidden ${point ? '' : 'opacity-0 focus-visible:opacity-100'}`}
         >

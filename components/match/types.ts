@@ -31,3 +31,12 @@ export const READING_WORDS: Record<ReadingKind, string> = {
   family: 'Five of the picture’s strongest hue.',
   quiet: 'The picture spoken low: the line’s muted shades only.',
 }
+
+/** What no other five do, where these are proved best: "No other five of your 40 shades …". */
+export const READING_PROOF: Record<ReadingKind, string> = {
+  true: 'come closer to this photograph',
+  accent: 'come closer to this photograph with its accent among them',
+  contrast: 'come closer to this photograph and step as clearly from light to dark',
+  family: 'come closer to this photograph within one family of colour',
+  quiet: 'come closer to the quieted photograph with muted ones only',
+}
