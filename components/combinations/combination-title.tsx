@@ -1,6 +1,7 @@
 'use client'
 
 import { Pencil } from 'lucide-react'
+import { useRouter } from 'next/navigation'
 import { useState, type FormEvent, type KeyboardEvent } from 'react'
 
 import { reach } from '@/components/reach'
@@ -14,7 +15,10 @@ import type { CombinationView } from '@/lib/combinations/present'
 import { COMBINATION_LIMITS, type RenameCombinationValues } from '@/lib/combinations/schema'
 import type { ActionResult } from '@/lib/errors'
 
-/** The title, and the form that changes it: Enter saves, Escape leaves it as it was. */
+/**
+ * The title, and the form that changes it: Enter saves, Escape leaves it as it was. When somebody
+ * saved in between, what was typed stays beside the title of now, and can be saved over it.
+ */
 export function CombinationTitle({
   brand,
   combination: { id, title, version },
@@ -24,16 +28,32 @@ export function CombinationTitle({
   combination: Pick<CombinationView, 'id' | 'title' | 'version'>
   rename: (brand: string, values: RenameCombinationValues) => Promise<ActionResult<unknown>>
 }) {
+  const router = useRouter()
   const [text, setText] = useState<string>()
   const [problem, setProblem] = useState<string>()
+  const [overtaken, setOvertaken] = useState(false)
   const [pending, setPending] = useState(false)
+  // The keyboard goes back to the button that opened the form.
+  const [closed, setClosed] = useState(false)
+
+  function begin(start?: string) {
+    setText(start)
+    setProblem(undefined)
+    setOvertaken(false)
+    setClosed(start === undefined)
+  }
 
   if (text === undefined) {
     return (
       <>
         {title}{' '}
         <span className="print:hidden">
-          <IconButton label="Rename combination" icon={<Pencil />} onClick={() => setText(title)} />
+          <IconButton
+            autoFocus={closed}
+            label="Rename combination"
+            icon={<Pencil />}
+            onClick={() => begin(title)}
+          />
         </span>
       </>
     )
@@ -47,15 +67,16 @@ export function CombinationTitle({
     setPending(false)
     if (!answer.ok) {
       setProblem(answer.fieldErrors?.title?.[0] ?? answer.message)
+      setOvertaken(answer.code === 'conflict')
+      if (answer.code === 'conflict') router.refresh()
       return
     }
-    setText(undefined)
-    setProblem(undefined)
+    begin()
     toastDone('Title saved')
   }
 
   function onKeyDown(event: KeyboardEvent) {
-    if (event.key === 'Escape') setText(undefined)
+    if (event.key === 'Escape') begin()
   }
 
   return (
@@ -63,6 +84,7 @@ export function CombinationTitle({
       <Field
         hideLabel
         label="Title"
+        hint={overtaken ? `It is now called “${title}”.` : undefined}
         error={problem}
         className="font-sans w-full max-w-lg text-base"
       >
@@ -79,7 +101,7 @@ export function CombinationTitle({
         <SubmitButton pending={pending} pendingLabel="Saving…">
           Save title
         </SubmitButton>
-        <Button onClick={() => setText(undefined)}>Leave it</Button>
+        <Button onClick={() => begin()}>Leave it</Button>
       </span>
     </form>
   )

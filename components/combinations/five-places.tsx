@@ -1,6 +1,7 @@
 'use client'
 
 import dynamic from 'next/dynamic'
+import { useRouter } from 'next/navigation'
 import { useState } from 'react'
 
 import { reach } from '@/components/reach'
@@ -17,6 +18,9 @@ import { PlaceRow } from './place-row'
 const SortablePlaces = dynamic(() =>
   import('./sortable-places').then(({ SortablePlaces: Places }) => Places),
 )
+
+const OVERTAKEN =
+  'Somebody else saved this combination first. Your order is not saved: look at theirs, then change it again if it needs to be.'
 
 /** The action that puts the five in a new order. */
 export type ReorderCombination = (
@@ -38,7 +42,9 @@ export function FivePlaces({
   const [sorting, setSorting] = useState(false)
   const [pending, setPending] = useState(false)
   const [problem, setProblem] = useState<string>()
-  const changed = places.some((place, at) => place !== combination.places[at])
+  const [overtaken, setOvertaken] = useState(false)
+  const router = useRouter()
+  const changed = places.some(({ shade }, at) => shade.id !== combination.places[at]?.shade.id)
 
   async function save() {
     setPending(true)
@@ -51,8 +57,13 @@ export function FivePlaces({
       }),
     )
     setPending(false)
-    if (answer.ok) toastDone('Order saved')
-    else setProblem(answer.message)
+    if (answer.ok) {
+      toastDone('Order saved')
+      return
+    }
+    const conflict = answer.code === 'conflict'
+    setOvertaken(conflict)
+    setProblem(conflict ? OVERTAKEN : answer.message)
   }
 
   return (
@@ -70,7 +81,20 @@ export function FivePlaces({
       )}
       {combination.canReorder ? (
         <div className="mt-4 space-y-3 print:hidden">
-          {problem ? <Notice kind="error">{problem}</Notice> : null}
+          {problem ? (
+            <Notice
+              kind="error"
+              actions={
+                overtaken && (
+                  <Button size="small" onClick={() => router.refresh()}>
+                    Show theirs
+                  </Button>
+                )
+              }
+            >
+              {problem}
+            </Notice>
+          ) : null}
           <div className="flex flex-wrap gap-3">
             {sorting ? (
               <>

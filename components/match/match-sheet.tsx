@@ -80,7 +80,7 @@ export function MatchSheet(props: MatchSheetProps) {
         unavailable={new Set(matches.filter((one) => !isMatch(one)).map(({ kind }) => kind))}
         onChange={(kind) => control.change({ reading: kind })}
       />
-      <div className="mt-5 grid gap-x-10 gap-y-8 lg:grid-cols-2 lg:grid-rows-[auto_1fr] print:grid-cols-2">
+      <div className="mt-5 grid gap-x-10 gap-y-8 lg:grid-cols-2 print:grid-cols-2">
         <div className="min-w-0 space-y-4">
           <div ref={picture}>
             <TouchPicture
@@ -105,7 +105,7 @@ export function MatchSheet(props: MatchSheetProps) {
           />
           {found ? <Wound match={found} shades={shades} title={photograph.title} /> : null}
         </div>
-        <div className="min-w-0 space-y-5 lg:row-span-2">
+        <div className="min-w-0 space-y-5">
           <p className="text-ink-soft">{READING_WORDS[reading]}</p>
           <Answer state={state} found={found} shades={shades} control={control} />
           {found ? (

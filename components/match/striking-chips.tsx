@@ -2,6 +2,7 @@
 
 import { Lock } from 'lucide-react'
 
+import { WoundSample } from '@/components/yarn/wound-sample'
 import { screenColor } from '@/lib/color/gamut'
 import { nearestShades } from '@/lib/color/match'
 import type { StrikingColor } from '@/lib/color/striking'
@@ -22,11 +23,14 @@ export function StrikingChips({
   if (colors.length === 0 || shades.length === 0) return null
   const byId = new Map(shades.map((shade) => [shade.id, shade]))
   return (
-    <section aria-labelledby="striking" className="print:hidden">
+    <section aria-labelledby="striking" className="lg:col-span-2 print:hidden">
       <h2 id="striking" className="text-lg">
         Striking colours
       </h2>
-      <p className="text-sm text-ink-faint">Press one to lock the shade nearest to it.</p>
+      <p className="max-w-measure text-sm text-ink-faint">
+        The vivid ones of the picture, each with the line’s nearest shade. Press one to lock that
+        shade.
+      </p>
       <ul role="list" className="mt-2 flex flex-wrap gap-2">
         {colors.map(({ lab }, at) => {
           const [nearest] = nearestShades(lab, shades, 1)
@@ -40,14 +44,15 @@ export function StrikingChips({
                 onClick={() => (locked ? control.unlock(shade.id) : control.lock(shade.id))}
                 className="inline-flex min-h-9 items-center gap-2 rounded border border-rule bg-sheet py-1 pr-3 pl-1.5 text-left text-sm hover:border-ink aria-pressed:border-woad aria-pressed:font-semibold pointer-coarse:min-h-11"
               >
-                <svg width="30" height="24" viewBox="0 0 30 24" aria-hidden="true">
-                  <path d="M1 2h28v20H1z" fill={screenColor(lab).hex} />
-                  <path d="M15 2h14v20H15z" fill={shade.hex} />
+                <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true">
+                  <circle cx="10" cy="10" r="9.5" fill={screenColor(lab).hex} />
                 </svg>
+                <WoundSample hex={shade.hex} className="h-6 w-auto" />
                 <span>
-                  {shade.label} <span className="text-ink-faint">{nearest!.deltaE.toFixed(1)}</span>
+                  {shade.label}{' '}
+                  <span className="text-ink-faint">ΔE00 {nearest!.deltaE.toFixed(1)}</span>
                 </span>
-                {locked ? <Lock aria-label="locked" className="size-3.5" /> : null}
+                {locked ? <Lock aria-hidden="true" className="size-3.5" /> : null}
               </button>
             </li>
           )

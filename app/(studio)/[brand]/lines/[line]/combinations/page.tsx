@@ -1,6 +1,6 @@
 import type { Metadata } from 'next'
 
-import { bandsOf, keptInWords } from '@/components/combinations/words'
+import { bandsOf, keptInWords, namesInWords } from '@/components/combinations/words'
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader } from '@/components/layout/sheet-header'
 import { AppLink } from '@/components/ui/app-link'
@@ -84,15 +84,15 @@ export default async function CombinationsPage({
           ) : (
             <ul
               role="list"
-              className="grid gap-x-8 gap-y-2 border-t border-hairline sm:grid-cols-2 lg:grid-cols-3"
+              className="grid gap-x-8 border-t border-hairline xl:grid-cols-3 md:grid-cols-2"
             >
               {combinations.map((combination) => (
-                <li key={combination.id} className="flex gap-4 border-b border-hairline py-4">
+                <li key={combination.id} className="flex gap-5 border-b border-hairline py-5">
                   <WrapCard
                     compact
                     bands={bandsOf(combination)}
                     title={combination.title}
-                    className="shrink-0"
+                    className="w-28 shrink-0"
                   />
                   <div className="min-w-0">
                     <AppLink
@@ -101,7 +101,8 @@ export default async function CombinationsPage({
                     >
                       {combination.title}
                     </AppLink>
-                    <p className="mt-1 text-sm text-ink-soft">
+                    <p className="mt-1 text-sm">{namesInWords(combination)}</p>
+                    <p className="mt-1 text-sm text-ink-faint">
                       {combination.photograph
                         ? `From ${combination.photograph.title}`
                         : 'Its photograph is gone'}

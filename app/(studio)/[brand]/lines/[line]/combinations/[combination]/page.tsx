@@ -83,7 +83,6 @@ export default async function CombinationPage({
         title={
           combination.canRename ? (
             <CombinationTitle
-              key={combination.version}
               brand={brand}
               combination={combination}
               rename={renameCombinationAction}
@@ -105,7 +104,7 @@ export default async function CombinationPage({
           )
         }
       />
-      <div className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,auto)_minmax(0,1fr)]">
+      <div className="grid gap-x-10 gap-y-8 lg:grid-cols-[minmax(0,auto)_minmax(0,1fr)] print:grid-cols-[75mm_minmax(0,1fr)]">
         <div className="space-y-2">
           <Ground className="flex justify-center border border-hairline p-6 print:border-0 print:p-0">
             <WrapCard
@@ -125,7 +124,7 @@ export default async function CombinationPage({
         />
       </div>
       <SheetSection title="As cloth">
-        <Ground className="grid grid-cols-2 gap-6 border border-hairline p-4 sm:grid-cols-3">
+        <Ground className="grid grid-cols-2 gap-6 border border-hairline p-4 sm:grid-cols-3 print:grid-cols-3 print:border-0 print:p-0">
           {CLOTHS.map(({ kind, words }) => (
             <figure key={kind} className="min-w-0">
               <Fabric bands={bands} kind={kind} className="w-full" />

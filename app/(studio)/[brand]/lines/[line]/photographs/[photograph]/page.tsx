@@ -4,9 +4,11 @@ import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader, SheetSection } from '@/components/layout/sheet-header'
 import { MatchSheet } from '@/components/match/match-sheet'
 import { PhotographDetailsForm } from '@/components/photographs/photograph-details-form'
+import { PhotographFacts } from '@/components/photographs/photograph-facts'
 import { PhotographPicture } from '@/components/photographs/photograph-picture'
 import { ReadAgainButton } from '@/components/photographs/read-again-button'
 import { ReadingStatus } from '@/components/photographs/reading-status'
+import { buttonClass } from '@/components/ui/button-class'
 import { LinkButton } from '@/components/ui/link-button'
 import { Notice } from '@/components/ui/notice'
 import { canKeepCombination } from '@/lib/combinations/policy'
@@ -71,9 +73,25 @@ export default async function PhotographPage({
       ) : null}
     </>
   )
+  const form = (
+    <PhotographDetailsForm brand={brand} photograph={photograph} save={updatePhotographAction} />
+  )
   const foot = (
     <SheetSection title="About the photograph" className="mt-12 print:hidden">
-      <PhotographDetailsForm brand={brand} photograph={photograph} save={updatePhotographAction} />
+      {photograph.canEdit && licence && altText ? (
+        // Said once, seldom changed: what matters on this page is the match.
+        <>
+          <PhotographFacts photograph={photograph} />
+          <details className="mt-4">
+            <summary className={buttonClass('secondary', 'main', 'cursor-pointer')}>
+              Change details
+            </summary>
+            <div className="mt-5">{form}</div>
+          </details>
+        </>
+      ) : (
+        form
+      )}
     </SheetSection>
   )
   if (state !== 'ready' || !reading) {
