@@ -65,11 +65,10 @@ export function DropperPanel(props: DropperPanelProps) {
                     size="small"
                     onClick={() => (locked ? control.unlock(shadeId) : control.lock(shadeId))}
                   >
-                    {locked ? 'Unlock' : 'Lock'}
-                    <span className="sr-only"> {shade.label}</span>
+                    {locked ? 'Unlock' : 'Lock'} <span className="sr-only">{shade.label}</span>
                   </Button>
                   <Button size="small" variant="quiet" onClick={() => control.exclude(shadeId)}>
-                    Exclude<span className="sr-only"> {shade.label}</span>
+                    Exclude <span className="sr-only">{shade.label}</span>
                   </Button>
                 </ShadeChoice>
               )

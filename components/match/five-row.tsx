@@ -30,7 +30,7 @@ export interface FiveRowProps {
 /** One of the five in running text, with what can be asked of it. */
 export function FiveRow(props: FiveRowProps) {
   const { place, shade, others, control, held, onHold, onPoint } = props
-  const of = <span className="sr-only"> {shade.label}</span>
+  const of = <span className="sr-only">{shade.label}</span>
   return (
     <li
       onPointerEnter={() => onPoint(true)}
@@ -68,19 +68,18 @@ export function FiveRow(props: FiveRowProps) {
             className="aria-pressed:underline"
             onClick={() => onHold(!held)}
           >
-            Show<span className="sr-only"> {shade.label} on the picture</span>
+            Show <span className="sr-only">{shade.label} on the picture</span>
           </Button>
           <Button
             size="small"
             variant="quiet"
             onClick={() => (place.locked ? control.unlock(shade.id) : control.lock(shade.id))}
           >
-            {place.locked ? 'Unlock' : 'Lock'}
-            {of}
+            {place.locked ? 'Unlock' : 'Lock'} {of}
           </Button>
           <Swap shade={shade} others={others} onSwap={(to) => control.swap(shade.id, to)} />
           <Button size="small" variant="quiet" onClick={() => control.exclude(shade.id)}>
-            Exclude{of}
+            Exclude {of}
           </Button>
         </div>
       </div>
@@ -133,7 +132,7 @@ function Swap({
       onOpenChange={setOpen}
       trigger={
         <Button size="small" variant="quiet">
-          Swap<span className="sr-only"> {shade.label}</span>
+          Swap <span className="sr-only">{shade.label}</span>
         </Button>
       }
     >
@@ -150,7 +149,7 @@ function Swap({
                   onSwap(shadeId)
                 }}
               >
-                Take<span className="sr-only"> {other.label}</span>
+                Take <span className="sr-only">{other.label}</span>
               </Button>
             </ShadeChoice>
           )

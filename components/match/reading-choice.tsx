@@ -31,7 +31,7 @@ export function ReadingChoice({
               onChange={() => onChange(kind)}
               className="absolute inset-0 cursor-pointer appearance-none opacity-0"
             />
-            {READING_LABELS[kind]}
+            {READING_LABELS[kind]}{' '}
             {unavailable.has(kind) ? (
               <span className="ml-1.5 text-sm font-normal text-ink-faint">none here</span>
             ) : null}
