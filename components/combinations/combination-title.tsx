@@ -86,7 +86,7 @@ export function CombinationTitle({
         label="Title"
         hint={overtaken ? `It is now called “${title}”.` : undefined}
         error={problem}
-        className="font-sans w-full max-w-lg text-base"
+        className="w-full max-w-lg font-body text-base"
       >
         <Input
           autoFocus
@@ -97,7 +97,7 @@ export function CombinationTitle({
           onKeyDown={onKeyDown}
         />
       </Field>
-      <span className="font-sans flex gap-2">
+      <span className="flex gap-2 font-body">
         <SubmitButton pending={pending} pendingLabel="Saving…">
           Save title
         </SubmitButton>

@@ -28,6 +28,12 @@ export type ReorderCombination = (
   values: { combinationId: string; version: number; shadeIds: string[] },
 ) => Promise<ActionResult<{ version: number }>>
 
+/** An order that was made from a version of the combination. */
+interface Draft {
+  version: number
+  places: PlaceView[]
+}
+
 /** The five places in their order; changing it is kept until it is saved. */
 export function FivePlaces({
   brand,
@@ -38,38 +44,46 @@ export function FivePlaces({
   combination: CombinationView
   reorder: ReorderCombination
 }) {
-  const [places, setPlaces] = useState<PlaceView[]>(combination.places)
-  const [sorting, setSorting] = useState(false)
-  const [pending, setPending] = useState(false)
-  const [problem, setProblem] = useState<string>()
-  const [overtaken, setOvertaken] = useState(false)
   const router = useRouter()
+  // Both are about one version: when a newer one comes, it is shown and they are of the past.
+  const [draft, setDraft] = useState<Draft>()
+  const [failure, setFailure] = useState<{ version: number; words: string; overtaken: boolean }>()
+  const [sorting, setSorting] = useState(false)
+  // The keyboard goes back to the button that began it.
+  const [closed, setClosed] = useState(false)
+  const [pending, setPending] = useState(false)
+  const { id, version } = combination
+  const places = draft?.version === version ? draft.places : combination.places
+  const problem = failure?.version === version ? failure : undefined
   const changed = places.some(({ shade }, at) => shade.id !== combination.places[at]?.shade.id)
+
+  function close() {
+    setSorting(false)
+    setClosed(true)
+  }
 
   async function save() {
     setPending(true)
-    setProblem(undefined)
-    const answer = await reach(
-      reorder(brand, {
-        combinationId: combination.id,
-        version: combination.version,
-        shadeIds: places.map(({ shade }) => shade.id),
-      }),
-    )
+    setFailure(undefined)
+    const shadeIds = places.map(({ shade }) => shade.id)
+    const answer = await reach(reorder(brand, { combinationId: id, version, shadeIds }))
     setPending(false)
     if (answer.ok) {
       toastDone('Order saved')
+      close()
       return
     }
-    const conflict = answer.code === 'conflict'
-    setOvertaken(conflict)
-    setProblem(conflict ? OVERTAKEN : answer.message)
+    const overtaken = answer.code === 'conflict'
+    setFailure({ version, overtaken, words: overtaken ? OVERTAKEN : answer.message })
   }
 
   return (
     <section aria-label="The five shades" className="min-w-0">
       {sorting ? (
-        <SortablePlaces places={places} onChange={setPlaces} />
+        <SortablePlaces
+          places={places}
+          onChange={(moved) => setDraft({ version, places: moved })}
+        />
       ) : (
         <LedgerList>
           {places.map((place, at) => (
@@ -85,14 +99,14 @@ export function FivePlaces({
             <Notice
               kind="error"
               actions={
-                overtaken && (
+                problem.overtaken && (
                   <Button size="small" onClick={() => router.refresh()}>
                     Show theirs
                   </Button>
                 )
               }
             >
-              {problem}
+              {problem.words}
             </Notice>
           ) : null}
           <div className="flex flex-wrap gap-3">
@@ -109,16 +123,18 @@ export function FivePlaces({
                 </Button>
                 <Button
                   onClick={() => {
-                    setPlaces(combination.places)
-                    setSorting(false)
-                    setProblem(undefined)
+                    setDraft(undefined)
+                    setFailure(undefined)
+                    close()
                   }}
                 >
                   Leave it as it was
                 </Button>
               </>
             ) : (
-              <Button onClick={() => setSorting(true)}>Change order</Button>
+              <Button autoFocus={closed} onClick={() => setSorting(true)}>
+                Change order
+              </Button>
             )}
           </div>
         </div>

@@ -107,13 +107,16 @@ describe('the five of a combination', () => {
 
   async function moveBarkUp(reorder: ReturnType<typeof vi.fn>) {
     const user = userEvent.setup()
-    render(<FivePlaces brand="b" combination={combination} reorder={reorder as never} />)
+    const show = (now: Partial<CombinationView>) => (
+      <FivePlaces brand="b" combination={{ ...combination, ...now }} reorder={reorder as never} />
+    )
+    const { rerender } = render(show({}))
     await user.click(screen.getByRole('button', { name: 'Change order' }))
     expect(await screen.findByRole('button', { name: 'Save order' })).toBeDisabled()
     await user.click(await screen.findByRole('button', { name: 'Move Bark up' }))
     expect(rows()[0]).toContain('Bark')
     await user.click(screen.getByRole('button', { name: 'Save order' }))
-    return user
+    return { user, renew: (now: Partial<CombinationView>) => rerender(show(now)) }
   }
 
   it('are saved in the new order', async () => {
@@ -124,13 +127,19 @@ describe('the five of a combination', () => {
       version: 3,
       shadeIds: ['Bark', 'Ash', 'Clay', 'Dusk', 'Fern'],
     })
+    // Until the page is there anew the order saved stays, and the keyboard is where it began.
+    expect(await screen.findByRole('button', { name: 'Change order' })).toHaveFocus()
+    expect(rows()[0]).toContain('Bark')
   })
 
   it('say what to do when somebody saved first', async () => {
-    const user = await moveBarkUp(vi.fn().mockResolvedValue(CONFLICT))
+    const { user, renew } = await moveBarkUp(vi.fn().mockResolvedValue(CONFLICT))
     const alert = await screen.findByRole('alert')
     expect(alert).toHaveTextContent('Your order is not saved')
     await user.click(within(alert).getByRole('button', { name: 'Show theirs' }))
     expect(refresh).toHaveBeenCalledOnce()
+    renew({ version: 4, places: ['Fern', 'Ash', 'Bark', 'Clay', 'Dusk'].map(place) })
+    expect(rows()[0]).toContain('Fern')
+    expect(screen.queryByRole('alert')).toBeNull()
   })
 })

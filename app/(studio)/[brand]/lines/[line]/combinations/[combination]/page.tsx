@@ -116,12 +116,7 @@ export default async function CombinationPage({
           </Ground>
           <GroundSwitch />
         </div>
-        <FivePlaces
-          key={combination.version}
-          brand={brand}
-          combination={combination}
-          reorder={reorderCombinationAction}
-        />
+        <FivePlaces brand={brand} combination={combination} reorder={reorderCombinationAction} />
       </div>
       <SheetSection title="As cloth">
         <Ground className="grid grid-cols-2 gap-6 border border-hairline p-4 sm:grid-cols-3 print:grid-cols-3 print:border-0 print:p-0">
