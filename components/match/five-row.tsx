@@ -37,51 +37,47 @@ export function FiveRow(props: FiveRowProps) {
       onPointerLeave={() => onPoint(false)}
       onFocus={({ target }) => target.matches(':focus-visible') && onPoint(true)}
       onBlur={() => onPoint(false)}
-      className="flex items-start gap-x-4 pt-3 pb-1.5 print:pb-3"
+      className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-4 pt-3 pb-1.5 print:pb-3"
     >
       <WoundSample hex={shade.hex} className="mt-0.5" />
-      <div className="min-w-0 grow">
-        <div className="flex flex-wrap justify-between gap-x-4">
-          <div className="min-w-0">
-            <p className="font-title text-lg leading-tight break-words">{shade.label}</p>
-            <p className="text-sm text-ink-soft">
-              {shade.name ? `No. ${shade.number} · ` : ''}
-              {place.inPhotograph
-                ? `${inPercent(place.share)} of the picture`
-                : 'not in the picture'}
-              {place.locked ? (
-                <span className="whitespace-nowrap">
-                  {' · '}
-                  <Lock aria-hidden="true" className="inline size-3.5 align-[-2px]" /> locked
-                </span>
-              ) : null}
-            </p>
-          </div>
-          <Figures place={place} />
+      <div className="flex flex-wrap justify-between gap-x-4 sm:flex-nowrap">
+        <div className="min-w-0">
+          <p className="font-title text-lg leading-tight break-words">{shade.label}</p>
+          <p className="text-sm text-ink-soft">
+            {shade.name ? `No. ${shade.number} · ` : ''}
+            {place.inPhotograph ? `${inPercent(place.share)} of the picture` : 'not in the picture'}
+            {place.locked ? (
+              <span className="whitespace-nowrap">
+                {' · '}
+                <Lock aria-hidden="true" className="inline size-3.5 align-[-2px]" /> locked
+              </span>
+            ) : null}
+          </p>
         </div>
-        <div className="mt-0.5 -ml-2.5 flex flex-wrap print:hidden">
-          <Button
-            size="small"
-            variant="quiet"
-            aria-pressed={held}
-            disabled={!place.inPhotograph}
-            className="aria-pressed:underline"
-            onClick={() => onHold(!held)}
-          >
-            Show <span className="sr-only">{shade.label} on the picture</span>
-          </Button>
-          <Button
-            size="small"
-            variant="quiet"
-            onClick={() => (place.locked ? control.unlock(shade.id) : control.lock(shade.id))}
-          >
-            {place.locked ? 'Unlock' : 'Lock'} {of}
-          </Button>
-          <Swap shade={shade} others={others} onSwap={(to) => control.swap(shade.id, to)} />
-          <Button size="small" variant="quiet" onClick={() => control.exclude(shade.id)}>
-            Exclude {of}
-          </Button>
-        </div>
+        <Figures place={place} />
+      </div>
+      <div className="mt-0.5 -ml-2.5 flex flex-wrap max-sm:col-span-2 sm:col-start-2 print:hidden">
+        <Button
+          size="small"
+          variant="quiet"
+          aria-pressed={held}
+          disabled={!place.inPhotograph}
+          className="aria-pressed:underline"
+          onClick={() => onHold(!held)}
+        >
+          Show <span className="sr-only">{shade.label} on the picture</span>
+        </Button>
+        <Button
+          size="small"
+          variant="quiet"
+          onClick={() => (place.locked ? control.unlock(shade.id) : control.lock(shade.id))}
+        >
+          {place.locked ? 'Unlock' : 'Lock'} {of}
+        </Button>
+        <Swap shade={shade} others={others} onSwap={(to) => control.swap(shade.id, to)} />
+        <Button size="small" variant="quiet" onClick={() => control.exclude(shade.id)}>
+          Exclude {of}
+        </Button>
       </div>
     </li>
   )
@@ -95,7 +91,7 @@ function inPercent(share: number): string {
 
 function Figures({ place: { deltaE, presence } }: { place: MatchPlace }) {
   return (
-    <p className="flex flex-wrap gap-x-3 text-sm text-ink-faint sm:block sm:text-right">
+    <p className="flex flex-wrap gap-x-3 text-sm text-ink-faint sm:block sm:shrink-0 sm:text-right">
       {deltaE === null ? null : (
         <abbr
           title="Mean ΔE00 to the parts of the picture it stands for"

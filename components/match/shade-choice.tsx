@@ -15,16 +15,16 @@ export function ShadeChoice({
   children: ReactNode
 }) {
   return (
-    <li className="flex items-center gap-x-3 py-2">
+    <li className="flex items-center gap-x-3 py-2 max-[23rem]:flex-wrap">
       <WoundSample hex={shade.hex} className="h-8 w-auto" />
-      <span className="min-w-0 grow">
+      <span className="min-w-0 flex-1">
         <span className="block font-title leading-tight break-words">{shade.label}</span>
         <span className="text-sm text-ink-faint">
           {shade.name ? `No. ${shade.number} · ` : ''}
           <span className="whitespace-nowrap">ΔE00 {deltaE.toFixed(1)}</span>
         </span>
       </span>
-      <span className="flex shrink-0 gap-1">{children}</span>
+      <span className="flex shrink-0 gap-1 max-[23rem]:w-full">{children}</span>
     </li>
   )
 }

@@ -37,6 +37,9 @@ export function wishesQuery({ reading, lock, exclude, apart }: MatchWishes): str
   return query.toString()
 }
 
+/** What is asked besides which reading is shown. */
+const askedOf = (wishes: MatchWishes) => wishesQuery({ ...wishes, reading: 'true' })
+
 /**
  * The wishes of the page's address. Each change is a step of the browser's history, so that going
  * back undoes it and a reload keeps it.
@@ -60,14 +63,14 @@ export function useWishes(): WishesControl {
   const change = (changes: Partial<MatchWishes>) => {
     const to = { ...wishes, ...changes }
     if (wishesQuery(to) === query) return
-    setBefore([...before, wishes])
+    if (askedOf(to) !== askedOf(wishes)) setBefore([...before, wishes])
     go(to)
   }
-  const last = before.findLastIndex((one) => wishesQuery(one) !== query)
+  const last = before.findLastIndex((one) => askedOf(one) !== askedOf(wishes))
   const { reading, lock, exclude } = wishes
   return {
     wishes,
-    any: wishesQuery({ ...wishes, reading: 'true' }) !== '',
+    any: askedOf(wishes) !== '',
     query,
     change,
     lock: (id) => change({ lock: including(lock, id), exclude: without(exclude, id) }),
@@ -83,7 +86,7 @@ export function useWishes(): WishesControl {
     ...(last >= 0 && {
       undo: () => {
         setBefore(before.slice(0, last))
-        go(before[last]!)
+        go({ ...before[last]!, reading })
       },
     }),
   }
