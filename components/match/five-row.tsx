@@ -39,7 +39,7 @@ export function FiveRow(props: FiveRowProps) {
       onBlur={() => onPoint(false)}
       className="grid grid-cols-[auto_minmax(0,1fr)] gap-x-4 pt-3 pb-1.5 print:pb-3"
     >
-      <WoundSample hex={shade.hex} className="mt-0.5" />
+      <WoundSample hex={shade.hex} className="mt-0.5 sm:row-span-2" />
       <div className="flex flex-wrap justify-between gap-x-4 sm:flex-nowrap">
         <div className="min-w-0">
           <p className="font-title text-lg leading-tight break-words">{shade.label}</p>

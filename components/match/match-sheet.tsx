@@ -80,7 +80,7 @@ export function MatchSheet(props: MatchSheetProps) {
         unavailable={new Set(matches.filter((one) => !isMatch(one)).map(({ kind }) => kind))}
         onChange={(kind) => control.change({ reading: kind })}
       />
-      <div className="mt-5 grid gap-x-10 gap-y-8 lg:grid-cols-2 print:grid-cols-2">
+      <div className="mt-5 grid gap-x-10 gap-y-8 min-[1000px]:grid-cols-2 print:grid-cols-2">
         <div className="min-w-0 space-y-4">
           <div ref={picture}>
             <TouchPicture

@@ -23,7 +23,7 @@ export function StrikingChips({
   if (colors.length === 0 || shades.length === 0) return null
   const byId = new Map(shades.map((shade) => [shade.id, shade]))
   return (
-    <section aria-labelledby="striking" className="lg:col-span-2 print:hidden">
+    <section aria-labelledby="striking" className="min-[1000px]:col-span-2 print:hidden">
       <h2 id="striking" className="text-lg">
         Striking colours
       </h2>
