@@ -18,7 +18,6 @@ export interface EditableCellProps {
   options?: readonly { value: string; label: string }[]
   /** Something to know before saving. */
   hint?: string
-  /** Which of the answer's field errors belong here; others show as well. */
   onSave: (typed: string) => Promise<ActionResult<unknown>>
   className?: string
 }
@@ -113,7 +112,7 @@ export function EditableCell({
     },
   }
   return (
-    <div className="min-w-20">
+    <div className={error ? 'min-w-44 text-left whitespace-normal' : 'min-w-16'}>
       {options ? (
         <select {...control}>
           {options.map((option) => (

@@ -77,8 +77,8 @@ export function ImportColumns({
       </div>
       {hasReadings ? (
         <Field
-          label="Readings that do not say light and observer were read under"
-          hint="As the instrument was set. What a row says itself goes before this."
+          label="Light and observer, where a row does not say"
+          hint="As the instrument was set. What a row itself says goes first."
           className="mt-5 max-w-96"
         >
           <Select

@@ -56,7 +56,7 @@ export function NumberCell({ shade, edits }: CellProps) {
     <EditableCell
       label={`Number of ${shade.label}`}
       value={shade.number}
-      onSave={(number) => save(shade, { number })}
+      onSave={(number) => save(shade, () => ({ number }))}
     >
       {shade.number}
     </EditableCell>
@@ -76,7 +76,7 @@ export function NameCell({ shade, edits }: CellProps) {
     <EditableCell
       label={`Name of ${shade.label}`}
       value={shade.name ?? ''}
-      onSave={(name) => save(shade, { name })}
+      onSave={(name) => save(shade, () => ({ name }))}
       className="min-w-36"
     >
       {shown}
@@ -96,7 +96,7 @@ export function StatusCell({ shade, edits }: CellProps) {
       label={`Status of ${shade.label}`}
       value={shade.status}
       options={STATUS_OPTIONS}
-      onSave={(status) => save(shade, { status: status as ShadeStatus })}
+      onSave={(status) => save(shade, () => ({ status: status as ShadeStatus }))}
       className="min-w-28"
     >
       {shown}
@@ -120,9 +120,16 @@ export function ReadingCell({ shade, edits, of }: CellProps & { of: 'L' | 'a' | 
           : undefined
       }
       onSave={(typed) =>
-        save(shade, {
-          color: { kind: 'lab', L, a, b, terms: `D65/${shade.observer}`, [of]: typed },
-        })
+        save(shade, ({ lab, observer }) => ({
+          color: {
+            kind: 'lab',
+            L: lab[0],
+            a: lab[1],
+            b: lab[2],
+            terms: `D65/${observer}`,
+            [of]: typed,
+          },
+        }))
       }
       className="text-right"
     >

@@ -55,7 +55,7 @@ export function ShadeFilter({
         />
         <Search
           aria-hidden="true"
-          className="pointer-events-none absolute top-3 left-3 size-4 text-ink-faint"
+          className="pointer-events-none absolute inset-y-0 left-3 my-auto size-4 text-ink-faint"
         />
       </Field>
       <fieldset className="flex flex-wrap gap-x-4">

@@ -18,7 +18,7 @@ export function ShadeNeighbours({
   const isMixed = neighbours.some((neighbour) => neighbour.shade.observer !== shade.observer)
   return (
     <>
-      <ul role="list" className="space-y-2">
+      <ul role="list" className="space-y-2 pt-1">
         {neighbours.map(({ shade: neighbour, difference }) => (
           <li key={neighbour.id}>
             <AppLink

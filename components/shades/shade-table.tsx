@@ -8,7 +8,7 @@ import {
 } from '@tanstack/react-table'
 import { ArrowDown, ArrowUp } from 'lucide-react'
 import { useRouter } from 'next/navigation'
-import { useMemo, useState, useTransition } from 'react'
+import { useMemo, useOptimistic, useState, useTransition } from 'react'
 
 import { reach } from '@/components/reach'
 import { cn } from '@/components/ui/cn'
@@ -37,9 +37,18 @@ export interface ShadeTableProps {
 }
 
 /** The shades of a line as a ledger: sorted, filtered and paged by the address, edited in place. */
-export function ShadeTable({ place, shades, total, filter, edits, actions }: ShadeTableProps) {
+export function ShadeTable({
+  place,
+  shades,
+  total,
+  filter: loaded,
+  edits,
+  actions,
+}: ShadeTableProps) {
   const router = useRouter()
   const [loading, startLoading] = useTransition()
+  // What was pressed shows at once; the rows follow when the server has them.
+  const [filter, showFilter] = useOptimistic(loaded)
   const [rowSelection, setRowSelection] = useState<RowSelectionState>({})
   const save = useSaveShade(place, shades, actions.update)
   const terms = {
@@ -50,9 +59,11 @@ export function ShadeTable({ place, shades, total, filter, edits, actions }: Sha
       return reach(actions.reorder(brand, { lineSlug, shadeIds: [shade.id], place: typed }))
     },
   }
-  const go = (next: Partial<ShadeTableFilter>) =>
+  const go = (change: Partial<ShadeTableFilter>) =>
     startLoading(() => {
-      router.push(tableHref(place, { ...filter, page: 1, ...next }) as never, { scroll: false })
+      const next = { ...filter, page: 1, ...change }
+      showFilter(next)
+      router.push(tableHref(place, next) as never, { scroll: false })
     })
 
   const sorting = useMemo(
@@ -89,16 +100,13 @@ export function ShadeTable({ place, shades, total, filter, edits, actions }: Sha
       <LiveRegion>
         {loading ? 'Loading shades…' : `${total} ${total === 1 ? 'shade fits' : 'shades fit'}.`}
       </LiveRegion>
-      {edits ? (
-        <SelectedShades
-          place={place}
-          actions={actions}
-          shadeIds={chosen}
-          onClear={() => setRowSelection({})}
-        />
-      ) : null}
       {shades.length > 0 ? (
-        <div className={cn('mt-4 transition-opacity', loading && 'opacity-60')} aria-busy={loading}>
+        <div className={cn('mt-3 transition-opacity', loading && 'opacity-60')} aria-busy={loading}>
+          {edits ? (
+            <p className="mb-1 text-sm text-ink-faint print:hidden">
+              Press what you want to change. Enter saves, Escape puts it back.
+            </p>
+          ) : null}
           <ShadeTableContext value={terms}>
             <Ledger caption="Shades">
               <thead>
@@ -119,18 +127,16 @@ export function ShadeTable({ place, shades, total, filter, edits, actions }: Sha
                             <button
                               type="button"
                               onClick={header.column.getToggleSortingHandler()}
-                              className="inline-flex min-h-8 items-center gap-1 hover:text-ink hover:underline pointer-coarse:min-h-11"
+                              className={cn(HEADER, 'hover:text-ink hover:underline')}
                             >
                               <table.FlexRender header={header} />
-                              {sorted === 'asc' ? (
-                                <ArrowUp aria-hidden className="size-3.5" />
-                              ) : null}
-                              {sorted === 'desc' ? (
-                                <ArrowDown aria-hidden className="size-3.5" />
-                              ) : null}
+                              {sorted === 'asc' ? <ArrowUp {...ARROW} /> : null}
+                              {sorted === 'desc' ? <ArrowDown {...ARROW} /> : null}
                             </button>
                           ) : (
-                            <table.FlexRender header={header} />
+                            <span className={HEADER}>
+                              <table.FlexRender header={header} />
+                            </span>
                           )}
                         </th>
                       )
@@ -153,8 +159,19 @@ export function ShadeTable({ place, shades, total, filter, edits, actions }: Sha
           </ShadeTableContext>
         </div>
       ) : null}
+      {edits ? (
+        <SelectedShades
+          place={place}
+          actions={actions}
+          shadeIds={chosen}
+          onClear={() => setRowSelection({})}
+        />
+      ) : null}
     </div>
   )
 }
+
+const HEADER = 'inline-flex min-h-8 items-center gap-1 pointer-coarse:min-h-11'
+const ARROW = { 'aria-hidden': true, className: 'size-3.5' } as const
 
 const classOf = (column: string) => (NUMBER_COLUMNS.includes(column) ? 'number' : undefined)

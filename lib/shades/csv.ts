@@ -207,11 +207,9 @@ function readRow(
   }
 }
 
+/** A message of a form as the end of "Row 14, L: …". */
 const lower = (message: string) =>
-  (message.startsWith('L ') ? message : message.charAt(0).toLowerCase() + message.slice(1)).replace(
-    /\.$/,
-    '',
-  )
+  message.charAt(0).toLowerCase() + message.slice(1).replace(/\.$/, '')
 
 const labCell = labFields as Record<'L' | 'a' | 'b', z.ZodType<number, string>>
 

@@ -84,7 +84,10 @@ const reading = (what: string, least: number, most: number) =>
       context.addIssue({ code: 'custom', message })
       return z.NEVER
     })
-    .refine((value) => value >= least && value <= most, `${what} is from ${least} to ${most}.`)
+    .refine(
+      (value) => value >= least && value <= most,
+      `Give ${what} from ${String(least).replace('-', '−')} to ${most}.`,
+    )
 
 /** Lab coordinates as numbers or as text; each says what is wrong with it. */
 export const labFields = {

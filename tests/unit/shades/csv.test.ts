@@ -126,7 +126,7 @@ describe('a row', () => {
     ['1,,,abc,0,0,D65,10,,', 'Row 2, L: “abc” is not a number: give L'],
     ['1,,,50,,0,D65,10,,', 'Row 2, a: give a'],
     ['1,,,5 0,0,0,D65,10,,', 'Row 2, L: “5 0” is not a number'],
-    ['1,,,120,0,0,D65,10,,', 'Row 2, L: L is from 0 to 100'],
+    ['1,,,120,0,0,D65,10,,', 'Row 2, L: give L from 0 to 100'],
     [',,,50,0,0,D65,10,,', 'Row 2, number: give the shade a number'],
     ['1,,done,50,0,0,D65,10,,', 'Row 2, status: “done” is no status: write target, dipped,'],
     ['1,,,,,,,,#12,', 'Row 2, hex: give a hex colour such as #7a8b4f'],

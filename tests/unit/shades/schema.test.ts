@@ -70,8 +70,8 @@ describe('a colour', () => {
   test.each([
     [{ L: '' }, 'Give L.'],
     [{ L: 'abc' }, '“abc” is not a number: give L.'],
-    [{ L: '101' }, 'L is from 0 to 100.'],
-    [{ a: '-151' }, 'a is from -150 to 150.'],
+    [{ L: '101' }, 'Give L from 0 to 100.'],
+    [{ a: '-151' }, 'Give a from −150 to 150.'],
   ])('says what is wrong with %j', (wrong, message) => {
     const result = shadeColor.safeParse({ ...lab, ...wrong, terms: 'D65/2' })
     expect(messagesOf(result)).toEqual([message])
