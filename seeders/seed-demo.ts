@@ -79,6 +79,6 @@ function shadeColumns({ lab, hex, order, ...rest }: DemoShade) {
     hex,
     illuminant: 'D65' as const,
     observer: lab ? (10 as const) : (2 as const),
-    position: order,
+    position: order - 1,
   }
 }
