@@ -11,7 +11,7 @@ import { Notice } from '@/components/ui/notice'
 import { Spinner } from '@/components/ui/spinner'
 import { toastDone } from '@/components/ui/toast'
 import type { ImportPreview } from '@/lib/shades/present'
-import type { CsvMapping, ReadingTerms } from '@/lib/shades/schema'
+import { SHADE_LIMITS, type CsvMapping, type ReadingTerms } from '@/lib/shades/schema'
 
 import { ImportColumns } from './import-columns'
 import { ImportRows } from './import-rows'
@@ -59,9 +59,15 @@ export function ImportShades({
   }
 
   function choose(next: CsvSource) {
-    setSource(next)
     setPreview(undefined)
     setTerms(null)
+    // More than this does not reach the server, which would look like a lost connection.
+    if (new TextEncoder().encode(next.text).length > SHADE_LIMITS.importText) {
+      setSource(undefined)
+      setProblem(`${next.name} is over 2.5 MB. Import it in smaller parts. Nothing was read.`)
+      return
+    }
+    setSource(next)
     void look(next, null, null)
   }
 

@@ -30,7 +30,7 @@ export function SampleBook({
           </div>
           <ul
             role="list"
-            className="grid grid-cols-[repeat(auto-fill,minmax(7rem,1fr))] gap-x-4 gap-y-6 sm:grid-cols-[repeat(auto-fill,minmax(9.25rem,1fr))] sm:gap-x-5"
+            className="grid grid-cols-[repeat(auto-fill,minmax(7rem,1fr))] gap-x-4 gap-y-6 sm:grid-cols-[repeat(auto-fill,minmax(9.25rem,1fr))] sm:gap-x-5 print:grid-cols-[repeat(auto-fill,minmax(7rem,1fr))]"
           >
             {shades.map((shade) => (
               <li key={shade.id} className="min-w-0">

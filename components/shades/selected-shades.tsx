@@ -62,7 +62,7 @@ export function SelectedShades({
       {count > 0 ? (
         <section
           aria-label="Chosen shades"
-          className="z-10 mt-4 flex flex-wrap items-center gap-x-6 gap-y-3 border-y border-rule bg-paper py-3 md:sticky md:bottom-0 print:hidden"
+          className="z-10 mt-4 flex flex-wrap items-center gap-x-4 gap-y-3 border-y border-rule bg-paper py-3 md:sticky md:bottom-0 print:hidden"
         >
           <p className="font-medium">{shades} chosen</p>
           <form

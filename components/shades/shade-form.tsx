@@ -121,7 +121,7 @@ export function ShadeForm(props: ShadeFormProps) {
     if (answer.ok) {
       requestKey.current = undefined
       toastDone(shade ? `${answer.data.label} saved.` : `${answer.data.label} added.`)
-      if (shade) reset(valuesOf(answer.data))
+      if (shade) reset(valuesOf(answer.data), { keepDirtyValues: false, keepErrors: false })
       else if (another.current) {
         reset({ ...EMPTY, status: values.status, color: { ...EMPTY.color, ...keptOf(values) } })
         setFocus('number')

@@ -174,4 +174,7 @@ export function ShadeTable({
 const HEADER = 'inline-flex min-h-8 items-center gap-1 pointer-coarse:min-h-11'
 const ARROW = { 'aria-hidden': true, className: 'size-3.5' } as const
 
-const classOf = (column: string) => (NUMBER_COLUMNS.includes(column) ? 'number' : undefined)
+const classOf = (column: string) => {
+  if (column === 'select') return 'print:hidden'
+  return NUMBER_COLUMNS.includes(column) ? 'number' : undefined
+}

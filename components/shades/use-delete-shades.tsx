@@ -92,6 +92,7 @@ export function useDeleteShades({
         ) : null
       }
       kept="The combinations stay as they are and show these shades as deleted. You can take the deletion back right after."
+      cancelLabel={asked?.shadeIds.length === 1 ? 'Keep it' : 'Keep them'}
       confirmLabel={
         asked?.shadeIds.length === 1
           ? 'Delete shade'
