@@ -11,6 +11,7 @@ import { inTransaction, Photograph } from '@/models'
 import { decodePhotograph, PhotographError, sniffPhotograph } from './decode'
 import { canUploadPhotographs } from './policy'
 import { findSameFile, uuidOrNone } from './queries'
+import { readColors } from './read-colors'
 import { FORMATS_TAKEN, UPLOAD_MIMES, type PhotographIdInput } from './schema'
 
 /** The photograph is taken in, or the line has that file already. */
@@ -34,8 +35,9 @@ export async function confirmUpload(
   if (!photograph) throw new NotFoundError()
   if (photograph.state !== 'pending') return { kind: 'added', photographId }
 
+  let contentType: string
   try {
-    await requireWhatWasAnnounced(photograph)
+    contentType = await requireWhatWasAnnounced(photograph)
   } catch (error) {
     if (error instanceof PhotographError) await discardUpload(photograph)
     throw error
@@ -44,7 +46,7 @@ export async function confirmUpload(
   try {
     await inTransaction(async (transaction) => {
       const [changed] = await Photograph.update(
-        { state: 'waiting' },
+        { state: 'waiting', contentType },
         { where: { id: photographId, state: 'pending' }, transaction },
       )
       // Somebody confirmed it a moment ago; that one's job is enough.
@@ -84,8 +86,11 @@ async function discardUpload({ id, objectKey }: Photograph): Promise<void> {
 
 const NOT_AS_ANNOUNCED = 'The file that arrived is not the one that was sent. Add it again.'
 
-/** @throws PhotographError for a file to be refused, InvalidError when none has arrived yet */
-async function requireWhatWasAnnounced(photograph: Photograph): Promise<void> {
+/**
+ * What the file is by its bytes; a browser only knows its name.
+ * @throws PhotographError for a file to be refused, InvalidError when none has arrived yet
+ */
+async function requireWhatWasAnnounced(photograph: Photograph): Promise<string> {
   const head = await headObject(photograph.objectKey)
   if (!head) throw new InvalidError('The file has not arrived. Send it again.')
   const { byteLength, contentType, sha256 } = photograph
@@ -100,11 +105,6 @@ async function requireWhatWasAnnounced(photograph: Photograph): Promise<void> {
   if (!(UPLOAD_MIMES as readonly string[]).includes(mime)) {
     throw new PhotographError('format', `Photographs are taken as ${FORMATS_TAKEN}.`)
   }
-  if (mime !== contentType) {
-    throw new PhotographError(
-      'format',
-      'The file is not of the type its name says. Export it again, then add it.',
-    )
-  }
-  await decodePhotograph(bytes)
+  readColors((await decodePhotograph(bytes)).image)
+  return mime
 }

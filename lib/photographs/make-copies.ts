@@ -22,12 +22,14 @@ export async function makeCopies(
   original: Buffer,
   format: Derivative['format'],
 ): Promise<Derivative[]> {
-  const { data, info } = await sharp(original, { failOn: 'error', limitInputPixels: MAX_PIXELS })
+  const picture = sharp(original, { failOn: 'error', limitInputPixels: MAX_PIXELS })
     .autoOrient()
     .resize(WIDTHS.at(-1), TALLEST, { fit: 'inside', withoutEnlargement: true })
     .toColourspace('srgb')
-    .raw({ depth: 'uchar' })
-    .toBuffer({ resolveWithObject: true })
+  // sharp leaves 16-bit pictures that carry a profile in Display P3 unless it is told.
+  const { space, icc } = await picture.metadata()
+  if (space === 'rgb16' && icc) picture.withIccProfile('srgb')
+  const { data, info } = await picture.raw({ depth: 'uchar' }).toBuffer({ resolveWithObject: true })
   const { width: widest, height, channels } = info
   const raw = { width: widest, height, channels }
   const widths = [...new Set([...WIDTHS.filter((width) => width < widest), widest])]

@@ -1,9 +1,9 @@
+import { createHash } from 'node:crypto'
 import { promisify } from 'node:util'
 import { deflate } from 'node:zlib'
 
 import { Op, type Transaction } from 'sequelize'
 
-import { readPhotographColors } from '@/lib/color/photograph-colors'
 import { strikingColors } from '@/lib/color/striking'
 import { enqueue } from '@/lib/jobs/queue'
 import { BY_POSITION, MATCHABLE } from '@/lib/shades/queries'
@@ -13,6 +13,7 @@ import { inTransaction, Line, Photograph, Reading, Shade } from '@/models'
 import { computeMatches } from './compute-matches'
 import { decodePhotograph, PhotographError } from './decode'
 import { makeCopies } from './make-copies'
+import { readColors } from './read-colors'
 
 const compress = promisify(deflate)
 
@@ -27,12 +28,9 @@ export async function readPhotograph(photographId: string): Promise<void> {
   if (!photograph || photograph.state === 'pending' || photograph.state === 'ready') return
   await setState(photographId, { state: 'reading', failure: null })
   try {
-    const original = await getObject(photograph.objectKey)
-    if (!original) {
-      throw new PhotographError('empty', 'Its file is gone from the picture store. Add it again.')
-    }
+    const original = await getOriginal(photograph)
     const { image, width, height } = await decodePhotograph(original)
-    const colors = readPhotographColors(image)
+    const colors = readColors(image)
     // The line's revision before its shades: a change in between leaves the reading marked stale.
     const line = await Line.findByPk(photograph.lineId, { rejectOnEmpty: true })
     const shades = await listShadesToMatch(line)
@@ -64,7 +62,7 @@ export async function readPhotograph(photographId: string): Promise<void> {
       await enqueue('copy-photograph', { photographId }, transaction)
     })
   } catch (error) {
-    if (!isAboutThePicture(error)) throw error
+    if (!(error instanceof PhotographError)) throw error
     await failReading(photographId, error.message)
   }
 }
@@ -78,14 +76,26 @@ export async function failReading(photographId: string, failure: string): Promis
 export async function copyPhotograph(photographId: string): Promise<void> {
   const photograph = await Photograph.findByPk(photographId)
   if (photograph?.state !== 'ready') return
-  const original = await getObject(photograph.objectKey)
-  if (!original) return
+  const original = await getOriginal(photograph)
   const copies = await makeCopies(photograph, original, 'avif')
   const others = photograph.derivatives.filter(({ format }) => format !== 'avif')
   await Photograph.update(
     { derivatives: [...others, ...copies] },
     { where: { id: photographId, state: 'ready', sha256: photograph.sha256 } },
   )
+}
+
+/** The file that was confirmed. @throws PhotographError when it is gone or another */
+async function getOriginal({ objectKey, sha256 }: Photograph): Promise<Buffer> {
+  const original = await getObject(objectKey)
+  if (!original) {
+    throw new PhotographError('empty', 'Its file is gone from the picture store. Add it again.')
+  }
+  // The form that it was sent with takes a file for minutes after the confirmation.
+  if (createHash('sha256').update(original).digest('hex') !== sha256) {
+    throw new PhotographError('damaged', 'Its file is not the one that was added. Add it again.')
+  }
+  return original
 }
 
 function setState(
@@ -107,6 +117,3 @@ async function listShadesToMatch({ brandId, id: lineId }: Line) {
   })
   return shades.map(({ id, labL, labA, labB }) => ({ id, lab: [labL, labA, labB] as const }))
 }
-
-const isAboutThePicture = (error: unknown): error is PhotographError | RangeError =>
-  error instanceof PhotographError || error instanceof RangeError

@@ -2,7 +2,7 @@ import { once } from 'node:events'
 import { spawn, type ChildProcess } from 'node:child_process'
 import { inflateSync } from 'node:zlib'
 
-import sharp from 'sharp'
+import sharp, { type Sharp } from 'sharp'
 import { beforeAll, beforeEach, describe, expect, it, vi } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
@@ -17,7 +17,7 @@ import { presentPhotograph } from '@/lib/photographs/present'
 import { getDerivative, getPhotograph } from '@/lib/photographs/queries'
 import { copyPhotograph, readPhotograph } from '@/lib/photographs/read-photograph'
 import { rereadPhotograph } from '@/lib/photographs/reread-photograph'
-import { deleteObjects, getObject } from '@/lib/storage/objects'
+import { deleteObjects, getObject, putObject } from '@/lib/storage/objects'
 import { setShadeStatus } from '@/lib/shades/set-shade-status'
 import { Photograph, Reading, sequelize, type Line, type Shade } from '@/models'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
@@ -52,6 +52,7 @@ function takeJobs(photographId: string) {
   })
 }
 
+const deep = (picture: Sharp) => picture.toColourspace('rgb16')
 const withReading = (id: string) => getPhotograph(actor, line.slug, id, { withReading: true })
 
 describe('reading a photograph', () => {
@@ -168,6 +169,29 @@ describe('the copies for the screen', () => {
     }
   })
 
+  it.each([
+    ['16 bits in Display P3', (red: Sharp) => deep(red).withIccProfile('p3').png()],
+    ['16 bits in sRGB', (red: Sharp) => deep(red).withIccProfile('srgb').png()],
+    ['16 bits without a profile', (red: Sharp) => deep(red).png()],
+    ['8 bits in Display P3', (red: Sharp) => red.withIccProfile('p3').png()],
+  ])('keep the colour of an original of %s', async (_, save) => {
+    const [r, g, b] = [208, 48, 32]
+    const side = 40 + Math.floor(Math.random() * 400)
+    const create = { width: side, height: 40, channels: 3, background: { r, g, b } } as const
+    const id = await addPhotograph(await save(sharp({ create })).toBuffer())
+    await readPhotograph(id)
+    await copyPhotograph(id)
+    const { photograph } = await withReading(id)
+    expect(photograph.derivatives.map(({ format }) => format)).toEqual(['webp', 'avif'])
+    for (const copy of photograph.derivatives) {
+      const body = await getObject(derivativeKey(photograph, copy))
+      const { channels } = await sharp(body!).stats()
+      const means = channels.map(({ mean }) => mean)
+      for (const [at, value] of [r, g, b].entries())
+        expect(Math.abs(means[at]! - value), `${copy.format}: ${means}`).toBeLessThan(4)
+    }
+  })
+
   it('are never wider than the original', async () => {
     const id = await addPhotograph(await makePicture({ width: 300, height: 200 }))
     await readPhotograph(id)
@@ -197,6 +221,17 @@ describe('a reading that fails', () => {
     expect(failed).toMatchObject({ state: 'failed', failure: expect.stringMatching(/gone/) })
     await rereadPhotograph(actor, { photographId: id })
     expect((await failed.reload()).state).toBe('waiting')
+  })
+
+  it('says so when the file was replaced after it was confirmed', async () => {
+    const id = await addPhotograph(await makePicture())
+    const { photograph } = await getPhotograph(actor, line.slug, id)
+    await putObject(photograph.objectKey, await makePicture(), 'image/jpeg')
+    await readPhotograph(id)
+    expect(await Photograph.findByPk(id)).toMatchObject({
+      state: 'failed',
+      failure: expect.stringMatching(/not the one that was added/),
+    })
   })
 
   it('is tried again while the store is away, and says so after the last try', async () => {

@@ -45,6 +45,15 @@ describe('adding a photograph', () => {
     expect(photograph).toMatchObject({ state: 'waiting', title: 'Hillside' })
   })
 
+  it('goes by what the file is, not by what its name says', async () => {
+    const png = await sharp(await makePicture())
+      .png()
+      .toBuffer()
+    const id = await uploadTo(actor, line, png, { fileName: 'saved.jpg' })
+    expect(await confirmUpload(actor, { photographId: id })).toMatchObject({ kind: 'added' })
+    expect((await Photograph.findByPk(id))!.contentType).toBe('image/png')
+  })
+
   it('confirming ten times at once takes it in once, with the same answer', async () => {
     const id = await uploadTo(actor, line, await makePicture())
     const answers = await Promise.all(
@@ -136,12 +145,19 @@ describe('a file that is refused leaves a message and nothing else', () => {
     ['a page with a script', () => html, /not a picture/],
     ['a cut-off JPEG', async () => (await makePicture()).subarray(0, 3000), /damaged or cut short/],
     [
-      'a PNG that says it is a JPEG',
-      async () =>
-        sharp(await makePicture())
+      'a picture that is transparent all over',
+      () =>
+        sharp({
+          create: {
+            width: 60,
+            height: 40,
+            channels: 4,
+            background: { r: 9, g: 9, b: 9, alpha: 0 },
+          },
+        })
           .png()
           .toBuffer(),
-      /not of the type/,
+      /transparent all over/,
     ],
     [
       'a GIF',
