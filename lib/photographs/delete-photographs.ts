@@ -2,6 +2,7 @@ import { Op, UniqueConstraintError } from 'sequelize'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { ConflictError, NotFoundError } from '@/lib/errors'
+import { enqueue } from '@/lib/jobs/queue'
 import { inTransaction, Photograph } from '@/models'
 
 import { canDeletePhotographs } from './policy'
@@ -46,6 +47,14 @@ export async function restorePhotographs(
       })
       const count = await Photograph.count({ where: mine, transaction })
       if (count !== new Set(photographIds).size) throw new NotFoundError()
+      // A job that met them deleted left them as they were: nobody else would read them.
+      const unread = await Photograph.findAll({
+        attributes: ['id'],
+        where: { ...mine, state: ['waiting', 'reading'] },
+        transaction,
+      })
+      for (const { id } of unread)
+        await enqueue('read-photograph', { photographId: id }, transaction)
       return { count }
     })
   } catch (error) {

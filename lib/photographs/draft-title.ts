@@ -13,5 +13,7 @@ export function draftTitle(fileName: string): string {
     .replace(/[_\s]+|(?<=\p{L})-(?=\p{L})/gu, ' ')
     .trim()
   const title = words.charAt(0).toLocaleUpperCase('en-GB') + words.slice(1)
-  return [...title].slice(0, PHOTOGRAPH_LIMITS.title).join('').trim() || 'Untitled photograph'
+  // Half a character may be left at the cut.
+  const cut = title.slice(0, PHOTOGRAPH_LIMITS.title).replace(/[\ud800-\udbff]$/, '')
+  return cut.trim() || 'Untitled photograph'
 }

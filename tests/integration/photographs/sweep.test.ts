@@ -37,6 +37,16 @@ function age(id: string, column: 'updated_at' | 'deleted_at', milliseconds: numb
   })
 }
 
+/** The jobs about a photograph; deleting them is what doing them comes to. */
+async function jobsOf(id: string, what: 'SELECT' | 'DELETE'): Promise<unknown[]> {
+  const [rows] = await sequelize().query(
+    `${what === 'SELECT' ? 'SELECT id' : 'DELETE'} FROM pgboss.job
+     WHERE name = 'read-photograph' AND data->>'photographId' = $id`,
+    { bind: { id } },
+  )
+  return rows
+}
+
 describe('the sweep', () => {
   it('removes an upload that was never confirmed, row and object, and not before its time', async () => {
     const id = await uploadTo(actor, line, await makePicture())
@@ -109,6 +119,19 @@ describe('undoing a delete', () => {
     expect(await Photograph.count({ where: { lineId: line.id } })).toBe(0)
     expect(await restorePhotographs(actor, { photographIds })).toEqual({ count: 2 })
     expect(await Photograph.count({ where: { lineId: line.id } })).toBe(2)
+  })
+
+  it('has a photograph read that was deleted before its turn', async () => {
+    const id = await uploadTo(actor, line, await makePicture())
+    await confirmUpload(actor, { photographId: id })
+    await deletePhotographs(actor, { photographIds: [id] })
+    // The job comes and finds nothing to read.
+    await readPhotograph(id)
+    await jobsOf(id, 'DELETE')
+    await restorePhotographs(actor, { photographIds: [id] })
+    expect(await jobsOf(id, 'SELECT')).toHaveLength(1)
+    await readPhotograph(id)
+    expect((await Photograph.findByPk(id))!.state).toBe('ready')
   })
 
   it('is refused once the same file is there again', async () => {
