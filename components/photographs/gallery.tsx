@@ -110,7 +110,7 @@ export function Gallery({
                   className="print:hidden"
                   label={
                     <>
-                      Select<span className="sr-only"> {title}</span>
+                      Select <span className="sr-only">{title}</span>
                     </>
                   }
                   checked={chosen.has(id)}

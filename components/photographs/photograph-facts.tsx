@@ -12,7 +12,7 @@ const outwards = (url: string) =>
     'Not given'
   )
 
-/** What is said about a photograph, for those who may not change it. */
+/** What is said about a photograph, to be read. */
 export function PhotographFacts({ photograph }: { photograph: PhotographView }) {
   const { title, photographer, licence, licenceNote, licenceUrl, sourceUrl, altText } = photograph
   return (

@@ -52,16 +52,16 @@ export function UploadRow({
       <div className="flex gap-2">
         {outcome?.kind === 'failed' || outcome?.kind === 'cancelled' ? (
           <Button size="small" icon={<RotateCcw aria-hidden="true" />} onClick={onRetry}>
-            Retry<span className="sr-only"> {file.name}</span>
+            Retry <span className="sr-only">{file.name}</span>
           </Button>
         ) : null}
         {step === 'ended' ? (
           <Button size="small" variant="quiet" icon={<X aria-hidden="true" />} onClick={onDismiss}>
-            Clear<span className="sr-only"> {file.name} from this list</span>
+            Clear <span className="sr-only">{file.name} from this list</span>
           </Button>
         ) : step === 'checking' ? null : (
           <Button size="small" icon={<X aria-hidden="true" />} onClick={onCancel}>
-            Cancel<span className="sr-only"> {file.name}</span>
+            Cancel <span className="sr-only">{file.name}</span>
           </Button>
         )}
       </div>

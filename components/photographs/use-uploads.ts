@@ -22,7 +22,8 @@ const isUnderWay = ({ step }: Upload) => step !== 'queued' && step !== 'ended'
 /**
  * The files being added to a line: some at a time, each to be cancelled or tried again by itself.
  * Leaving the page while any is on its way asks first.
- * @param onAdded called after each photograph that was taken in
+ * @param onAdded called after each file that the line has now; the answer to an earlier try may have
+ * been lost, so that it was taken in then
  */
 export function useUploads(
   place: { brand: string; lineSlug: string },
@@ -53,7 +54,7 @@ export function useUploads(
     })
     aborts.current.delete(key)
     change(key, { step: 'ended', outcome })
-    if (outcome.kind === 'added') onAdded()
+    if (outcome.kind === 'added' || outcome.kind === 'same') onAdded()
   }
 
   useEffect(() => {
