@@ -18,7 +18,7 @@ export function GalleryFilter({ filter, here }: { filter: Filter; here: string }
           maxLength={PHOTOGRAPH_LIMITS.search}
         />
       </Field>
-      <Field label="State" className="min-w-36">
+      <Field label="State" className="min-w-32 grow basis-32 sm:grow-0 sm:basis-40">
         <Select name="state" defaultValue={filter.state ?? ''}>
           <option value="">All</option>
           <option value="ready">Read</option>
@@ -26,9 +26,9 @@ export function GalleryFilter({ filter, here }: { filter: Filter; here: string }
           <option value="failed">Could not be read</option>
         </Select>
       </Field>
-      <Field label="Missing" className="min-w-36">
+      <Field label="Missing" className="min-w-32 grow basis-32 sm:grow-0 sm:basis-44">
         <Select name="missing" defaultValue={filter.missing ?? ''}>
-          <option value="">Anything or nothing</option>
+          <option value="">No matter</option>
           <option value="licence">Licence</option>
           <option value="alt">Alt text</option>
         </Select>

@@ -30,7 +30,8 @@ export function UploadRow({
   onRetry: () => void
   onDismiss: () => void
 }) {
-  const size = `${(file.size / 1e6).toFixed(1)} MB`
+  const size =
+    file.size < 1e5 ? `${Math.ceil(file.size / 1e3)} kB` : `${(file.size / 1e6).toFixed(1)} MB`
   return (
     <li className="flex flex-wrap items-center gap-x-4 gap-y-2 py-3">
       <div className="min-w-0 grow basis-60">

@@ -64,7 +64,7 @@ export function Facts({
     <dl className={cn('divide-y divide-hairline', className)}>
       {items.map((item, index) => (
         <div key={index} className="flex justify-between gap-4 py-1.5">
-          <dt className="text-ink-faint">{item.term}</dt>
+          <dt className="shrink-0 text-ink-faint">{item.term}</dt>
           <dd className="text-right">{item.reading}</dd>
         </div>
       ))}
