@@ -135,16 +135,3 @@ export function deltaE00(from: Lab, to: Lab, factors?: Ciede2000Factors): number
   deltaE00Row(from, oneLab, oneOut, 0, factors)
   return oneOut[0]!
 }
-
-/**
- * {@link deltaE00} for coordinates that lie in separate columns. Symmetric, ≥ 0.
- * @source CIE 142-2001
- */
-export const ciede2000 = (
-  L1: number,
-  a1: number,
-  b1: number,
-  L2: number,
-  a2: number,
-  b2: number,
-): number => deltaE00([L1, a1, b1], [L2, a2, b2])

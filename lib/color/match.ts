@@ -134,7 +134,8 @@ function problemOf(
   const m = cells.length
   const n = shades.length
   const cost = new Float64Array(distance.length)
-  for (let at = 0; at < cost.length; at++) cost[at] = distance[at]! * weights[at % m]!
+  for (let at = 0; at < cost.length;)
+    for (let i = 0; i < m; i++, at++) cost[at] = distance[at]! * weights[i]!
   const chromas = cells.map(({ lab }) => chromaOf(lab))
   const chromaLimit = quantile(chromas, cells, 0.99) + 3
   const unary = Float64Array.from(

@@ -33,12 +33,20 @@ const EDGES = [4, 5, 6, 7, 8, 10, 12, 15, 20, 30, 60]
 interface Bins {
   /** The occupied bins, ascending. */
   keys: number[]
-  labs: Lab[]
-  counts: Uint32Array
+  /** One a key, its mean: n×3 row-major L*, a*, b*. */
+  labs: Float64Array
+  /** One a key: its pixels. */
+  counts: number[]
   /** One a pixel: its bin, or −1 where nothing is visible. */
   binOfPixel: Int16Array
   visible: number
 }
+
+// Both are left as they were found: to allocate and clear megabytes would cost as much as reading.
+/** Per bin the sums of red, green and blue and the count of pixels, side by side; all 0. */
+const tally = new Float64Array(BINS * 4)
+/** Per cube of a grid, in the order they are met, its index; all −1. */
+const indexOfCube = new Int16Array(1 << 19).fill(-1)
 
 /** 5 bits a channel, each bin standing for the mean of what fell into it. */
 function binPixels({ data, width, height, space }: PixelImage): Bins {
@@ -46,41 +54,64 @@ function binPixels({ data, width, height, space }: PixelImage): Bins {
   const shift = wide ? 11 : 3
   const full = wide ? 65535 : 255
   const half = (full + 1) / 2
-  const counts = new Uint32Array(BINS)
-  const sums = new Float64Array(BINS * 3)
-  const binOfPixel = new Int16Array(width * height).fill(-1)
+  const binOfPixel = new Int16Array(width * height)
   let visible = 0
   for (let pixel = 0, at = 0; pixel < binOfPixel.length; pixel++, at += 4) {
-    if (data[at + 3]! < half) continue
+    if (data[at + 3]! < half) {
+      binOfPixel[pixel] = -1
+      continue
+    }
     const r = data[at]!
     const g = data[at + 1]!
     const b = data[at + 2]!
     const bin = ((r >> shift) << 10) | ((g >> shift) << 5) | (b >> shift)
     binOfPixel[pixel] = bin
-    counts[bin]!++
-    sums[bin * 3]! += r
-    sums[bin * 3 + 1]! += g
-    sums[bin * 3 + 2]! += b
+    const sums = bin * 4
+    tally[sums]! += r
+    tally[sums + 1]! += g
+    tally[sums + 2]! += b
+    tally[sums + 3]! += 1
     visible++
   }
-  const toLab = space === 'display-p3' ? displayP3ToLab : srgbToLab
   const keys: number[] = []
-  const labs: Lab[] = []
-  for (let bin = 0; bin < BINS; bin++) {
-    const count = counts[bin]!
-    if (count === 0) continue
+  for (let bin = 0; bin < BINS; bin++) if (tally[bin * 4 + 3]! > 0) keys.push(bin)
+  const toLab = space === 'display-p3' ? displayP3ToLab : srgbToLab
+  const labs = new Float64Array(keys.length * 3)
+  const counts = keys.map((bin, key) => {
+    const sums = bin * 4
+    const count = tally[sums + 3]!
     const scale = 1 / (count * full)
-    keys.push(bin)
-    labs.push(toLab(sums[bin * 3]! * scale, sums[bin * 3 + 1]! * scale, sums[bin * 3 + 2]! * scale))
-  }
+    labs.set(
+      toLab(tally[sums]! * scale, tally[sums + 1]! * scale, tally[sums + 2]! * scale),
+      key * 3,
+    )
+    for (let at = sums; at < sums + 4; at++) tally[at] = 0
+    return count
+  })
   return { keys, labs, counts, binOfPixel, visible }
 }
 
-/** Which cube of a grid of this edge a colour falls into; neutrals lie in the middle of theirs. */
-const cubeOf = (lab: Lab, edge: number): number =>
-  (Math.floor(lab[0] / edge) * 128 + Math.round(lab[1] / edge) + 64) * 128 +
-  Math.round(lab[2] / edge) +
-  64
+/**
+ * Which cube of the grid of this edge each colour falls into; neutrals lie in the middle of
+ * theirs. Null when there are more than {@link MAX_CELLS}.
+ */
+function cubesOf(labs: Float64Array, edge: number): { cubes: number[]; of: Uint8Array } | null {
+  const cubes: number[] = []
+  const of = new Uint8Array(labs.length / 3)
+  for (let key = 0, at = 0; key < of.length && cubes.length <= MAX_CELLS; key++, at += 3) {
+    // One is added because a black may come out a rounding error below L* 0.
+    const lightness = Math.floor(labs[at]! / edge) + 1
+    const a = Math.round(labs[at + 1]! / edge) + 64
+    const cube = (lightness * 128 + a) * 128 + Math.round(labs[at + 2]! / edge) + 64
+    if (indexOfCube[cube]! < 0) {
+      indexOfCube[cube] = cubes.length
+      cubes.push(cube)
+    }
+    of[key] = indexOfCube[cube]!
+  }
+  for (const cube of cubes) indexOfCube[cube] = -1
+  return cubes.length <= MAX_CELLS ? { cubes, of } : null
+}
 
 const round = (value: number): number => Math.round(value * 1e4) / 1e4
 
@@ -97,27 +128,16 @@ export function readPhotographColors(image: PixelImage): PhotographColors {
   const bins = binPixels(image)
   if (bins.visible === 0) throw new RangeError('no visible pixels')
 
-  const cubes = new Int32Array(bins.keys.length)
-  const cubeIndex = new Map<number, number>()
-  for (const edge of EDGES) {
-    cubeIndex.clear()
-    for (let bin = 0; bin < cubes.length && cubeIndex.size <= MAX_CELLS; bin++) {
-      const cube = cubeOf(bins.labs[bin]!, edge)
-      const known = cubeIndex.get(cube)
-      cubes[bin] = known ?? cubeIndex.size
-      if (known === undefined) cubeIndex.set(cube, cubeIndex.size)
-    }
-    if (cubeIndex.size <= MAX_CELLS) break
-  }
-
-  const sums = [...cubeIndex.keys()].map((cube) => ({ cube, l: 0, a: 0, b: 0, count: 0 }))
-  for (let bin = 0; bin < cubes.length; bin++) {
-    const sum = sums[cubes[bin]!]!
-    const [l, a, b] = bins.labs[bin]!
-    const count = bins.counts[bins.keys[bin]!]!
-    sum.l += l * count
-    sum.a += a * count
-    sum.b += b * count
+  let grid = null
+  for (let edge = 0; !grid; edge++) grid = cubesOf(bins.labs, EDGES[edge]!)
+  const { cubes, of } = grid
+  const sums = cubes.map((cube) => ({ cube, l: 0, a: 0, b: 0, count: 0 }))
+  for (let key = 0; key < of.length; key++) {
+    const sum = sums[of[key]!]!
+    const count = bins.counts[key]!
+    sum.l += bins.labs[key * 3]! * count
+    sum.a += bins.labs[key * 3 + 1]! * count
+    sum.b += bins.labs[key * 3 + 2]! * count
     sum.count += count
   }
   const order = sums.map((_, index) => index)
@@ -135,10 +155,13 @@ export function readPhotographColors(image: PixelImage): PhotographColors {
     cellOfCube[index] = cell
   })
   const cellOfBin = new Uint8Array(BINS)
-  for (let bin = 0; bin < cubes.length; bin++) cellOfBin[bins.keys[bin]!] = cellOfCube[cubes[bin]!]!
-  const cellMap = new Uint8Array(width * height)
+  bins.keys.forEach((bin, key) => {
+    cellOfBin[bin] = cellOfCube[of[key]!]!
+  })
+  const { binOfPixel } = bins
+  const cellMap = new Uint8Array(binOfPixel.length)
   for (let pixel = 0; pixel < cellMap.length; pixel++) {
-    const bin = bins.binOfPixel[pixel]!
+    const bin = binOfPixel[pixel]!
     cellMap[pixel] = bin < 0 ? NO_CELL : cellOfBin[bin]!
   }
   return { cells, width, height, cellMap }

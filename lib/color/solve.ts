@@ -153,7 +153,8 @@ class Search {
   private bound(node: Node, startU: Float64Array, steps: number): Bound {
     const { cells, cost, unary } = this.problem
     const { served, base, need } = node
-    const u = Float64Array.from(startU, (value, i) => Math.min(value, served[i]!))
+    const u = Float64Array.from(startU)
+    for (let i = 0; i < cells; i++) u[i] = Math.min(u[i]!, served[i]!)
     const reduced = new Float64Array(this.problem.options)
     let candidates = node.candidates
     let best: Bound = { value: -Infinity, candidates, reduced, sumU: 0, u }

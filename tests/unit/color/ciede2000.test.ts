@@ -3,7 +3,7 @@ import { differenceCiede2000 } from 'culori'
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
 
-import { ciede2000, deltaE00, deltaE00Row, packLabs } from '@/lib/color/ciede2000'
+import { deltaE00, deltaE00Row, packLabs } from '@/lib/color/ciede2000'
 import { hueOf, type Lab } from '@/lib/color/types'
 import { seededRandom } from '@/scripts/bench/line'
 import table from '@/tests/fixtures/color/ciede2000-pairs.json'
@@ -137,7 +137,6 @@ test('a row is the differences one by one, from its offset on', () => {
       deltaE00Row(from, packLabs(to), out, offset)
       expect([...out.subarray(0, offset)]).toEqual(Array(offset).fill(-1))
       expect([...out.subarray(offset)]).toEqual(to.map((lab) => deltaE00(from, lab)))
-      for (const lab of to) expect(ciede2000(...from, ...lab)).toBe(deltaE00(from, lab))
     }),
   )
 })
