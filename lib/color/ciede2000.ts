@@ -86,8 +86,9 @@ export function deltaE00Row(
     let s = uy1 + uy2
     const length = Math.sqrt(c * c + s * s)
     if (length > 1e-7) {
-      c /= length
-      s /= length
+      const per = 1 / length
+      c *= per
+      s *= per
     } else {
       // Opposite hues have no shorter way: the standard takes the half of h₁ + h₂, each 0–360°.
       const mean = (hueOf(x1, b1) + hueOf(x2, b2)) / 2

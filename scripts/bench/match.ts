@@ -9,8 +9,8 @@ import { warmUpReading } from '@/lib/photographs/warm-up'
 
 import type { Figure } from './index'
 import { dyedLine, seededRandom } from './line'
-import { labsOf, mean, median, ms, timed, timesAsLong } from './measure'
-import { matchFile, photographs, trueFive, type Photograph } from './photographs'
+import { labsOf, mean, median, ms, timed, medianTimes } from './measure'
+import { matchFile, photographs, shrinkAlone, trueFive, type Photograph } from './photographs'
 import { bruteForce, randomChoice } from './random-choice'
 import { againstVibrant } from './vibrant'
 
@@ -92,11 +92,11 @@ async function decodeToResult(photos: Photograph[], line: MatchShade[]): Promise
   const ratios: [number[], number[]] = [[], []]
   console.log('\nDecode to result, times as long as sharp alone')
   for (const { name, bytes, enlarged } of files) {
-    const ratio = await timesAsLong(
-      () => matchFile(bytes, line),
-      () => sharp(bytes).resize(320, 320, { fit: 'inside' }).raw().toBuffer(),
+    const [whole, alone] = await medianTimes(
+      [() => matchFile(bytes, line), () => shrinkAlone(bytes)],
       enlarged ? 15 : 5,
     )
+    const ratio = whole! / alone!
     ratios[Number(enlarged)]!.push(ratio)
     console.log(`  ${name.padEnd(46)} ${ratio.toFixed(2)}  (${(bytes.length / 1e6).toFixed(1)} MB)`)
   }
@@ -150,20 +150,21 @@ async function steadiness(photos: Photograph[], lines: MatchShade[][]): Promise<
   const copies = { 'half-size': { scale: 0.5 }, 'quality-60': { quality: 60 } }
   const figures: Figure[] = []
   for (const [name, how] of Object.entries(copies)) {
-    const shifts: number[] = []
-    for (const { bytes, colors } of photos) {
+    const shifts = { photograph: [] as number[], drawn: [] as number[] }
+    for (const { bytes, colors, group } of photos) {
       const { image } = await decodePhotograph(await copy(bytes, how))
       const copied = readPhotographColors(image)
       for (const line of lines) {
         const own = labsOf(trueFive(colors, line), line)
-        shifts.push(shift(own, labsOf(trueFive(copied, line), line)) / own.length)
+        shifts[group].push(shift(own, labsOf(trueFive(copied, line), line)) / own.length)
       }
     }
+    const means = [mean(shifts.photograph), mean(shifts.drawn)]
     figures.push({
       what: `shift of the five for a ${name} copy, 48 shades (${lines.length} lines)`,
-      value: `mean ΔE00 ${mean(shifts).toFixed(2)}, worst ${Math.max(...shifts).toFixed(2)}`,
-      bar: 'mean ≤ 1',
-      met: mean(shifts) <= 1,
+      value: `mean ΔE00: photographs ${means[0]!.toFixed(2)}, drawn ${means[1]!.toFixed(2)}; worst ${Math.max(...shifts.photograph, ...shifts.drawn).toFixed(2)}`,
+      bar: 'mean ≤ 1, either',
+      met: means.every((value) => value <= 1),
     })
   }
   return figures

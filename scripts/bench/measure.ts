@@ -17,19 +17,19 @@ export async function timed<T>(work: () => T | Promise<T>): Promise<[result: T, 
   return [result, performance.now() - started]
 }
 
-/** How many times as long `slower` takes as `other`: medians of runs that take turns. */
-export async function timesAsLong(
-  slower: () => Promise<unknown>,
-  other: () => Promise<unknown>,
+/** What each of these takes, in milliseconds: medians of runs that take turns. */
+export async function medianTimes(
+  works: (() => Promise<unknown>)[],
   runs: number,
-): Promise<number> {
-  const times: [number[], number[]] = [[], []]
-  for (let run = 0; run < runs; run++) {
-    // Who goes first changes, so that neither always finds what the other left warm.
-    for (const at of run % 2 ? [1, 0] : [0, 1])
-      times[at]!.push((await timed(at === 0 ? slower : other))[1])
-  }
-  return median(times[0]) / median(times[1])
+): Promise<number[]> {
+  const times = works.map((): number[] => [])
+  for (let run = 0; run < runs; run++)
+    for (let turn = 0; turn < works.length; turn++) {
+      // Who goes first changes, so that none always finds what another left warm.
+      const at = (run + turn) % works.length
+      times[at]!.push((await timed(works[at]!))[1])
+    }
+  return times.map(median)
 }
 
 export const labsOf = (match: Match, line: readonly MatchShade[]): Lab[] =>

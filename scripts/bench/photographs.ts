@@ -4,6 +4,7 @@ import path from 'node:path'
 import { isMatch, matchPhotograph, type Match, type MatchShade } from '@/lib/color/match'
 import { readPhotographColors, type PhotographColors } from '@/lib/color/photograph-colors'
 import { decodePhotograph } from '@/lib/photographs/decode'
+import sharp from '@/lib/photographs/sharp'
 
 const FOLDER = '/usr/share/backgrounds/mate'
 
@@ -64,3 +65,7 @@ export function trueFive(
 /** Everything from a file's bytes to its five. */
 export const matchFile = async (bytes: Buffer, line: readonly MatchShade[]): Promise<Match> =>
   trueFive(readPhotographColors((await decodePhotograph(bytes)).image), line)
+
+/** sharp's own decode and shrink of a file, and nothing else. */
+export const shrinkAlone = (bytes: Buffer): Promise<Buffer> =>
+  sharp(bytes).resize(320, 320, { fit: 'inside' }).raw().toBuffer()

@@ -8,8 +8,8 @@ import { srgbToLab } from '@/lib/color/srgb'
 import type { Lab } from '@/lib/color/types'
 
 import type { Figure } from './index'
-import { labsOf, mean, median, timesAsLong } from './measure'
-import { matchFile, trueFive, type Photograph } from './photographs'
+import { labsOf, mean, median, medianTimes } from './measure'
+import { matchFile, shrinkAlone, trueFive, type Photograph } from './photographs'
 
 /** node-vibrant's swatches of a whole file as it comes: up to six, at its own settings. */
 async function swatchesOf(bytes: Buffer): Promise<Lab[]> {
@@ -136,19 +136,24 @@ async function nearness(
 }
 
 async function speed(photos: Photograph[], line: MatchShade[]): Promise<Figure> {
-  const times: number[] = []
+  const ratios: number[] = []
   console.log('\nTimes as long as a match of 48 shades that node-vibrant takes, ≥ 4 MP')
   for (const { name, bytes, megapixels } of photos) {
     if (megapixels < 4) continue
     const vibrant = async () => nearestShades(await swatchesOf(bytes), line)
-    times.push(await timesAsLong(vibrant, () => matchFile(bytes, line), 3))
-    console.log(`  ${name.padEnd(46)} ${times.at(-1)!.toFixed(1)}`)
+    const match = () => matchFile(bytes, line)
+    const times = await medianTimes([vibrant, match, () => shrinkAlone(bytes)], 3)
+    const [theirs, ours, alone] = times as [number, number, number]
+    ratios.push(theirs / ours)
+    console.log(
+      `  ${name.padEnd(46)} ${(theirs / ours).toFixed(1)}  (sharp alone would be ${(theirs / alone).toFixed(1)})`,
+    )
   }
   return {
-    what: `faster than node-vibrant, ≥ 4 MP (${times.length} files)`,
-    value: `least ${Math.min(...times).toFixed(1)} ×, median ${median(times).toFixed(1)} ×`,
+    what: `faster than node-vibrant, ≥ 4 MP (${ratios.length} files)`,
+    value: `least ${Math.min(...ratios).toFixed(1)} ×, median ${median(ratios).toFixed(1)} ×`,
     bar: '≥ 8 ×',
-    met: Math.min(...times) >= 8,
+    met: Math.min(...ratios) >= 8,
   }
 }
 

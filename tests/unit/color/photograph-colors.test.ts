@@ -82,6 +82,17 @@ describe('the colours of a photograph', () => {
     expect(areas).toEqual([...areas].sort((a, b) => b - a))
   })
 
+  test('are the same whatever was read before, even where nothing was visible', () => {
+    fc.assert(
+      fc.property(anyPixels, anyPixels, (pixels, others) => {
+        const before = readPhotographColors(imageOf(pixels))
+        readPhotographColors(imageOf(others))
+        expect(() => readPhotographColors(imageOf([[9, 9, 9, 0]]))).toThrow('no visible pixels')
+        expect(readPhotographColors(imageOf(pixels))).toEqual(before)
+      }),
+    )
+  })
+
   test('are the same however the pixels are arranged', () => {
     fc.assert(
       fc.property(anyPixels, (pixels) => {
