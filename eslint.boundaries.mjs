@@ -17,7 +17,7 @@ export const zones = [
   zone('env', 'lib/env.ts'),
   zone('errors', 'lib/errors.ts'),
   zone('logger', 'lib/logger.ts'),
-  zone('schema', ['lib/*/schema.ts', 'lib/*/formats.ts']),
+  zone('schema', ['lib/*/schema.ts', 'lib/*/{constants,formats,wishes}.ts']),
   zone('present', 'lib/*/present.ts', { more: true }),
   zone('noun', 'lib/*/**'),
   zone('models', 'models/**'),
@@ -52,7 +52,8 @@ export const importTable = {
       node(),
     ),
 
-    // A schema, and the formats it speaks of, are sent to the browser, whatever else is beside them.
+    // What a schema checks and the constants it speaks of are sent to the browser, whatever else is
+    // beside them.
     from('schema', local('schema', 'color'), packages('zod')),
     from(
       'noun',

@@ -7,7 +7,7 @@ import {
   type NonAttribute,
 } from 'sequelize'
 
-import type { Derivative, Licence, PhotographState } from '@/lib/photographs/schema'
+import type { Derivative, Licence, PhotographState } from '@/lib/photographs/constants'
 
 import { idColumn, versionColumn } from './columns'
 import type { Reading } from './Reading'

@@ -6,7 +6,7 @@ import {
   type InferCreationAttributes,
 } from 'sequelize'
 
-import type { ShadeStatus } from '@/lib/shades/schema'
+import type { ShadeStatus } from '@/lib/shades/constants'
 
 import { idColumn, versionColumn } from './columns'
 import { sequelize } from './sequelize'

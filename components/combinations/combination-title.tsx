@@ -12,7 +12,8 @@ import { Input } from '@/components/ui/input'
 import { SubmitButton } from '@/components/ui/submit-button'
 import { toastDone } from '@/components/ui/toast'
 import type { CombinationView } from '@/lib/combinations/present'
-import { COMBINATION_LIMITS, type RenameCombinationValues } from '@/lib/combinations/schema'
+import { COMBINATION_LIMITS } from '@/lib/combinations/constants'
+import type { RenameCombinationValues } from '@/lib/combinations/schema'
 import type { ActionResult } from '@/lib/errors'
 
 /**

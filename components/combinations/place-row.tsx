@@ -2,7 +2,7 @@ import type { ReactNode } from 'react'
 
 import { WoundSample } from '@/components/yarn/wound-sample'
 import type { PlaceView } from '@/lib/combinations/present'
-import { PLACE_ROLES } from '@/lib/combinations/schema'
+import { PLACE_ROLES } from '@/lib/combinations/constants'
 
 /** One of the five in running text: its role by its place, name, number and share. */
 export function PlaceRow({

@@ -50,7 +50,7 @@ export function Switcher({
       <ul
         role="list"
         aria-label={heading}
-        className="font-sans absolute z-20 mt-1 max-h-80 w-full overflow-y-auto rounded border border-rule bg-sheet py-1 text-base"
+        className="absolute z-20 mt-1 max-h-80 w-full overflow-y-auto rounded border border-rule bg-sheet py-1 font-body text-base"
       >
         {places.map(({ name, href }) => (
           <li key={href}>

@@ -1,6 +1,5 @@
 'use client'
 
-import { zodResolver } from '@hookform/resolvers/zod'
 import { Minus, Plus } from 'lucide-react'
 import { useRouter } from 'next/navigation'
 import { useState } from 'react'
@@ -13,16 +12,10 @@ import { IconButton } from '@/components/ui/icon-button'
 import { Input } from '@/components/ui/input'
 import { Notice } from '@/components/ui/notice'
 import { Select } from '@/components/ui/select'
+import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
-import {
-  createLineSchema,
-  CURRENCIES,
-  LINE_LIMITS,
-  updateLineSchema,
-  YARN_WEIGHTS,
-  type CreateLineValues,
-  type UpdateLineValues,
-} from '@/lib/lines/schema'
+import { CURRENCIES, LINE_LIMITS, YARN_WEIGHTS } from '@/lib/lines/constants'
+import type { createLineSchema, CreateLineValues, UpdateLineValues } from '@/lib/lines/schema'
 import type { LineView } from '@/lib/lines/present'
 import type { ActionResult } from '@/lib/errors'
 
@@ -61,7 +54,9 @@ export function LineForm(props: LineFormProps) {
     line ? { lineSlug: line.slug, version: line.version } : { requestKey: crypto.randomUUID() },
   )
   const form = useForm({
-    resolver: zodResolver(line ? updateLineSchema : createLineSchema) as never,
+    resolver: schemaResolver<Values>(() =>
+      import('@/lib/lines/schema').then((it) => (line ? it.updateLineSchema : it.createLineSchema)),
+    ),
     defaultValues: { ...(line?.values ?? EMPTY), ...own } as Values,
   })
   const { register, control, handleSubmit, setError } = form

@@ -48,7 +48,7 @@ export function DropperPanel(props: DropperPanelProps) {
         <div className="mt-2 border-y border-hairline">
           <p className="flex items-center gap-2 pt-2 text-sm text-ink-soft">
             <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true">
-              <circle cx="10" cy="10" r="9" fill={touched.hex} stroke="var(--rule)" />
+              <circle cx="10" cy="10" r="9" fill={touched.css} stroke="var(--rule)" />
             </svg>
             Nearest to the colour under the cross
             <Button size="small" variant="quiet" className="ml-auto" onClick={onAway}>

@@ -1,18 +1,17 @@
 'use client'
 
 import { Lock } from 'lucide-react'
-import { useState } from 'react'
+import dynamic from 'next/dynamic'
 
 import { Button } from '@/components/ui/button'
-import { Popover } from '@/components/ui/popover'
 import { WoundSample } from '@/components/yarn/wound-sample'
-import { nearestShades, type MatchPlace } from '@/lib/color/match'
+import type { MatchPlace } from '@/lib/color/match'
 
-import { ShadeChoice } from './shade-choice'
 import type { MatchShadeView } from './types'
 import type { WishesControl } from './use-wishes'
 
-const NEIGHBOURS = 5
+// What places the popover is loaded after the page.
+const SwapShade = dynamic(() => import('./swap-shade').then((it) => it.SwapShade))
 
 /** Props of {@link FiveRow}. */
 export interface FiveRowProps {
@@ -74,7 +73,7 @@ export function FiveRow(props: FiveRowProps) {
         >
           {place.locked ? 'Unlock' : 'Lock'} {of}
         </Button>
-        <Swap shade={shade} others={others} onSwap={(to) => control.swap(shade.id, to)} />
+        <SwapShade shade={shade} others={others} onSwap={(to) => control.swap(shade.id, to)} />
         <Button size="small" variant="quiet" onClick={() => control.exclude(shade.id)}>
           Exclude {of}
         </Button>
@@ -107,50 +106,5 @@ function Figures({ place: { deltaE, presence } }: { place: MatchPlace }) {
         presence {presence.toFixed(1)}
       </abbr>
     </p>
-  )
-}
-
-function Swap({
-  shade,
-  others,
-  onSwap,
-}: {
-  shade: MatchShadeView
-  others: readonly MatchShadeView[]
-  onSwap: (shadeId: string) => void
-}) {
-  const [open, setOpen] = useState(false)
-  const byId = new Map(others.map((other) => [other.id, other]))
-  return (
-    <Popover
-      label={`Neighbours of ${shade.label}`}
-      open={open}
-      onOpenChange={setOpen}
-      trigger={
-        <Button size="small" variant="quiet">
-          Swap <span className="sr-only">{shade.label}</span>
-        </Button>
-      }
-    >
-      <p className="text-sm text-ink-faint">Nearest to {shade.label}</p>
-      <ul role="list" className="divide-y divide-hairline">
-        {nearestShades(shade.lab, others, NEIGHBOURS).map(({ shadeId, deltaE }) => {
-          const other = byId.get(shadeId)!
-          return (
-            <ShadeChoice key={shadeId} shade={other} deltaE={deltaE}>
-              <Button
-                size="small"
-                onClick={() => {
-                  setOpen(false)
-                  onSwap(shadeId)
-                }}
-              >
-                Take <span className="sr-only">{other.label}</span>
-              </Button>
-            </ShadeChoice>
-          )
-        })}
-      </ul>
-    </Popover>
   )
 }

@@ -1,7 +1,6 @@
 'use client'
 
 import { useRef, useState, type FormEvent } from 'react'
-import { toast } from 'sonner'
 
 import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
@@ -10,13 +9,11 @@ import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
 import { Notice } from '@/components/ui/notice'
 import { SubmitButton } from '@/components/ui/submit-button'
+import { toastDone } from '@/components/ui/toast'
 import { TextLink } from '@/components/ui/text-link'
 import type { Match } from '@/lib/color/match'
-import {
-  COMBINATION_LIMITS,
-  draftTitle,
-  type KeepCombinationValues,
-} from '@/lib/combinations/schema'
+import { COMBINATION_LIMITS, draftTitle } from '@/lib/combinations/constants'
+import type { KeepCombinationValues } from '@/lib/combinations/schema'
 import type { ActionResult } from '@/lib/errors'
 
 /** The action that keeps five shades. */
@@ -86,14 +83,13 @@ export function KeepDialog({
     }
     setOpen(false)
     const href = `/${brand}/lines/${lineSlug}/combinations/${answer.data.combinationId}`
-    toast.success(
+    toastDone(
       <>
         Kept as{' '}
         <TextLink href={href} prefetch={false}>
           {answer.data.title}
         </TextLink>
       </>,
-      { duration: 8000 },
     )
   }
 

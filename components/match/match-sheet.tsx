@@ -11,8 +11,7 @@ import { Ground } from '@/components/yarn/ground'
 import { GroundSwitch } from '@/components/yarn/ground-switch'
 import { WrapCard } from '@/components/yarn/wrap-card'
 import { isMatch, type Match, type NoMatch } from '@/lib/color/match'
-import type { StrikingColor } from '@/lib/color/striking'
-import type { PhotographView } from '@/lib/photographs/present'
+import type { PhotographView, StrikingColorView } from '@/lib/photographs/present'
 
 import { DropperPanel } from './dropper-panel'
 import { FiveRows } from './five-rows'
@@ -36,7 +35,7 @@ export interface MatchSheetProps {
   shades: readonly MatchShadeView[]
   /** The stored matches of the five readings. */
   matches: readonly (Match | NoMatch)[]
-  striking: readonly StrikingColor[]
+  striking: readonly StrikingColorView[]
   /** Absent for those who may not keep. */
   keep?: KeepCombination
   /** The head of the sheet and what stands under it. */

@@ -3,9 +3,8 @@
 import { Lock } from 'lucide-react'
 
 import { WoundSample } from '@/components/yarn/wound-sample'
-import { screenColor } from '@/lib/color/gamut'
 import { nearestShades } from '@/lib/color/match'
-import type { StrikingColor } from '@/lib/color/striking'
+import type { StrikingColorView } from '@/lib/photographs/present'
 
 import type { MatchShadeView } from './types'
 import type { WishesControl } from './use-wishes'
@@ -16,7 +15,7 @@ export function StrikingChips({
   shades,
   control,
 }: {
-  colors: readonly StrikingColor[]
+  colors: readonly StrikingColorView[]
   shades: readonly MatchShadeView[]
   control: WishesControl
 }) {
@@ -32,7 +31,7 @@ export function StrikingChips({
         shade.
       </p>
       <ul role="list" className="mt-2 flex flex-wrap gap-2">
-        {colors.map(({ lab }, at) => {
+        {colors.map(({ lab, hex }, at) => {
           const [nearest] = nearestShades(lab, shades, 1)
           const shade = byId.get(nearest!.shadeId)!
           const locked = control.wishes.lock.includes(shade.id)
@@ -45,7 +44,7 @@ export function StrikingChips({
                 className="inline-flex min-h-9 items-center gap-2 rounded border border-rule bg-sheet py-1 pr-3 pl-1.5 text-left text-sm hover:border-ink aria-pressed:border-woad aria-pressed:font-semibold pointer-coarse:min-h-11"
               >
                 <svg width="20" height="20" viewBox="0 0 20 20" aria-hidden="true">
-                  <circle cx="10" cy="10" r="9.5" fill={screenColor(lab).hex} />
+                  <circle cx="10" cy="10" r="9.5" fill={hex} />
                 </svg>
                 <WoundSample hex={shade.hex} className="h-6 w-auto" />
                 <span>

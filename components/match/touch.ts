@@ -1,5 +1,4 @@
 import { srgbToLab } from '@/lib/color/srgb'
-import { screenColor } from '@/lib/color/gamut'
 import type { Lab } from '@/lib/color/types'
 
 import type { TouchedColor } from './types'
@@ -23,6 +22,15 @@ export function meanColor(data: Uint8ClampedArray): Lab {
     for (let axis = 0; axis < 3; axis++) sum[axis]! += lab[axis]! / count
   }
   return [sum[0]!, sum[1]!, sum[2]!]
+}
+
+/** The same pixels as a screen colour; no more than a picture of what is touched. */
+function meanRgb(data: Uint8ClampedArray): string {
+  const sum = [0, 0, 0]
+  data.forEach((value, at) => {
+    if (at % 4 < 3) sum[at % 4]! += value
+  })
+  return `rgb(${sum.map((one) => Math.round(one / (data.length / 4))).join(' ')})`
 }
 
 const canvases = new WeakMap<HTMLImageElement, { src: string; context: CanvasRenderingContext2D }>()
@@ -50,6 +58,6 @@ export function touchPicture(image: HTMLImageElement, { x, y }: Point): TouchedC
   const top = Math.max(0, Math.min(height - 1, Math.round(y * (height - 1))) - REACH)
   const right = Math.min(width, left + 2 * REACH + 1)
   const bottom = Math.min(height, top + 2 * REACH + 1)
-  const lab = meanColor(context.getImageData(left, top, right - left, bottom - top).data)
-  return { lab, hex: screenColor(lab).hex }
+  const { data } = context.getImageData(left, top, right - left, bottom - top)
+  return { lab: meanColor(data), css: meanRgb(data) }
 }

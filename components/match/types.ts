@@ -11,7 +11,7 @@ export type MatchShadeView = Pick<
 /** A colour read from the picture, with the line's nearest shades. */
 export interface TouchedColor {
   lab: Lab
-  hex: string
+  css: string
 }
 
 /** The readings as the page calls them. */

@@ -4,7 +4,7 @@ import { usePathname, useSearchParams } from 'next/navigation'
 import { useMemo, useState } from 'react'
 
 import { DEFAULT_APART } from '@/lib/color/match'
-import { matchWishesSchema, type MatchWishes } from '@/lib/photographs/schema'
+import { readWishes, type MatchWishes } from '@/lib/photographs/wishes'
 
 /** What is asked of the match, and the ways to ask for something else. */
 export interface WishesControl {
@@ -49,8 +49,8 @@ export function useWishes(): WishesControl {
   const search = useSearchParams()
   const text = search.toString()
   const wishes = useMemo(() => {
-    const parsed = matchWishesSchema.safeParse(Object.fromEntries(new URLSearchParams(text)))
-    return parsed.success ? parsed.data : matchWishesSchema.parse({})
+    const none: MatchWishes = { reading: 'true', lock: [], exclude: [] }
+    return readWishes(Object.fromEntries(new URLSearchParams(text))) ?? none
   }, [text])
 
   // What was asked before each change made here; going back in the browser leaves some behind.

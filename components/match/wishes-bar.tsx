@@ -6,7 +6,7 @@ import { useState } from 'react'
 import { Button } from '@/components/ui/button'
 import { Slider } from '@/components/ui/slider'
 import { DEFAULT_APART } from '@/lib/color/match'
-import { MOST_APART } from '@/lib/photographs/schema'
+import { MOST_APART } from '@/lib/photographs/wishes'
 
 import type { MatchShadeView } from './types'
 import type { WishesControl } from './use-wishes'

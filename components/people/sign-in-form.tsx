@@ -1,6 +1,5 @@
 'use client'
 
-import { zodResolver } from '@hookform/resolvers/zod'
 import { signIn } from 'next-auth/react'
 import { useState } from 'react'
 import { useForm } from 'react-hook-form'
@@ -8,14 +7,15 @@ import { useForm } from 'react-hook-form'
 import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
 import { Notice } from '@/components/ui/notice'
+import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
-import { signInSchema, type SignInInput } from '@/lib/people/schema'
+import type { SignInInput } from '@/lib/people/schema'
 
 /** E-mail and password; on success goes to `next`, an address within Woadmap. */
 export function SignInForm({ next }: { next: string }) {
   const [problem, setProblem] = useState<string>()
   const { register, handleSubmit, formState } = useForm<SignInInput>({
-    resolver: zodResolver(signInSchema),
+    resolver: schemaResolver(() => import('@/lib/people/schema').then((it) => it.signInSchema)),
     defaultValues: { email: '', password: '' },
   })
 

@@ -3,7 +3,8 @@ import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
 import { LinkButton } from '@/components/ui/link-button'
 import { Select } from '@/components/ui/select'
-import { PHOTOGRAPH_LIMITS, type GalleryFilter as Filter } from '@/lib/photographs/schema'
+import { PHOTOGRAPH_LIMITS } from '@/lib/photographs/constants'
+import type { GalleryFilter as Filter } from '@/lib/photographs/schema'
 
 /** Narrows the gallery; its state is the address, so it also works before the script does. */
 export function GalleryFilter({ filter, here }: { filter: Filter; here: string }) {

@@ -12,7 +12,7 @@ import { Status } from '@/components/ui/status'
 import { toastDone, toastProblem, toastUndo } from '@/components/ui/toast'
 import type { ActionResult } from '@/lib/errors'
 import type { PhotographView } from '@/lib/photographs/present'
-import { LICENCE_LABELS } from '@/lib/photographs/schema'
+import { LICENCE_LABELS } from '@/lib/photographs/constants'
 
 import { PhotographPicture } from './photograph-picture'
 import { StateStatus } from './state-status'

@@ -1,6 +1,5 @@
 'use client'
 
-import { zodResolver } from '@hookform/resolvers/zod'
 import { useRouter } from 'next/navigation'
 import { useEffect, useState } from 'react'
 import { useForm, useWatch } from 'react-hook-form'
@@ -9,22 +8,16 @@ import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
 import { Notice } from '@/components/ui/notice'
 import { Select } from '@/components/ui/select'
+import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
 import { Textarea } from '@/components/ui/textarea'
 import { toastDone } from '@/components/ui/toast'
 import type { ActionResult } from '@/lib/errors'
 import type { PhotographView } from '@/lib/photographs/present'
-import {
-  LICENCE_LABELS,
-  LICENCES,
-  PHOTOGRAPH_LIMITS,
-  updatePhotographSchema,
-  type UpdatePhotographInput,
-  type UpdatePhotographValues,
-} from '@/lib/photographs/schema'
+import { LICENCE_LABELS, LICENCES, PHOTOGRAPH_LIMITS } from '@/lib/photographs/constants'
+import type { UpdatePhotographInput, UpdatePhotographValues } from '@/lib/photographs/schema'
 
 import { DetailsConflict } from './details-conflict'
-import { PhotographFacts } from './photograph-facts'
 
 /** The action that saves the form; answers the version it made. */
 export type SavePhotograph = (
@@ -72,20 +65,14 @@ const valuesOf = (photograph: PhotographView): UpdatePhotographValues => ({
 const inWords = (values: UpdatePhotographValues, name: Detail): string =>
   name === 'licence' && values.licence ? LICENCE_LABELS[values.licence] : values[name]
 
-/** What is said about a photograph: a form for those who may change it, facts for the others. */
-export function PhotographDetailsForm(props: PhotographDetailsFormProps) {
-  return props.photograph.canEdit ? (
-    <DetailsForm {...props} />
-  ) : (
-    <PhotographFacts photograph={props.photograph} />
-  )
-}
-
-function DetailsForm({ brand, photograph, save }: PhotographDetailsFormProps) {
+/** The form with what is said about a photograph. */
+export function PhotographDetailsForm({ brand, photograph, save }: PhotographDetailsFormProps) {
   const router = useRouter()
   const [problem, setProblem] = useState<string>()
   const form = useForm<UpdatePhotographValues, unknown, UpdatePhotographInput>({
-    resolver: zodResolver(updatePhotographSchema),
+    resolver: schemaResolver(() =>
+      import('@/lib/photographs/schema').then((it) => it.updatePhotographSchema),
+    ),
     defaultValues: valuesOf(photograph),
   })
   const { register, reset, handleSubmit, setError, getValues } = form

@@ -1,7 +1,7 @@
 import { Facts } from '@/components/ui/ledger'
 import { TextLink } from '@/components/ui/text-link'
 import type { PhotographView } from '@/lib/photographs/present'
-import { LICENCE_LABELS } from '@/lib/photographs/schema'
+import { LICENCE_LABELS } from '@/lib/photographs/constants'
 
 const outwards = (url: string) =>
   url ? (

@@ -1,7 +1,7 @@
 'use client'
 
 import { LiveRegion } from '@/components/ui/live-region'
-import { isUnsettled, type PhotographStanding } from '@/lib/photographs/schema'
+import { isUnsettled, type PhotographStanding } from '@/lib/photographs/constants'
 
 import { ReadAgainButton, type RereadPhotograph } from './read-again-button'
 import { StateStatus } from './state-status'

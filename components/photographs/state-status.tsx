@@ -1,5 +1,5 @@
 import { Status, type StatusKind } from '@/components/ui/status'
-import type { PhotographState } from '@/lib/photographs/schema'
+import type { PhotographState } from '@/lib/photographs/constants'
 
 const STATES: Record<PhotographState, { kind: StatusKind; words: string }> = {
   pending: { kind: 'waiting', words: 'Not sent yet' },

@@ -1,5 +1,5 @@
 import type { Failure } from '@/lib/errors'
-import { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from '@/lib/photographs/schema'
+import { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from '@/lib/photographs/formats'
 
 /** What is being done with a file that is on its way. */
 export type UploadStep = 'preparing' | 'sending' | 'checking'

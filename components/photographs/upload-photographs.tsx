@@ -7,7 +7,7 @@ import { useRef, useState, type DragEvent, type ReactNode } from 'react'
 import { Button } from '@/components/ui/button'
 import { cn } from '@/components/ui/cn'
 import { LedgerList } from '@/components/ui/ledger'
-import { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from '@/lib/photographs/schema'
+import { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from '@/lib/photographs/formats'
 
 import { UploadRow } from './upload-row'
 import { useUploads } from './use-uploads'

@@ -4,7 +4,7 @@ import { useRouter } from 'next/navigation'
 import { useEffect, useRef, useState } from 'react'
 import useSWR from 'swr'
 
-import { isUnsettled, type PhotographStanding } from '@/lib/photographs/schema'
+import { isUnsettled, type PhotographStanding } from '@/lib/photographs/constants'
 
 /** Milliseconds until the next look, after so many: 1 s at first, 5 s in the end. */
 export const pauseAfter = (looks: number): number => Math.min(5_000, 1_000 * 1.4 ** looks)

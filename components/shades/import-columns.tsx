@@ -12,7 +12,7 @@ import {
   type CsvField,
   type CsvMapping,
   type ReadingTerms,
-} from '@/lib/shades/schema'
+} from '@/lib/shades/constants'
 
 const FIELD_WORDS: Record<CsvField, string> = {
   number: 'Number',

@@ -11,7 +11,7 @@ import { Notice } from '@/components/ui/notice'
 import { Spinner } from '@/components/ui/spinner'
 import { toastDone } from '@/components/ui/toast'
 import type { ImportPreview } from '@/lib/shades/present'
-import { SHADE_LIMITS, type CsvMapping, type ReadingTerms } from '@/lib/shades/schema'
+import { SHADE_LIMITS, type CsvMapping, type ReadingTerms } from '@/lib/shades/constants'
 
 import { ImportColumns } from './import-columns'
 import { ImportRows } from './import-rows'

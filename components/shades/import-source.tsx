@@ -8,7 +8,7 @@ import { buttonClass } from '@/components/ui/button-class'
 import { cn } from '@/components/ui/cn'
 import { Field } from '@/components/ui/field'
 import { Textarea } from '@/components/ui/textarea'
-import { SHADE_LIMITS } from '@/lib/shades/schema'
+import { SHADE_LIMITS } from '@/lib/shades/constants'
 
 import { decodeText } from './decode-text'
 

@@ -3,18 +3,24 @@
 import { WoundSample } from '@/components/yarn/wound-sample'
 import { screenColor, type ScreenColor } from '@/lib/color/gamut'
 import { hexToLab } from '@/lib/color/srgb'
-import { shadeColor } from '@/lib/shades/schema'
+import { LAB_RANGES, parseHex, parseReading } from '@/lib/shades/constants'
 
 import { BeyondScreen } from './shade-words'
 import type { ShadeFormValues } from './shade-form'
 
 /** What a screen shows of a colour as typed; the terms do not change how it is shown. */
 function showable(color: ShadeFormValues['color']): ScreenColor | null {
-  const parsed = shadeColor.safeParse({ ...color, terms: 'D65/10' })
-  if (!parsed.success) return null
-  return parsed.data.kind === 'hex'
-    ? screenColor(hexToLab(parsed.data.hex))
-    : screenColor([parsed.data.L, parsed.data.a, parsed.data.b])
+  if (color.kind === 'hex') {
+    const hex = parseHex(color.hex)
+    return hex === null ? null : screenColor(hexToLab(hex))
+  }
+  const coordinate = (axis: 'L' | 'a' | 'b') => {
+    const value = parseReading(color[axis]) ?? NaN
+    const [least, most] = LAB_RANGES[axis]
+    return value >= least && value <= most ? value : NaN
+  }
+  const lab = [coordinate('L'), coordinate('a'), coordinate('b')] as const
+  return lab.some(Number.isNaN) ? null : screenColor(lab)
 }
 
 /** The sample of a colour while it is being typed. */

@@ -10,7 +10,7 @@ import { Input } from '@/components/ui/input'
 import { LiveRegion } from '@/components/ui/live-region'
 import { Select } from '@/components/ui/select'
 import { toastDone, toastProblem } from '@/components/ui/toast'
-import { SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/schema'
+import { SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/constants'
 
 import { STATUS_WORDS } from './shade-words'
 import { type LinePlace, type ShadesActions } from './shades-actions'

@@ -6,7 +6,7 @@ import { AppLink } from '@/components/ui/app-link'
 import { WoundSample } from '@/components/yarn/wound-sample'
 import type { ActionResult } from '@/lib/errors'
 import type { ShadeView } from '@/lib/shades/present'
-import { SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/schema'
+import { SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/constants'
 
 import { EditableCell } from './editable-cell'
 import { BeyondScreen, ShadeStatusWord, showReading, showTerms, STATUS_WORDS } from './shade-words'

@@ -6,12 +6,8 @@ import { useEffect, useRef, useState } from 'react'
 import { Checkbox } from '@/components/ui/checkbox'
 import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
-import {
-  SHADE_LIMITS,
-  SHADE_STATUSES,
-  type ShadeStatus,
-  type ShadeTableFilter,
-} from '@/lib/shades/schema'
+import { SHADE_LIMITS, SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/constants'
+import type { ShadeTableFilter } from '@/lib/shades/schema'
 
 import { STATUS_WORDS } from './shade-words'
 

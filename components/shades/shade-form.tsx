@@ -1,10 +1,8 @@
 'use client'
 
-import { zodResolver } from '@hookform/resolvers/zod'
 import { useRouter } from 'next/navigation'
 import { useRef, useState } from 'react'
 import { useForm, useWatch, type FieldPath } from 'react-hook-form'
-import { z } from 'zod'
 
 import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
@@ -13,6 +11,7 @@ import { Input } from '@/components/ui/input'
 import { Notice } from '@/components/ui/notice'
 import { SegmentedControl } from '@/components/ui/radio-group'
 import { Select } from '@/components/ui/select'
+import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
 import { toastDone } from '@/components/ui/toast'
 import type { ShadeView } from '@/lib/shades/present'
@@ -20,12 +19,9 @@ import {
   READING_TERMS,
   SHADE_LIMITS,
   SHADE_STATUSES,
-  shadeColor,
-  shadeName,
-  shadeNumber,
   TERMS_WORDS,
   type ShadeStatus,
-} from '@/lib/shades/schema'
+} from '@/lib/shades/constants'
 
 import { LiveSample } from './live-sample'
 import { STATUS_WORDS } from './shade-words'
@@ -38,13 +34,6 @@ export interface ShadeFormValues {
   status: ShadeStatus
   color: { kind: 'lab' | 'hex'; L: string; a: string; b: string; terms: string; hex: string }
 }
-
-const formSchema = z.object({
-  number: shadeNumber,
-  name: shadeName,
-  status: z.enum(SHADE_STATUSES),
-  color: shadeColor,
-})
 
 const EMPTY: ShadeFormValues = {
   number: '',
@@ -82,7 +71,7 @@ export function ShadeForm(props: ShadeFormProps) {
   const another = useRef(false)
   const form = useForm<ShadeFormValues>({
     // The parsed values are not used: the action parses what was typed, by the same schema.
-    resolver: zodResolver(formSchema) as never,
+    resolver: schemaResolver(() => import('@/lib/shades/schema').then((it) => it.shadeFormSchema)),
     values: shade ? valuesOf(shade) : undefined,
     defaultValues: EMPTY,
     // What somebody else saved meanwhile shows in the fields that were not touched here.

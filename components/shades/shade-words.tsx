@@ -3,7 +3,7 @@ import { MonitorX } from 'lucide-react'
 import { cn } from '@/components/ui/cn'
 import { Status, type StatusKind } from '@/components/ui/status'
 import type { ShadeView } from '@/lib/shades/present'
-import type { ShadeStatus } from '@/lib/shades/schema'
+import type { ShadeStatus } from '@/lib/shades/constants'
 
 /** The statuses of a shade as they are shown. */
 export const STATUS_WORDS: Record<ShadeStatus, string> = {

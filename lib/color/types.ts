@@ -8,10 +8,9 @@ export type Lab = readonly [number, number, number]
 export const chromaOf = (lab: Lab): number => Math.hypot(lab[1], lab[2])
 
 /** h*ab in degrees, 0 ≤ h < 360; 0 for a neutral. */
-export const hueOf = (lab: Lab): number => {
-  const degrees = (Math.atan2(lab[2], lab[1]) * 180) / Math.PI
-  return degrees < 0 ? degrees + 360 : degrees
-}
+export const hueOf = (lab: Lab): number =>
+  // Over again, since 360 less next to nothing is 360.
+  ((Math.atan2(lab[2], lab[1]) * 180) / Math.PI + 360) % 360
 
 /** The CIE standard observer a reading was made for: 2° (1931) or 10° (1964). */
 export type Observer = 2 | 10

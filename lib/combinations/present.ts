@@ -4,7 +4,7 @@ import { presentShade, type ShadeView } from '@/lib/shades/present'
 
 import { canDeleteCombination, canRenameCombination, canReorderCombination } from './policy'
 import type { KeptCombination } from './queries'
-import { PLACE_ROLES, type PlaceRole } from './schema'
+import { PLACE_ROLES, type PlaceRole } from './constants'
 
 /** One of the five places of a kept combination. */
 export interface PlaceView {

@@ -7,7 +7,8 @@ import { getLine } from '@/lib/lines/queries'
 import { Combination, CombinationPlace, Person, Photograph, sequelize, Shade } from '@/models'
 
 import { canReadCombinations } from './policy'
-import { COMBINATION_LIMITS, type CombinationFilter } from './schema'
+import { COMBINATION_LIMITS } from './constants'
+import type { CombinationFilter } from './schema'
 
 /** A combination with its places, shades and photograph, and the name of who kept it. */
 export interface KeptCombination {

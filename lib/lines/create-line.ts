@@ -3,7 +3,8 @@ import { ConflictError } from '@/lib/errors'
 import { createOnce, inTransaction, Line } from '@/models'
 
 import { canCreateLine } from './policy'
-import { LINE_LIMITS, type CreateLineInput } from './schema'
+import { LINE_LIMITS } from './constants'
+import type { CreateLineInput } from './schema'
 
 /** "Heronsway DK" → "heronsway-dk"; "line" when nothing of the name can stand in an address. */
 export function slugify(name: string): string {

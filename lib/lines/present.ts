@@ -1,6 +1,7 @@
 import type { Line } from '@/models'
 
-import { YARN_WEIGHTS, type CreateLineValues } from './schema'
+import { YARN_WEIGHTS } from './constants'
+import type { CreateLineValues } from './schema'
 
 /** Yards in a metre. @source International yard and pound agreement, 1959: 1 yd = 0.9144 m */
 const YARDS_PER_METRE = 1 / 0.9144

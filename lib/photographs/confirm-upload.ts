@@ -12,7 +12,8 @@ import { decodePhotograph, PhotographError, sniffPhotograph } from './decode'
 import { canUploadPhotographs } from './policy'
 import { findSameFile, uuidOrNone } from './queries'
 import { readColors } from './read-colors'
-import { FORMATS_TAKEN, UPLOAD_MIMES, type PhotographIdInput } from './schema'
+import { FORMATS_TAKEN, UPLOAD_MIMES } from './formats'
+import type { PhotographIdInput } from './schema'
 
 /** The photograph is taken in, or the line has that file already. */
 export type ConfirmAnswer =

@@ -6,7 +6,8 @@ import { enqueue } from '@/lib/jobs/queue'
 import { inTransaction, Photograph } from '@/models'
 
 import { canDeletePhotographs } from './policy'
-import { UNDO_WINDOW, type PhotographIdsInput } from './schema'
+import { UNDO_WINDOW } from './constants'
+import type { PhotographIdsInput } from './schema'
 
 /**
  * Deletes photographs; for UNDO_WINDOW they can be brought back. Combinations made from them stay.

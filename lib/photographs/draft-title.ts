@@ -1,4 +1,4 @@
-import { PHOTOGRAPH_LIMITS } from './schema'
+import { PHOTOGRAPH_LIMITS } from './constants'
 
 /**
  * A first title from a file's name: "heather_before-dark.JPG" → "Heather before dark". A camera's

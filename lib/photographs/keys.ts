@@ -1,4 +1,4 @@
-import type { Derivative } from './schema'
+import type { Derivative } from './constants'
 
 /** Where originals are kept; nothing under it is ever served. */
 export const ORIGINALS = 'originals/'

@@ -3,7 +3,7 @@ import type { Photograph } from '@/models'
 
 import { MAX_PIXELS } from './formats'
 import { derivativeKey } from './keys'
-import type { Derivative } from './schema'
+import type { Derivative } from './constants'
 import sharp from './sharp'
 
 /** The widths of the copies in pixels; none is wider than its original. */

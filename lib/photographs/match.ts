@@ -9,7 +9,7 @@ import { Photograph, Reading, Shade } from '@/models'
 
 import { canReadPhotographs } from './policy'
 import { uuidOrNone } from './queries'
-import type { MatchWishes } from './schema'
+import type { MatchWishes } from './wishes'
 
 const decompress = promisify(inflate)
 

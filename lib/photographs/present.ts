@@ -1,9 +1,12 @@
 import type { Actor } from '@/lib/auth/actor'
-import type { Line, Photograph } from '@/models'
+import { screenColor } from '@/lib/color/gamut'
+import type { Lab } from '@/lib/color/types'
+import type { Line, Photograph, Reading } from '@/models'
 
+import type { StoredMatches } from './compute-matches'
 import { derivativeName } from './keys'
 import { canDeletePhotographs, canEditPhotograph, canRereadPhotograph } from './policy'
-import type { Derivative, Licence, PhotographState } from './schema'
+import type { Derivative, Licence, PhotographState } from './constants'
 
 /** One copy for a `srcset`. */
 export interface PictureSource {
@@ -83,3 +86,22 @@ export function presentPhotograph(
     canReread: canRereadPhotograph(actor),
   }
 }
+
+/** A colour of a photograph worth offering for a lock. */
+export interface StrikingColorView {
+  lab: Lab
+  /** As a screen shows it. */
+  hex: string
+}
+
+/** What the match page needs of a photograph's reading. */
+export interface ReadingView {
+  matches: StoredMatches
+  striking: StrikingColorView[]
+}
+
+/** A reading as its view. */
+export const presentReading = ({ matches, striking }: Reading): ReadingView => ({
+  matches: matches as StoredMatches,
+  striking: striking.map(({ lab }) => ({ lab, hex: screenColor(lab).hex })),
+})

@@ -8,12 +8,8 @@ import { Photograph, Reading, type Line } from '@/models'
 
 import { derivativeKey, derivativeName } from './keys'
 import { canReadPhotographs } from './policy'
-import {
-  PHOTOGRAPH_LIMITS,
-  type Derivative,
-  type GalleryFilter,
-  type PhotographStanding,
-} from './schema'
+import { PHOTOGRAPH_LIMITS, type Derivative, type PhotographStanding } from './constants'
+import type { GalleryFilter } from './schema'
 
 const CONFIRMED = { [Op.ne]: 'pending' as const }
 const SHOWN: Record<NonNullable<GalleryFilter['state']>, string[]> = {

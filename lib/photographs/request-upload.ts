@@ -10,7 +10,8 @@ import { draftTitle } from './draft-title'
 import { originalKey } from './keys'
 import { canUploadPhotographs } from './policy'
 import { findSameFile } from './queries'
-import { PHOTOGRAPH_LIMITS, type RequestUploadInput } from './schema'
+import { PHOTOGRAPH_LIMITS } from './constants'
+import type { RequestUploadInput } from './schema'
 
 /** Where to send a file, or the photograph of the line that already is that file. */
 export type UploadAnswer =

@@ -1,61 +1,14 @@
 import { z } from 'zod'
 
-import { READING_KINDS } from '@/lib/color/readings'
-
+import {
+  LICENCES,
+  type Licence,
+  PHOTOGRAPH_LIMITS,
+  GALLERY_STATES,
+  GALLERY_MISSING,
+} from './constants'
 import { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from './formats'
-
-export { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES }
-
-/**
- * Where a photograph stands: `pending` (bytes expected in the object store), `waiting` (confirmed,
- * queued), `reading`, `ready`, `failed`.
- */
-export const PHOTOGRAPH_STATES = ['pending', 'waiting', 'reading', 'ready', 'failed'] as const
-/** One of PHOTOGRAPH_STATES. */
-export type PhotographState = (typeof PHOTOGRAPH_STATES)[number]
-
-/** Whether a state will still change by itself, so that a page follows it. */
-export const isUnsettled = (state: PhotographState): boolean =>
-  state === 'waiting' || state === 'reading'
-
-/** The licence a photograph is used under. */
-export const LICENCES = ['own-work', 'permission', 'cc0', 'cc-by', 'other'] as const
-/** One of LICENCES. */
-export type Licence = (typeof LICENCES)[number]
-/** The licences as people call them. */
-export const LICENCE_LABELS: Record<Licence, string> = {
-  'own-work': 'Own work',
-  permission: 'With permission',
-  cc0: 'CC0 (no rights reserved)',
-  'cc-by': 'CC BY (name the photographer)',
-  other: 'Another licence',
-}
-
-/** The bounds of what a photograph may hold. */
-export const PHOTOGRAPH_LIMITS = {
-  title: 120,
-  photographer: 120,
-  licenceNote: 600,
-  url: 500,
-  altText: 300,
-  fileName: 255,
-  search: 80,
-  perPage: 24,
-  perLine: 2_000,
-  /** Deleted, restored or followed in one request. */
-  atOnce: 100,
-} as const
-
-/** How long a deleted photograph can be brought back, in milliseconds; then it is swept. */
-export const UNDO_WINDOW = 24 * 60 * 60 * 1000
-
-/** A copy of a photograph made for the screen. */
-export interface Derivative {
-  format: 'webp' | 'avif'
-  /** Pixels. */
-  width: number
-  height: number
-}
+import { readWishes } from './wishes'
 
 const text = (most: number, what: string) =>
   z.string().trim().max(most, `Keep ${what} to ${most} characters.`)
@@ -90,6 +43,7 @@ export type PhotographIdInput = z.output<typeof photographIdSchema>
 export const photographParamSchema = z
   .strictObject({ photograph: z.string() })
   .transform(({ photograph }) => ({ photographId: photograph }))
+
 /** A photograph's copy in an address. */
 export const derivativeParamsSchema = z
   .strictObject({ photograph: z.string(), name: z.string() })
@@ -144,11 +98,6 @@ export type UpdatePhotographValues = z.input<typeof updatePhotographSchema>
 /** A parsed change of what is said. */
 export type UpdatePhotographInput = z.output<typeof updatePhotographSchema>
 
-/** The states the gallery can be narrowed to; `reading` covers waiting too. */
-export const GALLERY_STATES = ['ready', 'reading', 'failed'] as const
-/** What the gallery can be narrowed to because it is not there yet. */
-export const GALLERY_MISSING = ['licence', 'alt'] as const
-
 /** The gallery's filter as it stands in the address; what does not fit is left out. */
 export const galleryFilterSchema = z.object({
   q: z.string().trim().max(PHOTOGRAPH_LIMITS.search).catch('').default(''),
@@ -167,33 +116,12 @@ export const photographStatesSchema = z.object({
     .pipe(z.array(z.uuid()).min(1).max(PHOTOGRAPH_LIMITS.atOnce)),
 })
 
-/** Where one photograph stands, as a page that follows it is told. */
-export interface PhotographStanding {
-  id: string
-  state: PhotographState
-  failure: string | null
-}
-
-/** The most ΔE00 that the five can be asked to stand apart. */
-export const MOST_APART = 25
-
-const shadeIds = z
-  .string()
-  .transform((ids) => ids.split(',').filter(Boolean))
-  .pipe(z.array(z.uuid()).max(500))
-  .default([])
-
-/** What a designer asks of a match, as it stands in an address. */
-export const matchWishesSchema = z.object({
-  reading: z.enum(READING_KINDS).default('true'),
-  lock: shadeIds,
-  exclude: shadeIds,
-  apart: z.coerce.number().min(0).max(MOST_APART).optional(),
-})
-/** Parsed wishes. */
-export type MatchWishes = z.output<typeof matchWishesSchema>
-
 /** A photograph in an address, with wishes for its match. */
-export const matchParamsSchema = matchWishesSchema
-  .extend({ photograph: z.string() })
-  .transform(({ photograph, ...wishes }) => ({ photographId: photograph, ...wishes }))
+export const matchParamsSchema = z
+  .looseObject({ photograph: z.string() })
+  .transform(({ photograph, ...address }, context) => {
+    const wishes = readWishes(address)
+    if (wishes) return { photographId: photograph, ...wishes }
+    context.addIssue({ code: 'custom', message: 'These wishes make no sense together.' })
+    return z.NEVER
+  })

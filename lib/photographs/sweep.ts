@@ -4,7 +4,7 @@ import { deleteObjects, listObjects } from '@/lib/storage/objects'
 import { Photograph } from '@/models'
 
 import { derivativeKey, DERIVATIVES, ORIGINALS, photographOfKey } from './keys'
-import { UNDO_WINDOW } from './schema'
+import { UNDO_WINDOW } from './constants'
 
 const MINUTE = 60_000
 
@@ -18,6 +18,8 @@ export interface SweepAges {
   orphan: number
   /** A photograph that says it is being read: longer than all tries of its job. */
   reading: number
+  /** A photograph that waits to be read: longer than any heap before it takes. */
+  waiting: number
 }
 
 const AGES: SweepAges = {
@@ -25,6 +27,7 @@ const AGES: SweepAges = {
   deleted: UNDO_WINDOW,
   orphan: 60 * MINUTE,
   reading: 20 * MINUTE,
+  waiting: 6 * 60 * MINUTE,
 }
 
 /** Keys are looked at this many at a time. */
@@ -49,18 +52,29 @@ export interface SweepResult {
 export async function sweepUploads(ages: Partial<SweepAges> = {}): Promise<SweepResult> {
   const age = { ...AGES, ...ages }
   const before = (milliseconds: number) => ({ [Op.lte]: new Date(Date.now() - milliseconds) })
-  const [stuck] = await Photograph.update(
-    {
-      state: 'failed',
-      failure: 'Reading it was cut off several times. Read the photograph again.',
-    },
-    { where: { state: 'reading', updatedAt: before(age.reading) } },
+  const cutOff = await giveUp(
+    'reading',
+    before(age.reading),
+    'Reading it was cut off several times.',
   )
+  const lost = await giveUp('waiting', before(age.waiting), 'Its reading never began.')
   const uploads = await sweepRows({ state: 'pending', updatedAt: before(age.pending) })
   const photographs = await sweepRows({ deletedAt: before(age.deleted) })
   let objects = 0
   for (const prefix of [ORIGINALS, DERIVATIVES]) objects += await sweepOrphans(prefix, age.orphan)
-  return { uploads, photographs, objects, stuck }
+  return { uploads, photographs, objects, stuck: cutOff + lost }
+}
+
+async function giveUp(
+  state: 'reading' | 'waiting',
+  updatedAt: { [Op.lte]: Date },
+  why: string,
+): Promise<number> {
+  const [count] = await Photograph.update(
+    { state: 'failed', failure: `${why} Read the photograph again.` },
+    { where: { state, updatedAt } },
+  )
+  return count
 }
 
 async function sweepRows(where: WhereOptions<Photograph>): Promise<number> {

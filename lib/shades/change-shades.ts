@@ -6,7 +6,7 @@ import { getLine } from '@/lib/lines/queries'
 import { inTransaction, sequelize, Shade, type Line } from '@/models'
 
 import { canEditShades } from './policy'
-import { SHADE_LIMITS } from './schema'
+import { SHADE_LIMITS } from './constants'
 
 /** What a change did: its answer, and whether any row is different now. */
 export interface Change<T> {

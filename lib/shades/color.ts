@@ -2,7 +2,8 @@ import { hexToLab } from '@/lib/color/srgb'
 import type { Lab } from '@/lib/color/types'
 import type { Shade } from '@/models'
 
-import type { ReadingTerms, ShadeColor } from './schema'
+import type { ReadingTerms } from './constants'
+import type { ShadeColor } from './schema'
 
 /** The columns of a shade that say its colour. */
 export type ColorColumns = Pick<Shade, 'labL' | 'labA' | 'labB' | 'illuminant' | 'observer' | 'hex'>

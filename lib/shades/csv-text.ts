@@ -2,7 +2,7 @@ import { CsvError, parse } from 'csv-parse/sync'
 
 import { InvalidError } from '@/lib/errors'
 
-import { SHADE_LIMITS } from './schema'
+import { SHADE_LIMITS } from './constants'
 
 /** What may stand between the cells of a row. */
 export const DELIMITERS = [',', ';', '\t'] as const

@@ -5,18 +5,15 @@ import { neutraliseCell, writeCsv, type Sheet } from './csv-text'
 import type { ShadeRow } from './present'
 import {
   CSV_FIELDS,
-  labFields,
   oneLine,
   READING_TERMS,
   SHADE_STATUSES,
-  shadeHex,
-  shadeName,
-  shadeNumber,
   type CsvField,
   type CsvMapping,
   type ReadingTerms,
   type ShadeStatus,
-} from './schema'
+} from './constants'
+import { labFields, shadeHex, shadeName, shadeNumber } from './schema'
 
 /** What is wrong with one cell, in words. */
 export interface CellError {

@@ -1,7 +1,7 @@
 import { isSameColor, type ColorColumns } from './color'
 import { numberKey, type CsvRow, type CsvShade } from './csv'
 import type { ShadeRow } from './present'
-import { SHADE_STATUSES, type CsvField, type ShadeStatus } from './schema'
+import { SHADE_STATUSES, type CsvField, type ShadeStatus } from './constants'
 
 /** A shade as an import would leave it. */
 export type PlannedShade = { number: string; name: string | null; status: ShadeStatus } & {

@@ -5,7 +5,7 @@ import type { Shade } from '@/models'
 import { describeColor } from './color'
 import { describeError } from './csv'
 import type { ImportCounts, PlannedField, PlannedRow, PlannedShade } from './plan-import'
-import type { CsvMapping, ShadeStatus } from './schema'
+import type { CsvMapping, ShadeStatus } from './constants'
 
 /** A shade as it leaves the server. */
 export interface ShadeView {

@@ -6,7 +6,8 @@ import { countPlan, planImport } from './plan-import'
 import { canEditShades } from './policy'
 import { presentPlannedRow, type ImportPreview } from './present'
 import { listAllShades } from './queries'
-import { SHADE_LIMITS, type PreviewImportInput } from './schema'
+import { SHADE_LIMITS } from './constants'
+import type { PreviewImportInput } from './schema'
 
 /** Rows of the file that stand beside the choice of columns. */
 const EXAMPLES = 3

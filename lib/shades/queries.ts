@@ -19,7 +19,8 @@ import {
   type ShadeView,
 } from './present'
 import { bookGroups, bookOrder } from './sample-book'
-import { SHADE_LIMITS, SHADE_STATUSES, type ShadeSort, type ShadeTableFilter } from './schema'
+import { SHADE_LIMITS, SHADE_STATUSES, type ShadeSort } from './constants'
+import type { ShadeTableFilter } from './schema'
 import { findUses } from './uses'
 
 /** The line's own order; ties fall by age. */

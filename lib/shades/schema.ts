@@ -1,42 +1,17 @@
 import { z } from 'zod'
 
-/** How far a shade has come: wished for, dyed as a lab dip, approved, no longer made. */
-export const SHADE_STATUSES = ['target', 'dipped', 'approved', 'retired'] as const
-/** One of SHADE_STATUSES. */
-export type ShadeStatus = (typeof SHADE_STATUSES)[number]
-
-/**
- * The terms a Lab reading may come with: illuminant and standard observer. Nothing is assumed for a
- * reading that does not say, and nothing is converted: instruments read D65 for textiles.
- */
-export const READING_TERMS = ['D65/10', 'D65/2'] as const
-/** One of READING_TERMS. */
-export type ReadingTerms = (typeof READING_TERMS)[number]
-
-/** READING_TERMS in words. */
-export const TERMS_WORDS: Record<ReadingTerms, string> = {
-  'D65/10': 'D65, 10° observer',
-  'D65/2': 'D65, 2° observer',
-}
-
-/** The bounds of what a shade may hold. */
-export const SHADE_LIMITS = {
-  number: 16,
-  name: 60,
-  /** CIELAB; a and b beyond ±150 are no surface colour. */
-  ab: 150,
-  perLine: 5_000,
-  search: 60,
-  tablePage: 50,
-  bookPage: 200,
-  /** Rows of one CSV file. */
-  importRows: 5_000,
-  /** Characters of one CSV file; what a server action takes is set in next.config.mjs. */
-  importText: 2_500_000,
-} as const
-
-/** Text as it is kept: composed, on one line, without blanks at its ends. */
-export const oneLine = (text: string): string => text.normalize('NFC').replace(/\s+/gu, ' ').trim()
+import {
+  SHADE_STATUSES,
+  READING_TERMS,
+  SHADE_LIMITS,
+  oneLine,
+  parseReading,
+  parseHex,
+  LAB_RANGES,
+  CSV_FIELDS,
+  type CsvField,
+  SHADE_SORTS,
+} from './constants'
 
 const kept = z
   .string()
@@ -62,18 +37,7 @@ export const shadeName = z
   )
   .transform((name) => name || null)
 
-/**
- * A reading as written: a decimal point or comma, a hyphen or a minus sign, an exponent. Null when
- * it is anything else; never NaN, infinite or −0.
- */
-export function parseReading(text: string): number | null {
-  const plain = text.trim().replace('\u2212', '-').replace(',', '.')
-  if (!/^[+-]?(\d+\.?\d*|\.\d+)(e[+-]?\d{1,3})?$/i.test(plain)) return null
-  const value = Number(plain)
-  return Number.isFinite(value) ? value + 0 : null
-}
-
-const reading = (what: string, least: number, most: number) =>
+const reading = (what: string, [least, most]: readonly [number, number]) =>
   z
     .union([z.number(), z.string()])
     .transform((value, context) => {
@@ -91,21 +55,18 @@ const reading = (what: string, least: number, most: number) =>
 
 /** Lab coordinates as numbers or as text; each says what is wrong with it. */
 export const labFields = {
-  L: reading('L', 0, 100),
-  a: reading('a', -SHADE_LIMITS.ab, SHADE_LIMITS.ab),
-  b: reading('b', -SHADE_LIMITS.ab, SHADE_LIMITS.ab),
+  L: reading('L', LAB_RANGES.L),
+  a: reading('a', LAB_RANGES.a),
+  b: reading('b', LAB_RANGES.b),
 }
 
 /** An sRGB hex colour, kept as six lower-case digits after `#`. */
-export const shadeHex = z
-  .string()
-  .trim()
-  .toLowerCase()
-  .regex(/^#?([0-9a-f]{3}|[0-9a-f]{6})$/, 'Give a hex colour such as #7a8b4f.')
-  .transform((text) => {
-    const digits = text.replace('#', '')
-    return `#${digits.length === 3 ? digits.replace(/./g, '$&$&') : digits}`
-  })
+export const shadeHex = z.string().transform((text, context) => {
+  const hex = parseHex(text)
+  if (hex) return hex
+  context.addIssue({ code: 'custom', message: 'Give a hex colour such as #7a8b4f.' })
+  return z.NEVER
+})
 
 /** A shade's colour as entered: a reading with its terms, or a screen colour. */
 export const shadeColor = z.discriminatedUnion('kind', [
@@ -125,7 +86,11 @@ const shadeFields = {
   status: z.enum(SHADE_STATUSES),
   color: shadeColor,
 }
+/** What people fill in of a shade, new or not. */
+export const shadeFormSchema = z.object(shadeFields)
+
 const inLine = { lineSlug: z.string() }
+
 const shadeIds = z.array(z.uuid()).min(1, 'Choose at least one shade.').max(SHADE_LIMITS.perLine)
 
 /** The form that adds a shade. */
@@ -142,7 +107,7 @@ export type CreateShadeInput = z.output<typeof createShadeSchema>
 /** A change of a shade; a field left out stays as it is. */
 export const updateShadeSchema = z.strictObject({
   ...inLine,
-  ...z.object(shadeFields).partial().shape,
+  ...shadeFormSchema.partial().shape,
   shadeId: z.uuid(),
   version: z.number().int(),
 })
@@ -187,25 +152,8 @@ export const reorderShadesSchema = z.strictObject({
 /** A parsed move. */
 export type ReorderShadesInput = z.output<typeof reorderShadesSchema>
 
-/** What a column of a CSV file may hold; also the header of our own, in this order. */
-export const CSV_FIELDS = [
-  'number',
-  'name',
-  'status',
-  'L',
-  'a',
-  'b',
-  'illuminant',
-  'observer',
-  'hex',
-  'order',
-] as const
-/** One of CSV_FIELDS. */
-export type CsvField = (typeof CSV_FIELDS)[number]
-/** Which column of the file, from 0, holds which field; null when none does. */
-export type CsvMapping = Record<CsvField, number | null>
-
 const column = z.number().int().min(0).max(999).nullable()
+
 const importFields = {
   ...inLine,
   text: z
@@ -214,6 +162,7 @@ const importFields = {
   /** The terms of every reading in the file that does not say its own; null when each must say. */
   terms: z.enum(READING_TERMS).nullable(),
 }
+
 const mapping = z.strictObject(
   Object.fromEntries(CSV_FIELDS.map((field) => [field, column])) as Record<CsvField, typeof column>,
 )
@@ -231,11 +180,6 @@ export const importShadesSchema = z.strictObject({
 })
 /** A parsed import. */
 export type ImportShadesInput = z.output<typeof importShadesSchema>
-
-/** What the table may be sorted by. */
-export const SHADE_SORTS = ['order', 'number', 'name', 'status', 'L', 'a', 'b'] as const
-/** One of SHADE_SORTS. */
-export type ShadeSort = (typeof SHADE_SORTS)[number]
 
 /** The table's address. Nonsense in it gives the default of that part. */
 export const shadeTableSchema = z.object({

@@ -29,7 +29,7 @@ export const demoPhotographs: DemoPhotograph[] = [
     photographer,
     licence,
     altText:
-      'Grey, buff, russet and slate-blue pebbles on a beach, the last of a grey-green wave running over the far corner.',
+      'Grey, buff, russet and slate-blue pebbles on a beach, a few veined with white, with a grey-green sea out of focus beyond.',
     file: 'pebbles-at-low-water.jpg',
   },
   {

@@ -1,3 +1,5 @@
+import { gzipSync } from 'node:zlib'
+
 import AxeBuilder from '@axe-core/playwright'
 import { expect, test, type Page } from '@playwright/test'
 
@@ -54,3 +56,30 @@ for (const role of ROLES) {
     expect(problems).toEqual([])
   })
 }
+
+/** Bytes of script, gzipped, that a page may need before it answers. */
+const SCRIPT_BAR = 200_000
+
+test('no page needs more script before it answers than its bar', async ({ page }) => {
+  await signIn(page, 'owner')
+  const sizes = new Map<string, number>()
+  const sizeOf = async (source: string) => {
+    const known = sizes.get(source)
+    if (known !== undefined) return known
+    const size = gzipSync(await (await page.request.get(source)).body()).length
+    sizes.set(source, size)
+    return size
+  }
+  for (const [name, address] of addresses.set('signing in', '/sign-in')) {
+    const html = await (await page.request.get(address)).text()
+    // What is loaded after the page stands in no script tag; what is for old browsers is not loaded.
+    const tags = [...html.matchAll(/<script[^>]+src="([^"]+)"[^>]*>/g)]
+    const sources = tags.filter(([tag]) => !/nomodule/i.test(tag)).map(([, source]) => source!)
+    expect(sources.length, name).toBeGreaterThan(3)
+    const parts = await Promise.all(sources.map(sizeOf))
+    expect(
+      parts.reduce((sum, part) => sum + part, 0),
+      name,
+    ).toBeLessThanOrEqual(SCRIPT_BAR)
+  }
+})

@@ -7,7 +7,7 @@ import { wishesQuery } from '@/components/match/use-wishes'
 import { NO_CELL } from '@/lib/color/photograph-colors'
 import { READING_KINDS } from '@/lib/color/readings'
 import { srgbToLab } from '@/lib/color/srgb'
-import { matchWishesSchema, MOST_APART } from '@/lib/photographs/schema'
+import { MOST_APART, readWishes } from '@/lib/photographs/wishes'
 
 describe('the region of one of the five', () => {
   it('is left clear; every other pixel and every invisible one is veiled', () => {
@@ -55,7 +55,7 @@ describe('the wishes in an address', () => {
     fc.assert(
       fc.property(wishes, (asked) => {
         const query = Object.fromEntries(new URLSearchParams(wishesQuery(asked)))
-        const { apart, ...rest } = matchWishesSchema.parse(query)
+        const { apart, ...rest } = readWishes(query)!
         expect({ ...rest, apart }).toEqual(asked)
       }),
     )

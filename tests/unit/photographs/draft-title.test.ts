@@ -1,7 +1,7 @@
 import { describe, expect, it } from 'vitest'
 
 import { draftTitle } from '@/lib/photographs/draft-title'
-import { PHOTOGRAPH_LIMITS } from '@/lib/photographs/schema'
+import { PHOTOGRAPH_LIMITS } from '@/lib/photographs/constants'
 
 describe('a title drafted from a file name', () => {
   it.each([

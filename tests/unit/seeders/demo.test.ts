@@ -4,6 +4,7 @@ import sharp, { type Sharp } from 'sharp'
 import { describe, expect, it } from 'vitest'
 
 import { deltaE00 } from '@/lib/color/ciede2000'
+import { screenColor } from '@/lib/color/gamut'
 import { hexToLab } from '@/lib/color/srgb'
 import type { Lab } from '@/lib/color/types'
 import { READING_KINDS } from '@/lib/color/readings'
@@ -47,6 +48,30 @@ describe('the demo', () => {
     for (const [at, lab] of labs.entries()) {
       for (const other of labs.slice(at + 1)) expect(deltaE00(lab, other)).toBeGreaterThan(4)
     }
+  })
+
+  it('has shades a dyer could reach on wool, a few of them still unnamed', () => {
+    const { shades } = first!.lines[0]!
+    expect(shades.filter(({ name }) => name === null)).toHaveLength(4)
+    for (const { lab } of shades) {
+      expect(lab!.L).toBeGreaterThan(13)
+      expect(lab!.L).toBeLessThan(93)
+      expect(Math.hypot(lab!.a, lab!.b)).toBeLessThan(90)
+    }
+    const hues = shades
+      .filter(({ lab }) => Math.hypot(lab!.a, lab!.b) > 12)
+      .map(({ lab }) => (Math.atan2(lab!.b, lab!.a) * 180) / Math.PI + 180)
+      .sort((a, b) => a - b)
+    const gaps = hues.map((hue, at) => (hues[at + 1] ?? hues[0]! + 360) - hue)
+    expect(Math.max(...gaps)).toBeLessThan(50)
+  })
+
+  it('has a teal or a yellow or two that no screen shows, and hardly more', () => {
+    const outside = first!.lines[0]!.shades.filter(
+      ({ lab }) => !screenColor([lab!.L, lab!.a, lab!.b]).inGamut,
+    )
+    expect(outside.length).toBeGreaterThanOrEqual(1)
+    expect(outside.length).toBeLessThanOrEqual(3)
   })
 
   it('keeps combinations of photographs that are there, each in one of the readings', () => {

@@ -14,7 +14,7 @@ import {
 import { parseSheet } from '@/lib/shades/csv-text'
 import { planImport } from '@/lib/shades/plan-import'
 import type { ShadeRow } from '@/lib/shades/present'
-import { SHADE_STATUSES, type ReadingTerms } from '@/lib/shades/schema'
+import { SHADE_STATUSES, type ReadingTerms } from '@/lib/shades/constants'
 
 function read(text: string, terms: ReadingTerms | null = null) {
   const sheet = parseSheet(text)

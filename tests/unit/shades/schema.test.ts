@@ -1,9 +1,9 @@
 import fc from 'fast-check'
 import { describe, expect, it, test } from 'vitest'
 
+import { parseReading } from '@/lib/shades/constants'
 import {
   createShadeSchema,
-  parseReading,
   shadeColor,
   shadeHex,
   shadeName,

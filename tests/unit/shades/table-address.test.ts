@@ -2,7 +2,8 @@ import fc from 'fast-check'
 import { expect, it } from 'vitest'
 
 import { tableHref } from '@/components/shades/table-address'
-import { SHADE_SORTS, SHADE_STATUSES, shadeTableSchema } from '@/lib/shades/schema'
+import { SHADE_SORTS, SHADE_STATUSES } from '@/lib/shades/constants'
+import { shadeTableSchema } from '@/lib/shades/schema'
 
 const place = { brand: 'teasel', lineSlug: 'dk' }
 

@@ -71,7 +71,7 @@ function show({
         photograph={PHOTOGRAPH}
         shades={SHADES}
         matches={matches}
-        striking={[{ lab: [41, 0, 0], area: 0.1 }]}
+        striking={[{ lab: [41, 0, 0], hex: '#626262' }]}
         {...(keep && { keep: keep as never })}
         head={null}
         foot={null}

@@ -1,4 +1,4 @@
-import { render, screen } from '@testing-library/react'
+import { render, screen, waitFor } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { beforeEach, describe, expect, it, vi } from 'vitest'
 
@@ -32,6 +32,7 @@ describe('the details of a photograph', () => {
     render(<PhotographDetailsForm brand="b" photograph={photograph} save={save} />)
     await user.type(titleField(), ' at noon')
     await user.click(saveButton())
+    await waitFor(() => expect(save).toHaveBeenCalled())
     expect(save).toHaveBeenCalledExactlyOnceWith(
       'b',
       expect.objectContaining({ version: 3, title: 'The tarn at noon', licence: 'own-work' }),
@@ -45,7 +46,7 @@ describe('the details of a photograph', () => {
     await user.selectOptions(screen.getByRole('combobox', { name: 'Licence' }), 'permission')
     await user.click(saveButton())
     const note = screen.getByRole('textbox', { name: /Note on the licence/ })
-    expect(note).toBeInvalid()
+    await waitFor(() => expect(note).toBeInvalid())
     expect(note).toHaveAccessibleDescription(/Say who gave permission/)
     expect(save).not.toHaveBeenCalled()
   })
@@ -73,7 +74,7 @@ describe('the details of a photograph', () => {
     const { rerender } = render(form(photograph))
     await user.type(titleField(), ' at noon')
     await user.click(saveButton())
-    expect(refresh).toHaveBeenCalled()
+    await waitFor(() => expect(refresh).toHaveBeenCalled())
     rerender(
       form({ ...photograph, version: 4, title: 'The tarn at dusk', altText: 'Still water.' }),
     )

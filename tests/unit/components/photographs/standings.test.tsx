@@ -3,7 +3,7 @@ import { afterEach, beforeEach, describe, expect, it, vi } from 'vitest'
 
 import { ReadingStatus } from '@/components/photographs/reading-status'
 import { pauseAfter } from '@/components/photographs/use-standings'
-import type { PhotographState } from '@/lib/photographs/schema'
+import type { PhotographState } from '@/lib/photographs/constants'
 
 const refresh = vi.fn()
 vi.mock('next/navigation', () => ({ useRouter: () => ({ refresh }) }))

@@ -19,7 +19,8 @@ import { readForPage } from '@/lib/server/page'
 import { pageNumber, pagesOf } from '@/lib/server/paging'
 import { canEditShades } from '@/lib/shades/policy'
 import { listShadeTable, readSampleBook } from '@/lib/shades/queries'
-import { SHADE_LIMITS, shadeTableSchema } from '@/lib/shades/schema'
+import { SHADE_LIMITS } from '@/lib/shades/constants'
+import { shadeTableSchema } from '@/lib/shades/schema'
 
 import {
   deleteShadesAction,

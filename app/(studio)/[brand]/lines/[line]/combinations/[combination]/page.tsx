@@ -1,4 +1,5 @@
 import type { Metadata } from 'next'
+import { cache } from 'react'
 
 import { CombinationTitle } from '@/components/combinations/combination-title'
 import { DeleteCombination } from '@/components/combinations/delete-combination'
@@ -28,7 +29,24 @@ import {
   restoreCombinationAction,
 } from '../actions'
 
-export const metadata: Metadata = { title: 'Combination' }
+type Props = PageProps<'/[brand]/lines/[line]/combinations/[combination]'>
+
+const read = cache((brand: string, lineSlug: string, id: string) =>
+  readForPage(brand, async (actor) => {
+    const kept = await getCombination(actor, lineSlug, id)
+    const row = kept.combination.photograph
+    return {
+      combination: presentCombination(actor, kept),
+      photograph: row && presentPhotograph(actor, await getLine(actor, lineSlug), row),
+    }
+  }),
+)
+
+/** The combination names its page. */
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { brand, line, combination } = await params
+  return { title: (await read(brand, line, combination)).combination.title }
+}
 
 const CLOTHS = [
   { kind: 'stripes', words: 'as stripes' },
@@ -36,18 +54,9 @@ const CLOTHS = [
   { kind: 'rounds', words: 'as crochet rounds' },
 ] as const
 
-export default async function CombinationPage({
-  params,
-}: PageProps<'/[brand]/lines/[line]/combinations/[combination]'>) {
+export default async function CombinationPage({ params }: Props) {
   const { brand, line: lineSlug, combination: id } = await params
-  const { combination, photograph } = await readForPage(brand, async (actor) => {
-    const kept = await getCombination(actor, lineSlug, id)
-    const row = kept.combination.photograph
-    return {
-      combination: presentCombination(actor, kept),
-      photograph: row && presentPhotograph(actor, await getLine(actor, lineSlug), row),
-    }
-  })
+  const { combination, photograph } = await read(brand, lineSlug, id)
   const list = `/${brand}/lines/${lineSlug}/combinations`
   const bands = bandsOf(combination)
   return (

@@ -1,9 +1,10 @@
 import type { Metadata } from 'next'
+import { cache } from 'react'
 
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader, SheetSection } from '@/components/layout/sheet-header'
 import { MatchSheet } from '@/components/match/match-sheet'
-import { PhotographDetailsForm } from '@/components/photographs/photograph-details-form'
+import { PhotographDetails } from '@/components/photographs/photograph-details'
 import { PhotographFacts } from '@/components/photographs/photograph-facts'
 import { PhotographPicture } from '@/components/photographs/photograph-picture'
 import { ReadAgainButton } from '@/components/photographs/read-again-button'
@@ -12,32 +13,39 @@ import { buttonClass } from '@/components/ui/button-class'
 import { LinkButton } from '@/components/ui/link-button'
 import { Notice } from '@/components/ui/notice'
 import { canKeepCombination } from '@/lib/combinations/policy'
-import type { StoredMatches } from '@/lib/photographs/compute-matches'
-import { presentPhotograph } from '@/lib/photographs/present'
+import { presentPhotograph, presentReading } from '@/lib/photographs/present'
 import { getPhotograph } from '@/lib/photographs/queries'
-import { LICENCE_LABELS } from '@/lib/photographs/schema'
+import { LICENCE_LABELS } from '@/lib/photographs/constants'
 import { readForPage } from '@/lib/server/page'
 import { listMatchShades } from '@/lib/shades/queries'
 
 import { keepCombinationAction, rereadPhotographAction, updatePhotographAction } from './actions'
 
-export const metadata: Metadata = { title: 'Photograph' }
+type Props = PageProps<'/[brand]/lines/[line]/photographs/[photograph]'>
 
-const FEWEST = 5
-
-export default async function PhotographPage({
-  params,
-}: PageProps<'/[brand]/lines/[line]/photographs/[photograph]'>) {
-  const { brand, line: lineSlug, photograph: id } = await params
-  const { photograph, shades, reading, keeps } = await readForPage(brand, async (actor) => {
+const read = cache((brand: string, lineSlug: string, id: string) =>
+  readForPage(brand, async (actor) => {
     const found = await getPhotograph(actor, lineSlug, id, { withReading: true })
     return {
       photograph: presentPhotograph(actor, found.line, found.photograph),
       shades: await listMatchShades(actor, found.line.id),
-      reading: found.photograph.reading,
+      reading: found.photograph.reading ? presentReading(found.photograph.reading) : null,
       keeps: canKeepCombination(actor),
     }
-  })
+  }),
+)
+
+/** The photograph names its page. */
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { brand, line, photograph } = await params
+  return { title: (await read(brand, line, photograph)).photograph.title }
+}
+
+const FEWEST = 5
+
+export default async function PhotographPage({ params }: Props) {
+  const { brand, line: lineSlug, photograph: id } = await params
+  const { photograph, shades, reading, keeps } = await read(brand, lineSlug, id)
   const { title, state, licence, photographer, altText, stale, canReread } = photograph
   const head = (
     <>
@@ -74,7 +82,7 @@ export default async function PhotographPage({
     </>
   )
   const form = (
-    <PhotographDetailsForm brand={brand} photograph={photograph} save={updatePhotographAction} />
+    <PhotographDetails brand={brand} photograph={photograph} save={updatePhotographAction} />
   )
   const foot = (
     <SheetSection title="About the photograph" className="mt-12 print:hidden">
@@ -99,13 +107,13 @@ export default async function PhotographPage({
       <Sheet>
         {head}
         <div className="max-w-3xl space-y-6">
-          <PhotographPicture photograph={photograph} sizes="(min-width: 900px) 48rem, 100vw" />
           <ReadingStatus
             brand={brand}
             standing={photograph}
             canReread={canReread}
             reread={rereadPhotographAction}
           />
+          <PhotographPicture photograph={photograph} sizes="(min-width: 900px) 48rem, 100vw" />
         </div>
         {foot}
       </Sheet>
@@ -148,7 +156,7 @@ export default async function PhotographPage({
         hex,
         inGamut,
       }))}
-      matches={reading.matches as StoredMatches}
+      matches={reading.matches}
       striking={reading.striking}
       {...(keeps && { keep: keepCombinationAction })}
       head={head}

@@ -1,4 +1,5 @@
 import type { Metadata } from 'next'
+import { cache } from 'react'
 
 import { Note } from '@/components/layout/note'
 import { ScreenCaution } from '@/components/layout/screen-caution'
@@ -25,17 +26,25 @@ import { getShade } from '@/lib/shades/queries'
 
 import { deleteShadesAction, restoreShadesAction, updateShadeAction } from '../actions'
 
-export const metadata: Metadata = { title: 'Shade' }
+type Props = PageProps<'/[brand]/lines/[line]/shades/[shade]'>
 
-export default async function ShadePage({
-  params,
-}: PageProps<'/[brand]/lines/[line]/shades/[shade]'>) {
-  const { brand, line: lineSlug, shade: shadeId } = await params
-  const place = { brand, lineSlug }
-  const { edits, shade, neighbours, uses } = await readForPage(brand, async (actor) => ({
+const read = cache((brand: string, lineSlug: string, shadeId: string) =>
+  readForPage(brand, async (actor) => ({
     ...(await getShade(actor, lineSlug, shadeId)),
     edits: canEditShades(actor),
-  }))
+  })),
+)
+
+/** The shade names its page. */
+export async function generateMetadata({ params }: Props): Promise<Metadata> {
+  const { brand, line, shade } = await params
+  return { title: (await read(brand, line, shade)).shade.label }
+}
+
+export default async function ShadePage({ params }: Props) {
+  const { brand, line: lineSlug, shade: shadeId } = await params
+  const place = { brand, lineSlug }
+  const { edits, shade, neighbours, uses } = await read(brand, lineSlug, shadeId)
   const [L, a, b] = shade.lab
   const more = uses ? uses.total - uses.combinations.length : 0
 

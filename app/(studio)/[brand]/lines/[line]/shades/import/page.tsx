@@ -9,7 +9,7 @@ import { authorize } from '@/lib/auth/actor'
 import { getLine } from '@/lib/lines/queries'
 import { readForPage } from '@/lib/server/page'
 import { canEditShades } from '@/lib/shades/policy'
-import { SHADE_LIMITS, SHADE_STATUSES } from '@/lib/shades/schema'
+import { SHADE_LIMITS, SHADE_STATUSES } from '@/lib/shades/constants'
 
 import { importShadesAction, previewImportAction } from '../actions'
 
