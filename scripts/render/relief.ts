@@ -10,14 +10,13 @@ export interface Relief {
 
 /**
  * Lights a surface face on by a low warm sun (x right, y down, z towards the eye) and a blue sky:
- * shading, cast shadows and dark hollows. `wet`, 0 to 1 a pixel, adds the glint of water.
+ * shading, cast shadows and dark hollows.
  */
 export function lightRelief(
   relief: Relief,
   color: Picture,
   unitPixels: number,
   sun: { x: number; y: number; z: number },
-  wet?: Float32Array,
 ): Picture {
   const { width, height, data } = relief
   const near = { width, height, data: new Float32Array(data) }
@@ -54,16 +53,9 @@ export function lightRelief(
         1.1,
         smoothstep(-0.5, 0.5, fbm2(px / unitPixels / 3, py / unitPixels / 3, 2, 40)),
       )
-      const mirror =
-        Math.max(0, (nx * sun.x + ny * sun.y + sun.z + 1) * n) / Math.sqrt(2 + 2 * sun.z)
-      const gleam = wet
-        ? wet[at]! * (Math.max(0, open) * Math.min(1, mirror) ** 140 * 0.8 + 0.012)
-        : 0
-      out.data[at * 3] = gleam + color.data[at * 3]! * (2.35 * direct * drift + 0.3 * hollow)
-      out.data[at * 3 + 1] =
-        gleam + color.data[at * 3 + 1]! * (2.06 * direct * drift + 0.36 * hollow)
-      out.data[at * 3 + 2] =
-        gleam * 1.08 + color.data[at * 3 + 2]! * (1.62 * direct * drift + 0.47 * hollow)
+      out.data[at * 3] = color.data[at * 3]! * (2.35 * direct * drift + 0.3 * hollow)
+      out.data[at * 3 + 1] = color.data[at * 3 + 1]! * (2.06 * direct * drift + 0.36 * hollow)
+      out.data[at * 3 + 2] = color.data[at * 3 + 2]! * (1.62 * direct * drift + 0.47 * hollow)
     }
   }
   return out

@@ -1,101 +1,200 @@
+import type { Camera } from '../camera'
 import type { Development } from '../develop'
-import { fbm2, hash, noise2, ridged2, smoothstep, worley2, type Cell } from '../noise'
-import { blend, makePicture, paint, scale, type Picture, type Rgb } from '../picture'
-import { lightRelief } from '../relief'
+import { focus } from '../lens'
+import { fbm2, fbm3, mix, noise2, noise3, smoothstep } from '../noise'
+import { blend, halve, makePicture, paint, scale, type Picture, type Rgb } from '../picture'
+import { castBeach, layBeach, type Beach, type Touch } from '../pebbles'
 
 /** How this picture is developed. */
 export const development: Development = {
-  exposure: 1.15,
+  exposure: 1.12,
   contrast: 0.35,
+  saturation: 0.8,
   vignette: 0.3,
-  bloom: 0.05,
+  quality: 84,
 }
 
-const ACROSS = 5
-const tones = [
-  '#6d7578',
-  '#8d8574',
-  '#a39c8c',
-  '#7c4f3c',
-  '#50606c',
-  '#b7ae9c',
-  '#5f5a55',
-  '#94765c',
-  '#3f4a52',
+const camera: Camera = { x: 0, y: 0.62, z: 0, focal: 0.86, horizon: 0.13 }
+const SHORE = 4.4
+const kinds = [
+  '#5d6a74',
+  '#8d8f8c',
+  '#b29c7a',
+  '#8a5a43',
+  '#3c4246',
   '#c9c3b4',
+  '#6b7266',
+  '#a7784f',
+  '#74808a',
+  '#9c8f80',
 ].map(paint)
-const sand = paint('#57503f')
-const foam = paint('#a9b0ad')
-const sea = paint('#3f5552')
-const cell: Cell = { nearest: 0, second: 0, id: 0 }
+const quartz = paint('#dcd7ca')
+const seaDeep = paint('#4f6a68')
+const seaLight = paint('#8fa39d')
+const overcast = paint('#c9d0d3')
+const sun = { x: -0.62, y: 0.68, z: 0.39 }
 
-/** Pebbles of three sizes, the larger lying on the smaller; [height, id, how deep inside]. */
-function pebble(x: number, y: number): [number, number, number] {
-  let best: [number, number, number] = [-0.1, 0, -1]
-  for (const [size, seed, share] of [
-    [0.16, 1, 1],
-    [0.34, 2, 0.8],
-    [0.7, 3, 0.42],
-  ] as const) {
-    const bend = 0.18 * size
-    const wx = x + bend * fbm2(x / size, y / size, 2, seed + 10)
-    const wy = y * 1.25 + bend * fbm2(x / size, y / size, 2, seed + 20)
-    worley2(wx / size, wy / size, seed * 17, cell)
-    if (hash(cell.id & 0xffff, seed, 5) > share) continue
-    const gap = cell.second - cell.nearest
-    const inside = Math.min(1, gap * 1.7, (0.66 - cell.nearest) * 2.2)
-    if (gap < 0.04 || inside <= 0) continue
-    const round = Math.sqrt(1 - (1 - inside) ** 2)
-    const lift = size * (0.34 * round + 0.12) + size * 0.3
-    if (lift > best[0]) best = [lift, (cell.id % 100_003) + seed * 7, inside]
-  }
-  return best
-}
-
-/** Wet pebbles from above, with the last of a wave running over the far corner. */
+/** Pebbles on a beach, wet towards the sea, with the sea itself out of focus. */
 export function render(width: number, height: number): Picture {
-  const unitPixels = width / ACROSS
-  const relief = { width, height, data: new Float32Array(width * height) }
-  const wet = new Float32Array(width * height)
-  const color = makePicture(width, height)
-  for (let py = 0; py < height; py++) {
-    for (let px = 0; px < width; px++) {
-      const at = py * width + px
-      const x = px / unitPixels
-      const y = py / unitPixels
-      const [lift, id, inside] = pebble(x, y)
-      const own = (n: number) => hash(id, n, 3)
-      const grit = noise2(x * 110, y * 110, 11)
-      const mottle = fbm2(x * 9 + id, y * 9, 4, 12)
-      let tone: Rgb = sand
-      if (inside > 0) {
-        tone = blend(
-          tones[Math.floor(own(1) * 10)]!,
-          tones[Math.floor(own(2) * 10)]!,
-          0.28 + mottle * 0.5,
-        )
-        const vein = ridged2((x + own(3) * 9) * 3, (y * 0.6 + own(4) * 9) * 3, 3, 14)
-        if (own(5) > 0.72) tone = blend(tone, paint('#d6d1c4'), smoothstep(0.8, 0.95, vein))
-        tone = scale(tone, 0.5 + 0.2 * mottle + 0.1 * grit + 0.5 * own(6) * 0.5)
-      }
-      // The wave comes from the upper right.
-      const shore = x * 0.55 - y * 1.15 - 1.35 + 0.3 * fbm2(x * 0.9, y * 0.9, 4, 31)
-      const water = smoothstep(0, 0.9, shore)
-      const lace =
-        smoothstep(0.25, 0.75, ridged2(x * 2.3 + shore, y * 3, 5, 33)) *
-        smoothstep(0.75, 0.05, Math.abs(shore - 0.12) * 1.6)
-      tone = blend(tone, sea, water * 0.82)
-      tone = blend(tone, foam, Math.min(1, lace * 1.15) * smoothstep(-0.12, 0.06, shore))
-      const damp = smoothstep(-1.9, -0.2, shore)
-      relief.data[at] =
-        lift * (1 - water * 0.93) +
-        grit * 0.001 +
-        mottle * 0.012 +
-        water * (0.5 + 0.05 * fbm2(x * 3, y * 5, 4, 35)) +
-        lace * 0.03
-      wet[at] = Math.min(1, damp * 0.8 + water * 0.5) * (1 - lace)
-      color.data.set(scale(tone, 1 - 0.25 * damp * (1 - water)), at * 3)
+  const beach = layBeach(11, SHORE + 3)
+  const big = makePicture(width * 2, height * 2)
+  const depth = new Float32Array(width * height)
+  const lens = big.width * camera.focal
+  const color: Rgb = [0, 0, 0]
+  const touch: Touch = {
+    t: 0,
+    stone: -1,
+    x: 0,
+    y: 0,
+    z: 0,
+    nx: 0,
+    ny: 0,
+    nz: 0,
+    u: 0,
+    v: 0,
+    w: 0,
+    open: 1,
+    lit: 1,
+  }
+  for (let py = 0; py < big.height; py++) {
+    const v = (big.height * camera.horizon - py - 0.5) / lens
+    for (let px = 0; px < big.width; px++) {
+      const u = (px + 0.5 - big.width / 2) / lens
+      const far = trace(beach, u, v, touch, color)
+      const at = (py * big.width + px) * 3
+      big.data[at] = color[0]
+      big.data[at + 1] = color[1]
+      big.data[at + 2] = color[2]
+      depth[(py >> 1) * width + (px >> 1)] = far
     }
   }
-  return lightRelief(relief, color, unitPixels, { x: -0.56, y: -0.45, z: 0.7 }, wet)
+  const picture = halve(big)
+  focus(picture, depth, 1.35, width * 0.009, width * 0.0036)
+  return picture
+}
+
+function shoreline(x: number): number {
+  return SHORE + 0.5 * noise2(x * 0.5, 2.2, 61) + 0.12 * noise2(x * 2.1, 7, 62)
+}
+
+function trace(beach: Beach, u: number, v: number, touch: Touch, out: Rgb): number {
+  if (v > -0.002) {
+    skyTone(u, v, out)
+    return 400
+  }
+  const seaZ = camera.y / -v
+  const seaX = u * seaZ
+  const past = seaZ - shoreline(seaX)
+  if (past > 0.5 || !castBeach(beach, camera, u, v, touch)) {
+    seaTone(seaX, seaZ, past, v, out)
+    return seaZ
+  }
+  stoneTone(beach, touch, u, v, out)
+  if (past > -0.15) {
+    // The last of a wave, running out between the stones.
+    const film =
+      smoothstep(-0.15, 0.35, past + 0.1 * noise2(seaX * 4, seaZ * 4, 63)) *
+      smoothstep(0.02, -0.012, touch.y - 0.015 - 0.2 * past)
+    const sea: Rgb = [0, 0, 0]
+    seaTone(seaX, seaZ, Math.max(0.02, past), v, sea)
+    for (let c = 0; c < 3; c++) out[c] = mix(out[c]!, sea[c]!, film * 0.9)
+  }
+  return touch.t
+}
+
+function stoneTone(beach: Beach, touch: Touch, u: number, v: number, out: Rgb): void {
+  const { stone, u: a, v: b, w: c } = touch
+  let tone: Rgb
+  if (stone < 0) {
+    const grit =
+      noise2(touch.x * 420, touch.z * 420, 64) + 0.6 * noise2(touch.x * 160, touch.z * 160, 65)
+    tone = scale(paint('#6b6152'), 0.8 + 0.4 * grit)
+  } else {
+    const id = beach.id[stone]!
+    const kind = id % kinds.length
+    const k = (id >>> 4) % 997
+    const size = beach.size[stone]! * 40
+    const broad = fbm3(a * 1.4 + k, b * 1.4, c * 1.4, 4, 66)
+    const fine = fbm3(a * size * 3 + k, b * size * 3, c * size * 3, 4, 67)
+    const speck = noise3(a * size * 16, b * size * 16 + k, c * size * 16, 68)
+    tone = blend(kinds[kind]!, kinds[(id >>> 9) % kinds.length]!, 0.2 + 0.3 * broad)
+    tone = scale(
+      tone,
+      0.92 +
+        0.35 * fine +
+        (kind % 3 === 0 ? 0.3 : 0.12) * speck +
+        0.3 * (((id >>> 13) % 100) / 100 - 0.5),
+    )
+    if ((id >>> 5) % 5 === 0) {
+      const band = Math.sin((a * ((id >>> 7) % 3) + b * 6 + c * 2) * 2.2 + broad * 4)
+      tone = scale(tone, 1 + 0.22 * band)
+    }
+    if ((id >>> 6) % 6 === 0) {
+      const vein = Math.abs(a * 0.6 + b * 1.3 - c * 0.5 + 0.28 * broad - 0.15)
+      tone = blend(tone, quartz, smoothstep(0.075, 0.03, vein + 0.02 * speck) * 0.85)
+    }
+  }
+  const tide = touch.z - shoreline(touch.x)
+  const wet = smoothstep(
+    -2.1,
+    -0.9,
+    tide + 0.5 * fbm2(touch.x * 1.3, touch.z * 1.3, 3, 69) - touch.y * 6,
+  )
+  const bump = wet > 0.5 ? 0.05 : 0.12
+  const nx = touch.nx + bump * noise3(a * 5, b * 5, c * 5 + 3, 70)
+  const nz = touch.nz + bump * noise3(a * 5, b * 5 + 9, c * 5, 71)
+  const ny = touch.ny
+  const facing = Math.max(0, nx * sun.x + ny * sun.y + nz * sun.z)
+  const length = Math.hypot(u, v, 1)
+  const along = (nx * u + ny * v + nz) / length
+  const fresnel = 0.03 + 0.97 * (1 - Math.min(1, Math.abs(along))) ** 5
+  const rx = u / length - 2 * along * nx
+  const ry = v / length - 2 * along * ny
+  const rz = 1 / length - 2 * along * nz
+  const mirror = Math.min(1, Math.max(0, rx * sun.x + ry * sun.y + rz * sun.z))
+  const gloss =
+    wet * (fresnel * smoothstep(-0.1, 0.5, ry) * 1.1 * touch.open + mirror ** 60 * 0.7 * touch.lit)
+  const darker = mix(1, 0.5, wet)
+  const ambient = touch.open * (0.5 + 0.5 * ny)
+  out[0] = tone[0] * darker * (1.45 * facing * touch.lit + 0.42 * ambient) + gloss * overcast[0]
+  out[1] = tone[1] * darker * (1.36 * facing * touch.lit + 0.45 * ambient) + gloss * overcast[1]
+  out[2] = tone[2] * darker * (1.2 * facing * touch.lit + 0.5 * ambient) + gloss * overcast[2]
+}
+
+function seaTone(x: number, z: number, past: number, v: number, out: Rgb): void {
+  const sharpness = 1 / (1 + z * 0.12)
+  const swell =
+    noise2(x * 0.25, z * 0.5, 72) +
+    0.6 * noise2(x * 0.9, z * 2.2, 73) * sharpness +
+    0.35 * noise2(x * 3, z * 8, 74) * sharpness ** 2
+  const facing = Math.min(1, Math.max(0.02, -v * 1.4 + 0.16 * swell))
+  const mirror = 0.02 + 0.98 * (1 - facing) ** 5
+  const shallow = Math.exp(-Math.max(0, past) * 0.5)
+  const body = blend(seaDeep, seaLight, shallow * 0.7 + 0.18 * swell)
+  for (let c = 0; c < 3; c++) out[c] = mix(body[c]! * 0.8, overcast[c]! * 0.92, mirror * 0.85)
+  const lace = fbm2(x * 2.2, z * 3.4, 5, 75)
+  const edge =
+    smoothstep(0.34, 0.06, Math.abs(past - 0.16 + 0.1 * lace)) *
+    smoothstep(-0.25, 0.15, lace + 0.12)
+  const wash = smoothstep(2.6, 0.3, past) * smoothstep(0.08, 0.02, Math.abs(lace + 0.06)) * 0.6
+  const breaker = 8.2 + 0.7 * noise2(x * 0.35, 3, 76)
+  const crest =
+    smoothstep(0.55, 0.0, Math.abs(z - breaker - 0.25 * lace)) *
+    smoothstep(-0.2, 0.3, noise2(x * 0.22, 1, 77) + lace * 0.5)
+  const farCaps =
+    smoothstep(0.62, 0.8, noise2(x * 0.16, z * 0.55, 78)) *
+    smoothstep(10, 16, z) *
+    smoothstep(90, 30, z) *
+    0.5
+  const foam = Math.min(1, Math.max(edge, wash, crest, farCaps))
+  for (let c = 0; c < 3; c++) out[c] = mix(out[c]!, overcast[c]! * (1.05 + 0.2 * lace), foam)
+  const haze = 1 - Math.exp(-z / 160)
+  for (let c = 0; c < 3; c++) out[c] = mix(out[c]!, overcast[c]! * 0.86, haze * 0.75)
+}
+
+function skyTone(u: number, v: number, out: Rgb): void {
+  const up = Math.max(0, v)
+  const cloud = fbm2(u * 3.2, Math.log(up + 0.04) * 1.6, 5, 79)
+  const tone = 0.9 + 0.14 * cloud - up * 0.8
+  for (let c = 0; c < 3; c++) out[c] = overcast[c]! * tone * (1 - 0.05 * (2 - c) * (1 - cloud))
 }
