@@ -65,47 +65,52 @@ function againstBruteForce(): Figure {
   }
 }
 
-interface LargeFile {
-  name: string
-  bytes: Buffer
-  enlarged: boolean
-}
+/** How strong the grain of an enlarged copy is: at 12 megapixels it comes to 2 to 3 MB a file. */
+const GRAIN = 18
 
 /**
- * Files of 12 megapixels and more: those that are so large, and enlarged copies. A copy is smoother
- * than a camera's picture, so sharp is soon done with it and the rest weighs more.
+ * Files of 12 megapixels and more: those that are so large, and enlarged copies, to which grain is
+ * added. Without it a copy holds next to nothing to decode, as no camera's picture does.
  */
-async function largeFiles(photos: Photograph[]): Promise<LargeFile[]> {
+async function largeFiles(photos: Photograph[]): Promise<{ name: string; bytes: Buffer }[]> {
   const files = photos
     .filter(({ megapixels }) => megapixels >= 12)
-    .map(({ name, bytes }): LargeFile => ({ name, bytes, enlarged: false }))
+    .map(({ name, bytes }) => ({ name, bytes }))
+  const size = { width: 4000, height: 3000 }
+  const noise = { type: 'gaussian', mean: 128, sigma: GRAIN } as const
+  const grain = await sharp({ create: { ...size, channels: 3, background: '#808080', noise } })
+    .png({ compressionLevel: 0 })
+    .toBuffer()
   for (const { name, bytes } of photos) {
     if (!['nature/Dune.jpg', 'nature/Garden.jpg', 'nature/Storm.jpg'].includes(name)) continue
-    const large = sharp(bytes).resize(4000, 3000, { fit: 'cover' }).jpeg({ quality: 88 })
-    files.push({ name: `${name} enlarged`, bytes: await large.toBuffer(), enlarged: true })
+    const large = sharp(bytes)
+      .resize({ ...size, fit: 'cover' })
+      .composite([{ input: grain, blend: 'soft-light' }])
+      .jpeg({ quality: 88 })
+    files.push({ name: `${name} enlarged`, bytes: await large.toBuffer() })
   }
   return files
 }
 
 async function decodeToResult(photos: Photograph[], line: MatchShade[]): Promise<Figure> {
   const files = await largeFiles(photos)
-  const ratios: [number[], number[]] = [[], []]
+  const ratios: number[] = []
   console.log('\nDecode to result, times as long as sharp alone')
-  for (const { name, bytes, enlarged } of files) {
+  for (const { name, bytes } of files) {
     const [whole, alone] = await medianTimes(
       [() => matchFile(bytes, line), () => shrinkAlone(bytes)],
-      enlarged ? 15 : 5,
+      9,
     )
     const ratio = whole! / alone!
-    ratios[Number(enlarged)]!.push(ratio)
+    ratios.push(ratio)
     console.log(`  ${name.padEnd(46)} ${ratio.toFixed(2)}  (${(bytes.length / 1e6).toFixed(1)} MB)`)
   }
-  const [own, enlarged] = ratios.map((group) => Math.max(...group))
+  const worst = Math.max(...ratios)
   return {
     what: `decode to result, ≥ 12 MP, 48 shades (${files.length} files)`,
-    value: `worst as they are ${own!.toFixed(2)} × sharp alone, enlarged ${enlarged!.toFixed(2)} ×`,
+    value: `worst ${worst.toFixed(2)} × sharp alone`,
     bar: '≤ 1.5 ×',
-    met: own! <= 1.5 && enlarged! <= 1.5,
+    met: worst <= 1.5,
   }
 }
 
