@@ -1,3 +1,5 @@
+import { readFileSync } from 'node:fs'
+
 import { expect, test, type Page } from '@playwright/test'
 import pg from 'pg'
 
@@ -22,6 +24,7 @@ async function fillLine(page: Page, name: string) {
 
 async function database() {
   const client = new pg.Client({ connectionString: process.env.DATABASE_URL })
+  client.on('error', () => {})
   await client.connect()
   return client
 }
@@ -29,25 +32,31 @@ async function database() {
 const countLines = async (client: pg.Client, name: string) =>
   (await client.query('SELECT count(*)::int AS n FROM lines WHERE name = $1', [name])).rows[0].n
 
-test('the database going away during a save is told, keeps the form, and makes one row after all', async ({
+/** Stops PostgreSQL as a power cut would; the launcher starts it again. */
+async function crashDatabase(client: pg.Client) {
+  const { pid } = (await client.query('SELECT pg_backend_pid() AS pid')).rows[0]
+  const server = Number(/^PPid:\s*(\d+)/m.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))![1])
+  process.kill(server, 'SIGQUIT')
+}
+
+test('a restart of the database during a save is told, keeps the form, and makes one row after all', async ({
   page,
 }) => {
   const name = 'Line of the lost connection'
   await signIn(page, 'owner')
   await fillLine(page, name)
-  const client = await database()
+  let client = await database()
   try {
     await client.query('BEGIN; LOCK TABLE lines IN EXCLUSIVE MODE')
     await page.getByRole('button', { name: 'Make line' }).click()
     const waiting = `SELECT count(*)::int AS n FROM pg_stat_activity
       WHERE wait_event_type = 'Lock' AND application_name = 'woadmap'`
     await expect.poll(async () => (await client.query(waiting)).rows[0].n).toBeGreaterThan(0)
-    await client.query(`SELECT pg_terminate_backend(pid) FROM pg_stat_activity
-      WHERE application_name = 'woadmap' AND pid <> pg_backend_pid()`)
-    await client.query('ROLLBACK')
+    await crashDatabase(client)
     const told = page.getByRole('alert').filter({ hasText: 'database did not answer' })
     await expect(told).toBeVisible()
     await expect(page.getByLabel('Name', { exact: true })).toHaveValue(name)
+    await expect(async () => (client = await database())).toPass()
     expect(await countLines(client, name)).toBe(0)
     await page.getByRole('button', { name: 'Make line' }).click()
     await expect(page).toHaveURL(/\/lines\/line-of-the-lost-connection\/shades/)
