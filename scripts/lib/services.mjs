@@ -76,6 +76,8 @@ export function productEnvironment(env, settings, mode) {
     APP_ORIGIN: settings.appOrigin,
     SEED_DEMO: String(settings.seedDemo),
     NEXT_TELEMETRY_DISABLED: '1',
+    // It says at every start that Node.js 20 will not be served for ever.
+    AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
   }
 }
 

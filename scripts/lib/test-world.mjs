@@ -58,6 +58,8 @@ export async function makeTestWorld(fleet, local, given) {
       LOG_LEVEL: 'warn',
       SEED_DEMO: 'true',
       NEXT_TELEMETRY_DISABLED: '1',
+      // It says at every start that Node.js 20 will not be served for ever.
+      AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
     }),
   }
 }
