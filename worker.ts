@@ -5,7 +5,7 @@ import { HANDLERS, SCHEDULES, type JobHandler } from '@/lib/jobs/handlers'
 import { QUEUES, type JobName } from '@/lib/jobs/queue'
 import { logger } from '@/lib/logger'
 import { warmUpReading } from '@/lib/photographs/warm-up'
-import { sequelize } from '@/models'
+import { sequelize, withinScope } from '@/models'
 
 /** How long jobs under way may take to end once the process is told to stop, in milliseconds. */
 const GRACE = 20_000
@@ -17,10 +17,11 @@ async function workOff<Name extends JobName>(boss: PgBoss, name: Name): Promise<
     { batchSize: 1, pollingIntervalSeconds: 0.5, includeMetadata: true },
     async ([job]) => {
       const started = performance.now()
-      const log = logger().child({ job: job!.name, id: job!.id, data: job!.data })
+      const { requestId, ...data } = job!.data as { requestId?: string }
+      const log = logger().child({ job: job!.name, id: job!.id, data, requestId })
       try {
         const isLastTry = job!.retryCount >= QUEUES[name].retryLimit
-        const result = await handle(job!.data as never, { isLastTry })
+        const result = await withinScope({ requestId }, () => handle(data as never, { isLastTry }))
         log.info({ result, ms: Math.round(performance.now() - started) }, 'job done')
       } catch (error) {
         log.warn({ err: error, retryCount: job!.retryCount }, 'job failed')

@@ -14,6 +14,9 @@ const schema = z.object({
   S3_BUCKET: z.string().min(3).default('woadmap'),
   S3_ACCESS_KEY_ID: z.string().min(1),
   S3_SECRET_ACCESS_KEY: z.string().min(1),
+  SMTP_URL: z.string().regex(/^smtps?:\/\//),
+  MAIL_FROM: z.string().min(3).default('Woadmap <woadmap@localhost>'),
+  TRUSTED_PROXIES: z.coerce.number().int().min(0).max(5).default(0),
   LOG_LEVEL: z.enum(['fatal', 'error', 'warn', 'info', 'debug', 'silent']).default('info'),
   SEED_DEMO: flag.default(true),
 })

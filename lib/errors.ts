@@ -69,6 +69,17 @@ export class ConflictError extends AppError {
   }
 }
 
+/** Asked for too often; says when it can be asked for again. */
+export class TooManyError extends AppError {
+  constructor(
+    message: string,
+    /** Seconds. */
+    readonly retryAfter: number,
+  ) {
+    super('too-many', message)
+  }
+}
+
 /** A service we stand on (database, object store) does not answer. */
 export class UnavailableError extends AppError {
   constructor(message: string, options?: ErrorOptions) {
@@ -82,6 +93,8 @@ export interface Failure {
   code: ErrorCode | 'unexpected'
   message: string
   fieldErrors?: FieldErrors
+  /** Seconds until it can be asked for again. */
+  retryAfter?: number
 }
 
 /** What every action answers. */

@@ -6,6 +6,8 @@ import { SequelizeStorage, Umzug, type MigrationParams, type RunnableMigration }
 import { prepareQueues } from '@/lib/jobs/boss'
 import { sequelize } from '@/models/sequelize'
 
+import { grantToWeb } from './grants'
+
 /** What a migration file exports as `up` and `down`; each runs in a transaction of its own. */
 export type Migrate = (to: { query: QueryInterface; transaction: Transaction }) => Promise<void>
 
@@ -62,7 +64,10 @@ async function alone(work: () => Promise<unknown>): Promise<void> {
 if (process.argv[1] === fileURLToPath(import.meta.url)) {
   try {
     await alone(() => umzug.runAsCLI())
-    if (process.argv[2] === 'up') await prepareQueues()
+    if (process.argv[2] === 'up') {
+      await prepareQueues()
+      await grantToWeb()
+    }
   } finally {
     await sequelize().close()
   }

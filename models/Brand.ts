@@ -14,6 +14,8 @@ export class Brand extends Model<InferAttributes<Brand>, InferCreationAttributes
   declare id: CreationOptional<string>
   declare name: string
   declare slug: string
+  /** Its members must sign in with a second factor. */
+  declare secondFactorRequired: CreationOptional<boolean>
   declare createdAt: CreationOptional<Date>
   declare updatedAt: CreationOptional<Date>
 }
@@ -23,6 +25,7 @@ Brand.init(
     id: idColumn,
     name: { type: DataTypes.TEXT, allowNull: false },
     slug: { type: DataTypes.TEXT, allowNull: false, unique: true },
+    secondFactorRequired: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },

@@ -7,7 +7,7 @@ import {
   type NonAttribute,
 } from 'sequelize'
 
-import type { Role } from '@/lib/people/schema'
+import type { Role } from '@/lib/people/constants'
 
 import type { Brand } from './Brand'
 import { idColumn } from './columns'

@@ -15,6 +15,11 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
   declare email: string
   declare name: string
   declare passwordHash: string
+  /** Sealed; set and confirmed once the second factor is in use. */
+  declare totpSecret: CreationOptional<string | null>
+  declare totpConfirmedAt: CreationOptional<Date | null>
+  /** The time step of the last code taken, so that none is taken twice. */
+  declare totpLastStep: CreationOptional<number>
   declare createdAt: CreationOptional<Date>
   declare updatedAt: CreationOptional<Date>
 }
@@ -25,6 +30,9 @@ Person.init(
     email: { type: DataTypes.TEXT, allowNull: false, unique: true },
     name: { type: DataTypes.TEXT, allowNull: false },
     passwordHash: { type: DataTypes.TEXT, allowNull: false },
+    totpSecret: DataTypes.TEXT,
+    totpConfirmedAt: DataTypes.DATE,
+    totpLastStep: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },
     createdAt: DataTypes.DATE,
     updatedAt: DataTypes.DATE,
   },
@@ -32,6 +40,6 @@ Person.init(
     sequelize: sequelize(),
     modelName: 'Person',
     tableName: 'people',
-    defaultScope: { attributes: { exclude: ['passwordHash'] } },
+    defaultScope: { attributes: { exclude: ['passwordHash', 'totpSecret'] } },
   },
 )

@@ -17,6 +17,9 @@ export class Session extends Model<InferAttributes<Session>, InferCreationAttrib
   declare personId: string
   declare expiresAt: Date
   declare lastSeenAt: CreationOptional<Date>
+  /** As the browser named itself, and from where it signed in. */
+  declare userAgent: CreationOptional<string>
+  declare address: CreationOptional<string>
   declare createdAt: CreationOptional<Date>
   declare person?: NonAttribute<Person>
 }
@@ -27,6 +30,8 @@ Session.init(
     personId: { type: DataTypes.UUID, allowNull: false },
     expiresAt: { type: DataTypes.DATE, allowNull: false },
     lastSeenAt: { type: DataTypes.DATE, allowNull: false, defaultValue: DataTypes.NOW },
+    userAgent: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
+    address: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
     createdAt: DataTypes.DATE,
   },
   { sequelize: sequelize(), modelName: 'Session', tableName: 'sessions', updatedAt: false },

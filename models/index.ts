@@ -1,11 +1,16 @@
+import { AccountToken } from './AccountToken'
+import { Activity } from './Activity'
 import { Brand } from './Brand'
 import { Combination } from './Combination'
 import { CombinationPlace } from './CombinationPlace'
+import { Invitation } from './Invitation'
+import { Letter } from './Letter'
 import { Line } from './Line'
 import { Membership } from './Membership'
 import { Person } from './Person'
 import { Photograph } from './Photograph'
 import { Reading } from './Reading'
+import { RecoveryCode } from './RecoveryCode'
 import { Session } from './Session'
 import { Shade } from './Shade'
 
@@ -13,6 +18,9 @@ Membership.belongsTo(Brand, { as: 'brand', foreignKey: 'brandId' })
 Membership.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
 Session.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
 Person.hasMany(Membership, { as: 'memberships', foreignKey: 'personId' })
+AccountToken.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
+Invitation.belongsTo(Person, { as: 'invitedBy', foreignKey: 'invitedById' })
+Activity.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
 
 Line.hasMany(Shade, { as: 'shades', foreignKey: 'lineId' })
 Line.hasMany(Photograph, { as: 'photographs', foreignKey: 'lineId' })
@@ -26,17 +34,23 @@ CombinationPlace.belongsTo(Shade, { as: 'shade', foreignKey: 'shadeId' })
 CombinationPlace.belongsTo(Combination, { as: 'combination', foreignKey: 'combinationId' })
 
 export {
+  AccountToken,
+  Activity,
   Brand,
   Combination,
   CombinationPlace,
+  Invitation,
+  Letter,
   Line,
   Membership,
   Person,
   Photograph,
   Reading,
+  RecoveryCode,
   Session,
   Shade,
 }
 export { createOnce } from './create-once'
+export { currentScope, withinScope, type Scope } from './scope'
 export { inTransaction, sequelize } from './sequelize'
 export { updateVersioned } from './update-versioned'

@@ -2,6 +2,8 @@ import { Sequelize, type Transaction } from 'sequelize'
 
 import { building, env } from '@/lib/env'
 
+import { currentScope } from './scope'
+
 const shared = globalThis as typeof globalThis & { woadmapSequelize?: Sequelize }
 
 /** How long anything may wait for the database before it is given up, in milliseconds. */
@@ -13,29 +15,63 @@ const WAIT = { connect: 3_000, acquire: 4_000, statement: 10_000, lock: 4_000 } 
  * the first query.
  */
 export function sequelize(): Sequelize {
-  return (shared.woadmapSequelize ??= new Sequelize(
-    building ? 'postgres://127.0.0.1/none' : env().DATABASE_URL,
-    {
-      dialect: 'postgres',
-      logging: false,
-      define: { underscored: true, freezeTableName: true },
-      pool: {
-        max: building ? 1 : env().DATABASE_POOL_MAX,
-        min: 0,
-        acquire: WAIT.acquire,
-        idle: 10_000,
-      },
-      dialectOptions: {
-        connectionTimeoutMillis: WAIT.connect,
-        query_timeout: WAIT.statement,
-        statement_timeout: WAIT.statement,
-        lock_timeout: WAIT.lock,
-        idle_in_transaction_session_timeout: 30_000,
-        keepAlive: true,
-        application_name: 'woadmap',
-      },
+  return (shared.woadmapSequelize ??= connect())
+}
+
+function connect(): Sequelize {
+  const made = new Sequelize(building ? 'postgres://127.0.0.1/none' : env().DATABASE_URL, {
+    dialect: 'postgres',
+    logging: false,
+    define: { underscored: true, freezeTableName: true },
+    pool: {
+      max: building ? 1 : env().DATABASE_POOL_MAX,
+      min: 0,
+      acquire: WAIT.acquire,
+      idle: 10_000,
     },
-  ))
+    dialectOptions: {
+      connectionTimeoutMillis: WAIT.connect,
+      query_timeout: WAIT.statement,
+      statement_timeout: WAIT.statement,
+      lock_timeout: WAIT.lock,
+      idle_in_transaction_session_timeout: 30_000,
+      keepAlive: true,
+      application_name: 'woadmap',
+    },
+  })
+  made.addHook('afterPoolAcquire', (connection) => setScope(made, connection as ScopedConnection))
+  return made
+}
+
+interface ScopedConnection {
+  query(text: string, values: string[]): Promise<unknown>
+  /** The scope it was last set to. */
+  woadmapScope?: string
+}
+
+/**
+ * Tells PostgreSQL for whom the connection speaks from here on, before a query or a transaction
+ * takes it: the policies of the tables ask app.brand and app.person. One more round trip where
+ * the connection spoke for somebody else before.
+ */
+async function setScope(sequelize: Sequelize, connection: ScopedConnection): Promise<void> {
+  const { brandId = '', personId = '' } = currentScope()
+  const scope = `${brandId}/${personId}`
+  if (connection.woadmapScope === scope) return
+  try {
+    await connection.query(
+      "SELECT set_config('app.brand', $1, false), set_config('app.person', $2, false)",
+      [brandId, personId],
+    )
+    connection.woadmapScope = scope
+  } catch (error) {
+    await (sequelize as unknown as WithManager).connectionManager.destroyConnection(connection)
+    throw error
+  }
+}
+
+interface WithManager {
+  connectionManager: { destroyConnection(connection: unknown): Promise<void> }
 }
 
 /** Runs `work` in one transaction: committed when it returns, rolled back when it throws. */

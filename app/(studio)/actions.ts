@@ -3,6 +3,7 @@
 import { cookies, headers } from 'next/headers'
 import { redirect } from 'next/navigation'
 
+import { isSessionCookie } from '@/lib/auth/cookies'
 import { getPerson } from '@/lib/auth/get-actor'
 import { endSession } from '@/lib/auth/sessions'
 import { requireSameOrigin } from '@/lib/server/same-origin'
@@ -14,7 +15,7 @@ export async function signOutAction(): Promise<never> {
   if (person) await endSession(person.sessionId)
   const jar = await cookies()
   for (const { name } of jar.getAll()) {
-    if (/next-auth\.session-token(\.\d+)?$/.test(name)) jar.delete(name)
+    if (isSessionCookie(name)) jar.delete(name)
   }
   redirect('/sign-in')
 }

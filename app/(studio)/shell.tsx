@@ -5,15 +5,9 @@ import { SignOutButton } from '@/components/people/sign-out-button'
 import type { Actor } from '@/lib/auth/actor'
 import { getPerson } from '@/lib/auth/get-actor'
 import type { LineChapters } from '@/lib/lines/present'
+import { ROLE_WORDS } from '@/lib/people/constants'
 
 import { signOutAction } from './actions'
-
-const ROLE_WORDS = {
-  owner: 'Owner',
-  marketer: 'Marketer',
-  designer: 'Designer',
-  dyer: 'Dye house',
-} as const
 
 /** The studio's frame for one brand and, within a line, its chapters. */
 export async function Shell({

@@ -11,12 +11,25 @@ import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
 import type { SignInInput } from '@/lib/people/schema'
 
+/** Why somebody was not let in. */
+function inWords(error: string | null | undefined): string {
+  const [kind, seconds] = error?.split(':') ?? []
+  if (kind === 'CredentialsSignin')
+    return 'That e-mail and password do not fit together. Check both and sign in again.'
+  if (kind === 'code-refused')
+    return 'That code is not good, or was used before. Wait for the next one, or use a recovery code.'
+  if (kind === 'too-many')
+    return `There were too many wrong attempts. Nothing is lost; try again in ${Math.ceil(Number(seconds) / 60)} minutes.`
+  return 'Signing in did not work just now; nothing you typed is wrong. Try again in a moment.'
+}
+
 /** E-mail and password; on success goes to `next`, an address within Woadmap. */
 export function SignInForm({ next }: { next: string }) {
   const [problem, setProblem] = useState<string>()
+  const [asksForCode, setAsksForCode] = useState(false)
   const { register, handleSubmit, formState } = useForm<SignInInput>({
     resolver: schemaResolver(() => import('@/lib/people/schema').then((it) => it.signInSchema)),
-    defaultValues: { email: '', password: '' },
+    defaultValues: { email: '', password: '', code: '' },
   })
 
   async function onSubmit(input: SignInInput) {
@@ -25,11 +38,9 @@ export function SignInForm({ next }: { next: string }) {
       const answer = await signIn('credentials', { ...input, redirect: false })
       // A whole page load, so that nothing rendered for the previous person is kept.
       if (answer?.ok && !answer.error) return window.location.assign(next)
-      setProblem(
-        answer?.status === 401 || answer?.error === 'CredentialsSignin'
-          ? 'That e-mail and password do not fit together. Check both and sign in again.'
-          : 'Signing in did not work just now; nothing you typed is wrong. Try again in a moment.',
-      )
+      const { error } = answer ?? {}
+      if (error === 'code-wanted') return setAsksForCode(true)
+      setProblem(inWords(error))
     } catch {
       setProblem('Woadmap could not be reached. Check the connection and sign in again.')
     }
@@ -49,6 +60,23 @@ export function SignInForm({ next }: { next: string }) {
       <Field label="Password" required error={formState.errors.password?.message}>
         <Input type="password" autoComplete="current-password" {...register('password')} />
       </Field>
+      {asksForCode ? (
+        <Field
+          label="Code"
+          required
+          hint="The six digits of your authenticator, or one of your recovery codes."
+          error={formState.errors.code?.message}
+        >
+          <Input
+            // It appears because the password fits: the next thing to type.
+            autoFocus
+            autoComplete="one-time-code"
+            autoCapitalize="off"
+            spellCheck={false}
+            {...register('code')}
+          />
+        </Field>
+      ) : null}
       <SubmitButton pending={formState.isSubmitting} pendingLabel="Signing in…">
         Sign in
       </SubmitButton>

@@ -1,5 +1,6 @@
 import { ForbiddenError } from '@/lib/errors'
-import type { Role } from '@/lib/people/schema'
+import { withinScope } from '@/models'
+import type { Role } from '@/lib/people/constants'
 
 /** Who asks, in which brand, as what. Every query and command takes one. */
 export interface Actor {
@@ -23,3 +24,7 @@ export function allow(...roles: readonly Role[]): Policy {
 export function authorize(actor: Actor, policy: Policy): void {
   if (!policy(actor)) throw new ForbiddenError()
 }
+
+/** Runs `work` with the database open to the actor's brand and to no other. */
+export const asActor = <T>({ brandId, personId }: Actor, work: () => T): T =>
+  withinScope({ brandId, personId }, work)

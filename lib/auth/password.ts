@@ -13,6 +13,12 @@ export function hashPassword(password: string): Promise<string> {
   return hash(password, PARAMETERS)
 }
 
+/** Whether a hash was made with other parameters than today's, and so is to be made again. */
+export const isOutdated = (passwordHash: string): boolean =>
+  !passwordHash.startsWith(
+    `$argon2id$v=19$m=${PARAMETERS.memoryCost},t=${PARAMETERS.timeCost},p=${PARAMETERS.parallelism}$`,
+  )
+
 let decoy: Promise<string> | undefined
 
 /**

@@ -1,9 +1,8 @@
 import { Op } from 'sequelize'
 
-import { Membership, Person, Session } from '@/models'
+import { Membership, Person, Session, withinScope } from '@/models'
 
 import type { Actor } from './actor'
-import { verifyPassword } from './password'
 
 const HOUR = 60 * 60 * 1000
 
@@ -20,29 +19,13 @@ export interface SignedInPerson {
   readonly name: string
   readonly email: string
   readonly sessionId: string
+  readonly hasSecondFactor: boolean
   readonly memberships: readonly {
     brandId: string
     brandSlug: string
     brandName: string
     role: Actor['role']
   }[]
-}
-
-/**
- * Checks e-mail and password and opens a session.
- * @returns the session's id and the person's, or null when they do not fit
- */
-export async function openSession(
-  email: string,
-  password: string,
-): Promise<{ sessionId: string; personId: string } | null> {
-  const person = await Person.unscoped().findOne({ where: { email } })
-  if (!(await verifyPassword(person?.passwordHash, password)) || !person) return null
-  const session = await Session.create({
-    personId: person.id,
-    expiresAt: new Date(Date.now() + SESSION_LIFETIME),
-  })
-  return { sessionId: session.id, personId: person.id }
 }
 
 /** Ends a session; ending one that is over is no error. */
@@ -65,16 +48,20 @@ export async function findSignedInPerson(sessionId: string): Promise<SignedInPer
   if (now - session.lastSeenAt.getTime() > SEEN_EVERY) {
     await session.update({ lastSeenAt: new Date(now) })
   }
-  const memberships = await Membership.findAll({
-    where: { personId: session.personId },
-    include: ['brand'],
-    order: [['brand', 'name', 'ASC']],
-  })
+  const { personId } = session
+  const memberships = await withinScope({ personId }, () =>
+    Membership.findAll({
+      where: { personId },
+      include: ['brand'],
+      order: [['brand', 'name', 'ASC']],
+    }),
+  )
   return {
     id: session.person.id,
     name: session.person.name,
     email: session.person.email,
     sessionId: session.id,
+    hasSecondFactor: session.person.totpConfirmedAt !== null,
     memberships: memberships.map(({ brand, role }) => ({
       brandId: brand!.id,
       brandSlug: brand!.slug,

@@ -1,3 +1,4 @@
+import { sendLetter, sendLetters } from '@/lib/mail/send-letters'
 import { copyPhotograph } from '@/lib/photographs/read-photograph'
 import { sweepUploads } from '@/lib/photographs/sweep'
 
@@ -15,7 +16,12 @@ export const HANDLERS: { [Name in JobName]: JobHandler<Name> } = {
   'read-photograph': readPhotographJob,
   'copy-photograph': ({ photographId }) => copyPhotograph(photographId),
   'sweep-uploads': () => sweepUploads(),
+  'send-letter': ({ letterId }) => sendLetter(letterId),
+  'send-letters': () => sendLetters(),
 }
 
 /** When the jobs that nobody asks for are done. @see crontab(5) */
-export const SCHEDULES: Partial<Record<JobName, string>> = { 'sweep-uploads': '*/5 * * * *' }
+export const SCHEDULES: Partial<Record<JobName, string>> = {
+  'sweep-uploads': '*/5 * * * *',
+  'send-letters': '* * * * *',
+}

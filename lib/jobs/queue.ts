@@ -1,6 +1,8 @@
 import PgBoss from 'pg-boss'
 import type { Transaction } from 'sequelize'
 
+import { currentScope } from '@/models/scope'
+
 /**
  * The queues by name and what one of their jobs carries: ids only. A job is done at least once, so
  * its handler is idempotent.
@@ -9,6 +11,8 @@ export interface JobData {
   'read-photograph': { photographId: string }
   'copy-photograph': { photographId: string }
   'sweep-uploads': Record<string, never>
+  'send-letter': { letterId: string }
+  'send-letters': Record<string, never>
 }
 /** One of the queues. */
 export type JobName = keyof JobData
@@ -24,6 +28,8 @@ export const QUEUES: Record<
   'read-photograph': { retryLimit: 4, retryDelay: 2, expireInSeconds: 90 },
   'copy-photograph': { retryLimit: 4, retryDelay: 5, expireInSeconds: 120 },
   'sweep-uploads': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
+  'send-letter': { retryLimit: 3, retryDelay: 5, expireInSeconds: 60 },
+  'send-letters': { retryLimit: 0, retryDelay: 0, expireInSeconds: 300 },
 }
 
 // Never started and never connected: it only words the insert, which runs in our transaction.
@@ -42,7 +48,8 @@ export async function enqueue<Name extends JobName>(
 ): Promise<void> {
   sender ??= new PgBoss({ db: unconnected })
   const connection = (transaction as unknown as { connection: PgConnection }).connection
-  const id = await sender.send(name, data, {
+  const { requestId } = currentScope()
+  const id = await sender.send(name, requestId ? { ...data, requestId } : data, {
     ...QUEUES[name],
     retryBackoff: true,
     db: { executeSql: (text, values) => connection.query(text, values) },

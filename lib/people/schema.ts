@@ -1,10 +1,5 @@
 import { z } from 'zod'
 
-/** What a person may be in a brand. */
-export const ROLES = ['owner', 'marketer', 'designer', 'dyer'] as const
-/** One of ROLES. */
-export type Role = (typeof ROLES)[number]
-
 /** The sign-in form. The password is bounded so that nobody can make us hash a novel. */
 export const signInSchema = z.object({
   email: z
@@ -13,6 +8,8 @@ export const signInSchema = z.object({
     .toLowerCase()
     .max(254),
   password: z.string().min(1, 'Write your password.').max(256),
+  /** A one-time or a recovery code. */
+  code: z.string().trim().max(40).optional(),
 })
 /** A parsed sign-in form. */
 export type SignInInput = z.infer<typeof signInSchema>

@@ -3,37 +3,95 @@ import { headers } from 'next/headers'
 import { unstable_rethrow } from 'next/navigation'
 import type { z } from 'zod'
 
-import type { Actor } from '@/lib/auth/actor'
-import { getActor } from '@/lib/auth/get-actor'
-import type { ActionResult } from '@/lib/errors'
+import { asActor, type Actor } from '@/lib/auth/actor'
+import { getActor, getPerson } from '@/lib/auth/get-actor'
+import type { SignedInPerson } from '@/lib/auth/sessions'
+import { UnauthenticatedError, type ActionResult } from '@/lib/errors'
+import { withinScope } from '@/models'
 
 import { failureOf } from './map-error'
+import { addressOf, requestIdOf } from './request'
 import { requireSameOrigin } from './same-origin'
 
 /** What a page hands to a form: the action of one brand. */
 export type Action<Input, Data> = (brandSlug: string, input: Input) => Promise<ActionResult<Data>>
 
+/** What a page hands to a form: an action that is about a person, or about nobody yet. */
+export type PlainAction<Input, Data> = (input: Input) => Promise<ActionResult<Data>>
+
+interface Terms {
+  /** After a success the page it was called from is rendered anew. */
+  refreshes?: boolean
+}
+
+/** The way of every action: same origin → work → answer. */
+async function act<Data>(
+  where: string,
+  { refreshes = true }: Terms,
+  work: (head: Headers) => Promise<Data>,
+): Promise<ActionResult<Data>> {
+  const head = await headers()
+  return withinScope({ requestId: requestIdOf(head) }, async () => {
+    try {
+      requireSameOrigin(head)
+      const data = await work(head)
+      if (refreshes) refresh()
+      return { ok: true, data }
+    } catch (error) {
+      unstable_rethrow(error)
+      return failureOf(error, where)
+    }
+  })
+}
+
 /**
- * Makes a server action of a command: same origin → session → parse → command → answer. After a
- * success the page it was called from is rendered anew.
+ * Makes a server action of a command: same origin → session → parse → command → answer.
  * @param schema parses the input; unknown fields are refused when it is strict
  * @param command authorises within itself
  */
 export function defineAction<Schema extends z.ZodType, Data>(
   schema: Schema,
   command: (actor: Actor, input: z.output<Schema>) => Promise<Data>,
-  { refreshes = true }: { refreshes?: boolean } = {},
+  terms: Terms = {},
 ): Action<z.input<Schema>, Data> {
-  return async (brandSlug, input) => {
-    try {
-      requireSameOrigin(await headers())
+  return (brandSlug, input) =>
+    act(command.name, terms, async () => {
       const actor = await getActor(String(brandSlug))
-      const data = await command(actor, schema.parse(input))
-      if (refreshes) refresh()
-      return { ok: true, data }
-    } catch (error) {
-      unstable_rethrow(error)
-      return failureOf(error, command.name)
-    }
-  }
+      return asActor(actor, () => command(actor, schema.parse(input)))
+    })
+}
+
+/** Makes a server action of a command about the signed-in person, in no brand. */
+export function definePersonAction<Schema extends z.ZodType, Data>(
+  schema: Schema,
+  command: (person: SignedInPerson, input: z.output<Schema>) => Promise<Data>,
+  terms: Terms = {},
+): PlainAction<z.input<Schema>, Data> {
+  return (input) =>
+    act(command.name, terms, async () => {
+      const person = await getPerson()
+      if (!person) throw new UnauthenticatedError()
+      return withinScope({ personId: person.id }, () => command(person, schema.parse(input)))
+    })
+}
+
+/** Where a request comes from: its network address and what the browser calls itself. */
+export interface Caller {
+  address: string
+  userAgent: string
+}
+
+/** Makes a server action for whoever asks, signed in or not. */
+export function definePublicAction<Schema extends z.ZodType, Data>(
+  schema: Schema,
+  command: (input: z.output<Schema>, caller: Caller) => Promise<Data>,
+  terms: Terms = {},
+): PlainAction<z.input<Schema>, Data> {
+  return (input) =>
+    act(command.name, terms, (head) =>
+      command(schema.parse(input), {
+        address: addressOf(head),
+        userAgent: head.get('user-agent') ?? '',
+      }),
+    )
 }

@@ -1,11 +1,13 @@
 import type { NextRequest } from 'next/server'
 import { z } from 'zod'
 
-import type { Actor } from '@/lib/auth/actor'
+import { asActor, type Actor } from '@/lib/auth/actor'
 import { getActor } from '@/lib/auth/get-actor'
 import { HTTP_STATUS, InvalidError, type Failure } from '@/lib/errors'
+import { withinScope } from '@/models'
 
 import { failureOf } from './map-error'
+import { requestIdOf } from './request'
 import { requireSameOrigin } from './same-origin'
 
 type Params = { brand: string } & Record<string, string>
@@ -21,7 +23,7 @@ export function defineRoute<Schema extends z.ZodType>(
   schema: Schema,
   work: (actor: Actor, input: z.output<Schema>, request: NextRequest) => Promise<unknown>,
 ): (request: NextRequest, context: { params: Promise<Params> }) => Promise<Response> {
-  return async (request, { params }) => {
+  const answer = async (request: NextRequest, { params }: { params: Promise<Params> }) => {
     try {
       const writes = request.method !== 'GET' && request.method !== 'HEAD'
       if (writes) requireSameOrigin(request.headers)
@@ -29,14 +31,17 @@ export function defineRoute<Schema extends z.ZodType>(
       const actor = await getActor(brand)
       const query = Object.fromEntries(request.nextUrl.searchParams)
       const body = writes ? await readJson(request) : {}
-      const answer = await work(actor, schema.parse({ ...body, ...query, ...rest }), request)
-      return answer instanceof Response
-        ? answer
-        : Response.json(answer ?? null, { headers: PRIVATE })
+      const input = schema.parse({ ...body, ...query, ...rest })
+      const result = await asActor(actor, () => work(actor, input, request))
+      return result instanceof Response
+        ? result
+        : Response.json(result ?? null, { headers: PRIVATE })
     } catch (error) {
       return failureResponse(failureOf(error, `${request.method} ${request.nextUrl.pathname}`))
     }
   }
+  return (request, context) =>
+    withinScope({ requestId: requestIdOf(request.headers) }, () => answer(request, context))
 }
 
 async function readJson(request: NextRequest): Promise<object> {
@@ -52,5 +57,7 @@ async function readJson(request: NextRequest): Promise<object> {
 /** A failure as JSON with the status that fits its code. */
 export function failureResponse(failure: Failure): Response {
   const status = failure.code === 'unexpected' ? 500 : HTTP_STATUS[failure.code]
-  return Response.json(failure, { status, headers: PRIVATE })
+  const { retryAfter } = failure
+  const headers = { ...PRIVATE, ...(retryAfter && { 'Retry-After': String(retryAfter) }) }
+  return Response.json(failure, { status, headers })
 }

@@ -11,11 +11,13 @@ import { z } from 'zod'
 import {
   AppError,
   InvalidError,
+  TooManyError,
   UnavailableError,
   type Failure,
   type FieldErrors,
 } from '@/lib/errors'
 import { logger } from '@/lib/logger'
+import { currentScope } from '@/models'
 
 /** PostgreSQL's classes for "I am going", "too many", "cannot reach": worth trying again. */
 const PASSING = /^(57P0[1-4]|57014|53\d{3}|08\w{3}|55P03|40001|40P01|25P03)$/
@@ -58,18 +60,20 @@ export function fieldErrorsOf(error: z.ZodError): FieldErrors {
  */
 export function failureOf(error: unknown, where: string): Failure {
   const known = asAppError(error)
+  const { requestId } = currentScope()
   if (known) {
     if (known.code === 'unavailable')
-      logger().warn({ err: known.cause ?? known, where }, known.message)
+      logger().warn({ err: known.cause ?? known, where, requestId }, known.message)
     return {
       ok: false,
       code: known.code,
       message: known.message,
       ...(known.fieldErrors && { fieldErrors: known.fieldErrors }),
+      ...(known instanceof TooManyError && { retryAfter: known.retryAfter }),
     }
   }
-  const reference = randomBytes(4).toString('hex')
-  logger().error({ err: error, where, reference }, 'unexpected error')
+  const reference = requestId?.slice(0, 8) ?? randomBytes(4).toString('hex')
+  logger().error({ err: error, where, reference, requestId }, 'unexpected error')
   return {
     ok: false,
     code: 'unexpected',

@@ -1,20 +1,19 @@
+import { headers } from 'next/headers'
 import { forbidden, notFound, redirect } from 'next/navigation'
 
-import type { Actor } from '@/lib/auth/actor'
-import { getActor } from '@/lib/auth/get-actor'
+import { asActor, type Actor } from '@/lib/auth/actor'
+import { getActor, getPerson } from '@/lib/auth/get-actor'
+import type { SignedInPerson } from '@/lib/auth/sessions'
 import { ForbiddenError, InvalidError, NotFoundError, UnauthenticatedError } from '@/lib/errors'
+import { withinScope } from '@/models'
 
-/**
- * Reads for a page, as the actor of the brand in its address. What the queries refuse becomes the
- * page that says so: signed out → sign-in, not a row of this brand → not found, not this role →
- * forbidden. Anything else reaches the error page.
- */
-export async function readForPage<T>(
-  brandSlug: string,
-  read: (actor: Actor) => Promise<T>,
-): Promise<T> {
+import { requestIdOf } from './request'
+
+/** What queries refuse becomes the page that says so; anything else reaches the error page. */
+async function readOrSay<T>(read: () => Promise<T>): Promise<T> {
+  const requestId = requestIdOf(await headers())
   try {
-    return await read(await getActor(brandSlug))
+    return await withinScope({ requestId }, read)
   } catch (error) {
     if (error instanceof UnauthenticatedError) redirect('/sign-in')
     if (error instanceof ForbiddenError) forbidden()
@@ -22,3 +21,21 @@ export async function readForPage<T>(
     throw error
   }
 }
+
+/**
+ * Reads for a page, as the actor of the brand in its address: signed out → sign-in, not a row of
+ * this brand → not found, not this role → forbidden.
+ */
+export const readForPage = <T>(brandSlug: string, read: (actor: Actor) => Promise<T>): Promise<T> =>
+  readOrSay(async () => {
+    const actor = await getActor(brandSlug)
+    return asActor(actor, () => read(actor))
+  })
+
+/** Reads for a page of the signed-in person, in no brand. */
+export const readForPerson = <T>(read: (person: SignedInPerson) => Promise<T>): Promise<T> =>
+  readOrSay(async () => {
+    const person = await getPerson()
+    if (!person) throw new UnauthenticatedError()
+    return withinScope({ personId: person.id }, () => read(person))
+  })

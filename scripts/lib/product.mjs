@@ -37,7 +37,8 @@ export async function startWeb(fleet, env, { host, port, dev = false, show = fal
     command: process.execPath,
     args: [NEXT, dev ? 'dev' : 'start', '-p', String(port), '-H', host],
     cwd: ROOT,
-    env,
+    // The web connects as a role that sees one brand at a time, never as the owner of the tables.
+    env: { ...env, DATABASE_URL: env.DATABASE_WEB_URL ?? env.DATABASE_URL },
     show,
     // Next.js waits for open connections without limit.
     stopWithin: 4000,

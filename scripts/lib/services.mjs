@@ -87,7 +87,7 @@ async function startDatabase(fleet, settings) {
     port: settings.databasePort,
   })
   await postgres.ensureDatabase('woadmap')
-  return { DATABASE_URL: postgres.urlOf('woadmap') }
+  return { DATABASE_URL: postgres.urlOf('woadmap'), DATABASE_WEB_URL: postgres.webUrlOf('woadmap') }
 }
 
 async function startStore(fleet, env, settings) {

@@ -47,6 +47,7 @@ export async function makeTestWorld(fleet, local, given) {
       NEXTAUTH_URL: origin,
       NEXTAUTH_SECRET: 'a secret that guards nothing but tests',
       DATABASE_URL: postgres.urlOf(databaseOf(name)),
+      DATABASE_WEB_URL: postgres.webUrlOf(databaseOf(name)),
       DATABASE_POOL_MAX: '10',
       S3_ENDPOINT: endpoint,
       S3_PUBLIC_ENDPOINT: endpoint,

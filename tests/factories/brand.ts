@@ -1,7 +1,7 @@
 import { randomUUID } from 'node:crypto'
 
 import type { Actor } from '@/lib/auth/actor'
-import { ROLES, type Role } from '@/lib/people/schema'
+import { ROLES, type Role } from '@/lib/people/constants'
 import { Brand, Membership, Person } from '@/models'
 
 /** A brand nobody else's test knows. */

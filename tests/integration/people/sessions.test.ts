@@ -3,13 +3,8 @@ import { randomUUID } from 'node:crypto'
 import { beforeAll, describe, expect, it } from 'vitest'
 
 import { hashPassword } from '@/lib/auth/password'
-import {
-  actorIn,
-  endSession,
-  findSignedInPerson,
-  openSession,
-  SESSION_IDLE,
-} from '@/lib/auth/sessions'
+import { actorIn, endSession, findSignedInPerson, SESSION_IDLE } from '@/lib/auth/sessions'
+import { signIn as attempt } from '@/lib/auth/sign-in'
 import { Membership, Person, Session } from '@/models'
 import { makeBrand } from '@/tests/factories/brand'
 
@@ -27,10 +22,12 @@ beforeAll(async () => {
   await Membership.create({ brandId: first.id, personId: person.id, role: 'owner' })
 })
 
+const from = (address: string = randomUUID()) => ({ address, userAgent: 'a test' })
+
 async function signIn() {
-  const opened = await openSession(email, PASSWORD)
-  expect(opened).not.toBeNull()
-  return opened!
+  const outcome = await attempt({ email, password: PASSWORD, ...from() })
+  if (outcome.kind !== 'opened') throw new Error(outcome.kind)
+  return outcome
 }
 
 describe('signing in', () => {
@@ -45,8 +42,10 @@ describe('signing in', () => {
   })
 
   it('refuses a wrong password and an unknown address alike', async () => {
-    expect(await openSession(email, `${PASSWORD}!`)).toBeNull()
-    expect(await openSession('nobody@people.example', PASSWORD)).toBeNull()
+    const wrong = { email, password: `${PASSWORD}!`, ...from() }
+    const unknown = { email: 'nobody@people.example', password: PASSWORD, ...from() }
+    expect(await attempt(wrong)).toEqual({ kind: 'refused' })
+    expect(await attempt(unknown)).toEqual({ kind: 'refused' })
   })
 
   it('never hands out the password hash with a session', async () => {

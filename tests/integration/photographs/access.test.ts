@@ -4,7 +4,7 @@ import { beforeAll, describe, expect, it } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
-import { ROLES, type Role } from '@/lib/people/schema'
+import { ROLES, type Role } from '@/lib/people/constants'
 import { confirmUpload, withdrawUpload } from '@/lib/photographs/confirm-upload'
 import { deletePhotographs, restorePhotographs } from '@/lib/photographs/delete-photographs'
 import {

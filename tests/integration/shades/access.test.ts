@@ -4,7 +4,7 @@ import { beforeAll, describe, expect, it } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
 import { ForbiddenError, NotFoundError } from '@/lib/errors'
-import { ROLES, type Role } from '@/lib/people/schema'
+import { ROLES, type Role } from '@/lib/people/constants'
 import { createShade } from '@/lib/shades/create-shade'
 import { guessMapping } from '@/lib/shades/csv'
 import { deleteShades } from '@/lib/shades/delete-shades'

@@ -1,0 +1,80 @@
+import { RateLimiterMemory, RateLimiterPostgres, RateLimiterRes } from 'rate-limiter-flexible'
+
+import { TooManyError } from '@/lib/errors'
+import { sequelize } from '@/models'
+
+import { digest } from './seal'
+
+const MINUTE = 60
+const HOUR = 60 * MINUTE
+
+/** How often something may be asked for: so many times in so many seconds, by one key. */
+export const RATE_LIMITS = {
+  /** Wrong passwords and codes for one account, and from one address. */
+  'sign-in-account': { points: 5, duration: 15 * MINUTE },
+  'sign-in-address': { points: 5, duration: 15 * MINUTE },
+  /** Letters that reset a password, by e-mail address and by network address. */
+  'reset-email': { points: 3, duration: HOUR },
+  'reset-address': { points: 10, duration: HOUR },
+  'sign-up-address': { points: 10, duration: HOUR },
+  /** By brand. */
+  invitation: { points: 30, duration: HOUR },
+  upload: { points: 600, duration: HOUR },
+} as const
+/** One of RATE_LIMITS. */
+export type RateLimit = keyof typeof RATE_LIMITS
+
+const limiters = new Map<RateLimit, RateLimiterPostgres>()
+
+/**
+ * Counts live in PostgreSQL, so that all instances share them and a restart keeps them. While the
+ * database is away each process counts for itself.
+ */
+function limiterOf(name: RateLimit): RateLimiterPostgres {
+  const known = limiters.get(name)
+  if (known) return known
+  const terms = { ...RATE_LIMITS[name], keyPrefix: name }
+  const made = new RateLimiterPostgres({
+    ...terms,
+    storeClient: sequelize(),
+    storeType: 'sequelize',
+    tableName: 'rate_limits',
+    tableCreated: true,
+    clearExpiredByTimeout: false,
+    insuranceLimiter: new RateLimiterMemory(terms),
+  })
+  limiters.set(name, made)
+  return made
+}
+
+/** Neither an e-mail address nor a network address is kept: only what is left of it hashed. */
+const keyOf = (key: string) => digest(key.toLowerCase()).slice(0, 32)
+
+function inWords(seconds: number): string {
+  if (seconds < 90) return `${seconds} seconds`
+  return `${Math.ceil(seconds / 60)} minutes`
+}
+
+/** Counts one. @throws TooManyError when the limit was reached before */
+export async function spend(name: RateLimit, key: string, what = 'That'): Promise<void> {
+  try {
+    await limiterOf(name).consume(keyOf(key))
+  } catch (error) {
+    if (!(error instanceof RateLimiterRes)) throw error
+    const seconds = Math.max(1, Math.ceil(error.msBeforeNext / 1000))
+    throw new TooManyError(
+      `${what} was asked for too often. Try again in ${inWords(seconds)}.`,
+      seconds,
+    )
+  }
+}
+
+/** Takes one count back: what was spent turned out to be all right. */
+export async function refund(name: RateLimit, key: string): Promise<void> {
+  await limiterOf(name).reward(keyOf(key))
+}
+
+/** Forgets all counts of a key. */
+export async function forgive(name: RateLimit, key: string): Promise<void> {
+  await limiterOf(name).delete(keyOf(key))
+}

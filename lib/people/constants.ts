@@ -1,0 +1,12 @@
+/** What a person may be in a brand. */
+export const ROLES = ['owner', 'marketer', 'designer', 'dyer'] as const
+/** One of ROLES. */
+export type Role = (typeof ROLES)[number]
+
+/** The roles as people call them. */
+export const ROLE_WORDS: Record<Role, string> = {
+  owner: 'Owner',
+  marketer: 'Marketer',
+  designer: 'Designer',
+  dyer: 'Dye house',
+}

@@ -1,0 +1,41 @@
+import { randomUUID } from 'node:crypto'
+import { subscribe } from 'node:diagnostics_channel'
+import type { IncomingMessage, ServerResponse } from 'node:http'
+import type { Socket } from 'node:net'
+
+import { logger } from '@/lib/logger'
+
+import { PEER_HEADER, REQUEST_ID_HEADER } from './request'
+
+interface Started {
+  request: IncomingMessage
+  response: ServerResponse
+  socket: Socket
+}
+
+/** What is asked for all day long and says nothing. */
+const QUIET = /^\/(_next\/static|livez|readyz|icon|favicon)/
+
+/**
+ * Gives every request its id and the address it truly came from, over whatever headers of those
+ * names it carries, before anything else sees it; and logs a line when it has been answered. By
+ * Node.js's own channel, since Next.js keeps its server to itself.
+ */
+export function watchRequests(): void {
+  subscribe('http.server.request.start', (message) => {
+    const { request, response, socket } = message as Started
+    const requestId = randomUUID()
+    const started = performance.now()
+    request.headers[REQUEST_ID_HEADER] = requestId
+    request.headers[PEER_HEADER] = socket.remoteAddress ?? ''
+    response.setHeader(REQUEST_ID_HEADER, requestId)
+    const { method, url = '' } = request
+    const path = url.split('?')[0]!
+    if (QUIET.test(path)) return
+    response.once('close', () => {
+      const ms = Math.round(performance.now() - started)
+      const status = response.writableFinished ? response.statusCode : 499
+      logger().info({ requestId, method, path, status, ms }, 'request')
+    })
+  })
+}
