@@ -5,7 +5,8 @@ import { HANDLERS, SCHEDULES, type JobHandler } from '@/lib/jobs/handlers'
 import { QUEUES, type JobName } from '@/lib/jobs/queue'
 import { logger } from '@/lib/logger'
 import { warmUpReading } from '@/lib/photographs/warm-up'
-import { sequelize, withinScope } from '@/models'
+import { sequelize } from '@/models'
+import { withinScope } from '@/models/scope'
 
 /** How long jobs under way may take to end once the process is told to stop, in milliseconds. */
 const GRACE = 20_000

@@ -51,6 +51,5 @@ export {
   Shade,
 }
 export { createOnce } from './create-once'
-export { currentScope, withinScope, type Scope } from './scope'
 export { inTransaction, sequelize } from './sequelize'
 export { updateVersioned } from './update-versioned'

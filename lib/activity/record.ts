@@ -1,6 +1,7 @@
 import type { Transaction } from 'sequelize'
 
-import { Activity, currentScope } from '@/models'
+import { Activity } from '@/models'
+import { currentScope } from '@/models/scope'
 
 /** What was done, to what, and what it was before and after; never a secret. */
 export interface ActivityEntry {

@@ -1,5 +1,5 @@
 import { ForbiddenError } from '@/lib/errors'
-import { withinScope } from '@/models'
+import { withinScope } from '@/models/scope'
 import type { Role } from '@/lib/people/constants'
 
 /** Who asks, in which brand, as what. Every query and command takes one. */

@@ -4,7 +4,7 @@ import CredentialsProvider from 'next-auth/providers/credentials'
 import { env } from '@/lib/env'
 import { signInSchema } from '@/lib/people/schema'
 import { addressOf, requestIdOf } from '@/lib/server/request'
-import { withinScope } from '@/models'
+import { withinScope } from '@/models/scope'
 
 import { sessionCookieName } from './cookies'
 import { SESSION_LIFETIME } from './sessions'

@@ -1,6 +1,7 @@
 import { Op } from 'sequelize'
 
-import { Membership, Person, Session, withinScope } from '@/models'
+import { Membership, Person, Session } from '@/models'
+import { withinScope } from '@/models/scope'
 
 import type { Actor } from './actor'
 

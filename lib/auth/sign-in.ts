@@ -1,6 +1,7 @@
 import { recordActivity } from '@/lib/activity/record'
 import { TooManyError } from '@/lib/errors'
-import { inTransaction, Membership, Person, Session, withinScope } from '@/models'
+import { inTransaction, Membership, Person, Session } from '@/models'
+import { withinScope } from '@/models/scope'
 
 import { hashPassword, isOutdated, verifyPassword } from './password'
 import { forgive, refund, spend } from './rate-limits'

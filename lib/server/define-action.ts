@@ -7,7 +7,7 @@ import { asActor, type Actor } from '@/lib/auth/actor'
 import { getActor, getPerson } from '@/lib/auth/get-actor'
 import type { SignedInPerson } from '@/lib/auth/sessions'
 import { UnauthenticatedError, type ActionResult } from '@/lib/errors'
-import { withinScope } from '@/models'
+import { withinScope } from '@/models/scope'
 
 import { failureOf } from './map-error'
 import { addressOf, requestIdOf } from './request'

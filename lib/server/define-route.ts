@@ -4,7 +4,7 @@ import { z } from 'zod'
 import { asActor, type Actor } from '@/lib/auth/actor'
 import { getActor } from '@/lib/auth/get-actor'
 import { HTTP_STATUS, InvalidError, type Failure } from '@/lib/errors'
-import { withinScope } from '@/models'
+import { withinScope } from '@/models/scope'
 
 import { failureOf } from './map-error'
 import { requestIdOf } from './request'

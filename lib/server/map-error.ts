@@ -17,7 +17,7 @@ import {
   type FieldErrors,
 } from '@/lib/errors'
 import { logger } from '@/lib/logger'
-import { currentScope } from '@/models'
+import { currentScope } from '@/models/scope'
 
 /** PostgreSQL's classes for "I am going", "too many", "cannot reach": worth trying again. */
 const PASSING = /^(57P0[1-4]|57014|53\d{3}|08\w{3}|55P03|40001|40P01|25P03)$/

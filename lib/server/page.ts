@@ -5,7 +5,7 @@ import { asActor, type Actor } from '@/lib/auth/actor'
 import { getActor, getPerson } from '@/lib/auth/get-actor'
 import type { SignedInPerson } from '@/lib/auth/sessions'
 import { ForbiddenError, InvalidError, NotFoundError, UnauthenticatedError } from '@/lib/errors'
-import { withinScope } from '@/models'
+import { withinScope } from '@/models/scope'
 
 import { requestIdOf } from './request'
 

@@ -6,15 +6,8 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { digest } from '@/lib/auth/seal'
-import {
-  inTransaction,
-  Invitation,
-  Line,
-  Photograph,
-  Reading,
-  sequelize,
-  withinScope,
-} from '@/models'
+import { inTransaction, Invitation, Line, Photograph, Reading, sequelize } from '@/models'
+import { withinScope } from '@/models/scope'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
 import { makeCombination } from '@/tests/factories/combination'
 import { makeLine } from '@/tests/factories/line'
