@@ -1,12 +1,12 @@
-import { isReady } from '@/lib/server/health'
+import { readReadiness } from '@/lib/server/health'
 
-/** Whether this instance can serve: the database answers. */
+/** Whether this instance can serve: the database answers and is migrated. */
 export const dynamic = 'force-dynamic'
 
 export async function GET(): Promise<Response> {
-  const ready = await isReady()
-  return new Response(ready ? 'ready\n' : 'the database does not answer\n', {
-    status: ready ? 200 : 503,
+  const readiness = await readReadiness()
+  return new Response(readiness.ready ? `ready ${readiness.migration}\n` : `${readiness.why}\n`, {
+    status: readiness.ready ? 200 : 503,
     headers: { 'Cache-Control': 'no-store' },
   })
 }

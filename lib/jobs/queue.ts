@@ -11,6 +11,7 @@ export interface JobData {
   'read-photograph': { photographId: string }
   'copy-photograph': { photographId: string }
   'sweep-uploads': Record<string, never>
+  'sweep-accounts': Record<string, never>
   'send-letter': { letterId: string }
   'send-letters': Record<string, never>
 }
@@ -28,6 +29,7 @@ export const QUEUES: Record<
   'read-photograph': { retryLimit: 4, retryDelay: 2, expireInSeconds: 90 },
   'copy-photograph': { retryLimit: 4, retryDelay: 5, expireInSeconds: 120 },
   'sweep-uploads': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
+  'sweep-accounts': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
   'send-letter': { retryLimit: 3, retryDelay: 5, expireInSeconds: 60 },
   'send-letters': { retryLimit: 0, retryDelay: 0, expireInSeconds: 300 },
 }

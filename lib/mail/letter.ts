@@ -16,10 +16,19 @@ export interface LetterContent {
 
 const escape = (text: string) => text.replace(/[&<>"']/g, (sign) => `&#${sign.charCodeAt(0)};`)
 
-/** A letter as text and as HTML; its links begin with APP_ORIGIN, whatever a request said. */
+function linkTo(path: string): string {
+  const { href, origin } = new URL(path, env().APP_ORIGIN)
+  if (origin !== new URL(env().APP_ORIGIN).origin) throw new RangeError(`${path} leads elsewhere.`)
+  return href
+}
+
+/**
+ * A letter as text and as HTML; its links begin with APP_ORIGIN, whatever a request said.
+ * @throws RangeError for a path that leads elsewhere
+ */
 export function setLetter(content: LetterContent): { text: string; html: string } {
   const { name, paragraphs, action, closing } = content
-  const link = action && new URL(action.path, env().APP_ORIGIN).href
+  const link = action && linkTo(action.path)
   const greeting = name ? `Hello ${name},` : 'Hello,'
   const text = [
     greeting,

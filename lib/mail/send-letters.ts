@@ -11,13 +11,11 @@ const ROUND = 50
 
 let transport: Transporter | undefined
 
-function mailServer(): Transporter {
-  return (transport ??= createTransport(env().SMTP_URL, {
-    connectionTimeout: WAIT,
-    greetingTimeout: WAIT,
-    socketTimeout: WAIT,
-  } as never))
-}
+/** The way to a mail server, given up after ten seconds of silence. */
+export const mailServer = (url: string): Transporter =>
+  createTransport({ url, connectionTimeout: WAIT, greetingTimeout: WAIT, socketTimeout: WAIT })
+
+const ours = () => (transport ??= mailServer(env().SMTP_URL))
 
 /** A mail server's "no, and do not ask again". @source RFC 5321 § 4.2.1 */
 const isRefusal = (error: unknown) =>
@@ -28,7 +26,10 @@ const isRefusal = (error: unknown) =>
  * letter's own, so that one sent twice by a process that died in between is known as one.
  * @throws Error when the server does not take it just now; the next try or round goes on
  */
-export async function sendLetter(letterId: string): Promise<'sent' | 'refused' | 'done before'> {
+export async function sendLetter(
+  letterId: string,
+  server = ours(),
+): Promise<'sent' | 'refused' | 'done before'> {
   return inTransaction(async (transaction) => {
     const letter = await Letter.findOne({
       where: { id: letterId, sentAt: null, failedAt: null },
@@ -43,7 +44,7 @@ export async function sendLetter(letterId: string): Promise<'sent' | 'refused' |
     }
     const emptied = { sealedBody: '' }
     try {
-      await mailServer().sendMail({
+      await server.sendMail({
         messageId: `<${letter.id}@${new URL(env().APP_ORIGIN).hostname}>`,
         from: env().MAIL_FROM,
         to: letter.recipient,
@@ -68,7 +69,7 @@ export async function sendLetter(letterId: string): Promise<'sent' | 'refused' |
  * The work of the job `send-letters`: sends what is still in the outbox, oldest first, until the
  * server fails. However long it was away, nothing is lost.
  */
-export async function sendLetters(): Promise<{ sent: number; left: number }> {
+export async function sendLetters(server = ours()): Promise<{ sent: number; left: number }> {
   const unsent = { sentAt: null, failedAt: null, createdAt: { [Op.lte]: new Date() } }
   const waiting = await Letter.findAll({
     attributes: ['id'],
@@ -78,7 +79,7 @@ export async function sendLetters(): Promise<{ sent: number; left: number }> {
   })
   let sent = 0
   for (const { id } of waiting) {
-    await sendLetter(id)
+    await sendLetter(id, server)
     sent++
   }
   return { sent, left: await Letter.count({ where: unsent }) }

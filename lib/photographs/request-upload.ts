@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
+import { spend } from '@/lib/auth/rate-limits'
 import { ConflictError } from '@/lib/errors'
 import { getLine } from '@/lib/lines/queries'
 import { presignUpload, requireObjectStore } from '@/lib/storage/objects'
@@ -26,7 +27,7 @@ export type UploadAnswer =
 /**
  * Expects a file: a pending photograph, and a form that takes exactly that file. Asking again for
  * the same file gives the same photograph with a fresh form.
- * @throws NotFoundError, ConflictError, UnavailableError when the store is away (nothing is kept)
+ * @throws NotFoundError, ConflictError, TooManyError, UnavailableError when the store is away (nothing is kept)
  */
 export async function requestUpload(
   actor: Actor,
@@ -36,6 +37,7 @@ export async function requestUpload(
   const line = await getLine(actor, lineSlug)
   const same = await findSameFile(actor, line.id, file.sha256)
   if (same) return { kind: 'same', photographId: same.id, title: same.title }
+  await spend('upload', actor.brandId, 'Adding photographs')
   await requireObjectStore()
   const photograph = await expectFile(actor, line, file)
   const { url, fields } = await presignUpload({ ...file, key: photograph.objectKey })

@@ -1,15 +1,43 @@
+import { readdirSync } from 'node:fs'
+import { join } from 'node:path'
+
 import { QueryTypes } from 'sequelize'
 
 import { sequelize } from '@/models'
 
-/** Whether the database answers within a second. */
-export async function isReady(): Promise<boolean> {
-  const late = new Promise<false>((resolve) => setTimeout(resolve, 1_000, false).unref())
-  const answers = sequelize()
-    .query('SELECT 1', { type: QueryTypes.SELECT })
+/** How long the database may take to answer, in milliseconds. */
+const WAIT = 1_000
+
+/** Whether this instance can serve, and if not, why. */
+export type Readiness = { ready: true; migration: string } | { ready: false; why: string }
+
+/** The newest migration this release comes with. */
+function expectedMigration(): string {
+  const names = readdirSync(join(process.cwd(), 'migrations'))
+  return names
+    .filter((name) => /^\d{4}\..*\.ts$/.test(name))
+    .sort()
+    .at(-1)!
+}
+
+/** Asks, within a second, whether the database answers and is migrated at least as far as we need. */
+export async function readReadiness(): Promise<Readiness> {
+  const late = new Promise<null>((resolve) => setTimeout(resolve, WAIT, null).unref())
+  const applied = sequelize()
+    .query<{ name: string }>('SELECT name FROM migrations ORDER BY name DESC LIMIT 1', {
+      type: QueryTypes.SELECT,
+    })
     .then(
-      () => true,
-      () => false,
+      ([row]) => row?.name ?? '',
+      () => null,
     )
-  return Promise.race([answers, late])
+  const migration = await Promise.race([applied, late])
+  if (migration === null) return { ready: false, why: 'the database does not answer' }
+  const expected = expectedMigration()
+  return migration >= expected
+    ? { ready: true, migration }
+    : {
+        ready: false,
+        why: `the database is at ${migration || 'no migration'}, not yet at ${expected}`,
+      }
 }

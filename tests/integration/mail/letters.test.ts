@@ -1,0 +1,127 @@
+import { randomUUID } from 'node:crypto'
+import type { AddressInfo } from 'node:net'
+
+import { SMTPServer } from 'smtp-server'
+import { afterEach, describe, expect, it } from 'vitest'
+
+import { unseal } from '@/lib/auth/seal'
+import { postLetter } from '@/lib/mail/post-letter'
+import { mailServer, sendLetter, sendLetters } from '@/lib/mail/send-letters'
+import { inTransaction, Letter, sequelize } from '@/models'
+
+const CONTENT = {
+  kind: 'test',
+  subject: 'A letter',
+  paragraphs: ['What it says.'],
+  action: { label: 'Open', path: '/invitations/a-token-of-a-test' },
+}
+
+let server: SMTPServer | undefined
+afterEach(() => new Promise<void>((done) => (server ? server.close(done) : done())))
+
+/** A mail server that answers as it is told. @returns its address and the Message-IDs it took */
+async function makeMailServer(answer: (count: number) => Error | 'drop' | null) {
+  const taken: string[] = []
+  let count = 0
+  const made = new SMTPServer({
+    authOptional: true,
+    disabledCommands: ['STARTTLS'],
+    onData(stream, _session, done) {
+      let message = ''
+      stream.on('data', (chunk) => (message += chunk))
+      stream.on('end', () => {
+        const said = answer(++count)
+        if (said === 'drop') return dropAll(made)
+        if (!said) taken.push(/^Message-ID: (.*)$/im.exec(message)![1]!)
+        done(said)
+      })
+    },
+  })
+  server = made
+  made.on('error', () => {})
+  await new Promise<void>((ready) => made.listen(0, '127.0.0.1', ready))
+  const { port } = made.server.address() as AddressInfo
+  return { url: `smtp://127.0.0.1:${port}`, taken }
+}
+
+function dropAll(smtp: SMTPServer) {
+  for (const connection of (
+    smtp as unknown as { connections: Set<{ _socket: { destroy(): void } }> }
+  ).connections)
+    connection._socket.destroy()
+}
+
+async function post(): Promise<Letter> {
+  const recipient = `${randomUUID()}@people.example`
+  await inTransaction((transaction) => postLetter(recipient, CONTENT, transaction))
+  return (await Letter.findOne({ where: { recipient } }))!
+}
+
+describe('a letter in the outbox', () => {
+  it('is there, with its job, only if what it tells of is', async () => {
+    const recipient = `${randomUUID()}@people.example`
+    await inTransaction(async (transaction) => {
+      await postLetter(recipient, CONTENT, transaction)
+      throw new Error('no')
+    }).catch(() => {})
+    expect(await Letter.count({ where: { recipient } })).toBe(0)
+    const letter = await post()
+    const [jobs] = await sequelize().query(
+      "SELECT FROM pgboss.job WHERE name = 'send-letter' AND data->>'letterId' = $1",
+      { bind: [letter.id] },
+    )
+    expect(jobs).toHaveLength(1)
+  })
+
+  it('does not show what it says', async () => {
+    const { sealedBody } = await post()
+    expect(sealedBody).not.toContain('a-token-of-a-test')
+    expect(unseal(sealedBody, 'letter')).toContain('a-token-of-a-test')
+  })
+
+  it('is sent once, under its own Message-ID, and then emptied', async () => {
+    const { url, taken } = await makeMailServer(() => null)
+    const letter = await post()
+    const outcomes = await Promise.all([
+      sendLetter(letter.id, mailServer(url)),
+      sendLetter(letter.id, mailServer(url)),
+    ])
+    expect(outcomes.sort()).toEqual(['done before', 'sent'])
+    expect(taken).toEqual([`<${letter.id}@localhost>`])
+    await letter.reload()
+    expect(letter).toMatchObject({ sealedBody: '', failedAt: null })
+    expect(letter.sentAt).not.toBeNull()
+  })
+
+  it('waits for a server that is away, and is lost by none of the tries', async () => {
+    const letter = await post()
+    const away = mailServer('smtp://127.0.0.1:1')
+    for (let time = 0; time < 3; time++)
+      await expect(sendLetter(letter.id, away)).rejects.toThrow(/ECONNREFUSED/)
+    const { url, taken } = await makeMailServer(() => null)
+    await sendLetters(mailServer(url))
+    expect(taken).toContain(`<${letter.id}@localhost>`)
+  })
+
+  it('is sent again when the server drops the line before it has taken it, or asks to wait', async () => {
+    const letter = await post()
+    const busy = Object.assign(new Error('Come back later'), { responseCode: 451 })
+    const { url, taken } = await makeMailServer((count) => [, 'drop' as const, busy, null][count]!)
+    const way = mailServer(url)
+    await expect(sendLetter(letter.id, way)).rejects.toThrow()
+    await expect(sendLetter(letter.id, way)).rejects.toThrow(/Come back later/)
+    expect(await sendLetter(letter.id, way)).toBe('sent')
+    expect(taken).toHaveLength(1)
+  })
+
+  it('that is refused for good says so and is not sent again', async () => {
+    const letter = await post()
+    const unknown = Object.assign(new Error('No such mailbox'), { responseCode: 550 })
+    const { url } = await makeMailServer(() => unknown)
+    expect(await sendLetter(letter.id, mailServer(url))).toBe('refused')
+    await letter.reload()
+    expect(letter).toMatchObject({ sealedBody: '', sentAt: null })
+    expect(letter.failure).toContain('No such mailbox')
+    expect(await sendLetter(letter.id, mailServer(url))).toBe('done before')
+  })
+})
