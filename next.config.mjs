@@ -1,3 +1,19 @@
+/** What no answer goes without. What depends on where the product runs is in proxy.ts. */
+const EVERYWHERE = {
+  'X-Content-Type-Options': 'nosniff',
+  'X-Frame-Options': 'DENY',
+  'Referrer-Policy': 'same-origin',
+  'Cross-Origin-Opener-Policy': 'same-origin',
+  'Permissions-Policy': ['camera', 'display-capture', 'geolocation', 'microphone', 'payment', 'usb']
+    .map((feature) => `${feature}=()`)
+    .join(', '),
+}
+
+/** What is no page runs nothing and loads nothing, should a browser show it as one. */
+const NO_PAGE = { 'Content-Security-Policy': "default-src 'none'; frame-ancestors 'none'" }
+
+const listed = (headers) => Object.entries(headers).map(([key, value]) => ({ key, value }))
+
 /** @type {import('next').NextConfig} */
 export default {
   // `npm test` builds beside a product that may be running from .next.
@@ -17,6 +33,10 @@ export default {
     'sharp',
     '@node-rs/argon2',
     'pino',
+  ],
+  headers: () => [
+    { source: '/:path*', headers: listed(EVERYWHERE) },
+    { source: '/:root(api|_next|livez|readyz)/:path*', headers: listed(NO_PAGE) },
   ],
   experimental: {
     // A CSV of 5,000 shades travels through a server action; photographs never do.

@@ -1,22 +1,44 @@
 import { NextResponse, type NextRequest } from 'next/server'
 
 import { isSessionCookie } from '@/lib/auth/cookies'
+import { makePageHeaders, POLICY } from '@/lib/server/page-headers'
+
+/** Pages that open signed out, and what is no page of the studio. */
+const OPEN = /^\/($|sign-in$|icon|favicon)|\./
 
 /**
- * Sends a browser without a session cookie to the sign-in page and remembers where it wanted to
- * go. It authorises nothing: every page, route and action asks for itself.
+ * Gives every page its headers, and sends a browser without a session cookie to the sign-in page,
+ * which remembers where it wanted to go. It authorises nothing: every page, route and action asks
+ * for itself.
  */
 export function proxy(request: NextRequest): NextResponse {
-  const signedIn = request.cookies.getAll().some(({ name }) => isSessionCookie(name))
-  if (signedIn || request.method !== 'GET') return NextResponse.next()
-  const to = request.nextUrl.clone()
+  const headers = makePageHeaders()
+  const response = isLost(request) ? toSignIn(request) : onward(request, headers[POLICY]!)
+  for (const [name, value] of Object.entries(headers)) response.headers.set(name, value)
+  return response
+}
+
+function isLost({ cookies, method, nextUrl }: NextRequest): boolean {
+  if (method !== 'GET' || OPEN.test(nextUrl.pathname)) return false
+  return !cookies.getAll().some(({ name }) => isSessionCookie(name))
+}
+
+function toSignIn({ nextUrl }: NextRequest): NextResponse {
+  const to = nextUrl.clone()
   to.pathname = '/sign-in'
   to.search = ''
-  to.searchParams.set('next', request.nextUrl.pathname)
-  return NextResponse.redirect(to)
+  to.searchParams.set('next', nextUrl.pathname)
+  return NextResponse.redirect(to, { headers: { 'Cache-Control': 'private, no-store' } })
+}
+
+// Next.js puts the nonce of the request's policy on the scripts that it writes into the page.
+function onward(request: NextRequest, policy: string): NextResponse {
+  const headers = new Headers(request.headers)
+  headers.set(POLICY, policy)
+  return NextResponse.next({ request: { headers } })
 }
 
 export const config = {
-  // Pages of the studio only; uploads and everything under /api pass untouched.
-  matcher: ['/((?!api/|_next/|sign-in$|livez$|readyz$|icon|favicon)[^.]+)'],
+  // Pages only; uploads and everything under /api pass untouched.
+  matcher: ['/((?!api/|_next/|livez$|readyz$).*)'],
 }

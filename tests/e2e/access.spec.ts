@@ -1,7 +1,6 @@
-import { expect, test } from '@playwright/test'
-
 import { BRAND, LINE, signIn, signOut } from './support/accounts'
 import { PAGES } from './support/pages'
+import { expect, test } from './support/test'
 
 const UNKNOWN = '/no-such-brand/lines/heronsway-dk'
 

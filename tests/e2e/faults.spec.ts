@@ -1,9 +1,9 @@
 import { readFileSync } from 'node:fs'
 
-import { expect, test, type Page } from '@playwright/test'
 import pg from 'pg'
 
 import { BRAND, LINE, signIn } from './support/accounts'
+import { expect, test, type Page } from './support/test'
 
 async function fillLine(page: Page, name: string) {
   await page.goto(`/${BRAND}/lines/new`)

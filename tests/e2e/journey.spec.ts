@@ -1,8 +1,7 @@
 import { readFileSync } from 'node:fs'
 
-import { expect, test } from '@playwright/test'
-
 import { BRAND, LINE, signIn, signOut } from './support/accounts'
+import { expect, test } from './support/test'
 
 /** A photograph taken in the world: Debian's mate-backgrounds, which the test set-up installs. */
 const PHOTOGRAPH = '/usr/share/backgrounds/mate/nature/Dune.jpg'

@@ -1,10 +1,10 @@
 import { gzipSync } from 'node:zlib'
 
 import AxeBuilder from '@axe-core/playwright'
-import { expect, test, type Page } from '@playwright/test'
 
 import { signIn, type Who } from './support/accounts'
 import { PAGES } from './support/pages'
+import { expect, test, type Page } from './support/test'
 
 const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']
 const ROLES: readonly Who[] = ['owner', 'marketer', 'designer', 'dyer']

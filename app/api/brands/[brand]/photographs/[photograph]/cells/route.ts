@@ -9,7 +9,6 @@ export const GET = defineRoute(photographParamSchema, async (actor, input) => {
     headers: {
       'Content-Type': 'application/octet-stream',
       'Cache-Control': 'private, no-store',
-      'X-Content-Type-Options': 'nosniff',
       'X-Map-Width': String(width),
       'X-Map-Height': String(height),
     },
