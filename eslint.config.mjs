@@ -5,10 +5,20 @@ import boundaries from 'eslint-plugin-boundaries'
 import { defineConfig, globalIgnores } from 'eslint/config'
 
 import { governed, importTable, zones } from './eslint.boundaries.mjs'
+import { sqlPlugin } from './eslint.sql.mjs'
 
 const ENVIRONMENT = 'Only lib/env.ts reads the environment: use env() of @/lib/env.'
 const IMPURE =
   'lib/color is pure: the same input gives the same output, on any machine, at any time.'
+
+const SHIPPED = [
+  ...governed,
+  'worker.ts',
+  'seeders/**/*.ts',
+  'migrations/**/*.ts',
+  'scripts/**/*.ts',
+]
+const HTML = 'What people see is written as elements: React escapes it, a string of HTML does not.'
 
 export default defineConfig([
   globalIgnores([
@@ -45,7 +55,30 @@ export default defineConfig([
     rules: { 'boundaries/dependencies': ['error', importTable] },
   },
   {
-    files: [...governed, 'worker.ts', 'seeders/**/*.ts', 'migrations/**/*.ts', 'scripts/**/*.ts'],
+    files: SHIPPED,
+    plugins: { sql: sqlPlugin },
+    rules: {
+      'sql/fixed': 'error',
+      'no-eval': 'error',
+      'no-implied-eval': 'error',
+      'no-new-func': 'error',
+      'no-script-url': 'error',
+      'no-restricted-syntax': [
+        'error',
+        {
+          selector:
+            ':matches(Identifier, JSXIdentifier)[name=/^(dangerouslySetInnerHTML|innerHTML|outerHTML|insertAdjacentHTML|srcDoc)$/]',
+          message: HTML,
+        },
+        {
+          selector: 'Literal[value=/^(dangerouslySetInnerHTML|innerHTML|outerHTML|srcDoc)$/]',
+          message: HTML,
+        },
+      ],
+    },
+  },
+  {
+    files: SHIPPED,
     ignores: ['lib/env.ts'],
     rules: {
       'no-restricted-properties': [

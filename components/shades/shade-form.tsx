@@ -82,7 +82,9 @@ export function ShadeForm(props: ShadeFormProps) {
   const color = useWatch({ control, name: 'color' })
 
   function send(values: ShadeFormValues) {
-    const typed = values as never as Parameters<ShadesActions['create']>[1]
+    const typed = { ...values, color: chosenOf(values) } as never as Parameters<
+      ShadesActions['create']
+    >[1]
     if (!props.shade) {
       // One key a filled-in form: pressed twice, it makes one shade.
       requestKey.current ??= crypto.randomUUID()
@@ -242,6 +244,10 @@ export function ShadeForm(props: ShadeFormProps) {
     </form>
   )
 }
+
+/** The colour as it is entered, without the fields of the other kind. */
+const chosenOf = ({ color: { kind, hex, ...lab } }: ShadeFormValues) =>
+  kind === 'hex' ? { kind, hex } : { kind, ...lab }
 
 /** What stays for the next shade: how it is entered, and under which light. */
 const keptOf = ({ color: { kind, terms } }: ShadeFormValues) => ({ kind, terms })

@@ -1,10 +1,10 @@
-import { literal, Op, type Transaction, type WhereOptions } from 'sequelize'
+import { literal, Op, where, type Transaction, type WhereOptions } from 'sequelize'
 import { z } from 'zod'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { NotFoundError } from '@/lib/errors'
 import { getLine } from '@/lib/lines/queries'
-import { Combination, CombinationPlace, Person, Photograph, sequelize, Shade } from '@/models'
+import { Combination, CombinationPlace, Person, Photograph, Shade } from '@/models'
 
 import { canReadCombinations } from './policy'
 import { COMBINATION_LIMITS } from './constants'
@@ -37,9 +37,9 @@ export async function listCombinations(
 ): Promise<{ combinations: KeptCombination[]; total: number }> {
   authorize(actor, canReadCombinations)
   const line = await getLine(actor, lineSlug)
-  const where: WhereOptions = { brandId: actor.brandId, lineId: line.id }
+  const ofLine: WhereOptions = { brandId: actor.brandId, lineId: line.id }
   const { rows, count } = await Combination.findAndCountAll({
-    where: q === '' ? where : { [Op.and]: [where, { [Op.or]: [titleHolds(q), shadeHolds(q)] }] },
+    where: q === '' ? ofLine : { [Op.and]: [ofLine, { [Op.or]: [titleHolds(q), shadeHolds(q)] }] },
     include: [{ model: Photograph, as: 'photograph' }, PLACES],
     order: [
       ['createdAt', 'DESC'],
@@ -55,11 +55,12 @@ const pattern = (q: string) => `%${q.replace(/[\\%_]/g, '\\$&')}%`
 
 const titleHolds = (q: string) => ({ title: { [Op.iLike]: pattern(q) } })
 
-const shadeHolds = (q: string) =>
-  literal(`EXISTS (SELECT 1 FROM combination_places AS held
-    JOIN shades AS named ON named.id = held.shade_id
-    WHERE held.combination_id = "Combination"."id"
-      AND named.name ILIKE ${sequelize().escape(pattern(q))})`)
+/** The names of a combination's shades, a line each. */
+const SHADE_NAMES = literal(`(SELECT string_agg(named.name, chr(10)) FROM combination_places AS held
+  JOIN shades AS named ON named.id = held.shade_id
+  WHERE held.combination_id = "Combination"."id")`)
+
+const shadeHolds = (q: string) => where(SHADE_NAMES, { [Op.iLike]: pattern(q) })
 
 async function withNames(rows: Combination[]): Promise<KeptCombination[]> {
   const ids = [...new Set(rows.flatMap(({ createdById }) => createdById ?? []))]

@@ -62,14 +62,13 @@ export interface PhotographCounts {
 /** Counts a line's photographs. One query. */
 export async function countPhotographs(actor: Actor, line: Line): Promise<PhotographCounts> {
   authorize(actor, canReadPhotographs)
-  const countWhere = (condition: string) => literal(`count(*) FILTER (WHERE ${condition})::int`)
   const [counts] = (await Photograph.findAll({
     attributes: [
       [literal('count(*)::int'), 'all'],
-      [countWhere("state IN ('waiting', 'reading')"), 'reading'],
-      [countWhere("state = 'failed'"), 'failed'],
-      [countWhere('licence IS NULL'), 'withoutLicence'],
-      [countWhere("alt_text = ''"), 'withoutAltText'],
+      [literal("count(*) FILTER (WHERE state IN ('waiting', 'reading'))::int"), 'reading'],
+      [literal("count(*) FILTER (WHERE state = 'failed')::int"), 'failed'],
+      [literal('count(*) FILTER (WHERE licence IS NULL)::int'), 'withoutLicence'],
+      [literal("count(*) FILTER (WHERE alt_text = '')::int"), 'withoutAltText'],
     ],
     where: { brandId: actor.brandId, lineId: line.id, state: CONFIRMED },
     raw: true,

@@ -109,7 +109,7 @@ export const galleryFilterSchema = z.object({
 export type GalleryFilter = z.output<typeof galleryFilterSchema>
 
 /** Which photographs a page follows. */
-export const photographStatesSchema = z.object({
+export const photographStatesSchema = z.strictObject({
   ids: z
     .string()
     .transform((ids) => ids.split(','))
@@ -118,7 +118,13 @@ export const photographStatesSchema = z.object({
 
 /** A photograph in an address, with wishes for its match. */
 export const matchParamsSchema = z
-  .looseObject({ photograph: z.string() })
+  .strictObject({
+    photograph: z.string(),
+    reading: z.string().optional(),
+    lock: z.string().optional(),
+    exclude: z.string().optional(),
+    apart: z.string().optional(),
+  })
   .transform(({ photograph, ...address }, context) => {
     const wishes = readWishes(address)
     if (wishes) return { photographId: photograph, ...wishes }

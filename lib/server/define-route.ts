@@ -6,6 +6,7 @@ import { getActor } from '@/lib/auth/get-actor'
 import { HTTP_STATUS, InvalidError, type Failure } from '@/lib/errors'
 import { withinScope } from '@/models/scope'
 
+import { gatherInput } from './gather-input'
 import { failureOf } from './map-error'
 import { requestIdOf } from './request'
 import { requireSameOrigin } from './same-origin'
@@ -16,8 +17,8 @@ const PRIVATE = { 'Cache-Control': 'private, no-store' }
 
 /**
  * Makes a route handler under /api/brands/[brand] of a query or command: session → parse → work →
- * answer. The input is the address's parameters, the query string and, for writes, the JSON body,
- * in that order of precedence. A Response is passed on as it is; anything else becomes JSON.
+ * answer. The input is the address's parameters, the query string and, for writes, the JSON body; a
+ * field may come once. A Response is passed on as it is; anything else becomes JSON.
  */
 export function defineRoute<Schema extends z.ZodType>(
   schema: Schema,
@@ -29,9 +30,8 @@ export function defineRoute<Schema extends z.ZodType>(
       if (writes) requireSameOrigin(request.headers)
       const { brand, ...rest } = await params
       const actor = await getActor(brand)
-      const query = Object.fromEntries(request.nextUrl.searchParams)
       const body = writes ? await readJson(request) : {}
-      const input = schema.parse({ ...body, ...query, ...rest })
+      const input = schema.parse(gatherInput(rest, request.nextUrl.searchParams, body))
       const result = await asActor(actor, () => work(actor, input, request))
       return result instanceof Response
         ? result

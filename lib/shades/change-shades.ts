@@ -1,9 +1,9 @@
-import { literal, Op, UniqueConstraintError, type Transaction } from 'sequelize'
+import { col, fn, Op, UniqueConstraintError, where, type Transaction } from 'sequelize'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { ConflictError, NotFoundError } from '@/lib/errors'
 import { getLine } from '@/lib/lines/queries'
-import { inTransaction, sequelize, Shade, type Line } from '@/models'
+import { inTransaction, Shade, type Line } from '@/models'
 
 import { canEditShades } from './policy'
 import { SHADE_LIMITS } from './constants'
@@ -71,12 +71,14 @@ export async function findNumberHolder(
   exceptId?: string,
 ): Promise<Shade | null> {
   if (numbers.length === 0) return null
-  const lowered = numbers.map((number) => `lower(${sequelize().escape(number)})`).join(', ')
   return Shade.findOne({
     where: {
       brandId: line.brandId,
       lineId: line.id,
-      [Op.and]: literal(`lower(number) IN (${lowered})`),
+      // PostgreSQL lowers both, so that they are lowered alike.
+      [Op.and]: where(fn('lower', col('number')), {
+        [Op.in]: numbers.map((number) => fn('lower', number)),
+      }),
       ...(exceptId && { id: { [Op.ne]: exceptId } }),
     },
     transaction,

@@ -1,4 +1,5 @@
-import { literal, Op, type Order, type WhereOptions } from 'sequelize'
+import { col, fn, literal, Op, type Order, type WhereOptions } from 'sequelize'
+import type { Fn, Literal } from 'sequelize/types/utils'
 import { z } from 'zod'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
@@ -66,25 +67,25 @@ export async function listAllShades(
 
 /** Numbers as people count: by what stands before the first digits, then by those as a number. */
 const BY_NUMBER = [
-  `lower(regexp_replace(number, '[0-9].*$', ''))`,
-  `substring(number from '[0-9]+')::numeric`,
-  `lower(number)`,
+  literal(`lower(regexp_replace(number, '[0-9].*$', ''))`),
+  literal(`substring(number from '[0-9]+')::numeric`),
+  literal(`lower(number)`),
 ]
-const STATUS_ORDER = `array_position(ARRAY['${SHADE_STATUSES.join(`','`)}'], status)`
+const STATUS_ORDER = fn('array_position', [...SHADE_STATUSES], col('status'))
 
-const SORTS: Record<ShadeSort, readonly string[]> = {
-  order: ['position'],
+const SORTS: Record<ShadeSort, readonly (Literal | Fn)[]> = {
+  order: [literal('position')],
   number: BY_NUMBER,
-  name: [`lower(name)`],
+  name: [literal('lower(name)')],
   status: [STATUS_ORDER],
-  L: ['lab_l'],
-  a: ['lab_a'],
-  b: ['lab_b'],
+  L: [literal('lab_l')],
+  a: [literal('lab_a')],
+  b: [literal('lab_b')],
 }
 
 function orderOf({ sort, dir }: ShadeTableFilter): Order {
-  const direction = dir === 'desc' ? 'DESC' : 'ASC'
-  const chosen = SORTS[sort].map((sql) => literal(`${sql} ${direction} NULLS LAST`))
+  const direction = dir === 'desc' ? 'DESC NULLS LAST' : 'ASC NULLS LAST'
+  const chosen = SORTS[sort].map((by): [Literal | Fn, string] => [by, direction])
   return [...chosen, ...BY_POSITION]
 }
 

@@ -68,14 +68,17 @@ export const shadeHex = z.string().transform((text, context) => {
   return z.NEVER
 })
 
+const labColor = {
+  kind: z.literal('lab'),
+  ...labFields,
+  terms: z.enum(READING_TERMS, 'Say which light and observer it was read under.'),
+}
+const hexColor = { kind: z.literal('hex'), hex: shadeHex }
+
 /** A shade's colour as entered: a reading with its terms, or a screen colour. */
 export const shadeColor = z.discriminatedUnion('kind', [
-  z.object({
-    kind: z.literal('lab'),
-    ...labFields,
-    terms: z.enum(READING_TERMS, 'Say which light and observer it was read under.'),
-  }),
-  z.object({ kind: z.literal('hex'), hex: shadeHex }),
+  z.strictObject(labColor),
+  z.strictObject(hexColor),
 ])
 /** A parsed colour. */
 export type ShadeColor = z.output<typeof shadeColor>
@@ -86,8 +89,11 @@ const shadeFields = {
   status: z.enum(SHADE_STATUSES),
   color: shadeColor,
 }
-/** What people fill in of a shade, new or not. */
-export const shadeFormSchema = z.object(shadeFields)
+/** What people fill in of a shade, new or not; the form keeps both kinds of colour, and one counts. */
+export const shadeFormSchema = z.strictObject({
+  ...shadeFields,
+  color: z.discriminatedUnion('kind', [z.object(labColor), z.object(hexColor)]),
+})
 
 const inLine = { lineSlug: z.string() }
 
@@ -107,7 +113,7 @@ export type CreateShadeInput = z.output<typeof createShadeSchema>
 /** A change of a shade; a field left out stays as it is. */
 export const updateShadeSchema = z.strictObject({
   ...inLine,
-  ...shadeFormSchema.partial().shape,
+  ...z.strictObject(shadeFields).partial().shape,
   shadeId: z.uuid(),
   version: z.number().int(),
 })

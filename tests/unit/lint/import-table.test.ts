@@ -1,21 +1,6 @@
-import { ESLint } from 'eslint'
-import { beforeAll, describe, expect, test } from 'vitest'
-import typescript from 'typescript-eslint'
+import { describe, expect, test } from 'vitest'
 
-let eslint: ESLint
-
-beforeAll(() => {
-  // The snippets are no files of the project, so the rules that ask for types are left out.
-  eslint = new ESLint({ overrideConfig: [typescript.configs.disableTypeChecked] as never })
-})
-
-/** The rules that a file with this text, at this place, breaks. */
-async function broken(path: string, text: string): Promise<string[]> {
-  const [result] = await eslint.lintText(text, { filePath: path })
-  const fatal = result!.messages.find(({ fatal }) => fatal)
-  if (fatal) throw new Error(fatal.message)
-  return result!.messages.map(({ ruleId }) => ruleId ?? '')
-}
+import { broken } from './broken'
 
 const value = (source: string) => `import * as it from '${source}'; void it`
 const type = (source: string) =>

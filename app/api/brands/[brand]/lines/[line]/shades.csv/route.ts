@@ -4,7 +4,7 @@ import { defineRoute } from '@/lib/server/define-route'
 import { exportShades } from '@/lib/shades/export-shades'
 
 /** GET: all shades of the line as a CSV file to keep. */
-export const GET = defineRoute(z.object({ line: z.string() }), async (actor, { line }) => {
+export const GET = defineRoute(z.strictObject({ line: z.string() }), async (actor, { line }) => {
   const { fileName, text } = await exportShades(actor, line)
   return new Response(text, {
     headers: {
