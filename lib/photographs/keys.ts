@@ -26,6 +26,18 @@ export const derivativeKey = (
 ): string =>
   `${DERIVATIVES}${photograph.brandId}/${photograph.id}/${derivativeName(photograph, derivative)}`
 
+/** The keys of everything the object store holds of a confirmed photograph. */
+export const objectKeysOf = (
+  photograph: Owned & {
+    sha256: string
+    objectKey: string
+    derivatives: readonly Pick<Derivative, 'width' | 'format'>[]
+  },
+): string[] => [
+  photograph.objectKey,
+  ...photograph.derivatives.map((copy) => derivativeKey(photograph, copy)),
+]
+
 /** The photograph a key belongs to, or null for a key that is none of ours. */
 export const photographOfKey = (key: string): string | null =>
   /^(?:originals|derivatives)\/[0-9a-f-]{36}\/([0-9a-f]{8}(?:-[0-9a-f]{4}){3}-[0-9a-f]{12})(?:\/|$)/.exec(

@@ -3,7 +3,7 @@ import { Op, type WhereOptions } from 'sequelize'
 import { deleteObjects, listObjects } from '@/lib/storage/objects'
 import { Photograph } from '@/models'
 
-import { derivativeKey, DERIVATIVES, ORIGINALS, photographOfKey } from './keys'
+import { DERIVATIVES, objectKeysOf, ORIGINALS, photographOfKey } from './keys'
 import { UNDO_WINDOW } from './constants'
 
 const MINUTE = 60_000
@@ -90,14 +90,7 @@ async function sweepRows(where: WhereOptions<Photograph>): Promise<number> {
       paranoid: false,
     })
     const stays = new Set(left.map(({ id }) => id))
-    await deleteObjects(
-      rows
-        .filter(({ id }) => !stays.has(id))
-        .flatMap((row) => [
-          row.objectKey,
-          ...row.derivatives.map((copy) => derivativeKey(row, copy)),
-        ]),
-    )
+    await deleteObjects(rows.filter(({ id }) => !stays.has(id)).flatMap(objectKeysOf))
   }
 }
 

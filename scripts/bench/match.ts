@@ -7,7 +7,7 @@ import { decodePhotograph } from '@/lib/photographs/decode'
 import sharp from '@/lib/photographs/sharp'
 import { warmUpReading } from '@/lib/photographs/warm-up'
 
-import type { Figure } from './index'
+import type { Figure } from '../lib/figures.mjs'
 import { dyedLine, seededRandom } from './line'
 import { labsOf, mean, median, ms, timed, medianTimes } from './measure'
 import { matchFile, photographs, shrinkAlone, trueFive, type Photograph } from './photographs'

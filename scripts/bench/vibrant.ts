@@ -7,7 +7,7 @@ import { solveChoice } from '@/lib/color/solve'
 import { srgbToLab } from '@/lib/color/srgb'
 import type { Lab } from '@/lib/color/types'
 
-import type { Figure } from './index'
+import type { Figure } from '../lib/figures.mjs'
 import { labsOf, mean, median, medianTimes } from './measure'
 import { matchFile, shrinkAlone, trueFive, type Photograph } from './photographs'
 

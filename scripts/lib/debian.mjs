@@ -1,12 +1,16 @@
 import { existsSync, mkdirSync, writeFileSync } from 'node:fs'
 import { dirname } from 'node:path'
 
-import { findPostgres } from './postgres-binaries.mjs'
+import { CLIENT, findPostgres } from './postgres-binaries.mjs'
 import { Refusal, say } from './say.mjs'
 
 /** What Woadmap and its tests need from Debian, and how to tell that it is there. */
 export const DEBIAN = {
   postgresql: { name: 'postgresql', isPresent: () => findPostgres().length > 0 },
+  postgresqlClient: {
+    name: 'postgresql-client',
+    isPresent: () => findPostgres(undefined, undefined, CLIENT).length > 0,
+  },
   chromium: { name: 'chromium', isPresent: () => existsSync('/usr/bin/chromium') },
   // Photographs to measure the match on; too large to be kept in the repository.
   backgrounds: {

@@ -4,13 +4,18 @@ import { dirname, join } from 'node:path'
 import { Refusal } from './say.mjs'
 
 const DEBIAN = '/usr/lib/postgresql'
+/** What runs a database. */
+const SERVER = ['postgres', 'initdb']
+/** What copies one from elsewhere. */
+export const CLIENT = ['pg_dump', 'pg_restore']
 
 /**
  * Every folder on this machine that holds PostgreSQL's own programs, with its major version, newest
  * first. Debian keeps them out of the PATH.
+ * @param {string[]} programs all of which must be there
  * @returns {{folder: string, major: number}[]}
  */
-export function findPostgres(path = process.env.PATH ?? '', debian = DEBIAN) {
+export function findPostgres(path = process.env.PATH ?? '', debian = DEBIAN, programs = SERVER) {
   const folders = [
     ...(existsSync(debian)
       ? readdirSync(debian).map((version) => join(debian, version, 'bin'))
@@ -19,8 +24,8 @@ export function findPostgres(path = process.env.PATH ?? '', debian = DEBIAN) {
   ]
   const found = new Map()
   for (const folder of folders) {
-    if (!['postgres', 'initdb'].every((program) => existsSync(join(folder, program)))) continue
-    const home = dirname(realpathSync(join(folder, 'postgres')))
+    if (!programs.every((program) => existsSync(join(folder, program)))) continue
+    const home = dirname(realpathSync(join(folder, programs[0])))
     const major = Number(/(\d+)(?:\.\d+)?\/bin$/.exec(home)?.[1] ?? 0)
     found.set(home, { folder: home, major })
   }

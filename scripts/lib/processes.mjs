@@ -87,6 +87,18 @@ export class Fleet {
     }
   }
 
+  /**
+   * Stops one process for good; its name is free again.
+   * @param {NodeJS.Signals} [signal] its own stop signal when left out; SIGKILL ends it as a machine
+   *   that fails would
+   */
+  async stop(name, signal) {
+    const { spec, child } = this.#services.get(name)
+    this.#services.delete(name)
+    await stopChild(child, signal ?? spec.stopSignal, spec.stopWithin)
+    dropIdentity(this.#identityFile(name))
+  }
+
   /** The end of what a process wrote, for an error's sake. */
   tail(name, lines = 15) {
     try {
@@ -146,7 +158,7 @@ export class Fleet {
     const began = Date.now()
     writeIdentity(this.#identityFile(name), child.pid)
     child.once('exit', (code, signal) => {
-      if (this.#stopping) return
+      if (this.#stopping || this.#services.get(name)?.child !== child) return
       const inARow = Date.now() - began > RECOVERED_AFTER ? 1 : deaths + 1
       void this.#afterDeath(spec, inARow, signal ?? `code ${code}`)
     })

@@ -50,12 +50,19 @@ export async function startWeb(fleet, env, { host, port, dev = false, show = fal
   }
 }
 
-async function runScript(fleet, env, args, problem) {
-  const code = await fleet.run({
+/**
+ * Runs a TypeScript file with this environment.
+ * @returns {Promise<number>} its exit code
+ */
+export function runTs(fleet, env, args) {
+  return fleet.run({
     command: process.execPath,
     args: ['--import', 'tsx', ...args],
     cwd: ROOT,
     env,
   })
-  if (code !== 0) throw new Refusal(`${problem}; why is written above.`)
+}
+
+async function runScript(fleet, env, args, problem) {
+  if ((await runTs(fleet, env, args)) !== 0) throw new Refusal(`${problem}; why is written above.`)
 }

@@ -105,7 +105,7 @@ function node(fleet, env, args) {
   return fleet.run({ command: process.execPath, args, cwd: ROOT, env, within: LIMIT })
 }
 
-// Apart from .next, which a running product may be serving from.
-function distOf(local) {
+/** Where tests build to: apart from .next, which a running product may be serving from. */
+export function distOf(local) {
   return { WOADMAP_DIST_DIR: join(local, 'next').slice(ROOT.length + 1) }
 }

@@ -4,7 +4,7 @@ import { join } from 'node:path'
 import { describe, expect, test } from 'vitest'
 
 import { sudoSentence } from '../../../scripts/lib/debian.mjs'
-import { choosePostgres, findPostgres } from '../../../scripts/lib/postgres-binaries.mjs'
+import { choosePostgres, CLIENT, findPostgres } from '../../../scripts/lib/postgres-binaries.mjs'
 import { blockedAncestor, placePostgres } from '../../../scripts/lib/postgres-owner.mjs'
 import { keepSecret } from '../../../scripts/lib/secrets.mjs'
 import { temporaryFolder } from './temporary-folder'
@@ -34,6 +34,13 @@ describe('finding PostgreSQL', () => {
   test('a folder with half of the programs does not count', () => {
     const path = installed(temporaryFolder(), ['postgres'])
     expect(findPostgres(`/nowhere:${path}`, '/nowhere')).toEqual([])
+  })
+
+  test('the programs that copy a database may be there without those that run one', () => {
+    const debian = temporaryFolder()
+    installed(join(debian, '16/bin'), CLIENT)
+    expect(findPostgres('', debian)).toEqual([])
+    expect(findPostgres('', debian, CLIENT).map(({ major }) => major)).toEqual([16])
   })
 
   test('a data folder is run by the version that made it, or refused by name', () => {

@@ -44,6 +44,18 @@ describe('stopping', () => {
     expect(onLoss).not.toHaveBeenCalled()
   })
 
+  test('of one process alone leaves the others, and its name can be used again', async () => {
+    await node('web-a', FOREVER, { restart: true })
+    await node('web-b', FOREVER)
+    await fleet.stop('web-a', 'SIGKILL')
+    expect(pidOf('web-a')).toBeUndefined()
+    expect(fleet.isRunning('web-a')).toBe(false)
+    expect(fleet.isRunning('web-b')).toBe(true)
+    await node('web-a', FOREVER)
+    expect(fleet.isRunning('web-a')).toBe(true)
+    expect(onLoss).not.toHaveBeenCalled()
+  })
+
   test('ends by force what does not listen', async () => {
     await node('deaf', `process.on('SIGTERM', () => {}); console.log('ready'); ${FOREVER}`, {
       stopWithin: 100,
