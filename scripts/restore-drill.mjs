@@ -9,7 +9,6 @@ import { execFile } from 'node:child_process'
 import { createHash } from 'node:crypto'
 import { rmSync } from 'node:fs'
 import { join } from 'node:path'
-import { setTimeout as sleep } from 'node:timers/promises'
 import { promisify } from 'node:util'
 
 import { ensureBuild } from './lib/build.mjs'
@@ -19,7 +18,8 @@ import { launch } from './lib/launcher.mjs'
 import { ensurePackages, requireNode } from './lib/packages.mjs'
 import { ROOT } from './lib/paths.mjs'
 import { migrate, seed, startJobs, startWeb } from './lib/product.mjs'
-import { Refusal, say, sayError } from './lib/say.mjs'
+import { say, sayError } from './lib/say.mjs'
+import { photographsSettled } from './lib/settled.mjs'
 import { demoOwner, signIn } from './lib/sign-in.mjs'
 import { distOf } from './lib/test-steps.mjs'
 import { makeTestWorld } from './lib/test-world.mjs'
@@ -27,8 +27,6 @@ import { makeTestWorld } from './lib/test-world.mjs'
 const LOCAL = join(ROOT, '.local/test')
 const DRILL = join(LOCAL, 'drill')
 const BACKUP = join(DRILL, 'backup')
-/** The demo's photographs are read and copied within this, in milliseconds. */
-const SETTLED_WITHIN = 5 * 60_000
 
 async function drill(fleet) {
   await Promise.all([
@@ -42,7 +40,7 @@ async function drill(fleet) {
   await seed(fleet, lost.env)
   say('Waiting until the photographs of the demo are read')
   await startJobs(fleet, lost.env)
-  await settled(lost.env)
+  await photographsSettled(lost.env.DATABASE_URL)
   await fleet.stop('jobs')
   const before = await inventory(lost.env)
 
@@ -80,28 +78,6 @@ async function makePlace(fleet, name) {
   return {
     port: world.port,
     env: { ...world.environment('e2e', 'production'), ...distOf(LOCAL) },
-  }
-}
-
-/** Waits until no job is left to do. */
-async function settled({ DATABASE_URL }) {
-  const { default: pg } = await import('pg')
-  const client = new pg.Client({ connectionString: DATABASE_URL })
-  await client.connect()
-  const deadline = Date.now() + SETTLED_WITHIN
-  try {
-    for (;;) {
-      const { rows } = await client.query(
-        `SELECT (SELECT count(*) FROM photographs WHERE state <> 'ready') +
-          (SELECT count(*) FROM pgboss.job WHERE state IN ('created', 'retry', 'active')
-            AND name LIKE '%-photograph') AS left`,
-      )
-      if (rows[0].left === '0') return
-      if (Date.now() > deadline) throw new Refusal('The photographs of the demo were not read.')
-      await sleep(500)
-    }
-  } finally {
-    await client.end()
   }
 }
 

@@ -20,6 +20,8 @@ const SOURCES = [
   'package-lock.json',
 ]
 
+const BUILT_IN = ['NEXT_SERVER_ACTIONS_ENCRYPTION_KEY', 'NEXT_DEPLOYMENT_ID']
+
 /** Builds the product for production when its sources have changed since it was last built. */
 export async function ensureBuild(fleet, root, env) {
   const { dist, stamp } = placesOf(root, env)
@@ -49,13 +51,13 @@ function placesOf(root, env) {
 }
 
 function sourcesOf(root, env) {
-  return fingerprint(root, SOURCES, publicSettings(env))
+  return fingerprint(root, SOURCES, builtInSettings(env))
 }
 
-// Next.js writes settings with this prefix into the pages' code.
-function publicSettings(env) {
+// Next.js writes these settings into what it builds.
+function builtInSettings(env) {
   return Object.entries(env)
-    .filter(([name]) => name.startsWith('NEXT_PUBLIC_'))
+    .filter(([name]) => name.startsWith('NEXT_PUBLIC_') || BUILT_IN.includes(name))
     .map(([name, value]) => `${name}=${value}`)
     .sort()
 }

@@ -1,8 +1,11 @@
-import { existsSync, mkdirSync, writeFileSync } from 'node:fs'
+import { existsSync, lstatSync, mkdirSync, symlinkSync, writeFileSync } from 'node:fs'
 import { dirname } from 'node:path'
 
 import { CLIENT, findPostgres } from './postgres-binaries.mjs'
 import { Refusal, say } from './say.mjs'
+
+/** The proxy's program. */
+export const NGINX = '/usr/sbin/nginx'
 
 /** What Woadmap and its tests need from Debian, and how to tell that it is there. */
 export const DEBIAN = {
@@ -11,6 +14,7 @@ export const DEBIAN = {
     name: 'postgresql-client',
     isPresent: () => findPostgres(undefined, undefined, CLIENT).length > 0,
   },
+  nginx: { name: 'nginx', isPresent: () => existsSync(NGINX) },
   chromium: { name: 'chromium', isPresent: () => existsSync('/usr/bin/chromium') },
   // Photographs to measure the match on; too large to be kept in the repository.
   backgrounds: {
@@ -21,6 +25,7 @@ export const DEBIAN = {
 
 const NO_MAIN_CLUSTER = '/etc/postgresql-common/createcluster.d/no-main.conf'
 const SETTING = 'create_main_cluster = false'
+const NGINX_SERVICE = '/etc/systemd/system/nginx.service'
 
 /**
  * Installs the Debian packages that are missing: as root by itself, otherwise by telling the exact
@@ -39,6 +44,7 @@ export async function ensureDebianPackages(fleet, wanted, env) {
   }
   say(`Installing from Debian: ${missing.join(', ')}`)
   if (missing.includes('postgresql')) preventMainCluster()
+  if (missing.includes('nginx')) preventNginxService()
   const aptEnv = { ...env, DEBIAN_FRONTEND: 'noninteractive' }
   // A list that could not be refreshed may still be good enough; the installation decides.
   await fleet.run({ command: 'apt-get', args: ['update', '-qq'], env: aptEnv })
@@ -59,6 +65,7 @@ export function sudoSentence(missing) {
     ...(missing.includes('postgresql')
       ? [`mkdir -p ${dirname(NO_MAIN_CLUSTER)}`, `echo "${SETTING}" > ${NO_MAIN_CLUSTER}`]
       : []),
+    ...(missing.includes('nginx') ? [`ln -s /dev/null ${NGINX_SERVICE}`] : []),
     'apt-get update',
     `apt-get install -y --no-install-recommends ${missing.join(' ')}`,
   ]
@@ -73,4 +80,11 @@ function preventMainCluster() {
   if (existsSync(NO_MAIN_CLUSTER)) return
   mkdirSync(dirname(NO_MAIN_CLUSTER), { recursive: true })
   writeFileSync(NO_MAIN_CLUSTER, `${SETTING}\n`)
+}
+
+// Debian would otherwise start a web server of its own on port 80, for everybody.
+function preventNginxService() {
+  const folder = dirname(NGINX_SERVICE)
+  if (!existsSync(folder) || lstatSync(NGINX_SERVICE, { throwIfNoEntry: false })) return
+  symlinkSync('/dev/null', NGINX_SERVICE)
 }

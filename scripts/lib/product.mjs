@@ -12,10 +12,10 @@ export async function seed(fleet, env) {
   await runScript(fleet, env, ['seeders/seed.ts'], 'The demo could not be seeded')
 }
 
-/** Starts the job process: started again when it dies. */
-export async function startJobs(fleet, env, { show = false } = {}) {
+/** Starts a job process: started again when it dies. */
+export async function startJobs(fleet, env, { name = 'jobs', show = false } = {}) {
   await fleet.start({
-    name: 'jobs',
+    name,
     command: process.execPath,
     args: ['--import', 'tsx', 'worker.ts'],
     cwd: ROOT,
@@ -27,13 +27,17 @@ export async function startJobs(fleet, env, { show = false } = {}) {
 }
 
 /**
- * Starts the web server and waits until it answers.
- * @param {{host: string, port: number, dev?: boolean, show?: boolean}} options
+ * Starts a web server and waits until it answers.
+ * @param {{host: string, port: number, name?: string, dev?: boolean, show?: boolean}} options
  * @throws {Refusal} with its last words when it does not come up
  */
-export async function startWeb(fleet, env, { host, port, dev = false, show = false }) {
+export async function startWeb(
+  fleet,
+  env,
+  { host, port, name = 'web', dev = false, show = false },
+) {
   await fleet.start({
-    name: 'web',
+    name,
     command: process.execPath,
     args: [NEXT, dev ? 'dev' : 'start', '-p', String(port), '-H', host],
     cwd: ROOT,
@@ -44,9 +48,9 @@ export async function startWeb(fleet, env, { host, port, dev = false, show = fal
     stopWithin: 4000,
   })
   const reachable = ['0.0.0.0', '::'].includes(host) ? '127.0.0.1' : host
-  const alive = () => fleet.isRunning('web')
+  const alive = () => fleet.isRunning(name)
   if (!(await waitForPort(port, { host: reachable, within: 90_000, alive }))) {
-    throw new Refusal(`The web server did not start.\n${fleet.tail('web')}`)
+    throw new Refusal(`The web server did not start.\n${fleet.tail(name)}`)
   }
 }
 

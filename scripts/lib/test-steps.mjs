@@ -89,7 +89,11 @@ async function vitest({ fleet, local, filters }, env, projects) {
   return tallyOfReport(code, report, readVitest)
 }
 
-async function playwright({ fleet, local, filters }, env) {
+/**
+ * Runs the browser tests whose files the filters choose against the product of this environment.
+ * @returns their tally
+ */
+export async function playwright({ fleet, local, filters }, env) {
   const report = join(local, 'e2e.json')
   clearReport(report)
   const code = await node(fleet, { ...env, PLAYWRIGHT_JSON_OUTPUT_FILE: report }, [
