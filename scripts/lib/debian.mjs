@@ -21,6 +21,15 @@ export const DEBIAN = {
     name: 'mate-backgrounds',
     isPresent: () => existsSync('/usr/share/backgrounds/mate'),
   },
+  // Lies to one process about the time.
+  faketime: { name: 'libfaketime', isPresent: () => findFaketime() !== undefined },
+}
+
+/** Where Debian's libfaketime is, to be preloaded; undefined when it is not installed. */
+export function findFaketime() {
+  const machine = { x64: 'x86_64', arm64: 'aarch64' }[process.arch] ?? process.arch
+  const path = `/usr/lib/${machine}-linux-gnu/faketime/libfaketimeMT.so.1`
+  return existsSync(path) ? path : undefined
 }
 
 const NO_MAIN_CLUSTER = '/etc/postgresql-common/createcluster.d/no-main.conf'

@@ -57,6 +57,25 @@ export class Fleet {
     return service !== undefined && !hasEnded(service.child)
   }
 
+  /** The id of the named process; undefined while it does not run. */
+  pidOf(name) {
+    return this.isRunning(name) ? this.#services.get(name).child.pid : undefined
+  }
+
+  /**
+   * Stops one process for good; it may then be started anew under its name.
+   * @returns {Promise<NodeJS.Signals | number | null>} what ended it: a signal or its exit code
+   */
+  async stop(name) {
+    const service = this.#services.get(name)
+    if (!service) return null
+    this.#services.delete(name)
+    const { child, spec } = service
+    await stopChild(child, spec.stopSignal, spec.stopWithin)
+    dropIdentity(this.#identityFile(name))
+    return child.signalCode ?? child.exitCode
+  }
+
   /**
    * Runs a command to its end.
    * @param {{command: string, args: string[], env?: NodeJS.ProcessEnv, cwd?: string, within?: number}} spec
@@ -158,13 +177,13 @@ export class Fleet {
     const began = Date.now()
     writeIdentity(this.#identityFile(name), child.pid)
     child.once('exit', (code, signal) => {
-      if (this.#stopping || this.#services.get(name)?.child !== child) return
+      if (this.#isDismissed(name, child)) return
       const inARow = Date.now() - began > RECOVERED_AFTER ? 1 : deaths + 1
-      void this.#afterDeath(spec, inARow, signal ?? `code ${code}`)
+      void this.#afterDeath(spec, child, inARow, signal ?? `code ${code}`)
     })
   }
 
-  async #afterDeath(spec, deaths, how) {
+  async #afterDeath(spec, child, deaths, how) {
     const log = join(this.logFolder, `${spec.name}.log`)
     if (!spec.restart || deaths >= DEATHS_IN_A_ROW) {
       this.onLoss(
@@ -175,8 +194,12 @@ export class Fleet {
     const pause = Math.min(250 * 2 ** deaths, 10_000)
     say(`${spec.name} ended (${how}); starting it again in ${pause / 1000} s`)
     await sleep(pause, undefined, { ref: false })
-    if (this.#stopping) return
+    if (this.#isDismissed(spec.name, child)) return
     await this.#launch(spec, deaths).catch(this.onLoss)
+  }
+
+  #isDismissed(name, child) {
+    return this.#stopping || this.#services.get(name)?.child !== child
   }
 
   #identityFile(name) {

@@ -11,11 +11,12 @@ import { startPostgres } from './postgres.mjs'
  * cluster, an object store and a mail server of their own, on free ports.
  * @param {import('./processes.mjs').Fleet} fleet
  * @param {string} local the folder that holds all of it; objects and letters of the last run go
+ * @param {{durable?: boolean}} [options] whether the database must survive being killed
  * @returns {Promise<{environment: (name: string, mode: string) => object, renew: (name: string) => Promise<void>,
  *   port: number}>} `environment(name)` is a product's whole environment on a database and a bucket
  *   of that name; `renew(name)` empties the database
  */
-export async function makeTestWorld(fleet, local, given) {
+export async function makeTestWorld(fleet, local, given, { durable = false } = {}) {
   const [databasePort, objectStorePort, mailPort, port] = await findFreePorts(4)
   const origin = `http://localhost:${port}`
   const uploads = join(local, 'uploads')
@@ -23,7 +24,7 @@ export async function makeTestWorld(fleet, local, given) {
   for (const folder of [uploads, letters]) rmSync(folder, { recursive: true, force: true })
 
   const [postgres, endpoint, smtp] = await Promise.all([
-    startPostgres(fleet, { local, port: databasePort, durable: false }),
+    startPostgres(fleet, { local, port: databasePort, durable }),
     startObjectStore(fleet, {
       folder: uploads,
       port: objectStorePort,
@@ -65,7 +66,7 @@ export async function makeTestWorld(fleet, local, given) {
   }
 }
 
-const WORLDS = ['integration', 'e2e']
+const WORLDS = ['integration', 'e2e', 'faults']
 
 function databaseOf(name) {
   return `woadmap_${name}`
