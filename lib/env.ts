@@ -27,6 +27,9 @@ export type Env = z.infer<typeof schema>
 /** True while `next build` evaluates our modules: no setting is there, and nothing may connect. */
 export const building = process.env.NEXT_PHASE === 'phase-production-build'
 
+/** True in a process that serves pages, where somebody waits for every answer. Set by Next.js. */
+export const serving = process.env.NEXT_RUNTIME !== undefined
+
 let parsed: Env | undefined
 
 /**

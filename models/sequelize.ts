@@ -1,13 +1,20 @@
 import { Sequelize, type Transaction } from 'sequelize'
 
-import { building, env } from '@/lib/env'
+import { building, env, serving } from '@/lib/env'
 
+import { dropWhenSilent } from './drop-when-silent'
 import { currentScope } from './scope'
 
 const shared = globalThis as typeof globalThis & { woadmapSequelize?: Sequelize }
 
-/** How long anything may wait for the database before it is given up, in milliseconds. */
-const WAIT = { connect: 3_000, acquire: 4_000, statement: 10_000, lock: 4_000 } as const
+/**
+ * How long anything may wait for the database before it is given up, in milliseconds. Who waits for
+ * a page is told within 4 s, also when a connection and then a lock were waited for; a job and a
+ * migration may take longer.
+ */
+const WAIT = serving
+  ? { connect: 2_000, acquire: 2_000, statement: 2_500, lock: 1_500 }
+  : { connect: 3_000, acquire: 4_000, statement: 10_000, lock: 4_000 }
 
 /**
  * The one Sequelize instance. It lives on globalThis so that a hot reload keeps its pool; the
@@ -22,6 +29,7 @@ function connect(): Sequelize {
   const made = new Sequelize(building ? 'postgres://127.0.0.1/none' : env().DATABASE_URL, {
     dialect: 'postgres',
     logging: false,
+    hooks: { afterConnect: dropWhenSilent },
     define: { underscored: true, freezeTableName: true },
     pool: {
       max: building ? 1 : env().DATABASE_POOL_MAX,

@@ -38,6 +38,10 @@ function client(endpoint: string): S3Client {
   return made
 }
 
+/** How long the store may take to say anything at all to somebody who waits, in milliseconds. */
+const SIGN_OF_LIFE = 3_000
+const soon = () => ({ abortSignal: AbortSignal.timeout(SIGN_OF_LIFE) })
+
 async function ask<T>(work: (store: S3Client, bucket: string) => Promise<T>): Promise<T> {
   try {
     return await work(client(env().S3_ENDPOINT), env().S3_BUCKET)
@@ -85,7 +89,7 @@ export async function headObject(
 ): Promise<{ byteLength: number; contentType: string } | null> {
   try {
     const head = await ask((store, Bucket) =>
-      store.send(new HeadObjectCommand({ Bucket, Key: key })),
+      store.send(new HeadObjectCommand({ Bucket, Key: key }), soon()),
     )
     return { byteLength: head.ContentLength ?? 0, contentType: head.ContentType ?? '' }
   } catch (error) {
@@ -154,5 +158,5 @@ export async function deleteObjects(keys: readonly string[]): Promise<void> {
 
 /** Asks the store for a sign of life. @throws UnavailableError */
 export async function requireObjectStore(): Promise<void> {
-  await ask((store, Bucket) => store.send(new ListObjectsV2Command({ Bucket, MaxKeys: 1 })))
+  await ask((store, Bucket) => store.send(new ListObjectsV2Command({ Bucket, MaxKeys: 1 }), soon()))
 }

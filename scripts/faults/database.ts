@@ -150,6 +150,12 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       world.undo(thaw)
       // Connections at hand, as in the middle of a day.
       await Promise.all([1, 2, 3].map(() => world.owner.ask(`/${BRAND}/lines/${LINE}/edit`)))
+      // One save is in the middle of its transaction, one has not begun.
+      const letGo = await world.hold('LOCK TABLE shades IN EXCLUSIVE MODE')
+      const midway = world.newShade()
+      const saving = world.saveShade(midway)
+      await world.waitForLocked(1)
+      pids.splice(0, pids.length, ...postgresProcesses(world))
       signalAll(pids, 'SIGSTOP')
       const frozen = performance.now()
       const shade = world.newShade()
@@ -161,14 +167,16 @@ export const DATABASE_FAULTS: readonly Fault[] = [
         world.owner.ask('/livez'),
       ])
       mustBeTold(save, 'PostgreSQL was frozen')
+      mustBeTold(await saving, 'PostgreSQL froze in its midst')
       must(page.status >= 500 || page.status === 200, `a page answered ${page.status}`)
       must(route.status === 503, `a route answered ${route.status}`)
       must(ready.status === 503 && ready.ms < 1_500, `/readyz: ${ready.status} in ${ready.ms} ms`)
       must(alive.status === 200, `/livez answered ${alive.status}`)
       await sleep(Math.max(0, 10_000 - (performance.now() - frozen)))
       thaw()
+      await letGo()
       const recovered = await world.healthy()
-      await mustSaveOnce(world, shade)
+      for (const one of [shade, midway]) await mustSaveOnce(world, one)
       const slowest = Math.max(page.ms, route.ms)
       return `answered within ${seconds(slowest)} (/readyz ${seconds(ready.ms)}), ready ${seconds(recovered)} after the thaw, saved once`
     },

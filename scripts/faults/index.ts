@@ -2,13 +2,14 @@ import { setTimeout as sleep } from 'node:timers/promises'
 
 import { Refusal } from '../lib/say.mjs'
 
-import { findDamage } from './aftermath'
+import { findDamage, settled } from './aftermath'
 import { DATABASE_FAULTS } from './database'
 import { Missed, type Fault } from './fault'
+import { STORE_FAULTS } from './object-store'
 import { PATIENCE, seconds, World, type Ground } from './world'
 
 /** Every fault, in the order in which they are run. */
-export const FAULTS: readonly Fault[] = [...DATABASE_FAULTS]
+export const FAULTS: readonly Fault[] = [...DATABASE_FAULTS, ...STORE_FAULTS]
 
 /** The faults of these names; all when none is named. @throws Refusal naming them when one is unknown */
 export function chooseFaults(names: readonly string[]): readonly Fault[] {
@@ -23,6 +24,8 @@ export function chooseFaults(names: readonly string[]): readonly Fault[] {
 /** Runs the faults one after another and prints each. @returns the exit code: 1 when one missed */
 export async function runFaults(faults: readonly Fault[], ground: Ground): Promise<number> {
   const world = await World.open(ground)
+  // The demo's photographs are read and copied before anything breaks.
+  await settled(world, 120)
   let missed = 0
   for (const fault of faults) {
     const began = performance.now()

@@ -63,15 +63,16 @@ export class Fleet {
   }
 
   /**
-   * Stops one process for good; it may then be started anew under its name.
+   * Stops one process for good, by its own signal or another; it may then be started anew under
+   * its name.
    * @returns {Promise<NodeJS.Signals | number | null>} what ended it: a signal or its exit code
    */
-  async stop(name) {
+  async stop(name, signal) {
     const service = this.#services.get(name)
     if (!service) return null
     this.#services.delete(name)
     const { child, spec } = service
-    await stopChild(child, spec.stopSignal, spec.stopWithin)
+    await stopChild(child, signal ?? spec.stopSignal, spec.stopWithin)
     dropIdentity(this.#identityFile(name))
     return child.signalCode ?? child.exitCode
   }
@@ -104,18 +105,6 @@ export class Fleet {
       clearTimeout(timer)
       this.#tasks.delete(child)
     }
-  }
-
-  /**
-   * Stops one process for good; its name is free again.
-   * @param {NodeJS.Signals} [signal] its own stop signal when left out; SIGKILL ends it as a machine
-   *   that fails would
-   */
-  async stop(name, signal) {
-    const { spec, child } = this.#services.get(name)
-    this.#services.delete(name)
-    await stopChild(child, signal ?? spec.stopSignal, spec.stopWithin)
-    dropIdentity(this.#identityFile(name))
   }
 
   /** The end of what a process wrote, for an error's sake. */
