@@ -6,6 +6,7 @@ import { useState } from 'react'
 import { useFieldArray, useForm, type FieldPath } from 'react-hook-form'
 import type { z } from 'zod'
 
+import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
 import { Field, FieldError } from '@/components/ui/field'
 import { IconButton } from '@/components/ui/icon-button'
@@ -66,20 +67,15 @@ export function LineForm(props: LineFormProps) {
   async function onSubmit() {
     setProblem(undefined)
     const values = form.getValues()
-    const answer = await (props.save as Save<unknown>)(brand, { ...values, ...own }).catch(
-      () => null,
-    )
-    if (answer?.ok) {
+    const answer = await reach((props.save as Save<unknown>)(brand, { ...values, ...own }))
+    if (answer.ok) {
       router.push(`/${brand}/lines/${answer.data.slug}${line ? '' : '/shades'}` as never)
       return
     }
-    for (const [name, messages] of Object.entries(answer?.fieldErrors ?? {})) {
+    for (const [name, messages] of Object.entries(answer.fieldErrors ?? {})) {
       setError(name as FieldPath<Values>, { message: messages[0] }, { shouldFocus: true })
     }
-    setProblem(
-      answer?.message ??
-        'Woadmap could not be reached. Nothing you typed is lost: check the connection and save again.',
-    )
+    setProblem(answer.message)
   }
 
   const error = (name: keyof Values) => errors[name]?.message

@@ -4,6 +4,7 @@ import { useRouter } from 'next/navigation'
 import { useEffect, useState } from 'react'
 import { useForm, useWatch } from 'react-hook-form'
 
+import { reach } from '@/components/reach'
 import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
 import { Notice } from '@/components/ui/notice'
@@ -89,21 +90,18 @@ export function PhotographDetailsForm({ brand, photograph, save }: PhotographDet
   async function send(input: UpdatePhotographInput) {
     setProblem(undefined)
     const values = { ...input, licence: input.licence ?? ('' as const) }
-    const answer = await save(brand, values).catch(() => null)
-    if (answer?.ok) {
+    const answer = await reach(save(brand, values))
+    if (answer.ok) {
       reset({ ...values, version: answer.data.version })
       toastDone('Details saved')
       return
     }
-    if (answer?.code === 'conflict') router.refresh()
+    if (answer.code === 'conflict') router.refresh()
     for (const name of DETAILS) {
-      const message = answer?.fieldErrors?.[name]?.[0]
+      const message = answer.fieldErrors?.[name]?.[0]
       if (message) setError(name, { message })
     }
-    setProblem(
-      answer?.message ??
-        'Woadmap could not be reached. Nothing you typed is lost: check the connection and save again.',
-    )
+    setProblem(answer.message)
   }
   const submit = handleSubmit(send)
 

@@ -4,12 +4,21 @@ import { Refusal } from '../lib/say.mjs'
 
 import { findDamage, settled } from './aftermath'
 import { DATABASE_FAULTS } from './database'
+import { EDITOR_FAULTS } from './editors'
 import { Missed, type Fault } from './fault'
+import { JOB_FAULTS } from './jobs'
 import { STORE_FAULTS } from './object-store'
+import { WEB_FAULTS } from './web'
 import { PATIENCE, seconds, World, type Ground } from './world'
 
 /** Every fault, in the order in which they are run. */
-export const FAULTS: readonly Fault[] = [...DATABASE_FAULTS, ...STORE_FAULTS]
+export const FAULTS: readonly Fault[] = [
+  ...DATABASE_FAULTS,
+  ...STORE_FAULTS,
+  ...JOB_FAULTS,
+  ...WEB_FAULTS,
+  ...EDITOR_FAULTS,
+]
 
 /** The faults of these names; all when none is named. @throws Refusal naming them when one is unknown */
 export function chooseFaults(names: readonly string[]): readonly Fault[] {
@@ -63,7 +72,12 @@ async function runFault(world: World, fault: Fault): Promise<{ seen: string; wro
   await look(() => world.mend())
   const recovered = await look(() => world.healthy())
   const slow = world.takeWaits().filter(({ ms }) => ms > PATIENCE)
-  for (const { what, ms } of slow) wrong.push(`${what} was answered after ${seconds(ms)}`)
+  if (slow.length > 0) {
+    const { what, ms } = slow.reduce((a, b) => (b.ms > a.ms ? b : a))
+    wrong.push(
+      `${slow.length} answers took more than ${seconds(PATIENCE)}, the slowest (${what}) ${seconds(ms)}`,
+    )
+  }
   if (recovered !== undefined) {
     wrong.push(...((await look(() => findDamage(world))) ?? []))
   }

@@ -1,9 +1,19 @@
 import { execFileSync } from 'node:child_process'
-import { mkdirSync } from 'node:fs'
+import { mkdirSync, writeFileSync } from 'node:fs'
 import { join } from 'node:path'
 
+import { settled } from './aftermath'
 import { must, type Fault } from './fault'
-import { announce, confirm, expectUpload, read, send, stateOf, upload } from './photographs'
+import {
+  announce,
+  confirm,
+  expectUpload,
+  read,
+  readingOf,
+  send,
+  stateOf,
+  upload,
+} from './photographs'
 import { seconds, until, type World } from './world'
 
 /** How many rows there are of a photograph. */
@@ -19,16 +29,17 @@ async function removeOriginal(world: World, id: string): Promise<void> {
   await deleteObjects([row!.object_key])
 }
 
-/** A disk of 64 KB in place of where the store keeps one kind of object; false when not allowed. */
+/** A full disk in place of where the store keeps one kind of object; false when not allowed. */
 function fillUp(world: World, kind: string): boolean {
   const { local, env } = world.ground
   const folder = join(local, 'uploads', env.S3_BUCKET!, kind)
   mkdirSync(folder, { recursive: true })
   try {
-    execFileSync('mount', ['-t', 'tmpfs', '-o', 'size=64k', 'tmpfs', folder], { stdio: 'pipe' })
+    execFileSync('mount', ['-t', 'tmpfs', '-o', 'size=4k', 'tmpfs', folder], { stdio: 'pipe' })
   } catch {
     return false
   }
+  writeFileSync(join(folder, 'full'), Buffer.alloc(4096))
   let mounted = true
   world.undo(() => {
     if (mounted) execFileSync('umount', ['-l', folder], { stdio: 'pipe' })
@@ -169,17 +180,20 @@ export const STORE_FAULTS: readonly Fault[] = [
       const bytes = await world.newPicture()
       const expected = await expectUpload(world, bytes)
       must(await send(expected, bytes), 'the store did not take the file')
+      const letGo = await world.hold('LOCK TABLE photographs IN SHARE MODE')
       const gone = new AbortController()
       const first = confirm(world, expected, gone.signal).then(
         () => 'answered',
         () => 'cut',
       )
+      await world.waitForLocked(1)
+      gone.abort()
+      must((await first) === 'cut', 'the answer came before it was cut')
+      await letGo()
       await until(
         'it is taken in',
         async () => (await stateOf(world, expected.photographId)) !== 'pending',
       )
-      gone.abort()
-      const heard = await first
       const { answer } = await confirm(world, expected)
       must(
         answer.kind === 'added' && answer.photographId === expected.photographId,
@@ -198,7 +212,7 @@ export const STORE_FAULTS: readonly Fault[] = [
       must((await rowsOf(world, never.photographId)) === 1, 'a fresh upload was swept')
       const { uploads } = await sweepUploads({ pending: 0 })
       must(uploads === 1, `${uploads} uploads were swept`)
-      return `first answer ${heard}; again the same, one job, read; the unconfirmed one was swept only when old`
+      return 'taken in unheard; again the same answer, one job, read; the unconfirmed one was swept only when old'
     },
   },
   {
@@ -225,12 +239,16 @@ export const STORE_FAULTS: readonly Fault[] = [
         return 'root may not mount here: the store refused in its place; told, then taken in'
 
       // The copies for the screen are written by the job.
-      fillUp(world, 'derivatives')
+      await settled(world)
+      await world.ground.fleet.stop('jobs')
       const second = await upload(world, await world.newPicture())
-      await until('the copies were tried', async () => {
-        const state = await stateOf(world, second)
-        return state === 'reading' || state === 'failed'
-      })
+      fillUp(world, 'derivatives')
+      await world.startJobs()
+      await until(
+        'the copies were tried',
+        async () => (await readingOf(world, second))?.state === 'retry',
+        30,
+      )
       await world.mend()
       await read(world, second, 60)
       return `a full tmpfs as its disk: upload ${taken ? 'cut' : 'refused'}, then “${answer.message}”; read once there was room`

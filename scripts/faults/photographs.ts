@@ -85,3 +85,12 @@ export async function stateOf(world: World, id: string): Promise<string | undefi
 export function read(world: World, id: string, within = 30): Promise<number> {
   return until('the photograph is read', async () => (await stateOf(world, id)) === 'ready', within)
 }
+
+/** The state and the tries of the job that reads a photograph. */
+export async function readingOf(world: World, id: string) {
+  const [row] = await world.query<{ state: string; retry_count: number }>(
+    `SELECT state, retry_count FROM pgboss.job WHERE name = 'read-photograph' AND data->>'photographId' = $1`,
+    [id],
+  )
+  return row
+}

@@ -6,7 +6,10 @@ import { PhotographDetailsForm } from '@/components/photographs/photograph-detai
 import type { PhotographView } from '@/lib/photographs/present'
 
 const refresh = vi.fn()
-vi.mock('next/navigation', () => ({ useRouter: () => ({ refresh }) }))
+vi.mock('next/navigation', async (original) => ({
+  ...(await original<typeof import('next/navigation')>()),
+  useRouter: () => ({ refresh }),
+}))
 beforeEach(() => refresh.mockClear())
 
 const photograph = {
