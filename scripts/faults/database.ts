@@ -1,9 +1,11 @@
 import { readdirSync, readFileSync } from 'node:fs'
 import { setTimeout as sleep } from 'node:timers/promises'
 
-import type { Fault } from './fault'
-import { must } from './fault'
-import { BRAND, LINE, seconds, until, type World } from './world'
+import type { Page } from '@playwright/test'
+
+import { must, type Fault } from './fault'
+import { openTab } from './tab'
+import { BRAND, FAULT_LINE, LINE, PATIENCE, seconds, until, type World } from './world'
 
 /** The answer to a save that must have failed in words that say what to do. */
 function mustBeTold(
@@ -22,6 +24,14 @@ async function mustSaveOnce(world: World, shade: ReturnType<World['newShade']>):
   must(again.ok, `saving again was answered ${JSON.stringify(again)}`)
   const rows = await world.countShades(shade)
   must(rows === 1, `saving again left ${rows} rows`)
+}
+
+/** Opens a page that cannot be read. @returns after how long that was said, in milliseconds */
+async function openInTab(tab: Page, path: string): Promise<number> {
+  const began = performance.now()
+  void tab.goto(path).catch(() => {})
+  await tab.getByRole('heading', { name: 'could not be read' }).waitFor()
+  return performance.now() - began
 }
 
 /** PostgreSQL's first process and all its children. */
@@ -148,6 +158,7 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       const pids = postgresProcesses(world)
       const thaw = () => signalAll(pids, 'SIGCONT')
       world.undo(thaw)
+      const tab = await openTab(world)
       // Connections at hand, as in the middle of a day.
       await Promise.all([1, 2, 3].map(() => world.owner.ask(`/${BRAND}/lines/${LINE}/edit`)))
       // One save is in the middle of its transaction, one has not begun.
@@ -158,6 +169,7 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       pids.splice(0, pids.length, ...postgresProcesses(world))
       signalAll(pids, 'SIGSTOP')
       const frozen = performance.now()
+      const opening = openInTab(tab, `/${BRAND}/lines/${LINE}/edit`)
       const shade = world.newShade()
       const [save, page, route, ready, alive] = await Promise.all([
         world.saveShade(shade),
@@ -168,7 +180,9 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       ])
       mustBeTold(save, 'PostgreSQL was frozen')
       mustBeTold(await saving, 'PostgreSQL froze in its midst')
-      must(page.status >= 500 || page.status === 200, `a page answered ${page.status}`)
+      must(page.status === 500, `a page answered ${page.status}`)
+      const shown = await opening
+      must(shown < PATIENCE, `a browser was told after ${seconds(shown)}`)
       must(route.status === 503, `a route answered ${route.status}`)
       must(ready.status === 503 && ready.ms < 1_500, `/readyz: ${ready.status} in ${ready.ms} ms`)
       must(alive.status === 200, `/livez answered ${alive.status}`)
@@ -177,7 +191,7 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       await letGo()
       const recovered = await world.healthy()
       for (const one of [shade, midway]) await mustSaveOnce(world, one)
-      const slowest = Math.max(page.ms, route.ms)
+      const slowest = Math.max(page.ms, route.ms, shown)
       return `answered within ${seconds(slowest)} (/readyz ${seconds(ready.ms)}), ready ${seconds(recovered)} after the thaw, saved once`
     },
   },
@@ -215,7 +229,7 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       const { id } = made.data
       const letGo = await world.hold('SELECT 1 FROM shades WHERE id = $1 FOR UPDATE', [id])
       const change = {
-        lineSlug: 'line-of-bad-days',
+        lineSlug: FAULT_LINE,
         shadeId: id,
         version: 0,
         name: 'After the lock',
@@ -225,7 +239,7 @@ export const DATABASE_FAULTS: readonly Fault[] = [
         [id],
       )) as [{ version: number }]
       const save = () =>
-        world.owner.act('updateShadeAction', `/${BRAND}/lines/line-of-bad-days/shades/new`, {
+        world.owner.act('updateShadeAction', `/${BRAND}/lines/${FAULT_LINE}/shades/new`, {
           ...change,
           version,
         })

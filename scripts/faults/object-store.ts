@@ -251,7 +251,7 @@ export const STORE_FAULTS: readonly Fault[] = [
       )
       await world.mend()
       await read(world, second, 60)
-      return `a full tmpfs as its disk: upload ${taken ? 'cut' : 'refused'}, then “${answer.message}”; read once there was room`
+      return `a full tmpfs as its disk: the upload ${taken ? 'lost after the store took it' : 'refused'}, then “${answer.message}”; read once there was room`
     },
   },
 ]

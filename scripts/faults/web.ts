@@ -10,13 +10,11 @@ import {
 import { join } from 'node:path'
 import { randomBytes, randomUUID } from 'node:crypto'
 
-import { chromium, type Page } from '@playwright/test'
-
-import accounts from '@/seeders/demo-accounts.json' with { type: 'json' }
-import { chromium as launch } from '@/tests/e2e/support/chromium'
+import type { Page } from '@playwright/test'
 
 import { must, type Fault } from './fault'
-import { BRAND, LINE, seconds, until, type World } from './world'
+import { openTab } from './tab'
+import { BRAND, FAULT_LINE, LINE, seconds, until, type World } from './world'
 
 const OPEN = 20
 
@@ -108,11 +106,7 @@ export const WEB_FAULTS: readonly Fault[] = [
     within: 120,
     async run(world) {
       const { fleet, dist } = world.ground
-      const browser = await chromium.launch(launch)
-      world.undo(() => browser.close())
-      const page = await browser.newPage({ baseURL: world.ground.env.APP_ORIGIN! })
-      page.setDefaultTimeout(15_000)
-      await signIn(page)
+      const page = await openTab(world)
       world.undo(async () => {
         await fleet.stop('web')
         await world.startWeb()
@@ -141,20 +135,11 @@ export const WEB_FAULTS: readonly Fault[] = [
   },
 ]
 
-async function signIn(page: Page): Promise<void> {
-  const owner = accounts.find(({ role, brand }) => role === 'owner' && brand === BRAND)!
-  await page.goto('/sign-in')
-  await page.getByLabel('E-mail').fill(owner.email)
-  await page.getByLabel('Password').fill(owner.password)
-  await page.getByRole('button', { name: 'Sign in' }).click()
-  await page.waitForURL(`**/${BRAND}`)
-}
-
 async function typeShade(page: Page, world: World) {
   const shade = world.newShade()
-  await page.goto(`/${BRAND}/lines/line-of-bad-days/shades/new`)
+  await page.goto(`/${BRAND}/lines/${FAULT_LINE}/shades/new`)
   await page.getByLabel('Number', { exact: true }).fill(shade.number)
-  await page.getByLabel('Name', { exact: true }).fill(shade.name)
+  await page.getByLabel(/^Name/).fill(shade.name)
   return shade
 }
 

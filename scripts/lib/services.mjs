@@ -69,6 +69,9 @@ export function productEnvironment(env, settings, mode) {
     MAIL_FROM: 'Woadmap <woadmap@localhost>',
     NEXTAUTH_SECRET: env.NEXTAUTH_SECRET ?? keepSecret(join(settings.local, 'auth-secret')),
     NEXTAUTH_URL: settings.appOrigin,
+    // The ids of the actions are made with it: a page opened before a new build can still save.
+    NEXT_SERVER_ACTIONS_ENCRYPTION_KEY:
+      env.NEXT_SERVER_ACTIONS_ENCRYPTION_KEY ?? keepActionsKey(settings.local),
     ...env,
     NODE_ENV: mode,
     HOST: settings.host,
@@ -79,6 +82,11 @@ export function productEnvironment(env, settings, mode) {
     // It says at every start that Node.js 20 will not be served for ever.
     AWS_SDK_JS_NODE_VERSION_SUPPORT_WARNING_DISABLED: 'true',
   }
+}
+
+// Next.js wants its key in plain base64.
+function keepActionsKey(local) {
+  return Buffer.from(keepSecret(join(local, 'actions-key')), 'base64url').toString('base64')
 }
 
 async function startDatabase(fleet, settings) {

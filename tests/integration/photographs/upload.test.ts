@@ -1,4 +1,6 @@
 import { randomUUID } from 'node:crypto'
+import { once } from 'node:events'
+import { createServer, type AddressInfo } from 'node:net'
 
 import sharp from 'sharp'
 import { beforeAll, beforeEach, describe, expect, it, vi } from 'vitest'
@@ -250,6 +252,24 @@ describe('when something goes wrong on the way', () => {
       expect(await Photograph.count({ where: { lineId: line.id } })).toBe(0)
     } finally {
       spy.mockRestore()
+    }
+  })
+
+  it('a store that takes the connection and says nothing is given up within 4 s', async () => {
+    const silent = createServer().listen(0, '127.0.0.1')
+    await once(silent, 'listening')
+    const { port } = silent.address() as AddressInfo
+    const spy = vi
+      .spyOn(environment, 'env')
+      .mockReturnValue({ ...environment.env(), S3_ENDPOINT: `http://127.0.0.1:${port}` })
+    try {
+      const began = performance.now()
+      const asking = requestUpload(actor, announce(line, await makePicture()))
+      await expect(asking).rejects.toThrow(UnavailableError)
+      expect(performance.now() - began).toBeLessThan(4_000)
+    } finally {
+      spy.mockRestore()
+      silent.close()
     }
   })
 

@@ -66,6 +66,30 @@ describe('stopping', () => {
     expect(beginningOf(pid)).toBeUndefined()
   })
 
+  test('one process only leaves the others, is no loss, and lets it be started anew', async () => {
+    await node('database', FOREVER, { restart: true })
+    await node('jobs', FOREVER, { restart: true })
+    const [database, jobs] = [fleet.pidOf('database')!, fleet.pidOf('jobs')!]
+    expect(await fleet.stop('jobs')).toBe('SIGTERM')
+    expect(beginningOf(jobs)).toBeUndefined()
+    expect(fleet.pidOf('jobs')).toBeUndefined()
+    await node('jobs', FOREVER)
+    expect(fleet.pidOf('jobs')).not.toBe(jobs)
+    expect(fleet.pidOf('database')).toBe(database)
+    expect(onLoss).not.toHaveBeenCalled()
+  })
+
+  test('one that is about to be started again keeps it stopped', async () => {
+    await node('jobs', FOREVER, { restart: true })
+    const pid = fleet.pidOf('jobs')!
+    process.kill(pid, 'SIGKILL')
+    await vi.waitFor(() => expect(fleet.pidOf('jobs')).toBeUndefined(), 5000)
+    await fleet.stop('jobs')
+    // Longer than it waits before it starts one again.
+    await sleep(800)
+    expect(pidOf('jobs')).toBeUndefined()
+  })
+
   test('nothing can be started any more', async () => {
     await fleet.stopAll()
     await expect(node('late', FOREVER)).rejects.toThrow('Stopped')
