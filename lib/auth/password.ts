@@ -8,9 +8,15 @@ const PARAMETERS = {
   parallelism: 1,
 } as const
 
+/**
+ * A password as it is judged and hashed: however a keyboard composes "é" or "ﬁ", it is the same.
+ * @source NIST SP 800-63B-4 § 3.1.1.2; Unicode Standard Annex 15, NFKC
+ */
+export const plainPassword = (password: string): string => password.normalize('NFKC')
+
 /** The argon2id hash of a password, in PHC string format. */
 export function hashPassword(password: string): Promise<string> {
-  return hash(password, PARAMETERS)
+  return hash(plainPassword(password), PARAMETERS)
 }
 
 /** Whether a hash was made with other parameters than today's, and so is to be made again. */
@@ -30,6 +36,10 @@ export async function verifyPassword(
   password: string,
 ): Promise<boolean> {
   decoy ??= hashPassword('nobody has this password')
-  const fits = await verify(passwordHash ?? (await decoy), password)
+  const against = passwordHash ?? (await decoy)
+  const plain = plainPassword(password)
+  // Hashes made before passwords were composed alike hold what was typed.
+  const fits =
+    (await verify(against, plain)) || (plain !== password && (await verify(against, password)))
   return fits && passwordHash !== undefined
 }

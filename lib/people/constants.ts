@@ -10,3 +10,6 @@ export const ROLE_WORDS: Record<Role, string> = {
   designer: 'Designer',
   dyer: 'Dye house',
 }
+
+/** How long a password may be, in code points. @source NIST SP 800-63B-4 § 3.1.1.2 */
+export const PASSWORD_LENGTH = { min: 12, max: 256 } as const

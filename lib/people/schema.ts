@@ -7,7 +7,7 @@ export const signInSchema = z.object({
     .trim()
     .toLowerCase()
     .max(254),
-  password: z.string().min(1, 'Write your password.').max(256),
+  password: z.string().min(1, 'Write your password.').max(1024),
   /** A one-time or a recovery code. */
   code: z.string().trim().max(40).optional(),
 })
