@@ -11,13 +11,7 @@ const ENVIRONMENT = 'Only lib/env.ts reads the environment: use env() of @/lib/e
 const IMPURE =
   'lib/color is pure: the same input gives the same output, on any machine, at any time.'
 
-const SHIPPED = [
-  ...governed,
-  'worker.ts',
-  'seeders/**/*.ts',
-  'migrations/**/*.ts',
-  'scripts/**/*.ts',
-]
+const SHIPPED = [...governed, 'worker.ts', 'seeders/**/*.ts', 'migrations/**/*.ts']
 const HTML = 'What people see is written as elements: React escapes it, a string of HTML does not.'
 
 export default defineConfig([

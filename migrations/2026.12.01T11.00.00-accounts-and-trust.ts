@@ -1,4 +1,3 @@
-import { tenant } from './tenant'
 import type { Migrate } from './umzug'
 
 /*
@@ -11,6 +10,15 @@ CREATE FUNCTION app_brand() RETURNS uuid LANGUAGE sql STABLE
   RETURN nullif(current_setting('app.brand', true), '')::uuid;
 CREATE FUNCTION app_person() RETURNS uuid LANGUAGE sql STABLE
   RETURN nullif(current_setting('app.person', true), '')::uuid;
+
+-- Makes a table with a brand_id a tenant's: whoever is held by row-level security sees and writes
+-- the rows of the brand that app.brand names, and none when it names none.
+CREATE FUNCTION make_tenant(one regclass) RETURNS void LANGUAGE plpgsql AS $$
+BEGIN
+  EXECUTE format('ALTER TABLE %s ENABLE ROW LEVEL SECURITY', one);
+  EXECUTE format('CREATE POLICY of_the_brand ON %s
+    USING (brand_id = app_brand()) WITH CHECK (brand_id = app_brand())', one);
+END $$;
 `
 
 const TABLES = /* sql */ `
@@ -108,19 +116,11 @@ CREATE TABLE rate_limits (
 );
 `
 
-const POLICIES = [
-  'lines',
-  'shades',
-  'photographs',
-  'readings',
-  'combinations',
-  'combination_places',
-  'invitations',
-  'activities',
-]
-  .map(tenant)
-  .concat(
-    /* sql */ `
+const POLICIES = /* sql */ `
+SELECT make_tenant(one) FROM unnest(ARRAY[
+  'lines', 'shades', 'photographs', 'readings', 'combinations', 'combination_places',
+  'invitations', 'activities'
+]::regclass[]) AS one;
 ALTER TABLE memberships ENABLE ROW LEVEL SECURITY;
 CREATE POLICY of_the_brand_or_person ON memberships
   USING (brand_id = app_brand() OR person_id = app_person())
@@ -129,9 +129,7 @@ ALTER TABLE brands ENABLE ROW LEVEL SECURITY;
 CREATE POLICY of_the_brand_or_person ON brands
   USING (id = app_brand() OR id IN (SELECT brand_id FROM memberships WHERE person_id = app_person()))
   WITH CHECK (id = app_brand());
-`,
-  )
-  .join('\n')
+`
 
 const DOWN = /* sql */ `
 DROP TABLE rate_limits, activities, letters, invitations, recovery_codes, account_tokens;
@@ -146,6 +144,7 @@ DO $$ DECLARE one record; BEGIN
 END $$;
 ALTER TABLE brands DROP COLUMN second_factor_required;
 DROP FUNCTION brand_of_invitation;
+DROP FUNCTION make_tenant;
 DROP FUNCTION app_brand;
 DROP FUNCTION app_person;
 `

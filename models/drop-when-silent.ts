@@ -9,11 +9,11 @@ interface PgClient {
  */
 export function dropWhenSilent(connection: unknown): void {
   const client = connection as PgClient
-  const query = client.query.bind(client)
+  const ask = client.query.bind(client)
   client.query = (...args) => {
     const done = args.at(-1)
-    if (typeof done !== 'function') return query(...args)
-    return query(...args.slice(0, -1), (error: Error | null, result: unknown) => {
+    if (typeof done !== 'function') return ask(...args)
+    return ask(...args.slice(0, -1), (error: Error | null, result: unknown) => {
       if (error?.message === 'Query read timeout') client.connection.stream.destroy()
       done(error, result)
     })
