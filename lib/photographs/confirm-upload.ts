@@ -9,6 +9,7 @@ import { deleteObjects, getObject, headObject } from '@/lib/storage/objects'
 import { inTransaction, Photograph } from '@/models'
 
 import { decodePhotograph, PhotographError, sniffPhotograph } from './decode'
+import { refuseHiddenMarkup } from './hidden-markup'
 import { canUploadPhotographs } from './policy'
 import { findSameFile, uuidOrNone } from './queries'
 import { readColors } from './read-colors'
@@ -106,6 +107,7 @@ async function requireWhatWasAnnounced(photograph: Photograph): Promise<string> 
   if (!(UPLOAD_MIMES as readonly string[]).includes(mime)) {
     throw new PhotographError('format', `Photographs are taken as ${FORMATS_TAKEN}.`)
   }
+  refuseHiddenMarkup(bytes)
   readColors((await decodePhotograph(bytes)).image)
   return mime
 }

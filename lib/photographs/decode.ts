@@ -26,6 +26,7 @@ export type PhotographFault =
   | 'format'
   | 'not-a-picture'
   | 'damaged'
+  | 'hidden'
   | 'nothing-visible'
 
 /** A file that is no photograph we can read; the message is for the person who brought it. */

@@ -23,6 +23,13 @@ export const UPLOAD_MIMES = [
 /** The formats taken, as said to people. */
 export const FORMATS_TAKEN = 'JPEG, PNG, WebP, AVIF or TIFF'
 
+/**
+ * An ending, anywhere in a file's name, of what a browser or a computer opens as something that
+ * runs: no photograph needs one.
+ */
+export const ACTIVE_ENDING =
+  /\.(?:x?html?|xht|mht(?:ml)?|svgz?|xml|xsl|[mc]?js|php\d?|phtml|phar|aspx?|jspx?|cgi|sh|exe|dll|msi|bat|cmd|scr|ps1|vbs|jar|hta|swf|pdf)(?=[.\s]|$)/i
+
 /** Largest file: 40 MB. */
 export const MAX_BYTES = 40 * 1000 * 1000
 /** Largest picture: 120 megapixels. */

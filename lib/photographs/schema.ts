@@ -7,7 +7,7 @@ import {
   GALLERY_STATES,
   GALLERY_MISSING,
 } from './constants'
-import { FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from './formats'
+import { ACTIVE_ENDING, FORMATS_TAKEN, MAX_BYTES, UPLOAD_MIMES } from './formats'
 import { readWishes } from './wishes'
 
 const text = (most: number, what: string) =>
@@ -22,7 +22,14 @@ const link = (what: string) =>
 /** What a browser tells of a file before it sends it. */
 export const requestUploadSchema = z.strictObject({
   lineSlug: z.string().max(100),
-  fileName: z.string().min(1).max(PHOTOGRAPH_LIMITS.fileName, 'The file’s name is too long.'),
+  fileName: z
+    .string()
+    .min(1)
+    .max(PHOTOGRAPH_LIMITS.fileName, 'The file’s name is too long.')
+    .refine(
+      (name) => !ACTIVE_ENDING.test(name),
+      'The file’s name ends like a page or a program. Name it as a photograph, like hillside.jpg.',
+    ),
   contentType: z.enum(UPLOAD_MIMES, `Photographs are taken as ${FORMATS_TAKEN}.`),
   byteLength: z
     .number()

@@ -147,3 +147,26 @@ test('the dropper moves by keyboard and offers shades to lock', async ({ page })
   await page.getByRole('button', { name: 'Clear wishes' }).click()
   await expect(page).not.toHaveURL(/lock=/)
 })
+
+test('a shade is added by hand, by its colour on screen or by a reading', async ({ page }) => {
+  await signIn(page, 'designer')
+  for (const kind of ['hex', 'lab']) {
+    await page.goto(`${LINE}/shades/new`)
+    const number = `H-${kind}`
+    await page.getByLabel('Number', { exact: true }).fill(number)
+    // What was begun the other way does not come along.
+    await page.getByLabel('L*').fill('45')
+    if (kind === 'hex') {
+      await page.getByText('Screen colour (hex)').click()
+      await page.getByRole('textbox', { name: 'Hex' }).fill('#7a8b4f')
+    } else {
+      await page.getByLabel('a*').fill('-12')
+      await page.getByLabel('b*').fill('20,5')
+      await page.getByLabel('Read under').selectOption('D65/10')
+    }
+    await page.getByRole('button', { name: 'Add shade', exact: true }).click()
+    await expect(page).toHaveURL(/\/shades$/)
+    await page.goto(`${LINE}/shades?view=table&q=${number}`)
+    await expect(page.getByRole('link', { name: number }).first()).toBeVisible()
+  }
+})
