@@ -1,3 +1,4 @@
+import { cpus, loadavg } from 'node:os'
 import { setTimeout as sleep } from 'node:timers/promises'
 
 import { Refusal } from '../lib/say.mjs'
@@ -74,8 +75,9 @@ async function runFault(world: World, fault: Fault): Promise<{ seen: string; wro
   const slow = world.takeWaits().filter(({ ms }) => ms > PATIENCE)
   if (slow.length > 0) {
     const { what, ms } = slow.reduce((a, b) => (b.ms > a.ms ? b : a))
+    const load = loadavg()[0]!.toFixed(1)
     wrong.push(
-      `${slow.length} answers took more than ${seconds(PATIENCE)}, the slowest (${what}) ${seconds(ms)}`,
+      `${slow.length} answers took more than ${seconds(PATIENCE)}, the slowest (${what}) ${seconds(ms)}; the load of this machine is ${load} on ${cpus().length} processors`,
     )
   }
   if (recovered !== undefined) {

@@ -9,6 +9,7 @@ import {
 } from 'node:fs'
 import { join } from 'node:path'
 import { randomBytes, randomUUID } from 'node:crypto'
+import { setTimeout as sleep } from 'node:timers/promises'
 
 import type { Page } from '@playwright/test'
 
@@ -38,6 +39,12 @@ export const WEB_FAULTS: readonly Fault[] = [
       await world.waitForLocked(8)
       const began = performance.now()
       const stopping = fleet.stop('web')
+      await sleep(300)
+      const late = await world.owner.ask('/livez').then(
+        ({ status }) => `answered ${status}`,
+        () => 'refused',
+      )
+      must(late === 'refused', `a visitor who came after that was ${late}`)
       await letGo()
       const how = await stopping
       const took = performance.now() - began
@@ -140,6 +147,14 @@ async function typeShade(page: Page, world: World) {
   await page.goto(`/${BRAND}/lines/${FAULT_LINE}/shades/new`)
   await page.getByLabel('Number', { exact: true }).fill(shade.number)
   await page.getByLabel(/^Name/).fill(shade.name)
+  for (const [label, value] of [
+    [/^L\*/, '55'],
+    [/^a\*/, '-16'],
+    [/^b\*/, '30'],
+  ] as const) {
+    await page.getByLabel(label).fill(value)
+  }
+  await page.getByLabel('Read under').selectOption('D65/10')
   return shade
 }
 
