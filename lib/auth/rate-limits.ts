@@ -55,10 +55,10 @@ function inWords(seconds: number): string {
   return `${Math.ceil(seconds / 60)} minutes`
 }
 
-/** Counts one. @throws TooManyError when the limit was reached before */
-export async function spend(name: RateLimit, key: string, what = 'That'): Promise<void> {
+/** Counts one, or `count` at once. @throws TooManyError when the limit does not hold them */
+export async function spend(name: RateLimit, key: string, what = 'That', count = 1): Promise<void> {
   try {
-    await limiterOf(name).consume(keyOf(key))
+    await limiterOf(name).consume(keyOf(key), count)
   } catch (error) {
     if (!(error instanceof RateLimiterRes)) throw error
     const seconds = Math.max(1, Math.ceil(error.msBeforeNext / 1000))
@@ -69,9 +69,9 @@ export async function spend(name: RateLimit, key: string, what = 'That'): Promis
   }
 }
 
-/** Takes one count back: what was spent turned out to be all right. */
-export async function refund(name: RateLimit, key: string): Promise<void> {
-  await limiterOf(name).reward(keyOf(key))
+/** Takes one count, or `count`, back: what was spent turned out to be all right. */
+export async function refund(name: RateLimit, key: string, count = 1): Promise<void> {
+  await limiterOf(name).reward(keyOf(key), count)
 }
 
 /** Forgets all counts of a key. */
