@@ -13,6 +13,7 @@ import { Reading } from './Reading'
 import { RecoveryCode } from './RecoveryCode'
 import { Session } from './Session'
 import { Shade } from './Shade'
+import { SignUp } from './SignUp'
 
 Membership.belongsTo(Brand, { as: 'brand', foreignKey: 'brandId' })
 Membership.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
@@ -49,7 +50,8 @@ export {
   RecoveryCode,
   Session,
   Shade,
+  SignUp,
 }
 export { createOnce } from './create-once'
-export { inTransaction, sequelize } from './sequelize'
+export { inTransaction, sequelize, speakFor } from './sequelize'
 export { updateVersioned } from './update-versioned'

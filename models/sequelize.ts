@@ -3,7 +3,7 @@ import { Sequelize, type Transaction } from 'sequelize'
 import { building, env, serving } from '@/lib/env'
 
 import { dropWhenSilent } from './drop-when-silent'
-import { currentScope } from './scope'
+import { currentScope, type Scope } from './scope'
 
 const shared = globalThis as typeof globalThis & { woadmapSequelize?: Sequelize }
 
@@ -80,6 +80,20 @@ async function setScope(sequelize: Sequelize, connection: ScopedConnection): Pro
 
 interface WithManager {
   connectionManager: { destroyConnection(connection: unknown): Promise<void> }
+}
+
+/**
+ * Has an open transaction speak for somebody else until it ends or is told again: what belongs to
+ * several brands is written whole or not at all.
+ */
+export async function speakFor(
+  { brandId = '', personId = '' }: Scope,
+  transaction: Transaction,
+): Promise<void> {
+  await sequelize().query(
+    "SELECT set_config('app.brand', $1, true), set_config('app.person', $2, true)",
+    { bind: [brandId, personId], transaction },
+  )
 }
 
 /** Runs `work` in one transaction: committed when it returns, rolled back when it throws. */

@@ -16,7 +16,10 @@ export const RATE_LIMITS = {
   /** Letters that reset a password, by e-mail address and by network address. */
   'reset-email': { points: 3, duration: HOUR },
   'reset-address': { points: 10, duration: HOUR },
+  /** Letters that confirm an address, by the address and by the network address or person. */
+  'sign-up-email': { points: 3, duration: HOUR },
   'sign-up-address': { points: 10, duration: HOUR },
+  'email-change': { points: 5, duration: HOUR },
   /** By brand. */
   invitation: { points: 30, duration: HOUR },
   upload: { points: 600, duration: HOUR },

@@ -3,6 +3,7 @@ import { TooManyError } from '@/lib/errors'
 import { inTransaction, Membership, Person, Session } from '@/models'
 import { withinScope } from '@/models/scope'
 
+import { inAnswerTime } from './answer-time'
 import { hashPassword, isOutdated, verifyPassword } from './password'
 import { forgive, refund, spend } from './rate-limits'
 import { takeRecoveryCode, takeTotp } from './second-factor'
@@ -41,11 +42,14 @@ export async function signIn(attempt: SignInAttempt): Promise<SignInOutcome> {
     if (error instanceof TooManyError) return { kind: 'too-many', retryAfter: error.retryAfter }
     throw error
   }
-  const person = await Person.unscoped().findOne({ where: { email } })
-  if (!(await verifyPassword(person?.passwordHash, password)) || !person) {
-    if (person) await tellBrands(person.id, 'session.refused')
-    return { kind: 'refused' }
-  }
+  const person = await inAnswerTime(async () => {
+    const found = await Person.unscoped().findOne({ where: { email } })
+    if (found && (await verifyPassword(found.passwordHash, password))) return found
+    if (found) await tellBrands(found.id, 'session.refused')
+    else await verifyPassword(undefined, password)
+    return null
+  })
+  if (!person) return { kind: 'refused' }
   if (person.totpConfirmedAt) {
     if (!code) {
       // The account's wrong codes still count: asking for a code takes back only itself.

@@ -1,5 +1,5 @@
 import { sendLetter, sendLetters } from '@/lib/mail/send-letters'
-import { sweepAccounts } from '@/lib/people/sweep'
+import { sweepPeople } from '@/lib/people/sweep'
 import { copyPhotograph } from '@/lib/photographs/read-photograph'
 import { sweepUploads } from '@/lib/photographs/sweep'
 
@@ -17,14 +17,14 @@ export const HANDLERS: { [Name in JobName]: JobHandler<Name> } = {
   'read-photograph': readPhotographJob,
   'copy-photograph': ({ photographId }) => copyPhotograph(photographId),
   'sweep-uploads': () => sweepUploads(),
-  'sweep-accounts': () => sweepAccounts(),
   'send-letter': ({ letterId }) => sendLetter(letterId),
   'send-letters': () => sendLetters(),
+  'sweep-people': () => sweepPeople(),
 }
 
 /** When the jobs that nobody asks for are done. @see crontab(5) */
 export const SCHEDULES: Partial<Record<JobName, string>> = {
   'sweep-uploads': '*/5 * * * *',
-  'sweep-accounts': '17 * * * *',
   'send-letters': '* * * * *',
+  'sweep-people': '17 * * * *',
 }

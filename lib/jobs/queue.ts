@@ -11,9 +11,9 @@ export interface JobData {
   'read-photograph': { photographId: string }
   'copy-photograph': { photographId: string }
   'sweep-uploads': Record<string, never>
-  'sweep-accounts': Record<string, never>
   'send-letter': { letterId: string }
   'send-letters': Record<string, never>
+  'sweep-people': Record<string, never>
 }
 /** One of the queues. */
 export type JobName = keyof JobData
@@ -29,9 +29,9 @@ export const QUEUES: Record<
   'read-photograph': { retryLimit: 4, retryDelay: 2, expireInSeconds: 90 },
   'copy-photograph': { retryLimit: 4, retryDelay: 5, expireInSeconds: 120 },
   'sweep-uploads': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
-  'sweep-accounts': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
   'send-letter': { retryLimit: 3, retryDelay: 5, expireInSeconds: 60 },
   'send-letters': { retryLimit: 0, retryDelay: 0, expireInSeconds: 300 },
+  'sweep-people': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
 }
 
 // Never started and never connected: it only words the insert, which runs in our transaction.

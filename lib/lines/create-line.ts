@@ -6,15 +6,15 @@ import { canCreateLine } from './policy'
 import { LINE_LIMITS } from './constants'
 import type { CreateLineInput } from './schema'
 
-/** "Heronsway DK" → "heronsway-dk"; "line" when nothing of the name can stand in an address. */
-export function slugify(name: string): string {
+/** "Heronsway DK" → "heronsway-dk"; `otherwise` when nothing of it can stand in an address. */
+export function slugify(name: string, otherwise = 'line'): string {
   const slug = name
     .normalize('NFKD')
     .replace(/[\u0300-\u036f]/g, '')
     .toLowerCase()
     .replace(/[^a-z0-9]+/g, '-')
     .replace(/^-+|-+$/g, '')
-  return slug || 'line'
+  return slug || otherwise
 }
 
 /**

@@ -1,31 +1,39 @@
 import { Op, QueryTypes } from 'sequelize'
 
 import { SESSION_IDLE } from '@/lib/auth/sessions'
-import { AccountToken, Letter, sequelize, Session } from '@/models'
+import { AccountToken, Letter, sequelize, Session, SignUp } from '@/models'
 
-const DAY = 24 * 60 * 60 * 1000
-/** How long a letter that is done with is remembered, in milliseconds. */
-const LETTERS_KEPT = 30 * DAY
+const DAY = 24 * 60 * 60_000
+/** How long it is known that a letter was sent, in milliseconds. */
+const LETTER_KEPT = 30 * DAY
+
+/** What a sweep removed. */
+export interface PeopleSweepResult {
+  signUps: number
+  links: number
+  sessions: number
+  letters: number
+  limits: number
+}
 
 /**
- * The work of the job `sweep-accounts`: removes sessions that are over, tokens that prove nothing
- * any more, letters long sent, and counts of limits that have run out.
+ * The work of the job `sweep-people`: removes what is past its time and holds personal data, and
+ * counts of limits that have run out.
  */
-export async function sweepAccounts(now = Date.now()): Promise<Record<string, number>> {
-  const before = (time: number) => ({ [Op.lt]: new Date(time) })
-  const sessions = await Session.destroy({
-    where: { [Op.or]: { expiresAt: before(now), lastSeenAt: before(now - SESSION_IDLE) } },
-  })
-  const tokens = await AccountToken.destroy({ where: { expiresAt: before(now - DAY) } })
-  const letters = await Letter.destroy({
-    where: {
-      createdAt: before(now - LETTERS_KEPT),
-      [Op.or]: { sentAt: { [Op.ne]: null }, failedAt: { [Op.ne]: null } },
-    },
-  })
-  const limits = await sequelize().query('DELETE FROM rate_limits WHERE expire < $now', {
-    bind: { now },
-    type: QueryTypes.BULKDELETE,
-  })
-  return { sessions, tokens, letters, limits }
+export async function sweepPeople(now = Date.now()): Promise<PeopleSweepResult> {
+  const before = (age: number) => ({ [Op.lt]: new Date(now - age) })
+  return {
+    signUps: await SignUp.destroy({ where: { expiresAt: before(0) } }),
+    links: await AccountToken.destroy({ where: { expiresAt: before(DAY) } }),
+    sessions: await Session.destroy({
+      where: { [Op.or]: [{ expiresAt: before(0) }, { lastSeenAt: before(SESSION_IDLE) }] },
+    }),
+    letters: await Letter.destroy({
+      where: { [Op.or]: [{ sentAt: before(LETTER_KEPT) }, { failedAt: before(LETTER_KEPT) }] },
+    }),
+    limits: await sequelize().query('DELETE FROM rate_limits WHERE expire < $now', {
+      bind: { now },
+      type: QueryTypes.BULKDELETE,
+    }),
+  }
 }

@@ -16,6 +16,9 @@ interface Started {
 /** What is asked for all day long and says nothing. */
 const QUIET = /^\/(_next\/static|livez|readyz|icon|favicon)/
 
+/** The token of a link in a letter: whoever has it may use it, so the log does not keep it. */
+const TOKEN = /[\w-]{43}/g
+
 /**
  * Gives every request its id and the address it truly came from, over whatever headers of those
  * names it carries, before anything else sees it; and logs a line when it has been answered. By
@@ -30,7 +33,7 @@ export function watchRequests(): void {
     request.headers[PEER_HEADER] = socket.remoteAddress ?? ''
     response.setHeader(REQUEST_ID_HEADER, requestId)
     const { method, url = '' } = request
-    const path = url.split('?')[0]!
+    const path = url.split('?')[0]!.replace(TOKEN, '…')
     if (QUIET.test(path)) return
     response.once('close', () => {
       const ms = Math.round(performance.now() - started)
