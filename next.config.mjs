@@ -37,6 +37,11 @@ export default {
   headers: () => [
     { source: '/:path*', headers: listed(EVERYWHERE) },
     { source: '/:root(api|_next|livez|readyz)/:path*', headers: listed(NO_PAGE) },
+    // The address of these pages holds a token: no other page is to learn it.
+    {
+      source: '/:page(reset-password|confirm|confirm-email|invitations)/:token',
+      headers: listed({ 'Referrer-Policy': 'no-referrer' }),
+    },
   ],
   experimental: {
     // A CSV of 5,000 shades travels through a server action; photographs never do.

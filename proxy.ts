@@ -4,7 +4,8 @@ import { isSessionCookie } from '@/lib/auth/cookies'
 import { makePageHeaders, POLICY } from '@/lib/server/page-headers'
 
 /** Pages that open signed out, and what is no page of the studio. */
-const OPEN = /^\/($|sign-in$|icon|favicon)|\./
+const OPEN =
+  /^\/($|sign-in$|sign-up$|forgotten-password$|(reset-password|confirm|confirm-email|invitations)\/|icon|favicon)|\./
 
 /**
  * Gives every page its headers, and sends a browser without a session cookie to the sign-in page,

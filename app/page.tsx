@@ -19,7 +19,12 @@ export default async function FrontDoor() {
         <EmptyState
           heading="h1"
           title="You belong to no brand yet"
-          action={<SignOutButton signOut={signOutAction} />}
+          action={
+            <>
+              <LinkButton href="/account">Your account</LinkButton>
+              <SignOutButton signOut={signOutAction} />
+            </>
+          }
         >
           <p>Once a brand’s owner has taken you in, its lines stand here.</p>
         </EmptyState>
@@ -33,10 +38,11 @@ export default async function FrontDoor() {
         Woadmap keeps a yarn line together: its shades as measured, the photographs it grew from,
         and the five shades that are each photograph, proved best by CIEDE2000.
       </p>
-      <div className="mt-8">
+      <div className="mt-8 flex flex-wrap gap-3">
         <LinkButton href="/sign-in" variant="primary">
           Sign in
         </LinkButton>
+        <LinkButton href="/sign-up">Sign up with your brand</LinkButton>
       </div>
     </PlainPage>
   )

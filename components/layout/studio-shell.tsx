@@ -87,7 +87,12 @@ function Contents({
       ) : null}
       <div className="mt-auto flex flex-wrap items-center justify-between gap-x-3 pt-8 text-sm">
         <p className="min-w-0 text-ink-soft">
-          {person.name}
+          <AppLink
+            href="/account"
+            className="inline-flex min-h-8 items-center underline decoration-rule underline-offset-[3px] hover:decoration-ink pointer-coarse:min-h-11"
+          >
+            {person.name}
+          </AppLink>
           {person.role ? <span className="block text-ink-faint">{person.role}</span> : null}
         </p>
         {signOut}

@@ -11,6 +11,8 @@ import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
 import type { SignInInput } from '@/lib/people/schema'
 
+import { PasswordField } from './password-field'
+
 /** Why somebody was not let in. */
 function inWords(error: string | null | undefined): string {
   const [kind, seconds] = error?.split(':') ?? []
@@ -57,9 +59,7 @@ export function SignInForm({ next }: { next: string }) {
       <Field label="E-mail" required error={formState.errors.email?.message}>
         <Input type="email" autoComplete="username" {...register('email')} />
       </Field>
-      <Field label="Password" required error={formState.errors.password?.message}>
-        <Input type="password" autoComplete="current-password" {...register('password')} />
-      </Field>
+      <PasswordField error={formState.errors.password?.message} {...register('password')} />
       {asksForCode ? (
         <Field
           label="Code"

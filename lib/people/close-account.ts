@@ -3,7 +3,16 @@ import { QueryTypes } from 'sequelize'
 import type { SignedInPerson } from '@/lib/auth/sessions'
 import { ConflictError, InvalidError } from '@/lib/errors'
 import { postLetter } from '@/lib/mail/post-letter'
-import { Brand, inTransaction, Membership, Person, sequelize, SignUp, speakFor } from '@/models'
+import {
+  Brand,
+  Combination,
+  inTransaction,
+  Membership,
+  Person,
+  sequelize,
+  SignUp,
+  speakFor,
+} from '@/models'
 
 import { accountClosedLetter } from './letters'
 import { fateOf } from './queries'
@@ -53,6 +62,8 @@ export async function closeAccount(
     await recordInBrands(id, { action: 'person.account-closed' }, transaction)
     for (const { brandId } of removed) {
       await speakFor({ brandId, personId: id }, transaction)
+      // A shade that a combination holds cannot go before it.
+      await Combination.destroy({ where: { brandId }, force: true, transaction })
       await Brand.destroy({ where: { id: brandId }, transaction })
     }
     await speakFor({ personId: id }, transaction)

@@ -1,0 +1,5 @@
+import { DeadLink } from '@/components/people/dead-link'
+
+export default function LinkNotFound() {
+  return <DeadLink href="/account" label="Go to your account" />
+}
