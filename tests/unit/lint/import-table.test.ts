@@ -1,6 +1,8 @@
-import { describe, expect, test } from 'vitest'
+import { beforeAll, describe, expect, test } from 'vitest'
 
-import { broken } from './broken'
+import { broken, FIRST_LOOK } from './broken'
+
+beforeAll(() => broken('worker.ts', ''), FIRST_LOOK)
 
 const value = (source: string) => `import * as it from '${source}'; void it`
 const type = (source: string) =>

@@ -1,6 +1,8 @@
-import { describe, expect, test } from 'vitest'
+import { beforeAll, describe, expect, test } from 'vitest'
 
-import { broken } from './broken'
+import { broken, FIRST_LOOK } from './broken'
+
+beforeAll(() => broken('worker.ts', ''), FIRST_LOOK)
 
 const QUERIES = 'lib/shades/another-query.ts'
 const COMPONENT = 'components/shades/another.tsx'
