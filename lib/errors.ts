@@ -55,6 +55,15 @@ export class ForbiddenError extends AppError {
   }
 }
 
+/** The brand asks its members for a second factor, and this one has none. */
+export class SecondFactorNeededError extends ForbiddenError {
+  constructor(brandName: string) {
+    super(
+      `${brandName} asks everybody for a second factor, and you have none yet. Set one up at /account/second-factor, then do this again; what you typed is still here.`,
+    )
+  }
+}
+
 /** No such row for this actor: absent, deleted, or another brand's. */
 export class NotFoundError extends AppError {
   constructor(message = 'This does not exist, or is not yours to see.') {

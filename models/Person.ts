@@ -15,8 +15,10 @@ export class Person extends Model<InferAttributes<Person>, InferCreationAttribut
   declare email: string
   declare name: string
   declare passwordHash: string
-  /** Sealed; set and confirmed once the second factor is in use. */
+  /** Sealed; there while the second factor is in use. */
   declare totpSecret: CreationOptional<string | null>
+  /** Sealed; begun and not yet confirmed, perhaps to take the other's place. */
+  declare totpPending: CreationOptional<string | null>
   declare totpConfirmedAt: CreationOptional<Date | null>
   /** The time step of the last code taken, so that none is taken twice. */
   declare totpLastStep: CreationOptional<number>
@@ -31,6 +33,7 @@ Person.init(
     name: { type: DataTypes.TEXT, allowNull: false },
     passwordHash: { type: DataTypes.TEXT, allowNull: false },
     totpSecret: DataTypes.TEXT,
+    totpPending: DataTypes.TEXT,
     totpConfirmedAt: DataTypes.DATE,
     totpLastStep: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 0 },
     createdAt: DataTypes.DATE,
@@ -40,6 +43,6 @@ Person.init(
     sequelize: sequelize(),
     modelName: 'Person',
     tableName: 'people',
-    defaultScope: { attributes: { exclude: ['passwordHash', 'totpSecret'] } },
+    defaultScope: { attributes: { exclude: ['passwordHash', 'totpSecret', 'totpPending'] } },
   },
 )

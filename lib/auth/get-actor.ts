@@ -22,6 +22,7 @@ export const getPerson = cache(async (): Promise<SignedInPerson | null> => {
  * The signed-in person as an actor in the brand of the address.
  * @throws UnauthenticatedError when nobody is signed in
  * @throws NotFoundError when the brand does not exist or the person is not one of it
+ * @throws SecondFactorNeededError when the brand requires a second factor and they have none
  */
 export async function getActor(brandSlug: string): Promise<Actor> {
   const person = await getPerson()

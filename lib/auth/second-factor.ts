@@ -1,80 +1,86 @@
 import { randomInt } from 'node:crypto'
 
-import { Secret, TOTP } from 'otpauth'
 import { Op, type Transaction } from 'sequelize'
 
 import { Person, RecoveryCode } from '@/models'
 
-import { digest, seal, unseal } from './seal'
+import { keyedDigest, seal, unseal } from './seal'
+import { authenticatorAddress, newSecret, plainCode, stepOfTotp } from './totp'
 
-/** Seconds a one-time code is good for. @source RFC 6238 § 5.2 */
-const PERIOD = 30
-/** Steps before and after this one that are still taken, for clocks that differ. */
-const WINDOW = 1
 /** Recovery codes handed out at once. */
 export const RECOVERY_CODES = 10
+/** Letters and digits of a recovery code, in two halves. */
+const CODE_LENGTH = 10
 /** Without those that are mistaken for one another. */
 const ALPHABET = '23456789abcdefghjkmnpqrstuvwxyz'
 
-const totpOf = (secret: string, label = '') =>
-  new TOTP({ issuer: 'Woadmap', label, secret, period: PERIOD })
-
-/** A new secret for an authenticator: sealed to be kept, and as the address that sets one up. */
+/**
+ * A new secret for an authenticator: sealed to be kept, in base32 to be typed, and as the address
+ * that sets one up.
+ */
 export function makeTotpSecret(label: string): { sealed: string; secret: string; uri: string } {
-  const secret = new Secret({ size: 20 }).base32
-  return { sealed: seal(secret, 'totp'), secret, uri: totpOf(secret, label).toString() }
+  const secret = newSecret()
+  return { sealed: seal(secret, 'totp'), secret, uri: authenticatorAddress(secret, label) }
 }
 
-/** The address that sets an authenticator up for a secret made before. */
-export function totpAddress(sealed: string, label: string): { secret: string; uri: string } {
-  const secret = unseal(sealed, 'totp')
-  return { secret, uri: totpOf(secret, label).toString() }
-}
-
-const plain = (code: string) => code.replace(/[\s-]/g, '').toLowerCase()
+/** The time step whose code of a sealed secret this is now, or null. */
+export const stepOfCode = (sealed: string, code: string): number | null =>
+  stepOfTotp(unseal(sealed, 'totp'), code)
 
 /**
  * Takes a one-time code, which is then used up; so are those of the steps before it. The row is
- * raised only if no other request has taken the step meanwhile.
+ * raised only if no other request has taken the step meanwhile, and still has that secret.
  * @source RFC 6238 § 5.2: a code is accepted once
  */
 export async function takeTotp(
-  person: { id: string; totpSecret: string | null; totpLastStep: number },
+  { id, totpSecret }: { id: string; totpSecret: string | null },
   code: string,
   transaction?: Transaction,
 ): Promise<boolean> {
-  if (!person.totpSecret) return false
-  const totp = totpOf(unseal(person.totpSecret, 'totp'))
-  const delta = totp.validate({ token: plain(code), window: WINDOW })
-  if (delta === null) return false
-  const step = totp.counter() + delta
+  if (!totpSecret) return false
+  const step = stepOfCode(totpSecret, code)
+  if (step === null) return false
   const [taken] = await Person.update(
     { totpLastStep: step },
-    { where: { id: person.id, totpLastStep: { [Op.lt]: step } }, transaction },
+    { where: { id, totpSecret, totpLastStep: { [Op.lt]: step } }, transaction },
   )
   return taken === 1
 }
+
+const recoveryDigest = (personId: string, code: string) =>
+  keyedDigest(`${personId} ${plainCode(code)}`, 'recovery-code')
 
 /** Takes a recovery code, which is then used up. */
-export async function takeRecoveryCode(personId: string, code: string): Promise<boolean> {
+export async function takeRecoveryCode(
+  personId: string,
+  code: string,
+  transaction?: Transaction,
+): Promise<boolean> {
   const [taken] = await RecoveryCode.update(
     { usedAt: new Date() },
-    { where: { personId, codeHash: digest(plain(code)), usedAt: null } },
+    { where: { personId, codeHash: recoveryDigest(personId, code), usedAt: null }, transaction },
   )
   return taken === 1
 }
 
-/** New recovery codes in place of all old ones, to be shown once: 50 bits each. */
+/** How many recovery codes the person has not used yet. */
+export const countRecoveryCodes = (personId: string, transaction?: Transaction): Promise<number> =>
+  RecoveryCode.count({ where: { personId, usedAt: null }, transaction })
+
+/** New recovery codes in place of all old ones, to be shown once: 49 bits each. */
 export async function makeRecoveryCodes(
   personId: string,
   transaction: Transaction,
 ): Promise<string[]> {
-  const one = () => Array.from({ length: 10 }, () => ALPHABET[randomInt(ALPHABET.length)]).join('')
-  const codes = Array.from({ length: RECOVERY_CODES }, one)
+  const letter = () => ALPHABET[randomInt(ALPHABET.length)]
+  const codes = Array.from({ length: RECOVERY_CODES }, () =>
+    Array.from({ length: CODE_LENGTH }, letter).join(''),
+  )
   await RecoveryCode.destroy({ where: { personId }, transaction })
   await RecoveryCode.bulkCreate(
-    codes.map((code) => ({ personId, codeHash: digest(code) })),
+    codes.map((code) => ({ personId, codeHash: recoveryDigest(personId, code) })),
     { transaction },
   )
-  return codes.map((code) => `${code.slice(0, 5)}-${code.slice(5)}`)
+  const half = CODE_LENGTH / 2
+  return codes.map((code) => `${code.slice(0, half)}-${code.slice(half)}`)
 }

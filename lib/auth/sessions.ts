@@ -1,5 +1,6 @@
 import { Op } from 'sequelize'
 
+import { SecondFactorNeededError } from '@/lib/errors'
 import { Membership, Person, Session } from '@/models'
 import { withinScope } from '@/models/scope'
 
@@ -26,6 +27,8 @@ export interface SignedInPerson {
     brandSlug: string
     brandName: string
     role: Actor['role']
+    /** The brand's pages open only to who has a second factor. */
+    secondFactorRequired: boolean
   }[]
 }
 
@@ -68,13 +71,21 @@ export async function findSignedInPerson(sessionId: string): Promise<SignedInPer
       brandSlug: brand!.slug,
       brandName: brand!.name,
       role,
+      secondFactorRequired: brand!.secondFactorRequired,
     })),
   }
 }
 
-/** The person as an actor in one of their brands, or null when it is not one of theirs. */
+/**
+ * The person as an actor in one of their brands, or null when it is not one of theirs.
+ * @throws SecondFactorNeededError when the brand requires a second factor and they have none
+ */
 export function actorIn(person: SignedInPerson, brandSlug: string): Actor | null {
-  const membership = person.memberships.find((one) => one.brandSlug === brandSlug)
-  if (!membership) return null
+  const found = person.memberships.find((one) => one.brandSlug === brandSlug)
+  if (!found) return null
+  const { secondFactorRequired, ...membership } = found
+  if (secondFactorRequired && !person.hasSecondFactor) {
+    throw new SecondFactorNeededError(membership.brandName)
+  }
   return { personId: person.id, personName: person.name, ...membership }
 }

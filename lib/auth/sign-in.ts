@@ -1,12 +1,12 @@
-import { recordActivity } from '@/lib/activity/record'
 import { TooManyError } from '@/lib/errors'
-import { inTransaction, Membership, Person, Session } from '@/models'
-import { withinScope } from '@/models/scope'
+import { recordInBrands } from '@/lib/people/record-in-brands'
+import { postSecondFactorLetter } from '@/lib/people/second-factor-letter'
+import { inTransaction, Person, Session } from '@/models'
 
 import { inAnswerTime } from './answer-time'
 import { hashPassword, isOutdated, verifyPassword } from './password'
 import { forgive, refund, spend } from './rate-limits'
-import { takeRecoveryCode, takeTotp } from './second-factor'
+import { countRecoveryCodes, takeRecoveryCode, takeTotp } from './second-factor'
 import { SESSION_LIFETIME } from './sessions'
 
 /** What somebody signs in with. */
@@ -57,7 +57,7 @@ export async function signIn(attempt: SignInAttempt): Promise<SignInOutcome> {
       await refund('sign-in-address', address)
       return { kind: 'code-wanted' }
     }
-    if (!(await takeTotp(person, code)) && !(await takeRecoveryCode(person.id, code))) {
+    if (!(await takeTotp(person, code)) && !(await spendRecoveryCode(person, code))) {
       await tellBrands(person.id, 'session.refused')
       return { kind: 'code-refused' }
     }
@@ -89,18 +89,18 @@ async function settle({ email, address }: SignInAttempt): Promise<void> {
   await refund('sign-in-address', address)
 }
 
-async function tellBrands(
-  personId: string,
-  action: 'session.opened' | 'session.refused',
-): Promise<void> {
-  const memberships = await withinScope({ personId }, () =>
-    Membership.findAll({ where: { personId } }),
-  )
-  for (const { brandId } of memberships) {
-    await withinScope({ brandId }, () =>
-      inTransaction((transaction) =>
-        recordActivity({ brandId, personId }, { action }, transaction),
-      ),
-    )
-  }
+function tellBrands(personId: string, action: 'session.opened' | 'session.refused'): Promise<void> {
+  return inTransaction((transaction) => recordInBrands(personId, { action }, transaction))
+}
+
+/** Takes a recovery code and says so by letter: who still has the authenticator needs none. */
+function spendRecoveryCode(person: Person, code: string): Promise<boolean> {
+  return inTransaction(async (transaction) => {
+    if (!(await takeRecoveryCode(person.id, code, transaction))) return false
+    const left = await countRecoveryCodes(person.id, transaction)
+    const entry = { action: 'person.recovery-code-used', after: { left } } as const
+    await recordInBrands(person.id, entry, transaction)
+    await postSecondFactorLetter(person, { kind: 'recovery-code-used', left }, transaction)
+    return true
+  })
 }

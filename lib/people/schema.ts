@@ -24,6 +24,19 @@ const name = z
   .max(PEOPLE_LIMITS.name, `Keep the name to ${PEOPLE_LIMITS.name} characters.`)
 /** What makeToken makes. */
 const token = z.string().regex(/^[\w-]{43}$/)
+/** A one-time or a recovery code. */
+const code = z.string().trim().min(1, 'Write a code.').max(40, 'A code is shorter than that.')
+
+/** Begins a second factor; the code is asked for where one is in use. */
+export const beginSecondFactorSchema = z.strictObject({ password, code: code.optional() })
+/** A parsed beginning. */
+export type BeginSecondFactorInput = z.infer<typeof beginSecondFactorSchema>
+/** Confirms that an authenticator shows the codes of the second factor begun. */
+export const confirmSecondFactorSchema = z.strictObject({ code })
+/** Proves by both factors that it is you: before new recovery codes, or none at all. */
+export const bothFactorsSchema = z.strictObject({ password, code })
+/** A parsed proof by both factors. */
+export type BothFactors = z.infer<typeof bothFactorsSchema>
 
 /** The sign-in form. */
 export const signInSchema = z.object({
