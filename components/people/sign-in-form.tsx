@@ -25,21 +25,30 @@ function inWords(error: string | null | undefined): string {
   return 'Signing in did not work just now; nothing you typed is wrong. Try again in a moment.'
 }
 
-/** E-mail and password; on success goes to `next`, an address within Woadmap. */
+/** Where to go on to: who used a recovery code hears how many are left. */
+const onwards = (next: string, code = '') =>
+  code === '' || /^\d{6}$/.test(code.replace(/[\s-]/g, ''))
+    ? next
+    : `/account/second-factor?recovery=used&next=${encodeURIComponent(next)}`
+
+/** E-mail, password and, where it is asked for, a code; on success goes to `next`, an address within Woadmap. */
 export function SignInForm({ next }: { next: string }) {
   const [problem, setProblem] = useState<string>()
   const [asksForCode, setAsksForCode] = useState(false)
-  const { register, handleSubmit, formState } = useForm<SignInInput>({
+  const { register, handleSubmit, setError, formState } = useForm<SignInInput>({
     resolver: schemaResolver(() => import('@/lib/people/schema').then((it) => it.signInSchema)),
     defaultValues: { email: '', password: '', code: '' },
   })
 
   async function onSubmit(input: SignInInput) {
     setProblem(undefined)
+    if (asksForCode && !input.code) {
+      return setError('code', { message: 'Write a code.' }, { shouldFocus: true })
+    }
     try {
       const answer = await signIn('credentials', { ...input, redirect: false })
       // A whole page load, so that nothing rendered for the previous person is kept.
-      if (answer?.ok && !answer.error) return window.location.assign(next)
+      if (answer?.ok && !answer.error) return window.location.assign(onwards(next, input.code))
       const { error } = answer ?? {}
       if (error === 'code-wanted') return setAsksForCode(true)
       setProblem(inWords(error))

@@ -4,7 +4,13 @@ import { forbidden, notFound, redirect } from 'next/navigation'
 import { asActor, type Actor } from '@/lib/auth/actor'
 import { getActor, getPerson } from '@/lib/auth/get-actor'
 import type { SignedInPerson } from '@/lib/auth/sessions'
-import { ForbiddenError, InvalidError, NotFoundError, UnauthenticatedError } from '@/lib/errors'
+import {
+  ForbiddenError,
+  InvalidError,
+  NotFoundError,
+  SecondFactorNeededError,
+  UnauthenticatedError,
+} from '@/lib/errors'
 import { withinScope } from '@/models/scope'
 
 import { requestIdOf } from './request'
@@ -16,6 +22,7 @@ async function readOrSay<T>(read: () => Promise<T>): Promise<T> {
     return await withinScope({ requestId }, read)
   } catch (error) {
     if (error instanceof UnauthenticatedError) redirect('/sign-in')
+    if (error instanceof SecondFactorNeededError) redirect('/account/second-factor')
     if (error instanceof ForbiddenError) forbidden()
     if (error instanceof NotFoundError || error instanceof InvalidError) notFound()
     throw error
@@ -24,7 +31,8 @@ async function readOrSay<T>(read: () => Promise<T>): Promise<T> {
 
 /**
  * Reads for a page, as the actor of the brand in its address: signed out → sign-in, not a row of
- * this brand → not found, not this role → forbidden.
+ * this brand → not found, no second factor where the brand requires one → where it is set up, not
+ * this role → forbidden.
  */
 export const readForPage = <T>(brandSlug: string, read: (actor: Actor) => Promise<T>): Promise<T> =>
   readOrSay(async () => {

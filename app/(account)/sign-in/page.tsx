@@ -5,16 +5,12 @@ import { PlainPage } from '@/components/layout/plain-page'
 import { SignInForm } from '@/components/people/sign-in-form'
 import { TextLink } from '@/components/ui/text-link'
 import { getPerson } from '@/lib/auth/get-actor'
+import { ownAddress } from '@/lib/server/own-address'
 
 export const metadata: Metadata = { title: 'Sign in' }
 
-/** Only an address of our own may be gone to after signing in. */
-function withinWoadmap(next: string | string[] | undefined): string {
-  return typeof next === 'string' && /^\/(?![/\\])[\w\-./?=&%]*$/.test(next) ? next : '/'
-}
-
 export default async function SignInPage({ searchParams }: PageProps<'/sign-in'>) {
-  const next = withinWoadmap((await searchParams).next)
+  const next = ownAddress((await searchParams).next)
   if (await getPerson()) redirect('/')
   return (
     <PlainPage homeHref="/">
