@@ -1,7 +1,8 @@
 import { Op } from 'sequelize'
 
 import { SESSION_IDLE, type SignedInPerson } from '@/lib/auth/sessions'
-import { Membership, Session, withinScope } from '@/models'
+import { Membership, Session } from '@/models'
+import { withinScope } from '@/models/scope'
 
 /** The sessions of a person that have not ended, last seen first. */
 export function listSessions({ id }: SignedInPerson): Promise<Session[]> {

@@ -1,7 +1,8 @@
 import type { Transaction } from 'sequelize'
 
 import { recordActivity, type ActivityEntry } from '@/lib/activity/record'
-import { currentScope, Membership, speakFor } from '@/models'
+import { Membership, speakFor } from '@/models'
+import { currentScope } from '@/models/scope'
 
 /**
  * Adds a line to the activity record of each of a person's brands, in the transaction of what it

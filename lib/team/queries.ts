@@ -4,7 +4,8 @@ import { authorize, type Actor } from '@/lib/auth/actor'
 import { digest } from '@/lib/auth/seal'
 import type { SignedInPerson } from '@/lib/auth/sessions'
 import { NotFoundError } from '@/lib/errors'
-import { Brand, Invitation, Membership, Person, sequelize, withinScope } from '@/models'
+import { Brand, Invitation, Membership, Person, sequelize } from '@/models'
+import { withinScope } from '@/models/scope'
 
 import { canManageTeam, canReadTeam } from './policy'
 

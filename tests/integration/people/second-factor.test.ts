@@ -15,8 +15,9 @@ import { confirmSecondFactor } from '@/lib/people/confirm-second-factor'
 import { getSecondFactor } from '@/lib/people/get-second-factor'
 import { removeSecondFactor } from '@/lib/people/remove-second-factor'
 import { renewRecoveryCodes } from '@/lib/people/renew-recovery-codes'
-import type { Brand} from '@/models';
-import { Activity, Letter, Membership, Person, RecoveryCode, withinScope } from '@/models'
+import type { Brand } from '@/models'
+import { Activity, Letter, Membership, Person, RecoveryCode } from '@/models'
+import { withinScope } from '@/models/scope'
 import { makeBrand } from '@/tests/factories/brand'
 
 const password = 'a-long-walk-uphill'
