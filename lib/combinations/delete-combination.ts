@@ -1,3 +1,5 @@
+import { combinationObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { inTransaction } from '@/models'
 
@@ -17,5 +19,7 @@ export async function deleteCombination(
   await inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction })
     await combination.destroy({ transaction })
+    const object = combinationObject(combination)
+    await recordActivity(actor, { action: 'combination.deleted', object }, transaction)
   })
 }

@@ -1,6 +1,9 @@
+import { combinationObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { NotFoundError } from '@/lib/errors'
 import { getLine } from '@/lib/lines/queries'
+import { shadeLabel } from '@/lib/shades/present'
 import {
   Combination,
   CombinationPlace,
@@ -29,13 +32,17 @@ export async function keepCombination(
     const inLine = { brandId, lineId: line.id }
     const photograph = await Photograph.findOne({
       where: { ...inLine, id: photographId },
-      attributes: ['id'],
+      attributes: ['id', 'title'],
       transaction,
     })
     if (!photograph) throw new NotFoundError()
     const shadeIds = places.map(({ shadeId }) => shadeId)
-    const shades = await Shade.count({ where: { ...inLine, id: shadeIds }, transaction })
-    if (shades !== places.length) {
+    const shades = await Shade.findAll({
+      attributes: ['id', 'number', 'name'],
+      where: { ...inLine, id: shadeIds },
+      transaction,
+    })
+    if (shades.length !== places.length) {
       throw new NotFoundError(
         'One of these five is not a shade of the line any more. Nothing was kept: read the photograph again, then keep the five it finds.',
       )
@@ -63,6 +70,17 @@ export async function keepCombination(
           share,
         })),
         { transaction },
+      )
+      const labels = new Map(shades.map((shade) => [shade.id, shadeLabel(shade)]))
+      const order = shadeIds.map((id) => labels.get(id))
+      await recordActivity(
+        actor,
+        {
+          action: 'combination.kept',
+          object: combinationObject(combination),
+          after: { line: line.name, photograph: photograph.title, reading, order },
+        },
+        transaction,
       )
     }
     return combination

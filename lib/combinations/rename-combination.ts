@@ -1,3 +1,5 @@
+import { combinationObject } from '@/lib/activity/objects'
+import { recordChanges } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { Combination, inTransaction, updateVersioned } from '@/models'
 
@@ -18,6 +20,12 @@ export async function renameCombination(
     const combination = await loadCombination(actor, combinationId, { transaction })
     const row = { id: combination.id, brandId: actor.brandId, version }
     await updateVersioned(Combination, row, { title }, transaction)
+    await recordChanges(
+      actor,
+      { action: 'combination.renamed', object: combinationObject(combination) },
+      { before: combination, after: { title } },
+      transaction,
+    )
     return combination.reload({ transaction })
   })
 }

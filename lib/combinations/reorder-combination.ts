@@ -1,6 +1,11 @@
+import type { Transaction } from 'sequelize'
+
+import { combinationObject } from '@/lib/activity/objects'
+import { recordChanges } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { NotFoundError } from '@/lib/errors'
-import { Combination, CombinationPlace, inTransaction, updateVersioned } from '@/models'
+import { shadeLabel } from '@/lib/shades/present'
+import { Combination, CombinationPlace, inTransaction, Shade, updateVersioned } from '@/models'
 
 import { canReorderCombination } from './policy'
 import { loadCombination } from './queries'
@@ -20,6 +25,7 @@ export async function reorderCombination(
   return inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction })
     await updateVersioned(Combination, { id: combination.id, brandId, version }, {}, transaction)
+    const before = await listPlaces(actor, combinationId, transaction)
     for (const [at, shadeId] of shadeIds.entries()) {
       const [moved] = await CombinationPlace.update(
         { place: at + 1 },
@@ -27,6 +33,28 @@ export async function reorderCombination(
       )
       if (moved !== 1) throw new NotFoundError('One of these shades is not in the combination.')
     }
+    const after = await listPlaces(actor, combinationId, transaction)
+    await recordChanges(
+      actor,
+      { action: 'combination.reordered', object: combinationObject(combination) },
+      { before: { order: before }, after: { order: after } },
+      transaction,
+    )
     return combination.reload({ transaction })
   })
+}
+
+/** What the five are called, in order. */
+async function listPlaces(
+  { brandId }: Actor,
+  combinationId: string,
+  transaction: Transaction,
+): Promise<string[]> {
+  const places = await CombinationPlace.findAll({
+    where: { brandId, combinationId },
+    include: [{ model: Shade, as: 'shade', attributes: ['number', 'name'], paranoid: false }],
+    order: [['place', 'ASC']],
+    transaction,
+  })
+  return places.map(({ shade }) => shadeLabel(shade!))
 }

@@ -1,3 +1,5 @@
+import { combinationObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { inTransaction } from '@/models'
 
@@ -16,6 +18,9 @@ export async function restoreCombination(
   authorize(actor, canDeleteCombination)
   await inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction, deleted: true })
+    if (!combination.deletedAt) return
     await combination.restore({ transaction })
+    const object = combinationObject(combination)
+    await recordActivity(actor, { action: 'combination.restored', object }, transaction)
   })
 }

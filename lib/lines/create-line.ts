@@ -1,3 +1,5 @@
+import { lineObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { ConflictError } from '@/lib/errors'
 import { createOnce, inTransaction, Line } from '@/models'
@@ -36,6 +38,15 @@ export async function createLine(actor: Actor, input: CreateLineInput): Promise<
       const message = 'There is a line of that name already.'
       throw new ConflictError(message, { name: [message] })
     }
-    return made.row
+    const { row, created } = made
+    if (created) {
+      const after = { ...fields, priceMinor: row.priceMinor }
+      await recordActivity(
+        actor,
+        { action: 'line.created', object: lineObject(row), after },
+        transaction,
+      )
+    }
+    return row
   })
 }

@@ -1,3 +1,5 @@
+import { lineObject } from '@/lib/activity/objects'
+import { recordChanges } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { inTransaction, Line, updateVersioned } from '@/models'
 
@@ -14,10 +16,13 @@ export async function updateLine(actor: Actor, input: UpdateLineInput): Promise<
   const { lineSlug, version, price, ...fields } = input
   return inTransaction(async (transaction) => {
     const line = await getLine(actor, lineSlug, transaction)
-    await updateVersioned(
-      Line,
-      { id: line.id, brandId: actor.brandId, version },
-      { ...fields, priceMinor: Math.round(price * 100) },
+    const values = { ...fields, priceMinor: Math.round(price * 100) }
+    const { id, brandId } = line
+    await updateVersioned(Line, { id, brandId, version }, values, transaction)
+    await recordChanges(
+      actor,
+      { action: 'line.updated', object: lineObject(line) },
+      { before: line, after: values },
       transaction,
     )
     return line.reload({ transaction })

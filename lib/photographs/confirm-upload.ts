@@ -2,6 +2,8 @@ import { createHash } from 'node:crypto'
 
 import { UniqueConstraintError } from 'sequelize'
 
+import { photographObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { InvalidError, NotFoundError } from '@/lib/errors'
 import { enqueue } from '@/lib/jobs/queue'
@@ -52,7 +54,18 @@ export async function confirmUpload(
         { where: { id: photographId, state: 'pending' }, transaction },
       )
       // Somebody confirmed it a moment ago; that one's job is enough.
-      if (changed === 1) await enqueue('read-photograph', { photographId }, transaction)
+      if (changed !== 1) return
+      await enqueue('read-photograph', { photographId }, transaction)
+      const { fileName, byteLength } = photograph
+      await recordActivity(
+        actor,
+        {
+          action: 'photograph.added',
+          object: photographObject(photograph),
+          after: { fileName, byteLength },
+        },
+        transaction,
+      )
     })
     return { kind: 'added', photographId }
   } catch (error) {

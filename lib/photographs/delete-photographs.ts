@@ -1,5 +1,7 @@
 import { Op, UniqueConstraintError } from 'sequelize'
 
+import { recordedPhotographs } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { ConflictError, NotFoundError } from '@/lib/errors'
 import { enqueue } from '@/lib/jobs/queue'
@@ -8,6 +10,8 @@ import { inTransaction, Photograph } from '@/models'
 import { canDeletePhotographs } from './policy'
 import { UNDO_WINDOW } from './constants'
 import type { PhotographIdsInput } from './schema'
+
+const NAMED = { attributes: ['id', 'title'] }
 
 /**
  * Deletes photographs; for UNDO_WINDOW they can be brought back. Combinations made from them stay.
@@ -20,11 +24,12 @@ export async function deletePhotographs(
 ): Promise<{ count: number }> {
   authorize(actor, canDeletePhotographs)
   return inTransaction(async (transaction) => {
-    const count = await Photograph.destroy({
-      where: { id: photographIds, brandId: actor.brandId, state: { [Op.ne]: 'pending' } },
-      transaction,
-    })
+    const where = { id: photographIds, brandId: actor.brandId, state: { [Op.ne]: 'pending' } }
+    const photographs = await Photograph.findAll({ ...NAMED, where, transaction })
+    const count = await Photograph.destroy({ where, transaction })
     if (count !== new Set(photographIds).size) throw new NotFoundError()
+    const recorded = recordedPhotographs(photographs)
+    await recordActivity(actor, { action: 'photograph.deleted', ...recorded }, transaction)
     return { count }
   })
 }
@@ -42,10 +47,9 @@ export async function restorePhotographs(
   const mine = { id: photographIds, brandId, state: { [Op.ne]: 'pending' } }
   try {
     return await inTransaction(async (transaction) => {
-      await Photograph.restore({
-        where: { ...mine, deletedAt: { [Op.gt]: new Date(Date.now() - UNDO_WINDOW) } },
-        transaction,
-      })
+      const where = { ...mine, deletedAt: { [Op.gt]: new Date(Date.now() - UNDO_WINDOW) } }
+      const deleted = await Photograph.findAll({ ...NAMED, where, paranoid: false, transaction })
+      await Photograph.restore({ where, transaction })
       const count = await Photograph.count({ where: mine, transaction })
       if (count !== new Set(photographIds).size) throw new NotFoundError()
       // A job that met them deleted left them as they were: nobody else would read them.
@@ -56,6 +60,10 @@ export async function restorePhotographs(
       })
       for (const { id } of unread)
         await enqueue('read-photograph', { photographId: id }, transaction)
+      if (deleted.length > 0) {
+        const recorded = recordedPhotographs(deleted)
+        await recordActivity(actor, { action: 'photograph.restored', ...recorded }, transaction)
+      }
       return { count }
     })
   } catch (error) {

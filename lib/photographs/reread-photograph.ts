@@ -1,3 +1,5 @@
+import { photographObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { NotFoundError } from '@/lib/errors'
 import { enqueue } from '@/lib/jobs/queue'
@@ -22,8 +24,15 @@ export async function rereadPhotograph(
       { state: 'waiting', failure: null },
       { where: { ...mine, state: ['ready', 'failed'] }, transaction },
     )
-    if (changed === 1) return enqueue('read-photograph', { photographId }, transaction)
-    const being = { ...mine, state: ['waiting', 'reading'] }
-    if ((await Photograph.count({ where: being, transaction })) === 0) throw new NotFoundError()
+    const photograph = await Photograph.findOne({
+      where: { ...mine, state: ['waiting', 'reading'] },
+      attributes: ['id', 'title'],
+      transaction,
+    })
+    if (!photograph) throw new NotFoundError()
+    if (changed === 0) return
+    await enqueue('read-photograph', { photographId }, transaction)
+    const object = photographObject(photograph)
+    await recordActivity(actor, { action: 'photograph.reread', object }, transaction)
   })
 }

@@ -1,3 +1,5 @@
+import { photographObject } from '@/lib/activity/objects'
+import { recordChanges } from '@/lib/activity/record'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { NotFoundError } from '@/lib/errors'
 import { inTransaction, Photograph, updateVersioned } from '@/models'
@@ -19,6 +21,12 @@ export async function updatePhotograph(
     const photograph = await Photograph.findOne({ where: { id, brandId }, transaction })
     if (!photograph) throw new NotFoundError()
     await updateVersioned(Photograph, { id, brandId, version }, details, transaction)
+    await recordChanges(
+      actor,
+      { action: 'photograph.updated', object: photographObject(photograph) },
+      { before: photograph, after: details },
+      transaction,
+    )
     return photograph.reload({ transaction })
   })
 }

@@ -1,3 +1,5 @@
+import { shadeObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { createOnce, Shade } from '@/models'
 
@@ -16,13 +18,21 @@ export async function createShade(actor: Actor, input: CreateShadeInput): Promis
     const where = { brandId: actor.brandId, lineId: line.id }
     const held = await Shade.count({ where, transaction })
     const last = await Shade.max<number | null, Shade>('position', { where, transaction })
-    const values = { ...where, ...fields, ...colorColumns(color), position: (last ?? -1) + 1 }
-    const made = await createOnce(Shade, { ...values, requestKey }, transaction)
+    const position = (last ?? -1) + 1
+    const values = { ...fields, ...colorColumns(color), position }
+    const made = await createOnce(Shade, { ...where, ...values, requestKey }, transaction)
     if (!made) {
       const holder = await findNumberHolder(line, [fields.number], transaction)
       throw numberTaken(holder ?? fields)
     }
-    if (made.created) requireRoom(held, 1)
+    if (made.created) {
+      requireRoom(held, 1)
+      await recordActivity(
+        actor,
+        { action: 'shade.created', object: shadeObject(made.row, line), after: values },
+        transaction,
+      )
+    }
     return { answer: made.row, changed: made.created }
   })
 }

@@ -74,14 +74,17 @@ function parseRecords(content: string, delimiter: Delimiter): string[][] {
 const isBlank = (cells: readonly string[]) => cells.every((cell) => cell.trim() === '')
 
 /*
- * A spreadsheet takes a cell that begins with = + - or @ for a formula. Such text goes out with an
- * apostrophe before it, and so does text that already looks like one that went out: each export
- * adds exactly one apostrophe and each import takes exactly one away.
+ * A spreadsheet takes a cell that begins with = + - @, a tab or a line end for a formula. Such text
+ * goes out with an apostrophe before it, and so does text that already looks like one that went
+ * out: each export adds exactly one apostrophe and each import takes exactly one away.
  */
-const LOOKS_LIKE_FORMULA = /^'*[=+\-@]/
-const WENT_OUT = /^'+[=+\-@]/
+const LOOKS_LIKE_FORMULA = /^'*[=+\-@\t\r\n]/
+const WENT_OUT = /^'+[=+\-@\t\r\n]/
 
-/** Text for a cell, such that no spreadsheet runs it. {@link restoreCell} gives it back. */
+/**
+ * Text for a cell, such that no spreadsheet runs it. {@link restoreCell} gives it back.
+ * @source OWASP, CSV Injection
+ */
 export const neutraliseCell = (text: string): string =>
   LOOKS_LIKE_FORMULA.test(text) ? `'${text}` : text
 

@@ -1,3 +1,5 @@
+import { recordedShades } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { Shade } from '@/models'
 
@@ -17,13 +19,18 @@ export async function deleteShades(
 ): Promise<DeleteShadesAnswer> {
   return changeShades<DeleteShadesAnswer>(actor, lineSlug, async (line, transaction) => {
     const shades = await findShades(line, shadeIds, transaction)
-    const ids = shades.filter(({ deletedAt }) => !deletedAt).map(({ id }) => id)
+    const standing = shades.filter(({ deletedAt }) => !deletedAt)
+    const ids = standing.map(({ id }) => id)
     if (!confirmed) {
       const uses = await findUses(actor, ids, transaction)
       if (uses.total > 0) return { answer: { deleted: false, uses }, changed: false }
     }
     const where = { brandId: actor.brandId, lineId: line.id, id: ids }
     await Shade.destroy({ where, transaction })
+    if (ids.length > 0) {
+      const recorded = recordedShades(standing, line)
+      await recordActivity(actor, { action: 'shade.deleted', ...recorded }, transaction)
+    }
     return { answer: { deleted: true, shadeIds: ids }, changed: ids.length > 0 }
   })
 }

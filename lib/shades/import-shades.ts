@@ -1,3 +1,5 @@
+import { countAndName, lineObject } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { ConflictError, InvalidError } from '@/lib/errors'
 import { Shade } from '@/models'
@@ -6,7 +8,7 @@ import { changeShades, requireRoom } from './change-shades'
 import { mappingProblems, readRows } from './csv'
 import { parseSheet } from './csv-text'
 import { countPlan, planImport, type ImportCounts, type PlannedShade } from './plan-import'
-import { SHADE_VIEW_COLUMNS } from './present'
+import { shadeLabel, SHADE_VIEW_COLUMNS } from './present'
 import { BY_POSITION } from './queries'
 import type { ImportShadesInput } from './schema'
 
@@ -58,6 +60,14 @@ export async function importShades(
         updateOnDuplicate: [...UPDATED],
         transaction,
       })
+    }
+    if (changed) {
+      const { named } = countAndName(saves.map(shadeLabel))
+      await recordActivity(
+        actor,
+        { action: 'shade.imported', object: lineObject(line), after: { ...counts, named } },
+        transaction,
+      )
     }
     return { answer: counts, changed }
   })

@@ -1,5 +1,7 @@
 import { QueryTypes } from 'sequelize'
 
+import { recordedShades } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { sequelize, Shade } from '@/models'
 
@@ -18,7 +20,8 @@ export async function reorderShades(
   { lineSlug, shadeIds, place }: ReorderShadesInput,
 ): Promise<{ place: number }> {
   return changeShades(actor, lineSlug, async (line, transaction) => {
-    const moved = new Set((await findShades(line, shadeIds, transaction)).map(({ id }) => id))
+    const shades = await findShades(line, shadeIds, transaction)
+    const moved = new Set(shades.map(({ id }) => id))
     const order = await Shade.findAll({
       attributes: ['id', 'position'],
       where: { brandId: actor.brandId, lineId: line.id },
@@ -45,6 +48,21 @@ export async function reorderShades(
         type: QueryTypes.UPDATE,
         transaction,
       },
+    )
+    const { object, after } = recordedShades(
+      shades.filter(({ deletedAt }) => !deletedAt),
+      line,
+    )
+    const first = order.findIndex(({ id }) => moved.has(id)) + 1
+    await recordActivity(
+      actor,
+      {
+        action: 'shade.reordered',
+        object,
+        before: { place: first },
+        after: { place: at + 1, ...after },
+      },
+      transaction,
     )
     return { answer: { place: at + 1 }, changed: true }
   })

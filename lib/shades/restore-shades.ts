@@ -1,5 +1,7 @@
 import { literal } from 'sequelize'
 
+import { recordedShades } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { ConflictError } from '@/lib/errors'
 import { Shade } from '@/models'
@@ -36,6 +38,10 @@ export async function restoreShades(
         transaction,
       },
     )
+    if (deleted.length > 0) {
+      const recorded = recordedShades(deleted, line)
+      await recordActivity(actor, { action: 'shade.restored', ...recorded }, transaction)
+    }
     return { answer: { restored: deleted.length }, changed: deleted.length > 0 }
   })
 }

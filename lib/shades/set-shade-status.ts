@@ -1,5 +1,7 @@
 import { literal } from 'sequelize'
 
+import { recordedShades } from '@/lib/activity/objects'
+import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { Shade } from '@/models'
 
@@ -21,6 +23,20 @@ export async function setShadeStatus(
       { status, version: literal('version + 1') as unknown as number },
       { where: { brandId: actor.brandId, id: others.map(({ id }) => id) }, transaction },
     )
+    if (changed > 0) {
+      const { object, after } = recordedShades(others, line)
+      const statuses = [...new Set(others.map((shade) => shade.status))]
+      await recordActivity(
+        actor,
+        {
+          action: 'shade.status-set',
+          object,
+          before: { status: statuses },
+          after: { status, ...after },
+        },
+        transaction,
+      )
+    }
     return { answer: { changed }, changed: changed > 0 }
   })
 }

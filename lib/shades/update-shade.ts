@@ -1,3 +1,5 @@
+import { shadeObject } from '@/lib/activity/objects'
+import { recordChanges } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { ConflictError, NotFoundError, type FieldErrors } from '@/lib/errors'
 import { Shade, updateVersioned } from '@/models'
@@ -25,10 +27,13 @@ export async function updateShade(actor: Actor, input: UpdateShadeInput): Promis
       const holder = await findNumberHolder(line, [fields.number], transaction, shade.id)
       if (holder) throw numberTaken(holder)
     }
-    await updateVersioned(
-      Shade,
-      { id: shade.id, brandId: actor.brandId, version },
-      { ...fields, ...(color && colorColumns(color)) },
+    const values = { ...fields, ...(color && colorColumns(color)) }
+    const row = { id: shade.id, brandId: actor.brandId, version }
+    await updateVersioned(Shade, row, values, transaction)
+    await recordChanges(
+      actor,
+      { action: 'shade.updated', object: shadeObject(shade, line) },
+      { before: shade, after: values },
       transaction,
     )
     return { answer: await shade.reload({ transaction }), changed: true }

@@ -81,7 +81,9 @@ async function fillBrand(owner: Actor): Promise<void> {
     invitedById: personId,
     expiresAt: new Date(),
   })
-  await inTransaction((transaction) => recordActivity(owner, { action: 'line.made' }, transaction))
+  await inTransaction((transaction) =>
+    recordActivity(owner, { action: 'line.created' }, transaction),
+  )
 }
 
 /** What the web's role sees of a table with app.brand set to this. */

@@ -1,0 +1,226 @@
+import { ROLE_WORDS, type Role } from '@/lib/people/constants'
+
+/** The bounds of what the activity record shows and keeps. */
+export const ACTIVITY_LIMITS = {
+  perPage: 50,
+  /** Entries of one CSV file; older ones are reached by its dates. */
+  csvRows: 10_000,
+  /** How many things of one change are named; the others are counted. */
+  named: 20,
+} as const
+
+/** What an entry says besides who, when and what: its thing's name, and what was different. */
+export interface Told {
+  label: string
+  before: Readonly<Record<string, unknown>>
+  after: Readonly<Record<string, unknown>>
+}
+
+/** "the shade Moss of Heronsway DK", or "3 shades of Heronsway DK". */
+const shades = ({ label, after }: Told) =>
+  after.count ? `${String(after.count)} shades of ${label}` : `the shade ${label}`
+
+const photographs = ({ label, after }: Told) =>
+  after.count ? `${String(after.count)} photographs` : `the photograph ${label}`
+
+const role = (values: Told['after']) => ROLE_WORDS[values.role as Role] ?? 'no role'
+
+/** "restoreCombination" → "restore combination". */
+const inWords = (name: unknown) =>
+  String(name)
+    .replace(/([a-z])([A-Z])/g, '$1 $2')
+    .toLowerCase()
+
+interface ActionWords {
+  /** As the filter and the CSV name it. */
+  label: string
+  /** What follows the person's name. */
+  says: (told: Told) => string
+}
+
+/** Everything the record tells of, by the name it is kept under: the one table of its words. */
+export const ACTIONS = {
+  'session.opened': { label: 'Signed in', says: () => 'signed in' },
+  'session.refused': {
+    label: 'Sign-in refused',
+    says: () => 'was refused at sign-in: the password or the code was wrong',
+  },
+  'session.ended': {
+    label: 'Session ended',
+    says: ({ after }) =>
+      after.ended ? `ended ${String(after.ended)} other sessions` : 'ended a session',
+  },
+  'access.refused': {
+    label: 'Access refused',
+    says: ({ after }) =>
+      after.page
+        ? `was refused the page ${String(after.page)}`
+        : `was refused: ${inWords(after.asked)}`,
+  },
+  'activity.exported': {
+    label: 'Record exported',
+    says: () => 'took this record away as a CSV file',
+  },
+  'brand.created': { label: 'Brand made', says: ({ label }) => `made the brand ${label}` },
+  'brand.second-factor-requirement-changed': {
+    label: 'Second factor required or not',
+    says: ({ after }) =>
+      after.required
+        ? 'made a second factor required of everybody'
+        : 'made a second factor a matter of choice',
+  },
+  'membership.invited': {
+    label: 'Member invited',
+    says: ({ after }) => `invited somebody as ${role(after)}`,
+  },
+  'membership.invitation-resent': {
+    label: 'Invitation sent again',
+    says: ({ label }) => `sent an invitation as ${label} again`,
+  },
+  'membership.withdrawn': {
+    label: 'Invitation withdrawn',
+    says: ({ label }) => `withdrew an invitation as ${label}`,
+  },
+  'membership.joined': {
+    label: 'Member joined',
+    says: ({ after }) => `joined as ${role(after)}`,
+  },
+  'membership.role-changed': {
+    label: 'Role changed',
+    says: ({ label, before, after }) =>
+      `changed the role of ${label} from ${role(before)} to ${role(after)}`,
+  },
+  'membership.removed': {
+    label: 'Member removed',
+    says: ({ label, before }) => `removed ${label}, who was ${role(before)}`,
+  },
+  'membership.left': { label: 'Member left', says: () => 'left the brand' },
+  'person.name-changed': { label: 'Name changed', says: () => 'changed their name' },
+  'person.password-changed': { label: 'Password changed', says: () => 'changed their password' },
+  'person.password-reset': { label: 'Password reset', says: () => 'chose a new password by mail' },
+  'person.email-change-requested': {
+    label: 'E-mail change asked for',
+    says: () => 'asked to change their e-mail address',
+  },
+  'person.email-changed': {
+    label: 'E-mail changed',
+    says: () => 'changed their e-mail address',
+  },
+  'person.second-factor-added': {
+    label: 'Second factor added',
+    says: () => 'added a second factor to their account',
+  },
+  'person.second-factor-removed': {
+    label: 'Second factor removed',
+    says: () => 'removed the second factor from their account',
+  },
+  'person.recovery-codes-renewed': {
+    label: 'Recovery codes renewed',
+    says: () => 'made new recovery codes',
+  },
+  'person.recovery-code-used': {
+    label: 'Recovery code used',
+    says: ({ after }) => `signed in with a recovery code; ${String(after.left)} are left`,
+  },
+  'person.account-closed': { label: 'Account closed', says: () => 'closed their account' },
+  'line.created': { label: 'Line made', says: ({ label }) => `made the line ${label}` },
+  'line.updated': { label: 'Line changed', says: ({ label }) => `changed the line ${label}` },
+  'shade.created': { label: 'Shade added', says: (told) => `added ${shades(told)}` },
+  'shade.updated': { label: 'Shade changed', says: (told) => `changed ${shades(told)}` },
+  'shade.status-set': {
+    label: 'Status of shades set',
+    says: (told) => `set ${shades(told)} to ${String(told.after.status)}`,
+  },
+  'shade.reordered': {
+    label: 'Shades ordered',
+    says: (told) => `moved ${shades(told)} to place ${String(told.after.place)}`,
+  },
+  'shade.deleted': { label: 'Shades deleted', says: (told) => `deleted ${shades(told)}` },
+  'shade.restored': {
+    label: 'Shades brought back',
+    says: (told) => `brought back ${shades(told)}`,
+  },
+  'shade.imported': {
+    label: 'Shades imported',
+    says: ({ label, after }) =>
+      `imported shades into ${label}: ${String(after.new)} new, ${String(after.changed)} changed`,
+  },
+  'shade.exported': {
+    label: 'Shades exported',
+    says: ({ label, after }) =>
+      `took the ${String(after.count)} shades of ${label} away as a CSV file`,
+  },
+  'photograph.added': {
+    label: 'Photograph added',
+    says: ({ label }) => `added the photograph ${label}`,
+  },
+  'photograph.updated': {
+    label: 'Photograph’s details changed',
+    says: ({ label }) => `changed the details of the photograph ${label}`,
+  },
+  'photograph.reread': {
+    label: 'Photograph read again',
+    says: ({ label }) => `had the photograph ${label} read again`,
+  },
+  'photograph.deleted': {
+    label: 'Photographs deleted',
+    says: (told) => `deleted ${photographs(told)}`,
+  },
+  'photograph.restored': {
+    label: 'Photographs brought back',
+    says: (told) => `brought back ${photographs(told)}`,
+  },
+  'combination.kept': {
+    label: 'Combination kept',
+    says: ({ label }) => `kept the combination ${label}`,
+  },
+  'combination.renamed': {
+    label: 'Combination renamed',
+    says: ({ label, after }) => `renamed the combination ${label} to ${String(after.title)}`,
+  },
+  'combination.reordered': {
+    label: 'Combination ordered',
+    says: ({ label }) => `put the shades of the combination ${label} in another order`,
+  },
+  'combination.deleted': {
+    label: 'Combination deleted',
+    says: ({ label }) => `deleted the combination ${label}`,
+  },
+  'combination.restored': {
+    label: 'Combination brought back',
+    says: ({ label }) => `brought back the combination ${label}`,
+  },
+} as const satisfies Record<`${string}.${string}`, ActionWords>
+/** One of ACTIONS: the noun and what happened to it. */
+export type ActivityAction = keyof typeof ACTIONS
+
+/** The nouns of ACTIONS, as the filter heads them. */
+export const ACTIVITY_KINDS = {
+  session: 'Signing in',
+  access: 'Refusals',
+  activity: 'This record',
+  brand: 'The brand',
+  membership: 'Team',
+  person: 'Accounts',
+  line: 'Lines',
+  shade: 'Shades',
+  photograph: 'Photographs',
+  combination: 'Combinations',
+} as const satisfies Record<KindOf<ActivityAction>, string>
+/** One of ACTIVITY_KINDS. */
+export type ActivityKind = keyof typeof ACTIVITY_KINDS
+
+type KindOf<Action extends string> = Action extends `${infer Kind}.${string}` ? Kind : never
+
+/** Fields whose names in the code are no words. */
+export const FIELD_WORDS: Readonly<Record<string, string>> = {
+  labL: 'L',
+  labA: 'a',
+  labB: 'b',
+  priceMinor: 'price in hundredths',
+  altText: 'alt text',
+  netGrams: 'net weight in grams',
+  needleMm: 'needle in mm',
+  named: 'among them',
+  count: 'how many',
+}
