@@ -1,3 +1,5 @@
+import type { Instrumentation } from 'next'
+
 /**
  * Runs once before a server process answers: it must speak to the database as the role that sees
  * one brand at a time, and the first match would take many times longer cold.
@@ -14,4 +16,12 @@ export async function register(): Promise<void> {
   watchRequests()
   requireHeldRole()
   await warmUpReading()
+}
+
+/** Runs for every error that no page, route or action has dealt with. */
+export const onRequestError: Instrumentation.onRequestError = async (...told) => {
+  // eslint-disable-next-line no-restricted-properties
+  if (process.env.NEXT_RUNTIME !== 'nodejs') return
+  const { logRequestError } = await import('@/lib/server/log-request-error')
+  await logRequestError(...told)
 }

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 
 import { StudioShell } from '@/components/layout/studio-shell'
 import { SignOutButton } from '@/components/people/sign-out-button'
+import { canReadActivity } from '@/lib/activity/policy'
 import type { Actor } from '@/lib/auth/actor'
 import { getPerson } from '@/lib/auth/get-actor'
 import type { LineChapters } from '@/lib/lines/present'
@@ -27,6 +28,11 @@ export async function Shell({
         name: brandName,
         href: `/${brandSlug}`,
       }))}
+      brandPages={
+        canReadActivity(actor)
+          ? [{ label: 'Activity record', href: `/${actor.brandSlug}/activity` }]
+          : []
+      }
       person={{ name: actor.personName, role: ROLE_WORDS[actor.role] }}
       signOut={<SignOutButton signOut={signOutAction} />}
       {...chapters}

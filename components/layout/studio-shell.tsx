@@ -18,6 +18,8 @@ export interface StudioShellProps {
   /** All lines of the brand, the current one among them. */
   lines?: readonly Place[]
   chapters?: readonly Chapter[]
+  /** What is about the brand as a whole. */
+  brandPages?: readonly Chapter[]
   /** One Sheet. */
   children: ReactNode
 }
@@ -59,6 +61,7 @@ function Contents({
   line,
   lines = [],
   chapters = [],
+  brandPages = [],
   person,
   signOut,
 }: StudioShellProps) {
@@ -85,7 +88,10 @@ function Contents({
           <ChapterNav chapters={chapters} label={line ? `Chapters of ${line.name}` : brand.name} />
         </div>
       ) : null}
-      <div className="mt-auto flex flex-wrap items-center justify-between gap-x-3 pt-8 text-sm">
+      <div className="mt-auto pt-8">
+        {brandPages.length > 0 ? <ChapterNav chapters={brandPages} label={brand.name} /> : null}
+      </div>
+      <div className="flex flex-wrap items-center justify-between gap-x-3 pt-4 text-sm">
         <p className="min-w-0 text-ink-soft">
           <AppLink
             href="/account"

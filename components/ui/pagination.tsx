@@ -10,14 +10,18 @@ export function Pagination({
   label,
   summary,
   previousHref,
+  previousLabel = 'Previous page',
   nextHref,
+  nextLabel = 'Next page',
 }: {
   /** "Pages of photographs" */
   label: string
   /** "49–96 of 213 photographs" */
   summary?: string
   previousHref?: string
+  previousLabel?: string
   nextHref?: string
+  nextLabel?: string
 }) {
   if (!previousHref && !nextHref) return null
   return (
@@ -27,12 +31,12 @@ export function Pagination({
     >
       {previousHref ? (
         <AppLink href={previousHref} rel="prev" className={buttonClass('secondary', 'main')}>
-          <ChevronLeft aria-hidden="true" /> Previous page
+          <ChevronLeft aria-hidden="true" /> {previousLabel}
         </AppLink>
       ) : null}
       {nextHref ? (
         <AppLink href={nextHref} rel="next" className={buttonClass('secondary', 'main')}>
-          Next page <ChevronRight aria-hidden="true" />
+          {nextLabel} <ChevronRight aria-hidden="true" />
         </AppLink>
       ) : null}
       {summary ? <p className="ml-auto text-sm text-ink-faint">{summary}</p> : null}

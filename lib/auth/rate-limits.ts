@@ -23,6 +23,8 @@ export const RATE_LIMITS = {
   /** By brand. */
   invitation: { points: 30, duration: HOUR },
   upload: { points: 600, duration: HOUR },
+  /** Lines of the activity record about the same person refused the same thing. */
+  refusal: { points: 1, duration: MINUTE },
 } as const
 /** One of RATE_LIMITS. */
 export type RateLimit = keyof typeof RATE_LIMITS

@@ -10,6 +10,7 @@ import { UnauthenticatedError, type ActionResult } from '@/lib/errors'
 import { withinScope } from '@/models/scope'
 
 import { failureOf } from './map-error'
+import { recordRefusals } from './record-refusals'
 import { addressOf, requestIdOf } from './request'
 import { requireSameOrigin } from './same-origin'
 
@@ -46,29 +47,34 @@ async function act<Data>(
 
 /**
  * Makes a server action of a command: same origin → session → parse → command → answer.
+ * @param name the command's, for the log and the activity record: a build shortens the function's
  * @param schema parses the input; unknown fields are refused when it is strict
  * @param command authorises within itself
  */
 export function defineAction<Schema extends z.ZodType, Data>(
+  name: string,
   schema: Schema,
   command: (actor: Actor, input: z.output<Schema>) => Promise<Data>,
   terms: Terms = {},
 ): Action<z.input<Schema>, Data> {
   return (brandSlug, input) =>
-    act(command.name, terms, async () => {
+    act(name, terms, async () => {
       const actor = await getActor(String(brandSlug))
-      return asActor(actor, () => command(actor, schema.parse(input)))
+      return asActor(actor, () =>
+        recordRefusals(actor, { asked: name }, () => command(actor, schema.parse(input))),
+      )
     })
 }
 
 /** Makes a server action of a command about the signed-in person, in no brand. */
 export function definePersonAction<Schema extends z.ZodType, Data>(
+  name: string,
   schema: Schema,
   command: (person: SignedInPerson, input: z.output<Schema>) => Promise<Data>,
   terms: Terms = {},
 ): PlainAction<z.input<Schema>, Data> {
   return (input) =>
-    act(command.name, terms, async () => {
+    act(name, terms, async () => {
       const person = await getPerson()
       if (!person) throw new UnauthenticatedError()
       return withinScope({ personId: person.id }, () => command(person, schema.parse(input)))
@@ -83,12 +89,13 @@ export interface Caller {
 
 /** Makes a server action for whoever asks, signed in or not. */
 export function definePublicAction<Schema extends z.ZodType, Data>(
+  name: string,
   schema: Schema,
   command: (input: z.output<Schema>, caller: Caller) => Promise<Data>,
   terms: Terms = {},
 ): PlainAction<z.input<Schema>, Data> {
   return (input) =>
-    act(command.name, terms, (head) =>
+    act(name, terms, (head) =>
       command(schema.parse(input), {
         address: addressOf(head),
         userAgent: head.get('user-agent') ?? '',

@@ -8,6 +8,7 @@ import { withinScope } from '@/models/scope'
 
 import { gatherInput } from './gather-input'
 import { failureOf } from './map-error'
+import { recordRefusals } from './record-refusals'
 import { requestIdOf } from './request'
 import { requireSameOrigin } from './same-origin'
 
@@ -19,8 +20,10 @@ const PRIVATE = { 'Cache-Control': 'private, no-store' }
  * Makes a route handler under /api/brands/[brand] of a query or command: session → parse → work →
  * answer. The input is the address's parameters, the query string and, for writes, the JSON body; a
  * field may come once. A Response is passed on as it is; anything else becomes JSON.
+ * @param name what is asked for, for the log and the activity record
  */
 export function defineRoute<Schema extends z.ZodType>(
+  name: string,
   schema: Schema,
   work: (actor: Actor, input: z.output<Schema>, request: NextRequest) => Promise<unknown>,
 ): (request: NextRequest, context: { params: Promise<Params> }) => Promise<Response> {
@@ -32,12 +35,14 @@ export function defineRoute<Schema extends z.ZodType>(
       const actor = await getActor(brand)
       const body = writes ? await readJson(request) : {}
       const input = schema.parse(gatherInput(rest, request.nextUrl.searchParams, body))
-      const result = await asActor(actor, () => work(actor, input, request))
+      const result = await asActor(actor, () =>
+        recordRefusals(actor, { asked: name }, () => work(actor, input, request)),
+      )
       return result instanceof Response
         ? result
         : Response.json(result ?? null, { headers: PRIVATE })
     } catch (error) {
-      return failureResponse(failureOf(error, `${request.method} ${request.nextUrl.pathname}`))
+      return failureResponse(failureOf(error, name))
     }
   }
   return (request, context) =>

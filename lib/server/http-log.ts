@@ -5,7 +5,7 @@ import type { Socket } from 'node:net'
 
 import { logger } from '@/lib/logger'
 
-import { PEER_HEADER, REQUEST_ID_HEADER } from './request'
+import { PATH_HEADER, PEER_HEADER, REQUEST_ID_HEADER } from './request'
 
 interface Started {
   request: IncomingMessage
@@ -20,9 +20,9 @@ const QUIET = /^\/(_next\/static|livez|readyz|icon|favicon)/
 const TOKEN = /[\w-]{43}/g
 
 /**
- * Gives every request its id and the address it truly came from, over whatever headers of those
- * names it carries, before anything else sees it; and logs a line when it has been answered. By
- * Node.js's own channel, since Next.js keeps its server to itself.
+ * Gives every request its id, its path and the address it truly came from, over whatever headers of
+ * those names it carries, before anything else sees it; and logs a line when it has been answered.
+ * By Node.js's own channel, since Next.js keeps its server to itself.
  */
 export function watchRequests(): void {
   subscribe('http.server.request.start', (message) => {
@@ -34,6 +34,7 @@ export function watchRequests(): void {
     response.setHeader(REQUEST_ID_HEADER, requestId)
     const { method, url = '' } = request
     const path = url.split('?')[0]!.replace(TOKEN, '…')
+    request.headers[PATH_HEADER] = path
     if (QUIET.test(path)) return
     response.once('close', () => {
       const ms = Math.round(performance.now() - started)

@@ -1,4 +1,4 @@
-import { randomBytes } from 'node:crypto'
+import { randomUUID } from 'node:crypto'
 
 import {
   ConnectionAcquireTimeoutError,
@@ -54,6 +54,9 @@ export function fieldErrorsOf(error: z.ZodError): FieldErrors {
   return errors
 }
 
+/** What names a masked error to the person who met it: the beginning of its request's id. */
+export const referenceOf = (requestId: string = randomUUID()): string => requestId.slice(0, 8)
+
 /**
  * Turns anything thrown into what may be shown. Expected errors keep their words; others are
  * masked, logged, and named by a reference that finds the log line.
@@ -72,7 +75,7 @@ export function failureOf(error: unknown, where: string): Failure {
       ...(known instanceof TooManyError && { retryAfter: known.retryAfter }),
     }
   }
-  const reference = requestId?.slice(0, 8) ?? randomBytes(4).toString('hex')
+  const reference = referenceOf(requestId)
   logger().error({ err: error, where, reference, requestId }, 'unexpected error')
   return {
     ok: false,

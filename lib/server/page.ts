@@ -13,9 +13,17 @@ import {
 } from '@/lib/errors'
 import { withinScope } from '@/models/scope'
 
-import { requestIdOf } from './request'
+import { referenceOf } from './map-error'
+import { recordRefusals } from './record-refusals'
+import { PATH_HEADER, requestIdOf } from './request'
 
-/** What queries refuse becomes the page that says so; anything else reaches the error page. */
+/** Of a longer path the activity record keeps the beginning. */
+const MOST_OF_A_PATH = 200
+
+/**
+ * What queries refuse becomes the page that says so; anything else reaches the error page, which
+ * shows the digest that it is given here.
+ */
 async function readOrSay<T>(read: () => Promise<T>): Promise<T> {
   const requestId = requestIdOf(await headers())
   try {
@@ -25,6 +33,9 @@ async function readOrSay<T>(read: () => Promise<T>): Promise<T> {
     if (error instanceof SecondFactorNeededError) redirect('/account/second-factor')
     if (error instanceof ForbiddenError) forbidden()
     if (error instanceof NotFoundError || error instanceof InvalidError) notFound()
+    if (error instanceof Error && !('digest' in error)) {
+      Object.assign(error, { digest: referenceOf(requestId) })
+    }
     throw error
   }
 }
@@ -37,7 +48,10 @@ async function readOrSay<T>(read: () => Promise<T>): Promise<T> {
 export const readForPage = <T>(brandSlug: string, read: (actor: Actor) => Promise<T>): Promise<T> =>
   readOrSay(async () => {
     const actor = await getActor(brandSlug)
-    return asActor(actor, () => read(actor))
+    const path = (await headers()).get(PATH_HEADER) ?? ''
+    return asActor(actor, () =>
+      recordRefusals(actor, { page: path.slice(0, MOST_OF_A_PATH) }, () => read(actor)),
+    )
   })
 
 /** Reads for a page of the signed-in person, in no brand. */

@@ -7,6 +7,9 @@ export const REQUEST_ID_HEADER = 'x-request-id'
 /** The address the connection came from. */
 export const PEER_HEADER = 'x-woadmap-peer'
 
+/** The path that was asked for, which Next.js does not tell a page. */
+export const PATH_HEADER = 'x-woadmap-path'
+
 type HeaderSource = Pick<Headers, 'get'>
 
 /** The id of the request, for the log, the activity record and the jobs it leads to. */

@@ -57,7 +57,7 @@ export async function makeTestWorld(fleet, local, given, { durable = false } = {
       ...LOCAL_KEYS,
       SMTP_URL: smtp,
       MAIL_FROM: 'Woadmap <woadmap@localhost>',
-      LOG_LEVEL: 'warn',
+      LOG_LEVEL: 'info',
       SEED_DEMO: 'true',
       NEXT_TELEMETRY_DISABLED: '1',
       // It says at every start that Node.js 20 will not be served for ever.

@@ -30,6 +30,7 @@ export const PAGES: readonly StudioPage[] = [
   { name: 'lines', roles: EVERYBODY, find: () => `/${BRAND}` },
   { name: 'a new line', roles: ['owner'], find: () => `/${BRAND}/lines/new` },
   { name: 'how the brand signs in', roles: ['owner'], find: () => `/${BRAND}/security` },
+  { name: 'the activity record', roles: ['owner'], find: () => `/${BRAND}/activity` },
   { name: 'a line', roles: EVERYBODY, find: () => LINE },
   { name: 'changing a line', roles: ['owner'], find: () => `${LINE}/edit` },
   { name: 'the sample book', roles: EVERYBODY, find: () => `${LINE}/shades` },

@@ -6,16 +6,18 @@ import { updateLine } from '@/lib/lines/update-line'
 import { defineAction } from '@/lib/server/define-action'
 
 export const createLineAction = defineAction(
+  'createLine',
   createLineSchema,
-  async function createLineCommand(actor, input) {
+  async (actor, input) => {
     const { slug } = await createLine(actor, input)
     return { slug }
   },
 )
 
 export const updateLineAction = defineAction(
+  'updateLine',
   updateLineSchema,
-  async function updateLineCommand(actor, input) {
+  async (actor, input) => {
     const { slug, version } = await updateLine(actor, input)
     return { slug, version }
   },

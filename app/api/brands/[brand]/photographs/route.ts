@@ -3,4 +3,4 @@ import { requestUploadSchema } from '@/lib/photographs/schema'
 import { defineRoute } from '@/lib/server/define-route'
 
 /** Announces a file; the answer says where to send it. */
-export const POST = defineRoute(requestUploadSchema, requestUpload)
+export const POST = defineRoute('requestUpload', requestUploadSchema, requestUpload)

@@ -12,24 +12,33 @@ import {
 import { defineAction } from '@/lib/server/define-action'
 
 export const renameCombinationAction = defineAction(
+  'renameCombination',
   renameCombinationSchema,
-  async function rename(actor, input) {
+  async (actor, input) => {
     const { title, version } = await renameCombination(actor, input)
     return { title, version }
   },
 )
 
 export const reorderCombinationAction = defineAction(
+  'reorderCombination',
   reorderCombinationSchema,
-  async function reorder(actor, input) {
+  async (actor, input) => {
     const { version } = await reorderCombination(actor, input)
     return { version }
   },
 )
 
 // The page it is called from is gone after it: its own page would answer "not found".
-export const deleteCombinationAction = defineAction(combinationIdSchema, deleteCombination, {
-  refreshes: false,
-})
+export const deleteCombinationAction = defineAction(
+  'deleteCombination',
+  combinationIdSchema,
+  deleteCombination,
+  { refreshes: false },
+)
 
-export const restoreCombinationAction = defineAction(combinationIdSchema, restoreCombination)
+export const restoreCombinationAction = defineAction(
+  'restoreCombination',
+  combinationIdSchema,
+  restoreCombination,
+)

@@ -4,6 +4,14 @@ import { deletePhotographs, restorePhotographs } from '@/lib/photographs/delete-
 import { photographIdsSchema } from '@/lib/photographs/schema'
 import { defineAction } from '@/lib/server/define-action'
 
-export const deletePhotographsAction = defineAction(photographIdsSchema, deletePhotographs)
+export const deletePhotographsAction = defineAction(
+  'deletePhotographs',
+  photographIdsSchema,
+  deletePhotographs,
+)
 
-export const restorePhotographsAction = defineAction(photographIdsSchema, restorePhotographs)
+export const restorePhotographsAction = defineAction(
+  'restorePhotographs',
+  photographIdsSchema,
+  restorePhotographs,
+)

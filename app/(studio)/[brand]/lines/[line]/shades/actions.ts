@@ -22,32 +22,41 @@ import { setShadeStatus } from '@/lib/shades/set-shade-status'
 import { updateShade } from '@/lib/shades/update-shade'
 
 export const createShadeAction = defineAction(
+  'createShade',
   createShadeSchema,
-  async function createShadeCommand(actor, input) {
+  async (actor, input) => {
     return presentShade(await createShade(actor, input))
   },
 )
 
 export const updateShadeAction = defineAction(
+  'updateShade',
   updateShadeSchema,
-  async function updateShadeCommand(actor, input) {
+  async (actor, input) => {
     return presentShade(await updateShade(actor, input))
   },
 )
 
-export const setShadeStatusAction = defineAction(setShadeStatusSchema, setShadeStatus)
+export const setShadeStatusAction = defineAction(
+  'setShadeStatus',
+  setShadeStatusSchema,
+  setShadeStatus,
+)
 
-export const reorderShadesAction = defineAction(reorderShadesSchema, reorderShades)
+export const reorderShadesAction = defineAction('reorderShades', reorderShadesSchema, reorderShades)
 
 // The page of a deleted shade must leave before it is rendered anew; the caller does both.
-export const deleteShadesAction = defineAction(deleteShadesSchema, deleteShades, {
+export const deleteShadesAction = defineAction('deleteShades', deleteShadesSchema, deleteShades, {
   refreshes: false,
 })
 
-export const restoreShadesAction = defineAction(restoreShadesSchema, restoreShades)
+export const restoreShadesAction = defineAction('restoreShades', restoreShadesSchema, restoreShades)
 
-export const previewImportAction = defineAction(previewImportSchema, previewImport, {
-  refreshes: false,
-})
+export const previewImportAction = defineAction(
+  'previewImport',
+  previewImportSchema,
+  previewImport,
+  { refreshes: false },
+)
 
-export const importShadesAction = defineAction(importShadesSchema, importShades)
+export const importShadesAction = defineAction('importShades', importShadesSchema, importShades)

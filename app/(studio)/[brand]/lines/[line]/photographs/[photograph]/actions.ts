@@ -8,18 +8,24 @@ import { updatePhotograph } from '@/lib/photographs/update-photograph'
 import { defineAction } from '@/lib/server/define-action'
 
 export const keepCombinationAction = defineAction(
+  'keepCombination',
   keepCombinationSchema,
-  async function keep(actor, input) {
+  async (actor, input) => {
     const { id, title } = await keepCombination(actor, input)
     return { combinationId: id, title }
   },
 )
 
-export const rereadPhotographAction = defineAction(photographIdSchema, rereadPhotograph)
+export const rereadPhotographAction = defineAction(
+  'rereadPhotograph',
+  photographIdSchema,
+  rereadPhotograph,
+)
 
 export const updatePhotographAction = defineAction(
+  'updatePhotograph',
   updatePhotographSchema,
-  async function update(actor, input) {
+  async (actor, input) => {
     const { version } = await updatePhotograph(actor, input)
     return { version }
   },

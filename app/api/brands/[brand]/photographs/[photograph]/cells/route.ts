@@ -3,7 +3,7 @@ import { photographParamSchema } from '@/lib/photographs/schema'
 import { defineRoute } from '@/lib/server/define-route'
 
 /** The cell of each pixel, one byte a pixel, with the picture's size in two headers. */
-export const GET = defineRoute(photographParamSchema, async (actor, input) => {
+export const GET = defineRoute('getCellMap', photographParamSchema, async (actor, input) => {
   const { width, height, cells } = await getCellMap(actor, input)
   return new Response(new Uint8Array(cells), {
     headers: {

@@ -3,4 +3,4 @@ import { photographParamSchema } from '@/lib/photographs/schema'
 import { defineRoute } from '@/lib/server/define-route'
 
 /** Takes in a file that has been sent to the object store. */
-export const POST = defineRoute(photographParamSchema, confirmUpload)
+export const POST = defineRoute('confirmUpload', photographParamSchema, confirmUpload)

@@ -3,4 +3,4 @@ import { matchParamsSchema } from '@/lib/photographs/schema'
 import { defineRoute } from '@/lib/server/define-route'
 
 /** The five for a photograph under the wishes of the address. */
-export const GET = defineRoute(matchParamsSchema, matchWithWishes)
+export const GET = defineRoute('matchWithWishes', matchParamsSchema, matchWithWishes)

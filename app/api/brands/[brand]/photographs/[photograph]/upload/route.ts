@@ -3,4 +3,4 @@ import { photographParamSchema } from '@/lib/photographs/schema'
 import { defineRoute } from '@/lib/server/define-route'
 
 /** Gives up an upload that was not confirmed. */
-export const DELETE = defineRoute(photographParamSchema, withdrawUpload)
+export const DELETE = defineRoute('withdrawUpload', photographParamSchema, withdrawUpload)
