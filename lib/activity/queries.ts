@@ -1,4 +1,4 @@
-import { Op, type WhereOptions } from 'sequelize'
+import { col, fn, Op, where, type WhereOptions } from 'sequelize'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { Activity, Membership, Person } from '@/models'
@@ -20,7 +20,9 @@ function whereOf(actor: Actor, { person, what, from, to }: ActivityFilter): Wher
   return {
     brandId: actor.brandId,
     ...(person && { personId: person === 'former' ? null : person }),
-    ...(what && { action: what in ACTIVITY_KINDS ? { [Op.startsWith]: `${what}.` } : what }),
+    ...(what && {
+      [Op.and]: [isOfKind(what.split('.')[0]!), isKind(what) ? {} : { action: what }],
+    }),
     ...((from ?? to) && {
       createdAt: {
         ...(from && { [Op.gte]: new Date(from) }),
@@ -48,6 +50,10 @@ async function withNames(entries: Activity[]): Promise<ActivityRow[]> {
   const names = new Map(people.map(({ id, name }) => [id, name]))
   return entries.map((entry) => ({ entry, about: names.get(entry.objectId ?? '') ?? null }))
 }
+
+/** As an index has it. */
+const isOfKind = (kind: string) => where(fn('split_part', col('action'), '.', 1), kind)
+const isKind = (what: string) => what in ACTIVITY_KINDS
 
 /**
  * A page of the record, newest first: from the newest entry, or from the one after `before`. It

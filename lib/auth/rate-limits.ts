@@ -25,6 +25,8 @@ export const RATE_LIMITS = {
   upload: { points: 600, duration: HOUR },
   /** Lines of the activity record about the same person refused the same thing. */
   refusal: { points: 1, duration: MINUTE },
+  /** Those about the same person, whatever it was. */
+  'refusal-person': { points: 200, duration: HOUR },
 } as const
 /** One of RATE_LIMITS. */
 export type RateLimit = keyof typeof RATE_LIMITS

@@ -35,7 +35,9 @@ async function recordRefusal(actor: Actor, what: Asked): Promise<void> {
   const { brandId, personId } = actor
   try {
     await asActor(actor, async () => {
-      await spend('refusal', `${brandId} ${personId} ${Object.values(what).join()}`)
+      const who = `${brandId} ${personId}`
+      await spend('refusal', `${who} ${Object.values(what).join()}`)
+      await spend('refusal-person', who)
       await inTransaction((transaction) =>
         recordActivity(actor, { action: 'access.refused', after: what }, transaction),
       )
