@@ -17,19 +17,31 @@ import { definePublicAction } from '@/lib/server/define-action'
 // Each leaves the page it was sent from to say what happened: the link it stands on is used up.
 const STAYS = { refreshes: false }
 
-export const signUpAction = definePublicAction(signUpSchema, signUp, STAYS)
+export const signUpAction = definePublicAction('signUp', signUpSchema, signUp, STAYS)
 
-export const confirmSignUpAction = definePublicAction(confirmSignUpSchema, confirmSignUp, STAYS)
+export const confirmSignUpAction = definePublicAction(
+  'confirmSignUp',
+  confirmSignUpSchema,
+  confirmSignUp,
+  STAYS,
+)
 
 export const requestPasswordResetAction = definePublicAction(
+  'requestPasswordReset',
   requestPasswordResetSchema,
   requestPasswordReset,
   STAYS,
 )
 
-export const resetPasswordAction = definePublicAction(resetPasswordSchema, resetPassword, STAYS)
+export const resetPasswordAction = definePublicAction(
+  'resetPassword',
+  resetPasswordSchema,
+  resetPassword,
+  STAYS,
+)
 
 export const confirmEmailChangeAction = definePublicAction(
+  'confirmEmailChange',
   confirmEmailChangeSchema,
   confirmEmailChange,
   STAYS,

@@ -110,6 +110,10 @@ export const ACTIONS = {
     label: 'Second factor added',
     says: () => 'added a second factor to their account',
   },
+  'person.second-factor-replaced': {
+    label: 'Second factor replaced',
+    says: () => 'set up another authenticator in place of theirs',
+  },
   'person.second-factor-removed': {
     label: 'Second factor removed',
     says: () => 'removed the second factor from their account',

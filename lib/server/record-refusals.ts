@@ -5,7 +5,8 @@ import { asActor, type Actor } from '@/lib/auth/actor'
 import { spend } from '@/lib/auth/rate-limits'
 import { ForbiddenError, TooManyError } from '@/lib/errors'
 import { logger } from '@/lib/logger'
-import { currentScope, inTransaction, withinScope } from '@/models'
+import { inTransaction } from '@/models'
+import { currentScope, withinScope } from '@/models/scope'
 
 /** What was asked for: an action or a route by its name, or a page by its path. */
 export type Asked = { asked: string } | { page: string }

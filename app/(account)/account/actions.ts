@@ -16,19 +16,33 @@ import {
 } from '@/lib/people/schema'
 import { definePersonAction } from '@/lib/server/define-action'
 
-export const changeNameAction = definePersonAction(changeNameSchema, changeName)
+export const changeNameAction = definePersonAction('changeName', changeNameSchema, changeName)
 
 export const requestEmailChangeAction = definePersonAction(
+  'requestEmailChange',
   requestEmailChangeSchema,
   requestEmailChange,
 )
 
-export const changePasswordAction = definePersonAction(changePasswordSchema, changePassword)
+export const changePasswordAction = definePersonAction(
+  'changePassword',
+  changePasswordSchema,
+  changePassword,
+)
 
-export const endSessionAction = definePersonAction(endSessionSchema, endOwnSession)
+export const endSessionAction = definePersonAction('endOwnSession', endSessionSchema, endOwnSession)
 
-export const endOtherSessionsAction = definePersonAction(nothingSchema, endOtherSessions)
+export const endOtherSessionsAction = definePersonAction(
+  'endOtherSessions',
+  nothingSchema,
+  endOtherSessions,
+)
 
-export const closeAccountAction = definePersonAction(closeAccountSchema, closeAccount, {
-  refreshes: false,
-})
+export const closeAccountAction = definePersonAction(
+  'closeAccount',
+  closeAccountSchema,
+  closeAccount,
+  {
+    refreshes: false,
+  },
+)

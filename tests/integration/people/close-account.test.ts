@@ -75,7 +75,7 @@ describe('closing an account', () => {
       recordActivity(
         { brandId: elsewhere.id, personId: null },
         {
-          action: 'invitation.sent',
+          action: 'membership.invited',
           object: { kind: 'invitation', id: randomUUID(), label: person.email },
           after: { email: person.email },
         },

@@ -23,7 +23,16 @@ describe('an error in the log', () => {
       parameters: ['$argon2id$canary'],
       detail: 'Key (token_hash)=(canary) already exists.',
     })
-    const item = new ValidationErrorItem('taken', 'unique violation', 'tokenHash', 'canary')
+    const item = new ValidationErrorItem(
+      'taken',
+      'unique violation',
+      'tokenHash',
+      'canary',
+      null as never,
+      '',
+      '',
+      [],
+    )
     for (const error of [
       new DatabaseError(original),
       new UniqueConstraintError({ message: 'taken', errors: [item], parent: original }),

@@ -12,15 +12,25 @@ import {
 import { definePersonAction } from '@/lib/server/define-action'
 
 export const beginSecondFactorAction = definePersonAction(
+  'beginSecondFactor',
   beginSecondFactorSchema,
   beginSecondFactor,
 )
 
 export const confirmSecondFactorAction = definePersonAction(
+  'confirmSecondFactor',
   confirmSecondFactorSchema,
   confirmSecondFactor,
 )
 
-export const renewRecoveryCodesAction = definePersonAction(bothFactorsSchema, renewRecoveryCodes)
+export const renewRecoveryCodesAction = definePersonAction(
+  'renewRecoveryCodes',
+  bothFactorsSchema,
+  renewRecoveryCodes,
+)
 
-export const removeSecondFactorAction = definePersonAction(bothFactorsSchema, removeSecondFactor)
+export const removeSecondFactorAction = definePersonAction(
+  'removeSecondFactor',
+  bothFactorsSchema,
+  removeSecondFactor,
+)
