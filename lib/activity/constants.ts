@@ -106,7 +106,7 @@ export const ACTIONS = {
     label: 'E-mail changed',
     says: () => 'changed their e-mail address',
   },
-  'person.second-factor-added': {
+  'person.second-factor-set': {
     label: 'Second factor added',
     says: () => 'added a second factor to their account',
   },

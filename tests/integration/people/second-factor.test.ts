@@ -153,7 +153,7 @@ describe('confirming a second factor', () => {
 
   it('stands in the record of each of their brands and goes out by letter, without a secret', async () => {
     const { totp, recoveryCodes } = await setUp()
-    for (const { id } of brands) expect(await actionsIn(id)).toEqual(['person.second-factor-added'])
+    for (const { id } of brands) expect(await actionsIn(id)).toEqual(['person.second-factor-set'])
     const letters = await lettersTo()
     expect(letters.map(({ kind }) => kind)).toEqual(['second-factor-set'])
     for (const secret of [totp.secret.base32, ...recoveryCodes]) {
@@ -182,7 +182,7 @@ describe('changing the authenticator', () => {
     expect((await attempt(recoveryCodes[1])).kind).toBe('code-refused')
     expect((await attempt(next.generate(later))).kind).toBe('opened')
     expect(await actionsIn(brands[1]!.id)).toEqual([
-      'person.second-factor-added',
+      'person.second-factor-set',
       'person.second-factor-replaced',
     ])
   })
