@@ -1,9 +1,10 @@
-import { join } from 'node:path'
+import { join, relative } from 'node:path'
 
 import { build, ensureBuild } from './build.mjs'
 import { NEXT, ROOT } from './paths.mjs'
 import { migrate, seed, startJobs, startWeb } from './product.mjs'
 import { DEBIAN } from './debian.mjs'
+import { copyWithoutProxy } from './without-proxy.mjs'
 import { clearReport, readPlaywright, readVitest, tallyOfCheck, tallyOfReport } from './tally.mjs'
 
 /** No step may take longer, in milliseconds. */
@@ -68,10 +69,25 @@ export const STEPS = [
       await seed(fleet, env)
       await startJobs(fleet, env)
       await startWeb(fleet, env, { host: '127.0.0.1', port: world.port })
-      return playwright(context, { ...env, NODE_ENV: 'test' })
+      const bare = await startWithoutProxy(context, env)
+      return playwright(context, { ...env, NODE_ENV: 'test', WITHOUT_PROXY_ORIGIN: bare })
     },
   },
 ]
+
+// The same product on the same database, but for the proxy: what is closed stays closed.
+async function startWithoutProxy({ fleet, local, world }, env) {
+  const dist = join(local, 'next-without-proxy')
+  copyWithoutProxy(join(ROOT, env.WOADMAP_DIST_DIR), dist)
+  const [host, port] = ['127.0.0.1', world.secondPort]
+  const origin = `http://localhost:${port}`
+  await startWeb(
+    fleet,
+    { ...env, WOADMAP_DIST_DIR: relative(ROOT, dist), APP_ORIGIN: origin, NEXTAUTH_URL: origin },
+    { name: 'web-without-proxy', host, port },
+  )
+  return origin
+}
 
 async function vitest({ fleet, local, filters }, env, projects) {
   const report = join(local, `${projects[0]}.json`)

@@ -13,11 +13,11 @@ import { startPostgres } from './postgres.mjs'
  * @param {string} local the folder that holds all of it; objects and letters of the last run go
  * @param {{durable?: boolean}} [options] whether the database must survive being killed
  * @returns {Promise<{environment: (name: string, mode: string) => object, renew: (name: string) => Promise<void>,
- *   port: number}>} `environment(name)` is a product's whole environment on a database and a bucket
+ *   port: number, secondPort: number}>} `port` is the product's, `secondPort` that of a further instance; `environment(name)` is a product's whole environment on a database and a bucket
  *   of that name; `renew(name)` empties the database
  */
 export async function makeTestWorld(fleet, local, given, { durable = false } = {}) {
-  const [databasePort, objectStorePort, mailPort, port] = await findFreePorts(4)
+  const [databasePort, objectStorePort, mailPort, port, secondPort] = await findFreePorts(5)
   const origin = `http://localhost:${port}`
   const uploads = join(local, 'uploads')
   const letters = join(local, 'mail')
@@ -35,6 +35,7 @@ export async function makeTestWorld(fleet, local, given, { durable = false } = {
   ])
   return {
     port,
+    secondPort,
     renew: (name) => postgres.renewDatabase(databaseOf(name)),
     // Every setting is given, so that neither a shell nor a .env can send a test elsewhere.
     environment: (name, mode) => ({

@@ -8,6 +8,12 @@ import { requireSameOrigin } from '@/lib/server/same-origin'
 
 type Context = { params: Promise<{ nextauth: string[] }> }
 
+/**
+ * What the sign-in form asks for. The rest of next-auth stays shut: its pages are ours, and what it
+ * tells of a session comes from the cookie alone, also when the session has long ended.
+ */
+const OPEN = ['GET csrf', 'GET providers', 'POST callback/credentials']
+
 /** next-auth answers every refusal with 401; one for asking too often says so, and until when. */
 async function tellWhen(answer: Response): Promise<Response> {
   if (answer.status !== 401) return answer
@@ -22,8 +28,10 @@ async function tellWhen(answer: Response): Promise<Response> {
   return new Response(answer.body, { status: 429, headers })
 }
 
-/** next-auth's own addresses. */
+/** Those of next-auth's own addresses that are open. */
 export async function GET(request: NextRequest, context: Context): Promise<Response> {
+  const asked = `${request.method} ${(await context.params).nextauth.join('/')}`
+  if (!OPEN.includes(asked)) return new Response(null, { status: 404 })
   const answer = await tellWhen((await NextAuth(request, context, authOptions())) as Response)
   answer.headers.set('Cache-Control', 'private, no-store')
   return answer

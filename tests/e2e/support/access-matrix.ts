@@ -1,0 +1,343 @@
+/**
+ * Who may open or do what: every page, route and server action × every actor → the answer.
+ * tests/e2e/access-matrix.spec.ts asks for all of it, and fails on what is not named here.
+ *
+ * A new page is one line in PAGES, a new route one in ROUTES, a new action one in ACTIONS. The key
+ * is the pattern of the address without groups, or the action's export. A parameter of an address
+ * (`[shade]`) is filled with the field of that name in Place (places.ts): a new one goes there.
+ *
+ * `who` says it all in most lines:
+ * - roles: members of the brand in the address with one of these roles get `answer`, others of the
+ *   brand "forbidden"; people of another brand or of none "not found"; nobody is sent to sign in.
+ * - 'signed in': everybody who is signed in gets `answer`; nobody is sent to sign in.
+ * - 'anyone': everybody gets `answer`.
+ * `except` names what answers otherwise, by actor or by standing.
+ *
+ * What is sent must be harmless even to those who may do it, and yet reach past the check: an old
+ * version ("conflict"), the state a row has already ("ok"), a name that is taken ("conflict"). What
+ * cannot be harmless names in `before` the SQL that puts its rows in place for each actor.
+ */
+import { randomUUID } from 'node:crypto'
+
+import type { ErrorCode } from '@/lib/errors'
+import type { Role } from '@/lib/people/schema'
+
+import type { Place } from './places'
+
+/** A status of a page or route, where it leads (`→ /sign-in`), or the code of an action. */
+export type Answer = number | ErrorCode | 'ok' | `→ ${string}`
+
+/** What an actor is to the brand in the address. */
+export type Standing = 'member' | 'stranger' | 'removed' | 'nobody'
+
+interface Rule {
+  who: readonly Role[] | 'signed in' | 'anyone'
+  /** What those get who may; 200 of a page or route, 'ok' of an action. */
+  answer?: Answer
+  except?: Readonly<Record<string, Answer>> & { readonly [standing in Standing]?: Answer }
+  /** Row ids that are another brand's, or nobody's, answer this instead of "not found". */
+  unknown?: Answer
+  /** SQL run before each actor asks, with its values. */
+  before?: (place: Place) => readonly [string, readonly unknown[]]
+  /** It ends the session it is asked with: each actor asks with one of its own. */
+  endsSession?: boolean
+}
+/** A page, asked with GET. */
+export interface PageRule extends Rule {
+  query?: string
+}
+/** A route, asked with the method in its key. */
+export interface RouteRule extends Rule {
+  query?: (place: Place) => string
+  body?: (place: Place) => object
+  /** The address, where the pattern alone does not say it. */
+  at?: string
+}
+/** An action made by defineAction takes the brand and `input`; any other one says its `args`. */
+export interface ActionRule extends Rule {
+  input?: (place: Place) => object
+  args?: (place: Place) => readonly unknown[]
+}
+
+const OWNER: readonly Role[] = ['owner']
+const EDITORS: readonly Role[] = ['owner', 'designer']
+const STUDIO: readonly Role[] = ['owner', 'designer', 'marketer']
+const EVERYBODY: readonly Role[] = ['owner', 'designer', 'marketer', 'dyer']
+
+/** Every page. */
+export const PAGES: Record<string, PageRule> = {
+  '/': {
+    who: 'anyone',
+    except: { member: '→ /teasel-and-tarn', stranger: '→ /quern-yarn-works' },
+  },
+  '/sign-in': { who: 'anyone', except: { member: '→ /', stranger: '→ /', removed: '→ /' } },
+  '/[brand]': { who: EVERYBODY },
+  '/[brand]/lines/new': { who: OWNER },
+  '/[brand]/lines/[line]': { who: EVERYBODY },
+  '/[brand]/lines/[line]/edit': { who: OWNER },
+  '/[brand]/lines/[line]/shades': { who: EVERYBODY },
+  '/[brand]/lines/[line]/shades/[shade]': { who: EVERYBODY },
+  '/[brand]/lines/[line]/shades/new': { who: EDITORS },
+  '/[brand]/lines/[line]/shades/import': { who: EDITORS },
+  '/[brand]/lines/[line]/photographs': { who: STUDIO },
+  '/[brand]/lines/[line]/photographs/[photograph]': { who: STUDIO },
+  '/[brand]/lines/[line]/combinations': { who: STUDIO },
+  '/[brand]/lines/[line]/combinations/[combination]': { who: STUDIO },
+}
+
+/** Every method of every route. HEAD answers as GET does, which the test asks as well. */
+export const ROUTES: Record<string, RouteRule> = {
+  'GET /icon.svg': { who: 'anyone' },
+  'GET /livez': { who: 'anyone' },
+  'GET /readyz': { who: 'anyone' },
+  'GET /api/auth/[...nextauth]': { who: 'anyone', at: '/api/auth/csrf' },
+  // Without the token of its own form it leads to signing in, whatever it holds.
+  'POST /api/auth/[...nextauth]': {
+    who: 'anyone',
+    at: '/api/auth/callback/credentials',
+    body: () => ({ email: 'owner@teasel.example', password: 'kettle-on-the-fellside' }),
+    answer: '→ /api/auth/signin',
+  },
+  'GET /api/brands/[brand]/lines/[line]/shades.csv': { who: EVERYBODY },
+  'GET /api/brands/[brand]/photographs/states': {
+    who: STUDIO,
+    query: ({ photograph }) => `?ids=${photograph}`,
+    // Photographs that are not there are left out of its list.
+    unknown: 200,
+  },
+  'GET /api/brands/[brand]/photographs/[photograph]/cells': { who: STUDIO },
+  'GET /api/brands/[brand]/photographs/[photograph]/match': {
+    who: STUDIO,
+    query: () => '?reading=true',
+  },
+  'GET /api/brands/[brand]/photographs/[photograph]/derivatives/[name]': { who: STUDIO },
+  'POST /api/brands/[brand]/photographs': {
+    who: EDITORS,
+    // A file that the line has already is not sent again.
+    body: ({ line, sha256 }) => ({
+      lineSlug: line,
+      fileName: 'hillside.jpg',
+      contentType: 'image/jpeg',
+      byteLength: 1_000,
+      sha256,
+    }),
+  },
+  // Confirmed already, it answers so.
+  'POST /api/brands/[brand]/photographs/[photograph]/confirm': { who: EDITORS },
+  'DELETE /api/brands/[brand]/photographs/[photograph]/upload': {
+    who: EDITORS,
+    at: '/api/brands/[brand]/photographs/[pending]/upload',
+    before: ({ photograph, pending }) => [
+      `INSERT INTO photographs (id, brand_id, line_id, title, file_name, object_key, content_type,
+         byte_length, sha256)
+       SELECT $2, brand_id, line_id, 'Not yet arrived', 'late.jpg', 'originals/none/' || $2::uuid,
+         'image/jpeg', 1, sha256 FROM photographs WHERE id = $1 ON CONFLICT DO NOTHING`,
+      [photograph, pending],
+    ],
+  },
+}
+
+/** Every server action. */
+export const ACTIONS: Record<string, ActionRule> = {
+  signOutAction: { who: 'anyone', args: () => [], answer: '→ /sign-in', endsSession: true },
+
+  createLineAction: {
+    who: OWNER,
+    // The brand has a line of that name.
+    input: ({ lineName }) => ({ ...LINE, name: lineName, requestKey: randomUUID() }),
+    answer: 'conflict',
+  },
+  updateLineAction: {
+    who: OWNER,
+    input: ({ line, lineName }) => ({ ...LINE, name: lineName, lineSlug: line, version: -1 }),
+    answer: 'conflict',
+  },
+
+  createShadeAction: {
+    who: EDITORS,
+    input: ({ line, shadeNumber }) => ({
+      lineSlug: line,
+      number: shadeNumber,
+      name: null,
+      status: 'target',
+      color: { kind: 'hex', hex: '#888888' },
+      requestKey: randomUUID(),
+    }),
+    answer: 'conflict',
+  },
+  updateShadeAction: {
+    who: EDITORS,
+    input: ({ line, shade }) => ({ lineSlug: line, shadeId: shade, version: -1, name: 'Mine now' }),
+    answer: 'conflict',
+  },
+  setShadeStatusAction: {
+    who: EDITORS,
+    input: ({ line, shade, shadeStatus }) => ({
+      lineSlug: line,
+      shadeIds: [shade],
+      status: shadeStatus,
+    }),
+  },
+  reorderShadesAction: {
+    who: EDITORS,
+    input: ({ line, shade, shadePlace }) => ({
+      lineSlug: line,
+      shadeIds: [shade],
+      place: shadePlace,
+    }),
+  },
+  // Unconfirmed, shades that a combination holds are not deleted but shown in their use.
+  deleteShadesAction: {
+    who: EDITORS,
+    input: ({ line, five }) => ({ lineSlug: line, shadeIds: five, confirmed: false }),
+  },
+  restoreShadesAction: {
+    who: EDITORS,
+    input: ({ line, shade }) => ({ lineSlug: line, shadeIds: [shade] }),
+  },
+  previewImportAction: {
+    who: EDITORS,
+    input: ({ line }) => ({ lineSlug: line, text: CSV, terms: null, mapping: null }),
+  },
+  importShadesAction: {
+    who: EDITORS,
+    // Nobody has seen a preview of that revision.
+    input: ({ line }) => ({
+      lineSlug: line,
+      text: CSV,
+      terms: null,
+      mapping: COLUMNS,
+      shadesRevision: -1,
+    }),
+    answer: 'conflict',
+  },
+
+  deletePhotographsAction: {
+    who: EDITORS,
+    input: ({ spare }) => ({ photographIds: [spare] }),
+    before: ({ spare }) => ['UPDATE photographs SET deleted_at = NULL WHERE id = $1', [spare]],
+  },
+  restorePhotographsAction: {
+    who: EDITORS,
+    input: ({ photograph }) => ({ photographIds: [photograph] }),
+  },
+  updatePhotographAction: {
+    who: STUDIO,
+    input: ({ photograph }) => ({
+      photographId: photograph,
+      version: -1,
+      title: 'Mine now',
+      photographer: '',
+      licence: 'own-work',
+      licenceNote: '',
+      licenceUrl: '',
+      sourceUrl: '',
+      altText: '',
+    }),
+    answer: 'conflict',
+  },
+  // It waits to be read already.
+  rereadPhotographAction: {
+    who: EDITORS,
+    input: ({ waiting }) => ({ photographId: waiting }),
+    before: ({ waiting }) => [
+      `UPDATE photographs SET state = 'waiting', failure = NULL WHERE id = $1`,
+      [waiting],
+    ],
+  },
+  // The submit that kept it, sent again.
+  keepCombinationAction: {
+    who: EDITORS,
+    input: ({ line, photograph, five, requestKey }) => ({
+      lineSlug: line,
+      photographId: photograph,
+      reading: 'true',
+      title: 'Kept once',
+      places: five.map((shadeId) => ({ shadeId, share: 0.2 })),
+      requestKey,
+    }),
+  },
+
+  renameCombinationAction: {
+    who: STUDIO,
+    input: ({ combination }) => ({ combinationId: combination, version: -1, title: 'Mine now' }),
+    answer: 'conflict',
+  },
+  reorderCombinationAction: {
+    who: EDITORS,
+    input: ({ combination, five }) => ({ combinationId: combination, version: -1, shadeIds: five }),
+    answer: 'conflict',
+  },
+  deleteCombinationAction: {
+    who: EDITORS,
+    input: ({ spareCombination }) => ({ combinationId: spareCombination }),
+    before: ({ spareCombination }) => [
+      'UPDATE combinations SET deleted_at = NULL WHERE id = $1',
+      [spareCombination],
+    ],
+  },
+  restoreCombinationAction: {
+    who: EDITORS,
+    input: ({ combination }) => ({ combinationId: combination }),
+  },
+}
+
+const LINE = {
+  fibres: [{ fibre: 'wool', percent: 100 }],
+  ply: 3,
+  weightNumber: 3,
+  netGrams: 100,
+  length: 225,
+  lengthUnit: 'm',
+  needleMm: 4,
+  gaugeStitches: 22,
+  gaugeRows: 30,
+  currency: 'GBP',
+  price: 21.5,
+  launchDate: null,
+}
+const CSV = 'number,hex\nNobody has this,#808080\n'
+const COLUMNS = {
+  number: 0,
+  name: null,
+  status: null,
+  L: null,
+  a: null,
+  b: null,
+  illuminant: null,
+  observer: null,
+  hex: 1,
+  order: null,
+}
+
+/** How each kind of thing says no. */
+const REFUSALS = {
+  page: { nobody: '→ /sign-in', stranger: 404, role: 403 },
+  route: { nobody: 401, stranger: 404, role: 403 },
+  action: { nobody: 'unauthenticated', stranger: 'not-found', role: 'forbidden' },
+} as const
+/** A page, a route or an action. */
+export type Kind = keyof typeof REFUSALS
+
+/** What the matrix says an actor gets. */
+export function expectedAnswer(
+  kind: Kind,
+  rule: Rule,
+  actor: { name: string; standing: Standing; role?: Role },
+): Answer {
+  const { who, except = {} } = rule
+  const otherwise = except[actor.name] ?? except[actor.standing]
+  if (otherwise !== undefined) return otherwise
+  const allowed = rule.answer ?? (kind === 'action' ? 'ok' : 200)
+  if (who === 'anyone') return allowed
+  const { nobody, stranger, role } = REFUSALS[kind]
+  if (actor.standing === 'nobody') return nobody
+  if (who === 'signed in') return allowed
+  if (actor.standing !== 'member') return stranger
+  return who.includes(actor.role!) ? allowed : role
+}
+
+/** What a row's id that is not of the brand gets from those who may. */
+export function expectedOfUnknown(kind: Kind, rule: Rule): Answer {
+  return rule.unknown ?? REFUSALS[kind].stranger
+}
