@@ -336,8 +336,3 @@ export function expectedAnswer(
   if (actor.standing !== 'member') return stranger
   return who.includes(actor.role!) ? allowed : role
 }
-
-/** What a row's id that is not of the brand gets from those who may. */
-export function expectedOfUnknown(kind: Kind, rule: Rule): Answer {
-  return rule.unknown ?? REFUSALS[kind].stranger
-}

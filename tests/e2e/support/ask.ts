@@ -1,3 +1,5 @@
+import { Agent, request, type IncomingHttpHeaders } from 'node:http'
+
 import type { ActionRule, Answer, Kind, PageRule, RouteRule } from './access-matrix'
 import type { Place } from './places'
 import type { Surface } from './product-surface'
@@ -66,46 +68,79 @@ export function actionQuestion(
 /** Sends it, with these cookies and further headers, and reads what came back. */
 export async function ask(
   origin: string,
-  { kind, method, address, body, action }: Question,
+  question: Question,
   cookie: string,
-  headers: Record<string, string> = {},
+  more: Record<string, string> = {},
 ): Promise<Reply> {
+  const { kind, method, address, body, action } = question
   const writes = method !== 'GET' && method !== 'HEAD'
-  const response = await fetch(origin + address, {
-    method,
-    redirect: 'manual',
-    headers: {
-      ...(cookie && { cookie }),
-      ...(writes && { origin }),
-      ...(body && { 'content-type': action ? 'text/plain;charset=UTF-8' : 'application/json' }),
-      ...(action && { 'next-action': action, accept: 'text/x-component' }),
-      ...headers,
-    },
-    ...(body && { body }),
-  })
+  const headers = {
+    ...(cookie && { cookie }),
+    ...(writes && { origin }),
+    ...(body && { 'content-type': action ? 'text/plain;charset=UTF-8' : 'application/json' }),
+    ...(action && { 'next-action': action, accept: 'text/x-component' }),
+    ...more,
+  }
+  const answer = await send(origin, question, headers)
   // A browser's request for a page's data says in its address what is in its headers.
-  const location = response.headers.get('location')
+  const { location } = answer.headers
   if (location && /[?&]_rsc\b/.test(location) && !address.includes('_rsc')) {
     const { pathname, search } = new URL(location, origin)
-    const again = { kind, method, address: pathname + search }
-    return ask(origin, again, cookie, headers)
+    return ask(origin, { kind, method, address: pathname + search }, cookie, more)
   }
-  const bytes = Buffer.from(await response.arrayBuffer())
-  const { status } = response
-  const answer = kind === 'action' ? actionAnswer(response, bytes) : plainAnswer(response, origin)
-  return { answer, status, body: bytes.toString() }
+  return {
+    answer: kind === 'action' ? actionAnswer(answer) : plainAnswer(answer, origin),
+    status: answer.status,
+    body: answer.bytes.toString(),
+  }
 }
 
-function plainAnswer({ status, headers }: Response, origin: string): Answer {
-  const location = headers.get('location')
+interface Raw {
+  status: number
+  headers: IncomingHttpHeaders
+  bytes: Buffer
+}
+
+const agent = new Agent({ keepAlive: true })
+
+/** As it stands: fetch would put an odd address right before it is sent. */
+function send(
+  origin: string,
+  { method, address, body }: Question,
+  headers: Record<string, string>,
+): Promise<Raw> {
+  const { hostname, port } = new URL(origin)
+  const length = body === undefined ? {} : { 'content-length': String(Buffer.byteLength(body)) }
+  return new Promise((done, fail) => {
+    const sent = request(
+      { hostname, port, method, path: address, headers: { ...headers, ...length }, agent },
+      (response) => {
+        const chunks: Buffer[] = []
+        response.on('data', (chunk: Buffer) => chunks.push(chunk))
+        response.once('error', fail)
+        response.once('end', () =>
+          done({
+            status: response.statusCode!,
+            headers: response.headers,
+            bytes: Buffer.concat(chunks),
+          }),
+        )
+      },
+    )
+    sent.once('error', fail)
+    sent.end(body)
+  })
+}
+
+function plainAnswer({ status, headers: { location } }: Raw, origin: string): Answer {
   if (status < 300 || status > 399 || !location) return status
   const to = new URL(location, origin)
   return `→ ${to.origin === origin ? '' : to.origin}${to.pathname}`
 }
 
-function actionAnswer({ status, headers }: Response, bytes: Buffer): Answer {
-  const redirect = headers.get('x-action-redirect')
-  if (redirect) return `→ ${redirect.split(';')[0]}` as Answer
+function actionAnswer({ status, headers, bytes }: Raw): Answer {
+  const redirect = headers['x-action-redirect']
+  if (redirect) return `→ ${String(redirect).split(';')[0]!}`
   const rows = flightRows(bytes)
   // The first row is the framework's frame; `a` points to the row of what the action gave back.
   const frame = JSON.parse(rows.get(0) ?? '{}') as { a?: string }

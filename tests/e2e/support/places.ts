@@ -56,9 +56,9 @@ export function withUnknownRows(own: Place): Place {
  */
 export function wordsOf(
   body: string,
-  { line, five, spareCombination, ...place }: Place,
+  { brand, line, five, spareCombination, ...place }: Place,
 ): readonly string[] {
-  const ids = [...IDS.map((field) => place[field]), ...five, spareCombination, line]
+  const ids = [...IDS.map((field) => place[field]), ...five, spareCombination, brand, line]
   const said = ids.reduce((rest, id) => rest.replaceAll(id, 'one'), body)
   // `$L2d` refers to a part, `2d:` begins one.
   const unnumbered = said.replace(/\\n/g, ' ').replace(/\$[A-Za-z@]?[0-9a-f]{1,3}\b/g, ' ')

@@ -42,6 +42,9 @@ export function findSurface(dist: string): Surface {
     else if (![...surface.routes].some((route) => route.endsWith(` ${pattern}`)))
       surface.routes.add(`GET ${pattern}`)
   }
+  // The framework's other router, which this product does not use.
+  for (const path of Object.keys(readJson<object>(dist, 'pages-manifest.json')))
+    if (!/^\/(_app|_document|_error|404|500)$/.test(path)) surface.pages.set(path, `pages${path}`)
   findActions(surface, dist)
   return surface
 }
