@@ -81,8 +81,9 @@ function plain(text: string): string {
   const once = (escaped: string) =>
     escaped
       .replace(/&(amp|quot|#x27|lt|gt);/g, (_, name: string) => entities[name]!)
-      .replace(/\\u([0-9a-f]{4})/gi, (_, hex: string) => String.fromCharCode(parseInt(hex, 16)))
-      .replace(/\\(["\\/])/g, '$1')
+      .replace(/\\(?:u([0-9a-f]{4})|(["\\/]))/gi, (_, hex?: string, itself?: string) =>
+        hex ? String.fromCharCode(parseInt(hex, 16)) : itself!,
+      )
   return once(once(text))
 }
 
