@@ -5,8 +5,8 @@ import { QueryTypes } from 'sequelize'
 
 import { sequelize } from '@/models'
 
-/** How long the database may take to answer, in milliseconds. */
-const WAIT = 1_000
+/** How long the database may take, in milliseconds, so that it is told within a second. */
+const WAIT = 800
 
 /** Whether this instance can serve, and if not, why. */
 export type Readiness = { ready: true; migration: string } | { ready: false; why: string }

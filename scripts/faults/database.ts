@@ -155,9 +155,6 @@ export const DATABASE_FAULTS: readonly Fault[] = [
     expected:
       'pages, routes and saves are answered in words within 4 s, /livez stays up, /readyz says no within 1 s; then all works',
     async run(world) {
-      const pids = postgresProcesses(world)
-      const thaw = () => signalAll(pids, 'SIGCONT')
-      world.undo(thaw)
       const tab = await openTab(world)
       // Connections at hand, as in the middle of a day.
       await Promise.all([1, 2, 3].map(() => world.owner.ask(`/${BRAND}/lines/${LINE}/edit`)))
@@ -166,7 +163,9 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       const midway = world.newShade()
       const saving = world.saveShade(midway)
       await world.waitForLocked(1)
-      pids.splice(0, pids.length, ...postgresProcesses(world))
+      const pids = postgresProcesses(world)
+      const thaw = () => signalAll(pids, 'SIGCONT')
+      world.undo(thaw)
       signalAll(pids, 'SIGSTOP')
       const frozen = performance.now()
       const opening = openInTab(tab, `/${BRAND}/lines/${LINE}/edit`)

@@ -25,6 +25,8 @@ export interface Ground {
 export const PATIENCE = 4_000
 /** The product must be ready this long after a repair, in milliseconds. */
 const RECOVERY = 10_000
+/** One step of undoing a fault is waited for so long, in milliseconds. */
+const UNDOING = 15_000
 
 /** The demo's first brand. */
 export const BRAND = 'teasel-and-tarn'
