@@ -166,7 +166,9 @@ export class World {
 
   /** Undoes what is left to undo. */
   async mend(): Promise<void> {
-    for (let step; (step = this.#undo.pop());) await step()
+    for (let step; (step = this.#undo.pop());) {
+      await Promise.race([step(), sleep(UNDOING, undefined, { ref: false })])
+    }
   }
 
   /**
