@@ -164,11 +164,14 @@ export class World {
     this.#undo.push(step)
   }
 
-  /** Undoes what is left to undo. */
+  /** Undoes what is left to undo, and starts what a fault that missed has left stopped. */
   async mend(): Promise<void> {
     for (let step; (step = this.#undo.pop());) {
       await Promise.race([step(), sleep(UNDOING, undefined, { ref: false })])
     }
+    const { fleet } = this.ground
+    if (!fleet.isRunning('jobs')) await this.startJobs()
+    if (!fleet.isRunning('web')) await this.startWeb()
   }
 
   /**
