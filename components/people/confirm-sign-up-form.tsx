@@ -1,10 +1,13 @@
 'use client'
 
 import { signIn } from 'next-auth/react'
+import { useState } from 'react'
 
+import { LinkButton } from '@/components/ui/link-button'
 import type { ActionResult } from '@/lib/errors'
 import type { ConfirmSignUpInput } from '@/lib/people/schema'
 
+import { Done } from './done'
 import { PasswordField } from './password-field'
 import { PersonForm } from './person-form'
 import { usePersonForm } from './use-person-form'
@@ -23,18 +26,29 @@ export function ConfirmSignUpForm({
     input: ConfirmSignUpInput,
   ) => Promise<ActionResult<{ email: string; brandSlug: string }>>
 }) {
+  const [done, setDone] = useState(false)
   const form = usePersonForm<ConfirmSignUpInput, { email: string; brandSlug: string }>({
     schema: () => import('@/lib/people/schema').then((it) => it.confirmSignUpSchema),
     values: { token, password: '' },
     send: confirm,
-    done: async ({ brandSlug, ...made }, { password }) => {
-      // Signed in or not, the account is made: the brand's page leads to signing in where it must.
-      await signIn('credentials', { ...made, password, redirect: false }).catch(() => null)
-      const home = `/${brandSlug}`
-      // A whole page load, so that nothing rendered for whoever was here before is kept.
-      window.location.assign(home)
+    done: ({ brandSlug, ...made }, { password }) => {
+      setDone(true)
+      // What stands here meanwhile leads on too, if the connection breaks now.
+      void signIn('credentials', { ...made, password, callbackUrl: `/${brandSlug}` }).catch(
+        () => undefined,
+      )
     },
   })
+  if (done) {
+    return (
+      <Done
+        title="Your address is confirmed."
+        action={<LinkButton href="/sign-in">Sign in</LinkButton>}
+      >
+        <p>You are being signed in to {brandName}.</p>
+      </Done>
+    )
+  }
   return (
     <>
       <p className="mb-6 break-words text-ink-soft">

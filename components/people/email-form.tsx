@@ -44,7 +44,7 @@ export function EmailForm({
         <Input type="email" autoComplete="email" {...form.register('email')} />
       </Field>
       <PasswordField
-        label="Password, for the new address"
+        label="Your password"
         error={form.errorOf('password')}
         {...form.register('password')}
       />

@@ -29,7 +29,7 @@ export function PasswordForm({
     <PersonForm form={form} quiet submit="Change password" pendingLabel="Changing password…">
       <input type="hidden" autoComplete="username" value={email} readOnly />
       <PasswordField
-        label="Password as it is"
+        label="Current password"
         error={form.errorOf('password')}
         {...form.register('password')}
       />

@@ -3,11 +3,13 @@ import { gzipSync } from 'node:zlib'
 import AxeBuilder from '@axe-core/playwright'
 
 import { signIn, type Who } from './support/accounts'
-import { PAGES } from './support/pages'
+import { ACCOUNT_PAGES, PAGES, SIGNED_OUT } from './support/pages'
 import { expect, test, type Page } from './support/test'
 
 const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']
 const ROLES: readonly Who[] = ['owner', 'marketer', 'designer', 'dyer']
+
+const ALL = [...PAGES, ...ACCOUNT_PAGES]
 
 /** Addresses by the name of their page, looked up once as the owner. */
 const addresses = new Map<string, string>()
@@ -15,7 +17,7 @@ const addresses = new Map<string, string>()
 test.beforeAll(async ({ browser }) => {
   const page = await browser.newPage()
   await signIn(page, 'owner')
-  for (const { name, find } of PAGES) addresses.set(name, await find(page))
+  for (const { name, find } of ALL) addresses.set(name, await find(page))
   await page.close()
 })
 
@@ -25,7 +27,7 @@ async function violationsOf(page: Page): Promise<string[]> {
 }
 
 test('the pages before signing in are accessible', async ({ page }) => {
-  for (const address of ['/', '/sign-in']) {
+  for (const address of SIGNED_OUT) {
     await page.goto(address)
     await expect(page.getByRole('heading', { level: 1 })).toBeVisible()
     expect(await violationsOf(page), address).toEqual([])
@@ -40,7 +42,7 @@ for (const role of ROLES) {
     const problems: string[] = []
     page.on('pageerror', (error) => problems.push(error.message))
     await signIn(page, role)
-    for (const { name, roles } of PAGES) {
+    for (const { name, roles } of ALL) {
       const address = addresses.get(name)!
       await page.setViewportSize({ width: 1280, height: 900 })
       const response = await page.goto(address)
@@ -70,7 +72,8 @@ test('no page needs more script before it answers than its bar', async ({ page }
     sizes.set(source, size)
     return size
   }
-  for (const [name, address] of addresses.set('signing in', '/sign-in')) {
+  for (const address of SIGNED_OUT) addresses.set(address, address)
+  for (const [name, address] of addresses) {
     const html = await (await page.request.get(address)).text()
     // What is loaded after the page stands in no script tag; what is for old browsers is not loaded.
     const tags = [...html.matchAll(/<script[^>]+src="([^"]+)"[^>]*>/g)]

@@ -51,3 +51,12 @@ export const PAGES: readonly StudioPage[] = [
     find: firstLink('combinations', new RegExp(`/combinations/${ID}`)),
   },
 ]
+
+/** The pages of whoever is signed in, in no brand. */
+export const ACCOUNT_PAGES: readonly StudioPage[] = [
+  { name: 'the account', roles: EVERYBODY, find: () => '/account' },
+  { name: 'closing the account', roles: EVERYBODY, find: () => '/account/close' },
+]
+
+/** The pages of whoever is not signed in. */
+export const SIGNED_OUT = ['/', '/sign-in', '/sign-up', '/forgotten-password'] as const
