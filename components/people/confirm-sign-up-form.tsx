@@ -52,7 +52,7 @@ export function ConfirmSignUpForm({
   return (
     <>
       <p className="mb-6 break-words text-ink-soft">
-        {email} for {brandName}. Type the password you chose when you signed up; it shows that it
+        You signed up {brandName} with {email}. Type the password you chose then: it shows that it
         was you.
       </p>
       <PersonForm form={form} submit="Confirm address" pendingLabel="Confirming address…">

@@ -49,7 +49,7 @@ export function PasswordField({
       <Button
         variant="quiet"
         size="small"
-        className="absolute -top-1.5 right-0"
+        className="absolute -top-1.5 -right-2.5"
         onClick={() => setShown(!shown)}
       >
         {shown ? 'Hide' : 'Show'}

@@ -16,8 +16,11 @@ interface Started {
 /** What is asked for all day long and says nothing. */
 const QUIET = /^\/(_next\/static|livez|readyz|icon|favicon)/
 
-/** The token of a link in a letter: whoever has it may use it, so the log does not keep it. */
-const TOKEN = /[\w-]{43}/g
+/**
+ * What the log keeps of an address: no query, and no token of a link in a letter, since whoever has
+ * one may use it.
+ */
+export const loggedPath = (url: string): string => url.split('?')[0]!.replace(/[\w-]{43,}/g, '…')
 
 /**
  * Gives every request its id, its path and the address it truly came from, over whatever headers of
@@ -33,7 +36,7 @@ export function watchRequests(): void {
     request.headers[PEER_HEADER] = socket.remoteAddress ?? ''
     response.setHeader(REQUEST_ID_HEADER, requestId)
     const { method, url = '' } = request
-    const path = url.split('?')[0]!.replace(TOKEN, '…')
+    const path = loggedPath(url)
     request.headers[PATH_HEADER] = path
     if (QUIET.test(path)) return
     response.once('close', () => {
