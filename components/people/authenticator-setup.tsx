@@ -12,7 +12,7 @@ const CODE_HINT = 'The six digits that your authenticator shows for Woadmap now.
 
 /** The two steps after the beginning: show the secret to an authenticator, type its first code. */
 export function AuthenticatorSetup({
-  setup: { secret, uri, svg },
+  setup: { secret, uri, picture },
   confirm,
   onConfirmed,
   onLeave,
@@ -26,15 +26,16 @@ export function AuthenticatorSetup({
     <div className="space-y-8">
       <section>
         <h2 className="text-xl">1. Show this to your authenticator</h2>
-        <div
-          role="img"
-          aria-label="A picture of the secret, for a telephone’s camera. The secret itself stands below it."
-          className="mt-4 size-52 border border-hairline bg-sheet [&>svg]:size-full"
-          // Drawn on the server, of nothing but the address below.
-          dangerouslySetInnerHTML={{ __html: svg }}
+        {/* eslint-disable-next-line @next/next/no-img-element -- drawn for this page alone */}
+        <img
+          src={picture}
+          alt="A picture of the secret, for a telephone’s camera. The secret itself stands below it."
+          className="mt-4 size-52 border border-hairline bg-sheet"
         />
-        <p className="mt-4 text-ink-soft">Or type this secret; its code changes with time:</p>
-        <p className="mt-1 max-w-72 text-lg font-medium tracking-wide select-all [word-spacing:0.35em]">
+        <p className="mt-4 text-ink-soft">
+          Or type this secret, for a code that changes with time:
+        </p>
+        <p className="mt-1 max-w-60 text-lg font-medium tracking-wide select-all [word-spacing:0.35em]">
           {secret}
         </p>
         <p className="mt-4 mb-2 text-ink-soft">On the telephone itself:</p>
@@ -55,7 +56,7 @@ export function AuthenticatorSetup({
         />
       </section>
       <Button variant="quiet" onClick={onLeave}>
-        Leave it as it was
+        Leave it for now
       </Button>
     </div>
   )

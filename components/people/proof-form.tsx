@@ -4,6 +4,7 @@ import { useState } from 'react'
 import { useForm } from 'react-hook-form'
 
 import { reach } from '@/components/reach'
+import type { ButtonVariant } from '@/components/ui/button-class'
 import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
 import { Notice } from '@/components/ui/notice'
@@ -22,7 +23,7 @@ export function ProofForm<Asked extends keyof Proof, Data>({
   onDone,
   label,
   pendingLabel,
-  danger = false,
+  variant,
 }: {
   asks: readonly Asked[]
   codeHint?: string
@@ -31,7 +32,7 @@ export function ProofForm<Asked extends keyof Proof, Data>({
   /** The button: a verb with its object. */
   label: string
   pendingLabel: string
-  danger?: boolean
+  variant?: ButtonVariant
 }) {
   const [problem, setProblem] = useState<string>()
   const { register, handleSubmit, setError, formState } = useForm<Proof>({
@@ -80,11 +81,7 @@ export function ProofForm<Asked extends keyof Proof, Data>({
           />
         </Field>
       ) : null}
-      <SubmitButton
-        variant={danger ? 'danger' : 'primary'}
-        pending={isSubmitting}
-        pendingLabel={pendingLabel}
-      >
+      <SubmitButton variant={variant} pending={isSubmitting} pendingLabel={pendingLabel}>
         {label}
       </SubmitButton>
     </form>

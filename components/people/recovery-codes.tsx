@@ -50,12 +50,13 @@ export function RecoveryCodes({
       <h2 ref={heading} tabIndex={-1} className="text-xl outline-none">
         Keep your recovery codes
       </h2>
-      <p className="mt-1 text-ink-soft">
+      <p className="mt-1 text-ink-soft print:hidden">
         Without your authenticator, each of these signs you in once. They are shown now and never
         again; keep them where you will find them without your telephone.
       </p>
       <p className="mt-1 hidden print:block">
-        For {email} on Woadmap; each is good once, after the password.
+        Recovery codes of {email} on Woadmap. Each signs in once, after the password, in place of a
+        code of the authenticator.
       </p>
       <ol
         aria-label="Recovery codes"

@@ -95,6 +95,7 @@ function NotInUse({ begun, actions, onSetup, onCodes }: PartProps) {
           onDone={onSetup}
           label={begun ? 'Begin again' : 'Set up second factor'}
           pendingLabel="Making a secret…"
+          variant={begun ? 'secondary' : 'primary'}
         />
       </section>
     </div>
@@ -170,7 +171,7 @@ function InUse({ codesLeft, removable, actions, onSetup, onCodes }: PartProps) {
           onDone={() => toastDone('Your second factor is removed.')}
           label="Remove second factor"
           pendingLabel="Removing…"
-          danger
+          variant="danger"
         />
       </Dialog>
     </>

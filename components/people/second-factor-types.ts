@@ -6,8 +6,8 @@ export interface AuthenticatorSetup {
   secret: string
   /** The `otpauth:` address. */
   uri: string
-  /** The same as a picture: an SVG element. */
-  svg: string
+  /** The `data:` address of the same as a picture. */
+  picture: string
 }
 
 /** A password, and a code where one is asked for. */

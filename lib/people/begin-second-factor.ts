@@ -15,8 +15,8 @@ export interface BegunSecondFactor {
   secret: string
   /** The `otpauth:` address, which opens an authenticator on the telephone itself. */
   uri: string
-  /** The same address as a picture for another device's camera: an SVG element. */
-  svg: string
+  /** The same address for another device's camera: the `data:` address of an SVG picture. */
+  picture: string
 }
 
 /**
@@ -42,5 +42,9 @@ export async function beginSecondFactor(
     errorCorrectionLevel: 'M',
     color: { dark: '#000000', light: '#ffffff' },
   })
-  return { secret: secret.replace(/(.{4})(?=.)/g, '$1 '), uri, svg }
+  return {
+    secret: secret.replace(/(.{4})(?=.)/g, '$1 '),
+    uri,
+    picture: `data:image/svg+xml;base64,${Buffer.from(svg).toString('base64')}`,
+  }
 }

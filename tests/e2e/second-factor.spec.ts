@@ -1,11 +1,12 @@
-import { readFileSync } from 'node:fs'
+import { readdirSync, readFileSync } from 'node:fs'
+import { join } from 'node:path'
 
 import AxeBuilder from '@axe-core/playwright'
-import { expect, test, type Page } from '@playwright/test'
 import { TOTP } from 'otpauth'
 
 import { signOut } from './support/accounts'
 import { makeBrandWithPeople, type TestPerson } from './support/people'
+import { expect, test, type Page } from './support/test'
 
 const ADDRESS = '/account/second-factor'
 const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']
@@ -31,6 +32,16 @@ async function signInAs(page: Page, { email, password }: TestPerson, code?: stri
   if (code === undefined) return
   await page.getByLabel('Code').fill(code)
   await page.getByRole('button', { name: 'Sign in' }).click()
+}
+
+/** The subjects of the letters that somebody has been sent, as the local mail server files them. */
+function subjectsTo({ email }: TestPerson): string[] {
+  const folder = join(process.env.WOADMAP_LOCAL!, 'mail')
+  return readdirSync(folder)
+    .filter((name) => name.endsWith('.json'))
+    .map((name) => JSON.parse(readFileSync(join(folder, name), 'utf8')))
+    .filter(({ to }: { to: string[] }) => to.includes(email))
+    .map(({ subject }: { subject: string }) => subject)
 }
 
 /** An authenticator: codes one after another, none twice. */
@@ -92,7 +103,7 @@ test('a second factor is set up, and from then on signing in asks for a code, or
   await page.getByLabel('Password').fill(people.owner.password)
   await page.getByRole('button', { name: 'Begin again' }).click()
   await expect(page.getByRole('heading', { name: /Show this/ })).toBeVisible()
-  await page.getByRole('button', { name: 'Leave it as it was' }).click()
+  await page.getByRole('button', { name: 'Leave it for now' }).click()
   await page.getByRole('button', { name: 'Begin again' }).waitFor()
   await page.getByLabel('Password').fill(people.owner.password)
   await page.getByRole('button', { name: 'Begin again' }).click()
@@ -137,6 +148,13 @@ test('a second factor is set up, and from then on signing in asks for a code, or
   await dialog.getByLabel('Code').fill(codes[4]!)
   await dialog.getByRole('button', { name: 'Remove second factor' }).click()
   await expect(page.getByText('Not in use')).toBeVisible()
+  await expect
+    .poll(() => subjectsTo(people.owner).sort(), { timeout: 20_000 })
+    .toEqual([
+      'A recovery code was used',
+      'Your second factor is in use',
+      'Your second factor was removed',
+    ])
 })
 
 test('a brand that requires a second factor shuts out who has none, and lets them in once they have', async ({
@@ -161,7 +179,7 @@ test('a brand that requires a second factor shuts out who has none, and lets the
   await page.getByRole('link', { name: 'Set up your second factor' }).click()
   await setUp(page, people.owner)
   await page.getByRole('button', { name: 'I have kept my codes' }).click()
-  await page.getByRole('link', { name: 'Decide who of Bracken & Beck needs one' }).click()
+  await page.getByRole('link', { name: 'Decide whether Bracken & Beck requires one' }).click()
   await expect(page.getByText('The designer has none.')).toBeVisible()
   await setting.check()
   await expect(page.getByText(/The designer sees nothing of the brand until/)).toBeVisible()

@@ -43,6 +43,16 @@ export default async function AccountPage() {
       <Part title="Password">
         <PasswordForm email={email} change={changePasswordAction} />
       </Part>
+      <Part title="Second factor">
+        <p className="mb-4 max-w-measure text-ink-soft">
+          {person.hasSecondFactor
+            ? 'In use: signing in asks for a code after your password.'
+            : 'None: your password alone signs you in.'}
+        </p>
+        <LinkButton href="/account/second-factor">
+          {person.hasSecondFactor ? 'Look at your second factor' : 'Set up a second factor'}
+        </LinkButton>
+      </Part>
       <Part title="Sessions">
         <SessionsList
           sessions={sessions}

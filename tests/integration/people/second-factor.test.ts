@@ -1,6 +1,7 @@
 import { randomUUID } from 'node:crypto'
 
 import { TOTP } from 'otpauth'
+import sharp from 'sharp'
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest'
 
 import { hashPassword } from '@/lib/auth/password'
@@ -15,8 +16,7 @@ import { confirmSecondFactor } from '@/lib/people/confirm-second-factor'
 import { getSecondFactor } from '@/lib/people/get-second-factor'
 import { removeSecondFactor } from '@/lib/people/remove-second-factor'
 import { renewRecoveryCodes } from '@/lib/people/renew-recovery-codes'
-import type { Brand } from '@/models'
-import { Activity, Letter, Membership, Person, RecoveryCode } from '@/models'
+import { Activity, type Brand, Letter, Membership, Person, RecoveryCode } from '@/models'
 import { withinScope } from '@/models/scope'
 import { makeBrand } from '@/tests/factories/brand'
 
@@ -90,11 +90,15 @@ describe('beginning a second factor', () => {
       as(() => beginSecondFactor(person, { password: 'another one' })),
     ).rejects.toBeInstanceOf(InvalidError)
     expect((await rowOf()).totpPending).toBeNull()
-    const { secret, uri, svg } = await begin()
+    const { secret, uri, picture } = await begin()
     expect(secret).toMatch(/^([A-Z2-7]{4} ){7}[A-Z2-7]{4}$/)
     expect(new URL(uri).searchParams.get('secret')).toBe(secret.replaceAll(' ', ''))
-    expect(svg).toMatch(/^<svg /)
-    expect(svg).not.toMatch(/<script|style=| on\w+=/)
+    const svg = Buffer.from(picture.replace('data:image/svg+xml;base64,', ''), 'base64')
+    const { data, info } = await sharp(svg).resize(600).raw().toBuffer({ resolveWithObject: true })
+    expect(info).toMatchObject({ width: 600, height: 600 })
+    // Dark on light, with a quiet zone around it.
+    expect([...data.subarray(0, 3)]).toEqual([255, 255, 255])
+    expect(data.some((value) => value === 0)).toBe(true)
   })
 
   it('keeps the secret sealed, and asks for no code at sign-in before it is confirmed', async () => {
@@ -155,7 +159,7 @@ describe('confirming a second factor', () => {
     const { totp, recoveryCodes } = await setUp()
     for (const { id } of brands) expect(await actionsIn(id)).toEqual(['person.second-factor-set'])
     const letters = await lettersTo()
-    expect(letters.map(({ kind }) => kind)).toEqual(['second-factor-set'])
+    expect(letters.map(({ kind }) => kind)).toEqual(['second-factor-added'])
     for (const secret of [totp.secret.base32, ...recoveryCodes]) {
       expect(letters[0]!.text).not.toContain(secret)
     }

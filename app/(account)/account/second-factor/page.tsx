@@ -1,7 +1,9 @@
 import type { Metadata } from 'next'
 
 import { PlainPage } from '@/components/layout/plain-page'
+import { SheetHeader } from '@/components/layout/sheet-header'
 import { SecondFactorPanel } from '@/components/people/second-factor-panel'
+import { SignOutButton } from '@/components/people/sign-out-button'
 import { LinkButton } from '@/components/ui/link-button'
 import { Notice } from '@/components/ui/notice'
 import { TextLink } from '@/components/ui/text-link'
@@ -9,6 +11,7 @@ import { getSecondFactor } from '@/lib/people/get-second-factor'
 import { ownAddress } from '@/lib/server/own-address'
 import { readForPerson } from '@/lib/server/page'
 
+import { signOutAction } from '../../../(studio)/actions'
 import {
   beginSecondFactorAction,
   confirmSecondFactorAction,
@@ -44,8 +47,10 @@ export default async function SecondFactorPage({
   )
   return (
     <PlainPage homeHref="/">
-      <h1 className="text-2xl print:hidden">Second factor</h1>
-      <div className="mt-2 mb-6 space-y-5 print:hidden">
+      <div className="print:hidden">
+        <SheetHeader title="Second factor" back={{ href: '/account', label: 'Your account' }} />
+      </div>
+      <div className="mb-6 space-y-5 print:hidden">
         <p className="text-ink-soft">
           A code that your telephone shows, asked for after your password. Who has only your
           password stays outside.
@@ -97,12 +102,15 @@ export default async function SecondFactorPage({
             {goOn}
             {decidesIn.map(({ name, href }) => (
               <p key={href} className="text-ink-soft">
-                <TextLink href={href}>Decide who of {name} needs one</TextLink>
+                <TextLink href={href}>Decide whether {name} requires one</TextLink>
               </p>
             ))}
           </div>
         }
       />
+      <div className="mt-10 print:hidden">
+        <SignOutButton signOut={signOutAction} />
+      </div>
     </PlainPage>
   )
 }
