@@ -107,8 +107,8 @@ export const ACTIONS = {
     says: () => 'changed their e-mail address',
   },
   'person.second-factor-set': {
-    label: 'Second factor added',
-    says: () => 'added a second factor to their account',
+    label: 'Second factor set up',
+    says: () => 'set up a second factor for their account',
   },
   'person.second-factor-replaced': {
     label: 'Second factor replaced',

@@ -33,11 +33,18 @@ async function readOrSay<T>(read: () => Promise<T>): Promise<T> {
     if (error instanceof SecondFactorNeededError) redirect('/account/second-factor')
     if (error instanceof ForbiddenError) forbidden()
     if (error instanceof NotFoundError || error instanceof InvalidError) notFound()
-    if (error instanceof Error && !('digest' in error)) {
-      Object.assign(error, { digest: referenceOf(requestId) })
-    }
-    throw error
+    throw bareError(error, referenceOf(requestId))
   }
+}
+
+/**
+ * The error without what hangs on it, under the digest that its page shows: Next.js prints all of
+ * it beside our log, and a database error carries its statement. Those of Next.js's own pass.
+ */
+function bareError(error: unknown, digest: string): unknown {
+  if (!(error instanceof Error) || 'digest' in error) return error
+  const { name, message, stack } = error
+  return Object.assign(new Error(message), { name, stack, digest })
 }
 
 /**
