@@ -1,21 +1,11 @@
 'use server'
 
-import { cookies, headers } from 'next/headers'
 import { redirect } from 'next/navigation'
 
-import { isSessionCookie } from '@/lib/auth/cookies'
-import { getPerson } from '@/lib/auth/get-actor'
-import { endSession } from '@/lib/auth/sessions'
-import { requireSameOrigin } from '@/lib/server/same-origin'
+import { endThisSession } from '@/lib/server/sign-out'
 
 /** Ends the session of this browser; also works before the page's script has arrived. */
 export async function signOutAction(): Promise<never> {
-  requireSameOrigin(await headers())
-  const person = await getPerson()
-  if (person) await endSession(person.sessionId)
-  const jar = await cookies()
-  for (const { name } of jar.getAll()) {
-    if (isSessionCookie(name)) jar.delete(name)
-  }
+  await endThisSession()
   redirect('/sign-in')
 }

@@ -28,11 +28,12 @@ export async function Shell({
         name: brandName,
         href: `/${brandSlug}`,
       }))}
-      brandPages={
-        canReadActivity(actor)
+      brandPages={[
+        { label: 'Team', href: `/${actor.brandSlug}/team` },
+        ...(canReadActivity(actor)
           ? [{ label: 'Activity record', href: `/${actor.brandSlug}/activity` }]
-          : []
-      }
+          : []),
+      ]}
       person={{ name: actor.personName, role: ROLE_WORDS[actor.role] }}
       signOut={<SignOutButton signOut={signOutAction} />}
       {...chapters}

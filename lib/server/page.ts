@@ -68,3 +68,6 @@ export const readForPerson = <T>(read: (person: SignedInPerson) => Promise<T>): 
     if (!person) throw new UnauthenticatedError()
     return withinScope({ personId: person.id }, () => read(person))
   })
+
+/** Reads for a page that is open to whoever asks, signed in or not. */
+export const readForAnyone = <T>(read: () => Promise<T>): Promise<T> => readOrSay(read)

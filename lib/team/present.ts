@@ -2,7 +2,9 @@ import type { Actor } from '@/lib/auth/actor'
 import type { Role } from '@/lib/people/constants'
 import type { Invitation, Membership } from '@/models'
 
+import { ROLE_PHRASES } from './constants'
 import { canManageTeam } from './policy'
+import type { Offer } from './queries'
 
 const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' })
 const minute = new Intl.DateTimeFormat('en-GB', { timeStyle: 'short', timeZone: 'UTC' })
@@ -58,5 +60,31 @@ export function presentInvitation(invitation: Invitation, now = new Date()): Inv
     until: momentInWords(invitation.expiresAt),
     expired: invitation.expiresAt <= now,
     invitedBy: invitation.invitedBy?.name ?? null,
+  }
+}
+
+/** An invitation as whoever holds its link reads it. */
+export interface OfferView {
+  brandName: string
+  /** As it stands in a sentence: "a designer". */
+  role: string
+  invitedBy: string
+  email: string
+  /** "8 December 2026, 10:55 UTC". */
+  until: string
+  next: OpenOffer['next']
+}
+
+type OpenOffer = Extract<Offer, { kind: 'open' }>
+
+/** What a link offers, in words. */
+export function presentOffer({ invitation, brandName, next }: OpenOffer): OfferView {
+  return {
+    brandName,
+    role: ROLE_PHRASES[invitation.role],
+    invitedBy: invitation.invitedBy?.name ?? 'Somebody who has left Woadmap',
+    email: invitation.email,
+    until: momentInWords(invitation.expiresAt),
+    next,
   }
 }

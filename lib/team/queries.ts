@@ -95,6 +95,7 @@ export function requireOpen(invitation: Invitation | null): asserts invitation i
 
 /** An invitation to whoever opened its link, and what they can do about it. */
 export type Offer =
+  /** It was used, and the person is of the brand. */
   | { kind: 'joined'; brandSlug: string }
   | {
       kind: 'open'
@@ -110,7 +111,7 @@ export type Offer =
 /**
  * What a token offers to the signed-in person, or to somebody signed out (null). At most four
  * queries.
- * @throws NotFoundError when it is unknown, used by somebody else, withdrawn, sent anew or too old
+ * @throws NotFoundError when it is unknown, used, withdrawn, sent anew or too old
  */
 export function getOffer(person: SignedInPerson | null, token: string): Promise<Offer> {
   return withinInvitedBrand(token, async (brandId, tokenHash) => {

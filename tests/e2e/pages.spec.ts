@@ -1,12 +1,8 @@
-import { gzipSync } from 'node:zlib'
-
-import AxeBuilder from '@axe-core/playwright'
-
 import { signIn, type Who } from './support/accounts'
+import { overflowOf, SCRIPT_BAR, scriptBytesOf, violationsOf } from './support/page-checks'
 import { ACCOUNT_PAGES, PAGES, SIGNED_OUT } from './support/pages'
-import { expect, test, type Page } from './support/test'
+import { expect, test } from './support/test'
 
-const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']
 const ROLES: readonly Who[] = ['owner', 'marketer', 'designer', 'dyer']
 
 const ALL = [...PAGES, ...ACCOUNT_PAGES]
@@ -20,11 +16,6 @@ test.beforeAll(async ({ browser }) => {
   for (const { name, find } of ALL) addresses.set(name, await find(page))
   await page.close()
 })
-
-async function violationsOf(page: Page): Promise<string[]> {
-  const { violations } = await new AxeBuilder({ page }).withTags(WCAG).analyze()
-  return violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(' | ')}`)
-}
 
 test('the pages before signing in are accessible', async ({ page }) => {
   for (const address of SIGNED_OUT) {
@@ -50,40 +41,17 @@ for (const role of ROLES) {
       await expect(page.getByRole('heading', { level: 1 }), name).toBeVisible()
       expect(await violationsOf(page), `${name} as ${role}`).toEqual([])
       await page.setViewportSize({ width: 320, height: 640 })
-      const overflow = await page.evaluate(
-        () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
-      )
-      expect(overflow, `${name} at 320 px`).toBeLessThanOrEqual(0)
+      expect(await overflowOf(page), `${name} at 320 px`).toBeLessThanOrEqual(0)
     }
     expect(problems).toEqual([])
   })
 }
 
-/** Bytes of script, gzipped, that a page may need before it answers. */
-const SCRIPT_BAR = 200_000
-
 test('no page needs more script before it answers than its bar', async ({ page }) => {
   await signIn(page, 'owner')
-  const sizes = new Map<string, number>()
-  const sizeOf = async (source: string) => {
-    const known = sizes.get(source)
-    if (known !== undefined) return known
-    const size = gzipSync(await (await page.request.get(source)).body()).length
-    sizes.set(source, size)
-    return size
-  }
   for (const address of SIGNED_OUT) addresses.set(address, address)
   addresses.set('a second factor', '/account/second-factor')
   for (const [name, address] of addresses) {
-    const html = await (await page.request.get(address)).text()
-    // What is loaded after the page stands in no script tag; what is for old browsers is not loaded.
-    const tags = [...html.matchAll(/<script[^>]+src="([^"]+)"[^>]*>/g)]
-    const sources = tags.filter(([tag]) => !/nomodule/i.test(tag)).map(([, source]) => source!)
-    expect(sources.length, name).toBeGreaterThan(3)
-    const parts = await Promise.all(sources.map(sizeOf))
-    expect(
-      parts.reduce((sum, part) => sum + part, 0),
-      name,
-    ).toBeLessThanOrEqual(SCRIPT_BAR)
+    expect(await scriptBytesOf(page, address), name).toBeLessThanOrEqual(SCRIPT_BAR)
   }
 })

@@ -28,6 +28,7 @@ const ID = '[0-9a-f-]{36}'
 /** Every page of the studio. */
 export const PAGES: readonly StudioPage[] = [
   { name: 'lines', roles: EVERYBODY, find: () => `/${BRAND}` },
+  { name: 'the team', roles: EVERYBODY, find: () => `/${BRAND}/team` },
   { name: 'a new line', roles: ['owner'], find: () => `/${BRAND}/lines/new` },
   { name: 'how the brand signs in', roles: ['owner'], find: () => `/${BRAND}/security` },
   { name: 'the activity record', roles: ['owner'], find: () => `/${BRAND}/activity` },
