@@ -80,6 +80,7 @@ export function InviteForm({
       >
         <Textarea
           rows={2}
+          className="min-h-16"
           autoComplete="off"
           autoCapitalize="off"
           spellCheck={false}
