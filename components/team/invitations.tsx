@@ -56,8 +56,6 @@ export function Invitations({
 
   async function takeBack(invitation: InvitationView) {
     await send(withdraw, invitation, `The invitation of ${invitation.email} is withdrawn.`)
-    // The row the keyboard stood on is gone.
-    requestAnimationFrame(() => part.current?.focus())
   }
 
   return (
@@ -117,6 +115,7 @@ export function Invitations({
         confirmLabel="Withdraw invitation"
         cancelLabel="Keep invitation"
         onConfirm={() => takeBack(withdrawing!)}
+        focusAfter={part}
       />
     </SheetSection>
   )

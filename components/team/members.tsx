@@ -46,8 +46,6 @@ export function Members({
       toastProblem(answer.message)
       router.refresh()
     }
-    // The row the keyboard stood on is gone.
-    requestAnimationFrame(() => list.current?.focus())
   }
 
   return (
@@ -118,6 +116,7 @@ export function Members({
             confirmLabel="Remove member"
             cancelLabel="Keep member"
             onConfirm={() => remove(removing!)}
+            focusAfter={list}
           />
         </>
       ) : null}

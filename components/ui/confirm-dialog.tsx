@@ -1,7 +1,7 @@
 'use client'
 
 import { AlertDialog as Radix } from 'radix-ui'
-import { useState, type ReactElement, type ReactNode } from 'react'
+import { useRef, useState, type ReactElement, type ReactNode, type RefObject } from 'react'
 import { Button } from './button'
 import { cn } from './cn'
 import { DIALOG_CLASS, OVERLAY_CLASS } from './dialog'
@@ -23,6 +23,8 @@ export interface ConfirmDialogProps {
   open?: boolean
   onOpenChange?: (open: boolean) => void
   danger?: boolean
+  /** Where the keyboard goes on once it is done, if what it came from goes away by it. */
+  focusAfter?: RefObject<HTMLElement | null>
 }
 
 /** Asks before something is lost, and says what. Focus starts on the way back. */
@@ -37,10 +39,12 @@ export function ConfirmDialog({
   open,
   onOpenChange,
   danger = true,
+  focusAfter,
 }: ConfirmDialogProps) {
   const [ownOpen, setOwnOpen] = useState(false)
   const [pending, setPending] = useState(false)
   const [failed, setFailed] = useState(false)
+  const done = useRef(false)
   const change = (next: boolean) => {
     if (pending) return
     setFailed(false)
@@ -57,6 +61,7 @@ export function ConfirmDialog({
         () => false,
       )
     setPending(false)
+    done.current = worked
     if (worked) {
       setOwnOpen(false)
       onOpenChange?.(false)
@@ -67,7 +72,15 @@ export function ConfirmDialog({
       {trigger ? <Radix.Trigger asChild>{trigger}</Radix.Trigger> : null}
       <Radix.Portal>
         <Radix.Overlay className={OVERLAY_CLASS} />
-        <Radix.Content className={cn(DIALOG_CLASS, 'gap-3 p-5 sm:max-w-md sm:p-6')}>
+        <Radix.Content
+          className={cn(DIALOG_CLASS, 'gap-3 p-5 sm:max-w-md sm:p-6')}
+          onCloseAutoFocus={(event) => {
+            if (!done.current || !focusAfter?.current) return
+            done.current = false
+            event.preventDefault()
+            focusAfter.current.focus()
+          }}
+        >
           <Radix.Title className="font-title text-xl">{title}</Radix.Title>
           <Radix.Description asChild>
             <div className="space-y-2">
