@@ -30,6 +30,8 @@ export interface StudioShellProps {
  */
 export function StudioShell(props: StudioShellProps) {
   const { brand, line, children } = props
+  // One element in both places is sent to the browser once.
+  const contents = <Contents {...props} />
   return (
     <div className="margins:grid margins:min-h-dvh margins:grid-cols-[14.5rem_minmax(0,1fr)] print:block">
       <SkipLink />
@@ -38,16 +40,12 @@ export function StudioShell(props: StudioShellProps) {
           <Wordmark href={brand.href} />
           <p className="truncate text-sm text-ink-faint">{line?.name ?? brand.name}</p>
         </div>
-        <MarginMenu>
-          <Contents {...props} />
-        </MarginMenu>
+        <MarginMenu>{contents}</MarginMenu>
       </header>
       <div className="hidden border-r border-hairline margins:block print:hidden">
         <div className="sticky top-0 flex h-dvh flex-col overflow-y-auto px-6 pt-6 pb-4">
           <Wordmark href={brand.href} />
-          <div className="mt-6 flex grow flex-col">
-            <Contents {...props} />
-          </div>
+          <div className="mt-6 flex grow flex-col">{contents}</div>
         </div>
       </div>
       {children}

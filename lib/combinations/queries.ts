@@ -37,18 +37,23 @@ export async function listCombinations(
 ): Promise<{ combinations: KeptCombination[]; total: number }> {
   authorize(actor, canReadCombinations)
   const line = await getLine(actor, lineSlug)
-  const ofLine: WhereOptions = { brandId: actor.brandId, lineId: line.id }
-  const { rows, count } = await Combination.findAndCountAll({
-    where: q === '' ? ofLine : { [Op.and]: [ofLine, { [Op.or]: [titleHolds(q), shadeHolds(q)] }] },
-    include: [{ model: Photograph, as: 'photograph' }, PLACES],
-    order: [
-      ['createdAt', 'DESC'],
-      ['id', 'ASC'],
-    ],
-    limit: COMBINATION_LIMITS.perPage,
-    offset: (page - 1) * COMBINATION_LIMITS.perPage,
-  })
-  return { combinations: await withNames(rows), total: count }
+  const inLine: WhereOptions = { brandId: actor.brandId, lineId: line.id }
+  const where =
+    q === '' ? inLine : { [Op.and]: [inLine, { [Op.or]: [titleHolds(q), shadeHolds(q)] }] }
+  const [total, rows] = await Promise.all([
+    Combination.count({ where }),
+    Combination.findAll({
+      where,
+      include: [{ model: Photograph, as: 'photograph' }, PLACES],
+      order: [
+        ['createdAt', 'DESC'],
+        ['id', 'ASC'],
+      ],
+      limit: COMBINATION_LIMITS.perPage,
+      offset: (page - 1) * COMBINATION_LIMITS.perPage,
+    }),
+  ])
+  return { combinations: await withNames(rows), total }
 }
 
 const pattern = (q: string) => `%${q.replace(/[\\%_]/g, '\\$&')}%`

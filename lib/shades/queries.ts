@@ -19,7 +19,7 @@ import {
   type ShadeUses,
   type ShadeView,
 } from './present'
-import { bookGroups, bookOrder } from './sample-book'
+import { BOOK_FAMILY_SQL, bookGroups } from './sample-book'
 import { SHADE_LIMITS, SHADE_STATUSES, type ShadeSort } from './constants'
 import type { ShadeTableFilter } from './schema'
 import { findUses } from './uses'
@@ -129,6 +129,9 @@ export async function listShadeTable(
   return { line, shades: rows.map(presentShade), total: outside.length }
 }
 
+/** Neutrals first, then round the hues; light to dark. */
+const BY_BOOK: Order = [literal(BOOK_FAMILY_SQL), ['labL', 'DESC'], ...BY_POSITION]
+
 /** A page of the sample book, by family. Three queries. @throws NotFoundError */
 export async function readSampleBook(
   actor: Actor,
@@ -138,20 +141,12 @@ export async function readSampleBook(
   authorize(actor, canReadShades)
   const line = await getLine(actor, lineSlug)
   const where = { brandId: actor.brandId, lineId: line.id }
-  const all = await Shade.findAll({
-    attributes: COLOR_COLUMNS,
-    where,
-    order: BY_POSITION,
-    raw: true,
-  })
-  const ordered = bookOrder(all.map((row) => ({ id: row.id, lab: labOf(row) })))
-  const first = (page - 1) * SHADE_LIMITS.bookPage
-  const ids = ordered.slice(first, first + SHADE_LIMITS.bookPage).map(({ id }) => id)
-  const rows = await Shade.findAll({ ...VIEW, where: { ...where, id: ids } })
-  const byId = new Map(rows.map((row) => [row.id, presentShade(row)]))
-  // A shade deleted between the two queries is left out.
-  const shades = ids.flatMap((id) => byId.get(id) ?? [])
-  return { line, groups: bookGroups(shades), total: all.length }
+  const limit = SHADE_LIMITS.bookPage
+  const [total, rows] = await Promise.all([
+    Shade.count({ where }),
+    Shade.findAll({ ...VIEW, where, order: BY_BOOK, offset: (page - 1) * limit, limit }),
+  ])
+  return { line, groups: bookGroups(rows.map(presentShade)), total }
 }
 
 /** How many neighbours a shade's page names. */

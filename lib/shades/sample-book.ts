@@ -33,13 +33,19 @@ export function bookFamily(lab: Lab): string {
   return HUE_FAMILIES.find(([end]) => hue < end)![1]
 }
 
-/** Shades in the order of the sample book: neutrals first, then round the hues; light to dark. */
-export function bookOrder<T extends { lab: Lab }>(shades: readonly T[]): T[] {
-  return shades
-    .map((shade) => ({ shade, family: BOOK_FAMILIES.indexOf(bookFamily(shade.lab)) }))
-    .sort((one, other) => one.family - other.family || other.shade.lab[0] - one.shade.lab[0])
-    .map(({ shade }) => shade)
-}
+/**
+ * The family of a row of shades as its place among BOOK_FAMILIES, in SQL. The index shades_book is
+ * over this expression: one that is changed is right without it, and fast again with a new one.
+ */
+export const BOOK_FAMILY_SQL = `CASE
+  WHEN lab_a * lab_a + lab_b * lab_b < ${NEUTRAL_CHROMA ** 2} THEN 0
+  ${HUE_FAMILIES.slice(0, -1)
+    .map(
+      ([end, name]) =>
+        `WHEN 180 + atan2d(-lab_b, -lab_a) < ${end} THEN ${BOOK_FAMILIES.indexOf(name)}`,
+    )
+    .join('\n  ')}
+  ELSE ${BOOK_FAMILIES.indexOf(HUE_FAMILIES.at(-1)![1])} END`
 
 /** Shades in book order, put together by family. */
 export function bookGroups<T extends { lab: Lab }>(

@@ -1,7 +1,9 @@
 import { beforeAll, describe, expect, it } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
+import type { Lab } from '@/lib/color/types'
 import { getShade, listShadeTable, readSampleBook } from '@/lib/shades/queries'
+import { BOOK_FAMILIES, bookFamily } from '@/lib/shades/sample-book'
 import { shadeTableSchema } from '@/lib/shades/schema'
 import { Shade, type Line } from '@/models'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
@@ -128,5 +130,27 @@ describe('the neighbours of a shade', () => {
     const differences = neighbours.map(({ difference }) => difference)
     expect(differences).toEqual([...differences].sort((a, b) => a - b))
     expect(differences[0]).toBeGreaterThan(0)
+  })
+})
+
+describe('the sample book', () => {
+  it('goes through the families in order, light to dark, over its pages', async () => {
+    const wide = await makeLine({ id: owner.brandId })
+    // Round the hue circle in steps of 1.7°, some of it near grey; with the axes themselves.
+    const angles = [0, 90, 180, 270, ...Array.from({ length: 220 }, (_, n) => (n * 1.7) % 360)]
+    const labs = angles.map((degrees, n): Lab => {
+      const chroma = n % 9 === 8 ? 5 : 40
+      const radians = (degrees * Math.PI) / 180
+      return [(n * 37) % 100, chroma * Math.cos(radians), chroma * Math.sin(radians)]
+    })
+    await Promise.all(
+      labs.map(([labL, labA, labB], position) => makeShade(wide, { position, labL, labA, labB })),
+    )
+    const read = async (page: number) =>
+      (await readSampleBook(owner, wide.slug, page)).groups.flatMap(({ shades }) => shades)
+    const shown = [...(await read(1)), ...(await read(2))].map(({ lab }) => lab)
+    const place = (lab: Lab) => BOOK_FAMILIES.indexOf(bookFamily(lab))
+    const expected = [...labs].sort((one, other) => place(one) - place(other) || other[0] - one[0])
+    expect(shown).toEqual(expected)
   })
 })

@@ -1,21 +1,18 @@
 import { presentChapters } from '@/lib/lines/present'
-import { countChapters, getLine, listLineNames } from '@/lib/lines/queries'
-import { readForPage } from '@/lib/server/page'
+import { countChapters, listLineNames } from '@/lib/lines/queries'
 
 import { Shell } from '../../../shell'
+import { readLine } from './read-line'
 
 export default async function LineLayout({
   params,
   children,
 }: LayoutProps<'/[brand]/lines/[line]'>) {
   const { brand, line: slug } = await params
-  const { actor, chapters } = await readForPage(brand, async (one) => {
-    const line = await getLine(one, slug)
-    const [lines, counts] = await Promise.all([listLineNames(one), countChapters(one, line)])
-    return { actor: one, chapters: presentChapters(brand, line, lines, counts) }
-  })
+  const { actor, line } = await readLine(brand, slug)
+  const [lines, counts] = await Promise.all([listLineNames(actor), countChapters(actor, line)])
   return (
-    <Shell actor={actor} chapters={chapters}>
+    <Shell actor={actor} chapters={presentChapters(brand, line, lines, counts)}>
       {children}
     </Shell>
   )

@@ -6,24 +6,22 @@ import { Facts } from '@/components/ui/ledger'
 import { LinkButton } from '@/components/ui/link-button'
 import { canUpdateLine } from '@/lib/lines/policy'
 import { presentLine } from '@/lib/lines/present'
-import { getLine } from '@/lib/lines/queries'
-import { readForPage } from '@/lib/server/page'
+
+import { readLine } from './read-line'
 
 export const metadata: Metadata = { title: 'The line' }
 
 export default async function LinePage({ params }: PageProps<'/[brand]/lines/[line]'>) {
   const { brand, line: slug } = await params
-  const { line, edits } = await readForPage(brand, async (actor) => ({
-    line: presentLine(await getLine(actor, slug)),
-    edits: canUpdateLine(actor),
-  }))
+  const { actor, line: row } = await readLine(brand, slug)
+  const line = presentLine(row)
   return (
     <Sheet>
       <SheetHeader
         title={line.name}
         meta={line.launchDate ? `Launches ${line.launchDate}` : 'No launch date yet'}
         actions={
-          edits && <LinkButton href={`/${brand}/lines/${line.slug}/edit`}>Edit line</LinkButton>
+          canUpdateLine(actor) && <LinkButton href={`/${brand}/lines/${line.slug}/edit`}>Edit line</LinkButton>
         }
       />
       <Facts

@@ -1,0 +1,93 @@
+import { QueryTypes } from 'sequelize'
+
+import { sequelize } from '@/models'
+
+/** How many rows of each kind a line is to have. */
+export interface LineSize {
+  shades: number
+  photographs: number
+  combinations: number
+}
+
+const run = (sql: string, bind: Record<string, unknown>) =>
+  sequelize().query(sql, { bind, type: QueryTypes.RAW })
+
+/** Makes a brand of nobody. @returns its id */
+export async function fillBrand(slug: string): Promise<string> {
+  const [row] = await sequelize().query<{ id: string }>(
+    'INSERT INTO brands (name, slug) VALUES ($slug::text, $slug::text) RETURNING id',
+    { bind: { slug }, type: QueryTypes.SELECT },
+  )
+  return row!.id
+}
+
+/**
+ * Makes a line with so many rows, every one as large as real ones are: photographs with their copies
+ * and reading, combinations of five shades.
+ */
+export async function fillLine(brandId: string, slug: string, size: LineSize): Promise<void> {
+  const [line] = await sequelize().query<{ id: string }>(
+    `INSERT INTO lines (brand_id, slug, name, fibres, ply, weight_number, net_grams, length,
+       length_unit, needle_mm, gauge_stitches, gauge_rows, currency, price_minor)
+     VALUES ($brandId, $slug::text, $slug::text, '[{"fibre": "wool", "percent": 100}]', 3, 3, 100, 225,
+       'm', 4, 22, 30, 'EUR', 2150)
+     RETURNING id`,
+    { bind: { brandId, slug }, type: QueryTypes.SELECT },
+  )
+  const lineId = line!.id
+  await run(
+    `INSERT INTO shades (brand_id, line_id, number, name, lab_l, lab_a, lab_b, illuminant, observer,
+       status, position)
+     SELECT $brandId::uuid, $lineId::uuid, n::text, 'Shade of the ' || n || 'th morning', 15 + (n * 37) % 80,
+       (n * 53) % 90 - 45, (n * 71) % 90 - 45, 'D65', 10, 'approved', n
+     FROM generate_series(1, $count::int) n`,
+    { brandId, lineId, count: size.shades },
+  )
+  await run(
+    `INSERT INTO photographs (brand_id, line_id, title, photographer, licence, alt_text, file_name,
+       object_key, content_type, byte_length, sha256, width, height, state, derivatives, created_at)
+     SELECT $brandId::uuid, $lineId::uuid, 'Hillside ' || n, 'Somebody of ours', CASE WHEN n % 5 > 0 THEN 'own-work' END,
+       CASE WHEN n % 7 > 0 THEN repeat('A hillside under rain. ', 5) ELSE '' END, 'hillside.jpg',
+       'originals/' || $brandId::uuid || '/' || gen_random_uuid(), 'image/jpeg', 500000,
+       encode(sha256(($lineId::uuid || n::text)::bytea), 'hex'), 2400, 1600, 'ready',
+       '[{"format": "webp", "width": 400, "height": 267}, {"format": "webp", "width": 800, "height": 533},
+         {"format": "webp", "width": 1600, "height": 1067}, {"format": "avif", "width": 400, "height": 267},
+         {"format": "avif", "width": 800, "height": 533}, {"format": "avif", "width": 1600, "height": 1067}]',
+       now() - n * interval '1 minute'
+     FROM generate_series(1, $count::int) n`,
+    { brandId, lineId, count: size.photographs },
+  )
+  await run(
+    `INSERT INTO readings (brand_id, photograph_id, cells, cell_map, map_width, map_height, striking,
+       matches, shades_revision)
+     SELECT brand_id, id, '[]', decode(repeat('0a', 3000), 'hex'), 60, 50, '[]', '[]', 1
+     FROM photographs WHERE line_id = $lineId::uuid`,
+    { lineId },
+  )
+  // The checks of references are planned by what PostgreSQL believes to be there.
+  await sequelize().query('ANALYZE shades, photographs')
+  await run(
+    `INSERT INTO combinations (brand_id, line_id, title, photograph_id, reading, created_at)
+     SELECT $brandId::uuid, $lineId::uuid, 'Five of hillside ' || n, p.ids[1 + n % $photographs::int],
+       'true', now() - n * interval '1 minute'
+     FROM generate_series(1, $count::int) n
+     CROSS JOIN (SELECT array_agg(id) AS ids FROM photographs WHERE line_id = $lineId::uuid) p`,
+    { brandId, lineId, count: size.combinations, photographs: size.photographs },
+  )
+  await sequelize().query('ANALYZE combinations')
+  await run(
+    `INSERT INTO combination_places (brand_id, combination_id, place, shade_id, share)
+     SELECT $brandId::uuid, c.id, place, s.ids[1 + (c.n * 5 + place) % $shades::int], 0.2
+     FROM (SELECT id, row_number() OVER () AS n FROM combinations WHERE line_id = $lineId::uuid) c
+     CROSS JOIN generate_series(1, 5) place
+     CROSS JOIN (SELECT array_agg(id) AS ids FROM shades WHERE line_id = $lineId::uuid) s`,
+    { brandId, lineId, shades: size.shades },
+  )
+}
+
+/** What PostgreSQL does by itself, in time, after so many rows have come. */
+export async function settle(): Promise<void> {
+  await sequelize().query(
+    'VACUUM (ANALYZE) lines, shades, photographs, readings, combinations, combination_places',
+  )
+}
