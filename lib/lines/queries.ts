@@ -52,16 +52,6 @@ export async function getLine(
   return line
 }
 
-/** The names and addresses of all the brand's lines, for the switch between them. */
-export async function listLineNames(actor: Actor): Promise<Pick<Line, 'slug' | 'name'>[]> {
-  authorize(actor, canReadLines)
-  return Line.findAll({
-    where: { brandId: actor.brandId },
-    attributes: ['slug', 'name'],
-    order: [['name', 'ASC']],
-  })
-}
-
 /** What stands in each chapter, counted beside the line's row, and who may open it. */
 const CHAPTERS = {
   shades: {
@@ -85,16 +75,37 @@ const CHAPTERS = {
 /** How many rows stand in a chapter; a chapter that the role may not open is left out. */
 export type ChapterCounts = { shades: number; photographs?: number; combinations?: number }
 
-/** How much stands in each chapter of a line that this role may open. One query. */
-export async function countChapters(actor: Actor, line: Line): Promise<ChapterCounts> {
+/** The names and addresses of all the brand's lines, for the switch between them. */
+const SIBLINGS =
+  literal(`(SELECT json_agg(json_build_object('slug', s.slug, 'name', s.name) ORDER BY s.name)
+  FROM lines s WHERE s.brand_id = "Line".brand_id)`)
+
+/**
+ * One line of the actor's brand by its slug, with what its margin shows: the brand's lines, and how
+ * much stands in each chapter that this role may open. One query, since every page of a line asks it.
+ * @throws NotFoundError
+ */
+export async function getLineWithMargin(
+  actor: Actor,
+  lineSlug: string,
+): Promise<{ line: Line; lines: Pick<Line, 'slug' | 'name'>[]; counts: ChapterCounts }> {
   authorize(actor, canReadLines)
   const open = Object.entries(CHAPTERS).filter(([, { opens }]) => opens(actor))
-  const counts = await Line.findOne({
-    attributes: open.map(([name, { count }]): ProjectionAlias => [count, name]),
-    where: { brandId: actor.brandId, id: line.id },
-    raw: true,
+  const line = await Line.findOne({
+    attributes: {
+      include: [
+        [SIBLINGS, 'siblings'],
+        ...open.map(([name, { count }]): ProjectionAlias => [count, name]),
+      ],
+    },
+    where: { brandId: actor.brandId, slug: lineSlug },
   })
-  // Another brand's line, like one that is gone, has nothing in it.
-  const nothing = Object.fromEntries(open.map(([name]) => [name, 0]))
-  return (counts ?? nothing) as unknown as ChapterCounts
+  if (!line) throw new NotFoundError()
+  const beside = line.dataValues as unknown as ChapterCounts & {
+    siblings: Pick<Line, 'slug' | 'name'>[]
+  }
+  const counts = Object.fromEntries(
+    open.map(([name]) => [name, beside[name as keyof ChapterCounts]]),
+  ) as ChapterCounts
+  return { line, lines: beside.siblings, counts }
 }

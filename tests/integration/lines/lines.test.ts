@@ -6,13 +6,14 @@ import type { Actor } from '@/lib/auth/actor'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
 import { createLine } from '@/lib/lines/create-line'
 import { presentLine } from '@/lib/lines/present'
-import { countChapters, getLine, listLineNames, listLines } from '@/lib/lines/queries'
+import { getLine, getLineWithMargin, listLines } from '@/lib/lines/queries'
 import { createLineSchema, type CreateLineInput } from '@/lib/lines/schema'
 import { updateLine } from '@/lib/lines/update-line'
 import { ROLES, type Role } from '@/lib/people/constants'
 import { Line } from '@/models'
 import { makeActors, makeBrand } from '@/tests/factories/brand'
 import { makeLine } from '@/tests/factories/line'
+import { makeShades } from '@/tests/factories/shade'
 
 const input = (name: string): CreateLineInput =>
   createLineSchema.parse({
@@ -57,7 +58,12 @@ const DOINGS: { name: string; do: Doing; roles: readonly Role[]; ofTheLine: bool
     roles: ROLES,
     ofTheLine: false,
   },
-  { name: 'list their names', do: (a) => listLineNames(a), roles: ROLES, ofTheLine: false },
+  {
+    name: 'read a line with its margin',
+    do: (a, line) => getLineWithMargin(a, line.slug),
+    roles: ROLES,
+    ofTheLine: true,
+  },
   { name: 'read a line', do: (a, line) => getLine(a, line.slug), roles: ROLES, ofTheLine: true },
   {
     name: 'make a line',
@@ -100,17 +106,21 @@ describe('who may do what with lines', () => {
     const line = await makeLine({ id: ours.owner.brandId })
     const { lines } = await listLines(theirs.owner, { page: 1, perPage: 200 })
     expect(lines.map((one) => one.line.id)).not.toContain(line.id)
-    expect((await listLineNames(theirs.owner)).map(({ slug }) => slug)).not.toContain(line.slug)
-    expect(await countChapters(theirs.owner, line)).toEqual({
-      shades: 0,
-      photographs: 0,
-      combinations: 0,
-    })
+    // Even under the same address, theirs is theirs and counts what is theirs.
+    const same = await makeLine({ id: theirs.owner.brandId }, { slug: line.slug })
+    await makeShades(line, 2)
+    await makeShades(same, 1)
+    const margin = await getLineWithMargin(theirs.owner, line.slug)
+    expect(margin.line.id).toBe(same.id)
+    expect(margin.counts).toEqual({ shades: 1, photographs: 0, combinations: 0 })
+    const names = margin.lines
+    const own = await Line.findAll({ where: { brandId: theirs.owner.brandId } })
+    expect(names.map(({ name }) => name)).toEqual(own.map(({ name }) => name).sort())
   })
 
   it('the dye house is told of no chapter but the shades', async () => {
     const line = await makeLine({ id: ours.owner.brandId })
-    expect(await countChapters(ours.dyer, line)).toEqual({ shades: 0 })
+    expect((await getLineWithMargin(ours.dyer, line.slug)).counts).toEqual({ shades: 0 })
   })
 })
 

@@ -1,5 +1,4 @@
 import { presentChapters } from '@/lib/lines/present'
-import { countChapters, listLineNames } from '@/lib/lines/queries'
 
 import { Shell } from '../../../shell'
 import { readLine } from './read-line'
@@ -9,8 +8,7 @@ export default async function LineLayout({
   children,
 }: LayoutProps<'/[brand]/lines/[line]'>) {
   const { brand, line: slug } = await params
-  const { actor, line } = await readLine(brand, slug)
-  const [lines, counts] = await Promise.all([listLineNames(actor), countChapters(actor, line)])
+  const { actor, line, lines, counts } = await readLine(brand, slug)
   return (
     <Shell actor={actor} chapters={presentChapters(brand, line, lines, counts)}>
       {children}

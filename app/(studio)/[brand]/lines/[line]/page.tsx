@@ -21,7 +21,9 @@ export default async function LinePage({ params }: PageProps<'/[brand]/lines/[li
         title={line.name}
         meta={line.launchDate ? `Launches ${line.launchDate}` : 'No launch date yet'}
         actions={
-          canUpdateLine(actor) && <LinkButton href={`/${brand}/lines/${line.slug}/edit`}>Edit line</LinkButton>
+          canUpdateLine(actor) && (
+            <LinkButton href={`/${brand}/lines/${line.slug}/edit`}>Edit line</LinkButton>
+          )
         }
       />
       <Facts

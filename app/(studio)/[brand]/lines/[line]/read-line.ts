@@ -1,10 +1,9 @@
 import { cache } from 'react'
 
-import { getLine } from '@/lib/lines/queries'
+import { getLineWithMargin } from '@/lib/lines/queries'
 import { readForPage } from '@/lib/server/page'
 
-/** The line of an address with who looks at it; read once for the margin and the page. */
-export const readLine = cache(
-  (brand: string, slug: string) =>
-    readForPage(brand, async (actor) => ({ actor, line: await getLine(actor, slug) })),
+/** The line of an address with its margin and who looks at it; read once for layout and page. */
+export const readLine = cache((brand: string, slug: string) =>
+  readForPage(brand, async (actor) => ({ actor, ...(await getLineWithMargin(actor, slug)) })),
 )
