@@ -27,7 +27,7 @@ export async function confirmSecondFactor(
       }
       const step = stepOfCode(totpPending, code)
       if (step === null) throw codeRefused()
-      const change = row.totpConfirmedAt ? 'second-factor-replaced' : 'second-factor-added'
+      const change = row.totpConfirmedAt ? 'second-factor-replaced' : 'second-factor-set'
       await row.update(
         {
           totpSecret: totpPending,

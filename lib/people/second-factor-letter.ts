@@ -7,7 +7,7 @@ import { postLetter } from '@/lib/mail/post-letter'
 export type SecondFactorChange =
   | {
       kind:
-        | 'second-factor-added'
+        | 'second-factor-set'
         | 'second-factor-replaced'
         | 'second-factor-removed'
         | 'recovery-codes-renewed'
@@ -28,7 +28,7 @@ const leftInWords = (left: number) =>
 
 function contentOf(change: SecondFactorChange): Pick<LetterContent, 'subject' | 'paragraphs'> {
   switch (change.kind) {
-    case 'second-factor-added':
+    case 'second-factor-set':
       return {
         subject: 'Your second factor is in use',
         paragraphs: [

@@ -30,7 +30,7 @@ export const changePasswordAction = definePersonAction(
   changePassword,
 )
 
-export const endSessionAction = definePersonAction('endOwnSession', endSessionSchema, endOwnSession)
+export const endSessionAction = definePersonAction('endSession', endSessionSchema, endOwnSession)
 
 export const endOtherSessionsAction = definePersonAction(
   'endOtherSessions',

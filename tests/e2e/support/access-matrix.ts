@@ -20,7 +20,7 @@
 import { randomUUID } from 'node:crypto'
 
 import type { ErrorCode } from '@/lib/errors'
-import type { Role } from '@/lib/people/schema'
+import type { Role } from '@/lib/people/constants'
 
 import type { Place } from './places'
 

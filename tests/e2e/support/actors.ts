@@ -1,6 +1,6 @@
 import type pg from 'pg'
 
-import type { Role } from '@/lib/people/schema'
+import type { Role } from '@/lib/people/constants'
 import accounts from '../../../seeders/demo-accounts.json' with { type: 'json' }
 
 import type { Standing } from './access-matrix'

@@ -159,7 +159,7 @@ describe('confirming a second factor', () => {
     const { totp, recoveryCodes } = await setUp()
     for (const { id } of brands) expect(await actionsIn(id)).toEqual(['person.second-factor-set'])
     const letters = await lettersTo()
-    expect(letters.map(({ kind }) => kind)).toEqual(['second-factor-added'])
+    expect(letters.map(({ kind }) => kind)).toEqual(['second-factor-set'])
     for (const secret of [totp.secret.base32, ...recoveryCodes]) {
       expect(letters[0]!.text).not.toContain(secret)
     }

@@ -12,12 +12,14 @@ import { acceptInvitationSchema, joinAsNewPersonSchema } from '@/lib/team/schema
 const terms = { refreshes: false }
 
 export const acceptInvitationAction = definePersonAction(
+  'acceptInvitation',
   acceptInvitationSchema,
   acceptInvitation,
   terms,
 )
 
 export const joinAsNewPersonAction = definePublicAction(
+  'joinAsNewPerson',
   joinAsNewPersonSchema,
   joinAsNewPerson,
   terms,

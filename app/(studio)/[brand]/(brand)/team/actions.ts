@@ -15,25 +15,33 @@ import {
 } from '@/lib/team/schema'
 import { withdrawInvitation } from '@/lib/team/withdraw-invitation'
 
-export const inviteMembersAction = defineAction(inviteMembersSchema, inviteMembers)
+export const inviteMembersAction = defineAction('inviteMembers', inviteMembersSchema, inviteMembers)
 
 export const resendInvitationAction = defineAction(
+  'resendInvitation',
   invitationIdSchema,
   async function resendInvitationCommand(actor, input) {
     await resendInvitation(actor, input)
   },
 )
 
-export const withdrawInvitationAction = defineAction(invitationIdSchema, withdrawInvitation)
+export const withdrawInvitationAction = defineAction(
+  'withdrawInvitation',
+  invitationIdSchema,
+  withdrawInvitation,
+)
 
 export const changeRoleAction = defineAction(
+  'changeRole',
   changeRoleSchema,
   async function changeRoleCommand(actor, input) {
     await changeRole(actor, input)
   },
 )
 
-export const removeMemberAction = defineAction(membershipIdSchema, removeMember)
+export const removeMemberAction = defineAction('removeMember', membershipIdSchema, removeMember)
 
 // The page it is asked from is not open to the person any more.
-export const leaveBrandAction = defineAction(leaveBrandSchema, leaveBrand, { refreshes: false })
+export const leaveBrandAction = defineAction('leaveBrand', leaveBrandSchema, leaveBrand, {
+  refreshes: false,
+})
