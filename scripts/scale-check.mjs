@@ -80,10 +80,7 @@ async function measureLoad(origin) {
       rate: median(runs.map(({ requests }) => requests.average)),
       p975: median(runs.map(({ latency }) => latency.p97_5)),
       wrong: runs.reduce((sum, run) => sum + run.non2xx + run.errors, 0),
-      // Round by round, so that what slows one slows the other.
-      ratio: median(
-        runs.map((run, at) => run.requests.average / results.get(HELLO)[at].requests.average),
-      ),
+      ratio: totalOf(runs) / totalOf(results.get(HELLO)),
     }
   })
   process.stdout.write(
@@ -91,7 +88,7 @@ async function measureLoad(origin) {
       ['', 'requests a second', 'p97.5', 'of hello-world'],
       ...rows.map(({ title, rate, p975, ratio }) => [
         title,
-        rate.toFixed(0),
+        rate.toFixed(1),
         `${p975} ms`,
         ratio.toFixed(2),
       ]),
@@ -126,6 +123,8 @@ async function targetsOf(origin) {
     { title: 'JSON route', url: origin + states, headers: { cookie }, bar: 0.6 },
   ]
 }
+
+const totalOf = (runs) => runs.reduce((sum, { requests }) => sum + requests.total, 0)
 
 function median(values) {
   const sorted = values.toSorted((one, other) => one - other)

@@ -1,8 +1,3 @@
-'use client'
-
-// Every page is sent with what it would show instead of itself. As components of the browser these
-// are named and not spelled out: it has them, and draws them when they are called for.
-
 import { LinkButton } from '@/components/ui/link-button'
 import { ForbiddenState, NotFoundState } from '@/components/ui/states'
 

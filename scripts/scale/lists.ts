@@ -22,7 +22,7 @@ const TIME_BAR = 1.5
 const BUFFERS_BAR = 2
 const OTHER_BRANDS = 100
 /** Each list is read this many times at each step. */
-const RUNS = 41
+const RUNS = 61
 
 /** Lines in which every list fills its first page, ten times as many, and a hundred times. */
 const STEPS: { name: string; size: LineSize }[] = [
