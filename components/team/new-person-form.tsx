@@ -4,6 +4,7 @@ import { signIn } from 'next-auth/react'
 import { useState } from 'react'
 import { useForm } from 'react-hook-form'
 
+import { PasswordField } from '@/components/people/password-field'
 import { reach } from '@/components/reach'
 import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
@@ -12,8 +13,7 @@ import { Notice } from '@/components/ui/notice'
 import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
 import type { ActionResult } from '@/lib/errors'
-import { PASSWORD_LENGTH } from '@/lib/people/constants'
-import { TEAM_LIMITS } from '@/lib/team/constants'
+import { PEOPLE_LIMITS } from '@/lib/people/constants'
 import type { JoinAsNewPersonValues } from '@/lib/team/schema'
 
 type Answer = ActionResult<{ email: string; brandSlug: string }>
@@ -71,16 +71,9 @@ export function NewPersonForm({
         <Input type="email" autoComplete="username" readOnly value={email} />
       </Field>
       <Field label="Your name" required hint="As your team knows you." error={errors.name?.message}>
-        <Input autoComplete="name" maxLength={TEAM_LIMITS.personName} {...register('name')} />
+        <Input autoComplete="name" maxLength={PEOPLE_LIMITS.name} {...register('name')} />
       </Field>
-      <Field
-        label="Password"
-        required
-        hint={`At least ${PASSWORD_LENGTH.min} characters. Three or four words that have nothing to do with each other are good.`}
-        error={errors.password?.message}
-      >
-        <Input type="password" autoComplete="new-password" {...register('password')} />
-      </Field>
+      <PasswordField fresh error={errors.password?.message} {...register('password')} />
       {problem ? (
         <Notice
           kind="error"

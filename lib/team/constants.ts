@@ -6,7 +6,6 @@ export const TEAM_LIMITS = {
   addresses: 20,
   /** Members and open invitations together. */
   perBrand: 200,
-  personName: 80,
   /** Characters of a pasted list of addresses. */
   pasted: 6_000,
 } as const

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 
-import { ROLES } from '../people/constants'
+import { PEOPLE_LIMITS, ROLES } from '../people/constants'
 import { TEAM_LIMITS } from './constants'
 
 const address = z.email().max(254)
@@ -73,7 +73,7 @@ export const joinAsNewPersonSchema = z.strictObject({
     .string()
     .trim()
     .min(1, 'Write your name.')
-    .max(TEAM_LIMITS.personName, `Keep your name to ${TEAM_LIMITS.personName} characters.`)
+    .max(PEOPLE_LIMITS.name, `Keep your name to ${PEOPLE_LIMITS.name} characters.`)
     .regex(/^[^\p{Cc}]*$/u, 'Write your name on one line.'),
   password: z.string().min(1, 'Choose a password.').max(1024),
 })

@@ -1,10 +1,11 @@
 import { randomUUID } from 'node:crypto'
 
-import { expect, test, type Page } from '@playwright/test'
+import type { Page } from '@playwright/test'
 
 import { BRAND, LINE, signIn, signOut } from './support/accounts'
 import { letterTo, linkIn } from './support/letters'
 import { overflowOf, SCRIPT_BAR, scriptBytesOf, violationsOf } from './support/page-checks'
+import { expect, test } from './support/test'
 
 const TEAM = `/${BRAND}/team`
 const PASSWORD = 'lanterns under the larches'
@@ -22,7 +23,7 @@ async function invite(page: Page, email: string, role = 'Designer') {
 async function joinAsNew(guest: Page, address: string, name: string) {
   await guest.goto(address)
   await guest.getByLabel('Your name').fill(name)
-  await guest.getByLabel('Password').fill(PASSWORD)
+  await guest.getByLabel('Password', { exact: true }).fill(PASSWORD)
   await guest.getByRole('button', { name: 'Make account and join Teasel & Tarn' }).click()
   await expect(guest).toHaveURL(new RegExp(`/${BRAND}$`))
 }
@@ -49,6 +50,7 @@ test('a guest is invited by letter, makes an account, joins, changes role, and i
   expect(letter.text).toContain('as a designer')
   expect(letter.html).toContain('Open the invitation')
   const invitation = linkIn(letter)
+  expect(new URL(invitation).origin).toBe(process.env.APP_ORIGIN)
 
   const other = await browser.newContext()
   const guest = await other.newPage()
@@ -64,7 +66,7 @@ test('a guest is invited by letter, makes an account, joins, changes role, and i
   await guest.setViewportSize({ width: 1280, height: 900 })
 
   await guest.getByLabel('Your name').fill('Wilf Tansy')
-  await guest.getByLabel('Password').fill('short')
+  await guest.getByLabel('Password', { exact: true }).fill('short')
   await guest.getByRole('button', { name: 'Make account and join' }).click()
   await expect(guest.getByText('Use at least 12 characters')).toBeVisible()
   await joinAsNew(guest, invitation, 'Wilf Tansy')
@@ -123,7 +125,7 @@ test('an account of another brand joins with itself, then leaves again', async (
   expect(await violationsOf(page)).toEqual([])
   await page.getByRole('link', { name: 'Sign in' }).click()
   await page.getByLabel('E-mail').fill(email)
-  await page.getByLabel('Password').fill('millstones-turn-slowly')
+  await page.getByLabel('Password', { exact: true }).fill('millstones-turn-slowly')
   await page.getByRole('button', { name: 'Sign in' }).click()
   await page.getByRole('button', { name: 'Join Teasel & Tarn' }).click()
   await expect(page).toHaveURL(new RegExp(`/${BRAND}$`))

@@ -1,6 +1,7 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 
+import { PEOPLE_LIMITS } from '@/lib/people/constants'
 import { TEAM_LIMITS } from '@/lib/team/constants'
 import { inviteMembersSchema, joinAsNewPersonSchema, readAddresses } from '@/lib/team/schema'
 
@@ -52,7 +53,7 @@ describe('a new person’s name', () => {
       joinAsNewPersonSchema.safeParse({ token: 't', name, password: 'p' }).success
     expect(named('Wilf Tansy')).toBe(true)
     expect(named('Ødegård, 村上')).toBe(true)
-    for (const name of ['', '  ', 'Wilf\r\nBcc: all', 'x'.repeat(TEAM_LIMITS.personName + 1)]) {
+    for (const name of ['', '  ', 'Wilf\r\nBcc: all', 'x'.repeat(PEOPLE_LIMITS.name + 1)]) {
       expect(named(name), JSON.stringify(name)).toBe(false)
     }
   })

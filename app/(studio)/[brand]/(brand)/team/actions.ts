@@ -20,7 +20,7 @@ export const inviteMembersAction = defineAction('inviteMembers', inviteMembersSc
 export const resendInvitationAction = defineAction(
   'resendInvitation',
   invitationIdSchema,
-  async function resendInvitationCommand(actor, input) {
+  async (actor, input) => {
     await resendInvitation(actor, input)
   },
 )
@@ -34,7 +34,7 @@ export const withdrawInvitationAction = defineAction(
 export const changeRoleAction = defineAction(
   'changeRole',
   changeRoleSchema,
-  async function changeRoleCommand(actor, input) {
+  async (actor, input) => {
     await changeRole(actor, input)
   },
 )

@@ -7,6 +7,7 @@ import { Invitations } from '@/components/team/invitations'
 import { InviteForm } from '@/components/team/invite-form'
 import { LeaveBrandButton } from '@/components/team/leave-brand-button'
 import { Members } from '@/components/team/members'
+import { TextLink } from '@/components/ui/text-link'
 import { ROLES, ROLE_WORDS } from '@/lib/people/constants'
 import { readForPage } from '@/lib/server/page'
 import { ROLE_HINTS } from '@/lib/team/constants'
@@ -41,17 +42,27 @@ export default async function TeamPage({ params }: PageProps<'/[brand]/team'>) {
   return (
     <Sheet
       notes={
-        <Note title="Roles">
-          <dl className="space-y-2">
-            {ROLES.map((role) => (
-              <div key={role}>
-                <dt className="font-medium text-ink">{ROLE_WORDS[role]}</dt>
-                <dd>{ROLE_HINTS[role]}</dd>
-              </div>
-            ))}
-          </dl>
-          {manages ? null : <p>An owner of {actor.brandName} changes who is in the team.</p>}
-        </Note>
+        <>
+          <Note title="Roles">
+            <dl className="space-y-2">
+              {ROLES.map((role) => (
+                <div key={role}>
+                  <dt className="font-medium text-ink">{ROLE_WORDS[role]}</dt>
+                  <dd>{ROLE_HINTS[role]}</dd>
+                </div>
+              ))}
+            </dl>
+            {manages ? null : <p>An owner of {actor.brandName} changes who is in the team.</p>}
+          </Note>
+          {manages ? (
+            <Note title="Signing in">
+              <p>
+                You can ask a second factor of everybody:{' '}
+                <TextLink href={`/${brand}/security`}>how {actor.brandName} signs in</TextLink>.
+              </p>
+            </Note>
+          ) : null}
+        </>
       }
     >
       <SheetHeader
