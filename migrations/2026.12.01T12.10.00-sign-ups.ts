@@ -31,7 +31,7 @@ BEGIN ATOMIC
     WHERE people.id = app_person() AND letters.recipient = people.email AND sent_at IS NOT NULL;
   UPDATE activities SET object_label = NULL, before = NULL, after = NULL FROM people
     WHERE people.id = app_person() AND (
-      object_id = people.id OR object_label = people.email
+      object_label = people.email
       OR position(people.email in coalesce(before::text, '') || coalesce(after::text, '')) > 0
     );
 END;

@@ -1,9 +1,9 @@
 import { randomUUID } from 'node:crypto'
 
 import AxeBuilder from '@axe-core/playwright'
-import { expect, test, type Page } from '@playwright/test'
 
 import { letterTo, linkIn } from './support/letters'
+import { expect, test, type Page } from './support/test'
 
 const PASSWORD = 'three hills and a ford'
 const NEW = 'a wether in the lower field'

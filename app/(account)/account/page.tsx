@@ -30,7 +30,7 @@ export default async function AccountPage() {
     person: one,
     sessions: (await listSessions(one)).map((row) => presentSession(row, one.sessionId)),
   }))
-  const { name, email, memberships } = person
+  const { name, email, hasSecondFactor, memberships } = person
   return (
     <PlainPage wide homeHref="/">
       <SheetHeader title="Your account" meta={email} back={{ href: '/', label: 'Your lines' }} />
@@ -45,12 +45,12 @@ export default async function AccountPage() {
       </Part>
       <Part title="Second factor">
         <p className="mb-4 max-w-measure text-ink-soft">
-          {person.hasSecondFactor
-            ? 'In use: signing in asks for a code after your password.'
-            : 'None: your password alone signs you in.'}
+          {hasSecondFactor
+            ? 'Besides your password, signing in asks for a code of your authenticator.'
+            : 'Besides your password, signing in can ask for a code that your telephone shows.'}
         </p>
         <LinkButton href="/account/second-factor">
-          {person.hasSecondFactor ? 'Look at your second factor' : 'Set up a second factor'}
+          {hasSecondFactor ? 'Change second factor' : 'Set up second factor'}
         </LinkButton>
       </Part>
       <Part title="Sessions">

@@ -97,6 +97,14 @@ describe('closing an account', () => {
   it('keeps what they made, and the record of it, under nobody’s name', async () => {
     const line = await makeLine(shared)
     const made = await makeCombination(line, await makeShades(line, 5), { createdById: person.id })
+    const object = { kind: 'person', id: person.id, label: 'Owner' }
+    await inTransaction((transaction) =>
+      recordActivity(
+        { brandId: shared.id, personId: colleague.id },
+        { action: 'membership.role-changed', object, after: { role: 'owner' } },
+        transaction,
+      ),
+    )
     await close()
     expect((await Combination.findByPk(made.id))!.createdById).toBeNull()
     const rows = await Activity.findAll({
@@ -105,8 +113,10 @@ describe('closing an account', () => {
     })
     expect(rows.map(({ action, personId }) => [action, personId])).toEqual([
       ['session.opened', null],
+      ['membership.role-changed', colleague.id],
       ['person.account-closed', null],
     ])
+    expect(rows[1]).toMatchObject({ objectLabel: 'Owner', after: { role: 'owner' } })
   })
 
   it('removes a brand that nobody else is of with all that is in it, and no other', async () => {
