@@ -24,7 +24,7 @@ export async function signIn(origin, { email, password }) {
     body: new URLSearchParams({ email, password, csrfToken, json: 'true', callbackUrl: origin }),
   })
   const cookies = cookiesOf(answer)
-  return cookies.includes('session-token=') ? cookies : ''
+  return cookies.includes('woadmap.session=') ? cookies : ''
 }
 
 function cookiesOf(response) {

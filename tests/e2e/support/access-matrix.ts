@@ -71,7 +71,20 @@ export const PAGES: Record<string, PageRule> = {
     except: { member: '→ /teasel-and-tarn', stranger: '→ /quern-yarn-works' },
   },
   '/sign-in': { who: 'anyone', except: { member: '→ /', stranger: '→ /', removed: '→ /' } },
+  '/sign-up': { who: 'anyone', except: { member: '→ /', stranger: '→ /', removed: '→ /' } },
+  '/forgotten-password': { who: 'anyone' },
+  // The token of the place is in no letter.
+  '/confirm/[token]': { who: 'anyone', answer: 404 },
+  '/confirm-email/[token]': { who: 'anyone', answer: 404 },
+  '/reset-password/[token]': { who: 'anyone', answer: 404 },
+  '/invitations/[token]': { who: 'anyone', answer: 404 },
+  '/account': { who: 'signed in' },
+  '/account/close': { who: 'signed in' },
+  '/account/second-factor': { who: 'signed in' },
   '/[brand]': { who: EVERYBODY },
+  '/[brand]/team': { who: EVERYBODY },
+  '/[brand]/activity': { who: OWNER },
+  '/[brand]/security': { who: OWNER },
   '/[brand]/lines/new': { who: OWNER },
   '/[brand]/lines/[line]': { who: EVERYBODY },
   '/[brand]/lines/[line]/edit': { who: OWNER },
@@ -98,6 +111,7 @@ export const ROUTES: Record<string, RouteRule> = {
     body: () => ({ email: 'owner@teasel.example', password: 'kettle-on-the-fellside' }),
     answer: '→ /api/auth/signin',
   },
+  'GET /api/brands/[brand]/activity.csv': { who: OWNER },
   'GET /api/brands/[brand]/lines/[line]/shades.csv': { who: EVERYBODY },
   'GET /api/brands/[brand]/photographs/states': {
     who: STUDIO,
@@ -140,6 +154,69 @@ export const ROUTES: Record<string, RouteRule> = {
 /** Every server action. */
 export const ACTIONS: Record<string, ActionRule> = {
   signOutAction: { who: 'anyone', args: () => [], answer: '→ /sign-in', endsSession: true },
+
+  // Whoever asks is let in as far as the form.
+  signUpAction: { who: 'anyone', args: () => [{}], answer: 'invalid' },
+  confirmSignUpAction: { who: 'anyone', args: () => [{}], answer: 'invalid' },
+  requestPasswordResetAction: { who: 'anyone', args: () => [{}], answer: 'invalid' },
+  resetPasswordAction: { who: 'anyone', args: () => [{}], answer: 'invalid' },
+  confirmEmailChangeAction: { who: 'anyone', args: () => [{}], answer: 'invalid' },
+  joinAsNewPersonAction: { who: 'anyone', args: () => [{}], answer: 'invalid' },
+  acceptInvitationAction: {
+    who: 'signed in',
+    args: ({ token }) => [{ token }],
+    answer: 'not-found',
+  },
+  signOutForInvitationAction: {
+    who: 'anyone',
+    args: () => ['one'],
+    answer: '→ /invitations/one',
+    endsSession: true,
+  },
+
+  // About oneself alone: what a form lacks is asked for.
+  changeNameAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+  requestEmailChangeAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+  changePasswordAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+  endSessionAction: {
+    who: 'signed in',
+    args: () => [{ sessionId: randomUUID() }],
+    answer: 'not-found',
+  },
+  endOtherSessionsAction: { who: 'signed in', args: () => [{ all: true }], answer: 'invalid' },
+  closeAccountAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+  beginSecondFactorAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+  confirmSecondFactorAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+  renewRecoveryCodesAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+  removeSecondFactorAction: { who: 'signed in', args: () => [{}], answer: 'invalid' },
+
+  // The owner of the brand is of it already: no letter goes out.
+  inviteMembersAction: {
+    who: OWNER,
+    input: ({ ownerEmail }) => ({ emails: ownerEmail, role: 'dyer', requestKey: randomUUID() }),
+  },
+  resendInvitationAction: {
+    who: OWNER,
+    input: () => ({ invitationId: randomUUID() }),
+    answer: 'not-found',
+  },
+  withdrawInvitationAction: {
+    who: OWNER,
+    input: () => ({ invitationId: randomUUID() }),
+    answer: 'not-found',
+  },
+  changeRoleAction: {
+    who: OWNER,
+    input: () => ({ membershipId: randomUUID(), role: 'dyer', was: 'dyer' }),
+    answer: 'not-found',
+  },
+  removeMemberAction: {
+    who: OWNER,
+    input: () => ({ membershipId: randomUUID() }),
+    answer: 'not-found',
+  },
+  leaveBrandAction: { who: EVERYBODY, input: () => ({ really: true }), answer: 'invalid' },
+  requireSecondFactorAction: { who: OWNER, input: () => ({ required: false }) },
 
   createLineAction: {
     who: OWNER,

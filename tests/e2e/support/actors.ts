@@ -41,7 +41,7 @@ export async function openSessionOf(origin: string, email: string): Promise<stri
     redirect: 'manual',
   })
   const cookie = cookiesOf(answer)
-  if (!cookie.includes('session-token=')) {
+  if (!cookie.includes('woadmap.session=')) {
     throw new Error(`Signing in as ${email} answered ${answer.status}: ${await answer.text()}`)
   }
   return cookie

@@ -6,6 +6,10 @@ import pg from 'pg'
 export interface Place {
   /** Slugs, as in an address. */
   brand: string
+  /** Of somebody who is an owner of the brand. */
+  ownerEmail: string
+  /** Of no letter. */
+  token: string
   line: string
   lineName: string
   shade: string
@@ -172,8 +176,15 @@ export async function makePlace(
      FROM unnest($3::uuid[]) WITH ORDINALITY AS five (shade_id, place)`,
     [brand_id, combination, five],
   )
+  const owner = await client.query(
+    `SELECT email FROM people JOIN memberships ON person_id = people.id
+     WHERE brand_id = $1 AND role = 'owner' ORDER BY people.created_at, people.id LIMIT 1`,
+    [brand_id],
+  )
   return {
     brand,
+    ownerEmail: owner.rows[0].email,
+    token: 'A'.repeat(43),
     line,
     lineName: line_name,
     shade: id,
