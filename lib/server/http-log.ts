@@ -18,9 +18,9 @@ const QUIET = /^\/(_next\/static|livez|readyz|icon|favicon)/
 
 /**
  * What the log keeps of an address: no query, and no token of a link in a letter, since whoever has
- * one may use it.
+ * one may use it. It also travels as a header, and so stays within ASCII.
  */
-export const loggedPath = (url: string): string => url.split('?')[0]!.replace(/[\w-]{43,}/g, '…')
+export const loggedPath = (url: string): string => url.split('?')[0]!.replace(/[\w-]{43,}/g, '*')
 
 /**
  * Gives every request its id, its path and the address it truly came from, over whatever headers of
