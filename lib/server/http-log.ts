@@ -36,9 +36,8 @@ export function watchRequests(): void {
     request.headers[PEER_HEADER] = socket.remoteAddress ?? ''
     response.setHeader(REQUEST_ID_HEADER, requestId)
     const { method, url = '' } = request
-    // A header holds Latin letters only; what is left out of the log is no character of those.
-    request.headers[PATH_HEADER] = url.split('?')[0]!
     const path = loggedPath(url)
+    request.headers[PATH_HEADER] = path
     if (QUIET.test(path)) return
     response.once('close', () => {
       const ms = Math.round(performance.now() - started)
