@@ -49,9 +49,10 @@ test('a restart of the database during a save is told, keeps the form, and makes
   try {
     await client.query('BEGIN; LOCK TABLE lines IN EXCLUSIVE MODE')
     await page.getByRole('button', { name: 'Make line' }).click()
-    const waiting = `SELECT count(*)::int AS n FROM pg_stat_activity
-      WHERE wait_event_type = 'Lock' AND application_name = 'woadmap'`
-    await expect.poll(async () => (await client.query(waiting)).rows[0].n).toBeGreaterThan(0)
+    const waiting = 'SELECT count(*)::int AS n FROM pg_locks WHERE NOT granted'
+    await expect
+      .poll(async () => (await client.query(waiting)).rows[0].n, { intervals: [50] })
+      .toBeGreaterThan(0)
     await crashDatabase(client)
     const told = page.getByRole('alert').filter({ hasText: 'database did not answer' })
     await expect(told).toBeVisible()

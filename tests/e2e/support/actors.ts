@@ -24,6 +24,8 @@ const DOMAIN = 'matrix.example'
 // The people made here have the password of the account they are a copy of.
 const MODEL = accounts[0]!
 // None is the end of another, so that one can be told from the other in a text.
+/** What somebody of the matrix is called. */
+export const calledAs = (name: string): string => `Here as ${name}`
 const emailOf = (name: string) => `as-${name.replaceAll(' ', '-')}@${DOMAIN}`
 const ROLES: readonly Role[] = ['owner', 'marketer', 'designer', 'dyer']
 
@@ -67,7 +69,7 @@ export async function makeActors(
   await clearActors(client)
   const add = async (name: string, standing: Standing, brand: string, role: Role) => {
     const email = emailOf(name)
-    await addMember(client, { email, name: `Here as ${name}`, brand, role })
+    await addMember(client, { email, name: calledAs(name), brand, role })
     return { name, standing, role, brand, email, cookie: await openSessionOf(origin, email) }
   }
   const members: MatrixActor[] = []

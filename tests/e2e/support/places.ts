@@ -64,8 +64,11 @@ export function wordsOf(
 ): readonly string[] {
   const ids = [...IDS.map((field) => place[field]), ...five, spareCombination, brand, line]
   const said = ids.reduce((rest, id) => rest.replaceAll(id, 'one'), body)
-  // `$L2d` refers to a part, `2d:` begins one.
-  const unnumbered = said.replace(/\\n/g, ' ').replace(/\$[A-Za-z@]?[0-9a-f]{1,3}\b/g, ' ')
+  // `$L2d` refers to a part, `2d:` begins one; a nonce is another at every request.
+  const unnumbered = said
+    .replace(/[A-Za-z0-9+/]{22}==/g, ' ')
+    .replace(/\\n/g, ' ')
+    .replace(/\$[A-Za-z@]?[0-9a-f]{1,3}\b/g, ' ')
   const words = unnumbered.match(/[\p{L}\p{N}_.:/-]+/gu) ?? []
   return [...new Set(words)].filter((word) => !/^[BPS]?:?[0-9a-f]{1,2}(:\w*)?$/.test(word)).sort()
 }

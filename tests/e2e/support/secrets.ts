@@ -3,7 +3,7 @@ import { join } from 'node:path'
 
 import type pg from 'pg'
 
-import type { MatrixActor } from './actors'
+import { calledAs, type MatrixActor } from './actors'
 
 /** What must not be read by some. */
 export interface Secrets {
@@ -72,7 +72,8 @@ export function secretsIn(text: string, secrets: Secrets, actor: MatrixActor): s
     }),
   ]
   const read = plain(text)
-  return hidden.filter((secret) => secret !== actor.email && read.includes(secret))
+  const own = [actor.email, calledAs(actor.name)]
+  return hidden.filter((secret) => !own.includes(secret) && read.includes(secret))
 }
 
 /** The text with the escapes of HTML, of JSON, and of JSON within a script undone. */

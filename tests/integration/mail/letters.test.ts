@@ -99,7 +99,8 @@ describe('a letter in the outbox', () => {
     for (let time = 0; time < 3; time++)
       await expect(sendLetter(letter.id, away)).rejects.toThrow(/ECONNREFUSED/)
     const { url, taken } = await makeMailServer(() => null)
-    await sendLetters(mailServer(url))
+    // Other tests' letters are older, and first in line.
+    while ((await sendLetters(mailServer(url))).left > 0);
     expect(taken).toContain(`<${letter.id}@localhost>`)
   })
 

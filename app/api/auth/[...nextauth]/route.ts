@@ -14,6 +14,9 @@ type Context = { params: Promise<{ nextauth: string[] }> }
  */
 const OPEN = ['GET csrf', 'GET providers', 'POST callback/credentials']
 
+const shut = () =>
+  new Response(null, { status: 404, headers: { 'Cache-Control': 'private, no-store' } })
+
 /** next-auth answers every refusal with 401; one for asking too often says so, and until when. */
 async function tellWhen(answer: Response): Promise<Response> {
   if (answer.status !== 401) return answer
@@ -31,7 +34,7 @@ async function tellWhen(answer: Response): Promise<Response> {
 /** Those of next-auth's own addresses that are open. */
 export async function GET(request: NextRequest, context: Context): Promise<Response> {
   const asked = `${request.method} ${(await context.params).nextauth.join('/')}`
-  if (!OPEN.includes(asked)) return new Response(null, { status: 404 })
+  if (!OPEN.includes(asked)) return shut()
   const answer = await tellWhen((await NextAuth(request, context, authOptions())) as Response)
   answer.headers.set('Cache-Control', 'private, no-store')
   return answer
