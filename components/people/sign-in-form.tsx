@@ -22,6 +22,7 @@ function inWords(error: string | null | undefined): string {
     return 'That code is not good, or was used before. Wait for the next one, or use a recovery code.'
   if (kind === 'too-many')
     return `There were too many wrong attempts. Nothing is lost; try again in ${Math.ceil(Number(seconds) / 60)} minutes.`
+  if (error && kind === 'failed') return error.slice('failed:'.length)
   return 'Signing in did not work just now; nothing you typed is wrong. Try again in a moment.'
 }
 

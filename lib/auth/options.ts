@@ -3,6 +3,7 @@ import CredentialsProvider from 'next-auth/providers/credentials'
 
 import { env } from '@/lib/env'
 import { signInSchema } from '@/lib/people/schema'
+import { failureOf } from '@/lib/server/map-error'
 import { addressOf, requestIdOf } from '@/lib/server/request'
 import { withinScope } from '@/models/scope'
 
@@ -23,6 +24,11 @@ declare module 'next-auth/jwt' {
 
 /** Whether people reach the product over https, so that its cookies may be bound to that. */
 export const isSecure = (): boolean => new URL(env().APP_ORIGIN).protocol === 'https:'
+
+/** next-auth sends the words of whatever is thrown to the browser: ours are written for people. */
+function maskError(error: unknown): never {
+  throw new Error(`failed:${failureOf(error, 'signIn').message}`)
+}
 
 /** An outcome as the sign-in form reads it from next-auth: "too-many:540". */
 const asError = (outcome: Exclude<SignInOutcome, { kind: 'opened' }>): string =>
@@ -62,7 +68,7 @@ export function authOptions(): NextAuthOptions {
               ...input.data,
               address: addressOf(headers),
               userAgent: headers.get('user-agent') ?? '',
-            }),
+            }).catch(maskError),
           )
           if (outcome.kind === 'refused') return null
           if (outcome.kind !== 'opened') throw new Error(asError(outcome))

@@ -93,7 +93,9 @@ test('what a colleague did stands in the owner’s record, is narrowed, opened i
   expect(text).not.toContain('signed in')
 
   await page.goto(`/${BRAND}/activity?what=activity`)
-  await expect(sheet.getByText('took this record away as a CSV file')).toBeVisible()
+  await expect(
+    entries.filter({ hasText: 'took this record away as a CSV file' }).first(),
+  ).toBeVisible()
   await page.goto(`/${BRAND}/activity?from=2000-01-01&to=2000-01-02`)
   await expect(page.getByRole('heading', { name: 'No entry fits that' })).toBeVisible()
   await page.goto(`/${BRAND}/activity?what=nonsense&person=%27&from=x&before=y`)
@@ -182,6 +184,7 @@ test('one request’s id stands in its answer, its log line, the record, the job
 
 test('an error that nobody expected is masked, and its reference finds its log line', async ({
   page,
+  complaints,
 }) => {
   await signIn(page, 'owner')
   await database.query('ALTER TABLE combinations RENAME TO combinations_away')
@@ -191,6 +194,8 @@ test('an error that nobody expected is masked, and its reference finds its log l
     const told = page.getByRole('alert').filter({ hasText: 'This page could not be read' })
     await expect(told).toBeVisible()
     await expectLogged(await told.textContent(), await response!.text())
+    // React says in the console that the server has left out the error's words.
+    for (const complaint of complaints.splice(0)) expect(complaint).toContain('React error #441')
   } finally {
     await database.query('ALTER TABLE combinations_away RENAME TO combinations')
   }
@@ -205,6 +210,23 @@ test('an error that nobody expected is masked, and its reference finds its log l
   } finally {
     await database.query('ALTER TABLE shades_away RENAME TO shades')
   }
+})
+
+test('nor does signing in tell more, nor open, while it cannot be done', async ({ page }) => {
+  await page.goto('/sign-in')
+  await page.getByLabel('E-mail').fill('owner@teasel.example')
+  await page.getByLabel('Password').fill('not asked for')
+  await database.query('ALTER TABLE people RENAME TO people_away')
+  try {
+    const answered = page.waitForResponse((one) => one.url().includes('/callback/credentials'))
+    await page.getByRole('button', { name: 'Sign in' }).click()
+    const told = page.getByRole('alert').filter({ hasText: 'Something went wrong on our side' })
+    await expect(told).toBeVisible()
+    await expectLogged(await told.textContent(), await (await answered).text())
+  } finally {
+    await database.query('ALTER TABLE people_away RENAME TO people')
+  }
+  await expect(page).toHaveURL(/\/sign-in/)
 })
 
 /** The reference in the words shown finds one line of the log, which says what the words do not. */
