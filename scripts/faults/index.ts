@@ -8,6 +8,7 @@ import { DATABASE_FAULTS } from './database'
 import { EDITOR_FAULTS } from './editors'
 import { Missed, type Fault } from './fault'
 import { JOB_FAULTS } from './jobs'
+import { MAIL_FAULTS } from './mail'
 import { STORE_FAULTS } from './object-store'
 import { WEB_FAULTS } from './web'
 import { PATIENCE, seconds, World, type Ground } from './world'
@@ -17,6 +18,7 @@ export const FAULTS: readonly Fault[] = [
   ...DATABASE_FAULTS,
   ...STORE_FAULTS,
   ...JOB_FAULTS,
+  ...MAIL_FAULTS,
   ...WEB_FAULTS,
   ...EDITOR_FAULTS,
 ]

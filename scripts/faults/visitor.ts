@@ -52,7 +52,8 @@ export class Visitor {
       body: form.toString(),
     })
     must(
-      answer.status === 200 && [...this.#cookies.keys()].some((name) => /woadmap\.session/.test(name)),
+      answer.status === 200 &&
+        [...this.#cookies.keys()].some((name) => /woadmap\.session/.test(name)),
       `${role} could not sign in (${answer.status})`,
     )
     return this

@@ -94,7 +94,7 @@ export class World {
     const env = {
       ...this.ground.env,
       WOADMAP_DIST_DIR: dist,
-      DATABASE_URL: through(this.gates.webDatabase, this.ground.env.DATABASE_URL!),
+      DATABASE_WEB_URL: through(this.gates.webDatabase, this.ground.env.DATABASE_WEB_URL!),
       S3_ENDPOINT: through(this.gates.webStore, this.ground.env.S3_ENDPOINT!),
       S3_PUBLIC_ENDPOINT: through(this.gates.browserStore, this.ground.env.S3_ENDPOINT!),
       SMTP_URL: through(this.gates.mail, this.ground.env.SMTP_URL!),
@@ -154,8 +154,7 @@ export class World {
   /** Waits until so many of the web's statements wait for a lock. */
   waitForLocked(atLeast: number): Promise<unknown> {
     return until(`${atLeast} statements wait for the lock`, async () => {
-      const waiting = `pg_stat_activity WHERE wait_event_type = 'Lock' AND application_name = 'woadmap'`
-      return (await this.count(waiting)) >= atLeast
+      return (await this.count('pg_locks WHERE NOT granted')) >= atLeast
     })
   }
 

@@ -166,7 +166,7 @@ test('every route has its headers and is stored nowhere, whatever it answers', a
     line: 'heronsway-dk',
     photograph: address.split('/').at(-1)!,
     name: copy.split('/').at(-1)!,
-    nextauth: 'session',
+    nextauth: 'csrf',
   })
   for (const route of there) {
     const query = route.endsWith('/states') ? `?ids=${address.split('/').at(-1)!}` : ''
