@@ -31,11 +31,14 @@ const inWords = (name: unknown) =>
     .replace(/([a-z])([A-Z])/g, '$1 $2')
     .toLowerCase()
 
-interface ActionWords {
+/** The words of one action. */
+export interface ActionWords {
   /** As the filter and the CSV name it. */
   label: string
   /** What follows the person's name. */
   says: (told: Told) => string
+  /** The sentence leaves nothing to be told in detail. */
+  saysAll?: true
 }
 
 /** Everything the record tells of, by the name it is kept under: the one table of its words. */
@@ -49,6 +52,7 @@ export const ACTIONS = {
     label: 'Session ended',
     says: ({ after }) =>
       after.ended ? `ended ${String(after.ended)} other sessions` : 'ended a session',
+    saysAll: true,
   },
   'access.refused': {
     label: 'Access refused',
@@ -56,6 +60,7 @@ export const ACTIONS = {
       after.page
         ? `was refused the page ${String(after.page)}`
         : `was refused: ${inWords(after.asked)}`,
+    saysAll: true,
   },
   'activity.exported': {
     label: 'Record exported',

@@ -1,6 +1,6 @@
 import type { Activity } from '@/models'
 
-import { ACTIONS, FIELD_WORDS, type ActivityAction, type Told } from './constants'
+import { ACTIONS, FIELD_WORDS, type ActionWords, type ActivityAction, type Told } from './constants'
 import type { ActivityRow } from './queries'
 
 /** One field of an entry: as it was, and as it is. */
@@ -50,7 +50,7 @@ export function presentActivity({ entry, about }: ActivityRow): ActivityView {
     before: entry.before ?? {},
     after: entry.after ?? {},
   }
-  const words = ACTIONS[entry.action as ActivityAction] ?? unknownAction(entry.action)
+  const words: ActionWords = ACTIONS[entry.action as ActivityAction] ?? unknownAction(entry.action)
   return {
     id: entry.id,
     at,
@@ -59,7 +59,7 @@ export function presentActivity({ entry, about }: ActivityRow): ActivityView {
     person: entry.person?.name ?? 'A former member',
     action: words.label,
     sentence: words.says(told),
-    changes: changesIn(entry),
+    changes: words.saysAll ? [] : changesIn(entry),
     requestId: entry.requestId,
   }
 }

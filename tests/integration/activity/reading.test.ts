@@ -153,6 +153,17 @@ describe('the record', () => {
     expect(await labelsOf(stays, { person: 'former' })).toEqual(['their line'])
   })
 
+  it('says of a refusal what was refused, and has nothing to add', async () => {
+    const brand = await makeBrand('Refusals')
+    const one = await makeActor(brand)
+    await record(one, { action: 'access.refused', after: { asked: 'restoreCombination' } })
+    const { entries } = await listActivity(one, asking())
+    expect(presentDays(entries)[0]!.entries[0]).toMatchObject({
+      sentence: 'was refused: restore combination',
+      changes: [],
+    })
+  })
+
   it('says what was different, field by field, in words', async () => {
     const brand = await makeBrand('Details')
     const one = await makeActor(brand)
