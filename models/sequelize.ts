@@ -1,4 +1,4 @@
-import { Sequelize, type Transaction } from 'sequelize'
+import { ConnectionError, Sequelize, type Transaction } from 'sequelize'
 
 import { building, env, serving } from '@/lib/env'
 
@@ -74,7 +74,7 @@ async function setScope(sequelize: Sequelize, connection: ScopedConnection): Pro
     connection.woadmapScope = scope
   } catch (error) {
     await (sequelize as unknown as WithManager).connectionManager.destroyConnection(connection)
-    throw error
+    throw new ConnectionError(error as Error)
   }
 }
 

@@ -1,5 +1,5 @@
 import PgBoss from 'pg-boss'
-import type { Transaction } from 'sequelize'
+import { DatabaseError, type Transaction } from 'sequelize'
 
 import { currentScope } from '@/models/scope'
 
@@ -54,11 +54,19 @@ export async function enqueue<Name extends JobName>(
   const id = await sender.send(name, requestId ? { ...data, requestId } : data, {
     ...QUEUES[name],
     retryBackoff: true,
-    // pg-boss writes its own SQL; we only lend it the connection.
-    // eslint-disable-next-line sql/fixed
-    db: { executeSql: (text, values) => connection.query(text, values) },
+    db: { executeSql: (text, values) => runOn(connection, text, values) },
   })
   if (!id) throw new Error(`No queue named ${name}: run the migrations.`)
+}
+
+/** pg-boss writes its own SQL; we only lend it the connection, and say as Sequelize does what failed. */
+async function runOn(connection: PgConnection, text: string, values: unknown[]) {
+  try {
+    // eslint-disable-next-line sql/fixed
+    return await connection.query(text, values)
+  } catch (error) {
+    throw new DatabaseError(Object.assign(error as Error, { sql: '' }))
+  }
 }
 
 interface PgConnection {

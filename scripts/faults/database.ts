@@ -169,6 +169,8 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       signalAll(pids, 'SIGSTOP')
       const frozen = performance.now()
       const opening = openInTab(tab, `/${BRAND}/lines/${LINE}/edit`)
+      // When something else is missed first, nobody waits for it any more.
+      opening.catch(() => {})
       const shade = world.newShade()
       const [save, page, route, ready, alive] = await Promise.all([
         world.saveShade(shade),

@@ -17,6 +17,9 @@ async function invite(world: World): Promise<string> {
   return email
 }
 
+/** The end of a letter, which may come in a piece of its own. @source RFC 5321 § 4.1.1.4 */
+const LAST_LINE = /(^|\r\n)\.\r\n$/
+
 /** How many letters the mail server has taken for an address. */
 function arrived(world: World, email: string): number {
   const folder = join(world.ground.local, 'mail')
@@ -66,7 +69,7 @@ export const MAIL_FAULTS: readonly Fault[] = [
       const { mail } = world.gates
       let dropped = 0
       mail.tamper((way, chunk, cut) => {
-        if (dropped > 0 || way !== 'out' || !chunk.includes('\r\n.\r\n')) return chunk
+        if (dropped > 0 || way !== 'out' || !LAST_LINE.test(chunk.toString('latin1'))) return chunk
         dropped++
         cut()
         return null
