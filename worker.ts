@@ -1,34 +1,21 @@
 import type PgBoss from 'pg-boss'
 
 import { createBoss } from '@/lib/jobs/boss'
-import { HANDLERS, SCHEDULES, type JobHandler } from '@/lib/jobs/handlers'
+import { SCHEDULES } from '@/lib/jobs/handlers'
 import { QUEUES, type JobName } from '@/lib/jobs/queue'
+import { runJob } from '@/lib/jobs/run-job'
 import { logger } from '@/lib/logger'
 import { warmUpReading } from '@/lib/photographs/warm-up'
 import { sequelize } from '@/models'
-import { withinScope } from '@/models/scope'
 
 /** How long jobs under way may take to end once the process is told to stop, in milliseconds. */
 const GRACE = 20_000
 
-async function workOff<Name extends JobName>(boss: PgBoss, name: Name): Promise<void> {
-  const handle = HANDLERS[name] as JobHandler<JobName>
+async function workOff(boss: PgBoss, name: JobName): Promise<void> {
   await boss.work<object>(
     name,
     { batchSize: 1, pollingIntervalSeconds: 0.5, includeMetadata: true },
-    async ([job]) => {
-      const started = performance.now()
-      const { requestId, ...data } = job!.data as { requestId?: string }
-      const log = logger().child({ job: job!.name, id: job!.id, data, requestId })
-      try {
-        const isLastTry = job!.retryCount >= QUEUES[name].retryLimit
-        const result = await withinScope({ requestId }, () => handle(data as never, { isLastTry }))
-        log.info({ result, ms: Math.round(performance.now() - started) }, 'job done')
-      } catch (error) {
-        log.warn({ err: error, retryCount: job!.retryCount }, 'job failed')
-        throw error
-      }
-    },
+    ([job]) => runJob(name, job!),
   )
 }
 
