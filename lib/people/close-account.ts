@@ -3,16 +3,8 @@ import { QueryTypes } from 'sequelize'
 import type { SignedInPerson } from '@/lib/auth/sessions'
 import { ConflictError, InvalidError } from '@/lib/errors'
 import { postLetter } from '@/lib/mail/post-letter'
-import {
-  Brand,
-  Combination,
-  inTransaction,
-  Membership,
-  Person,
-  sequelize,
-  SignUp,
-  speakFor,
-} from '@/models'
+import { lockMembers } from '@/lib/team/members'
+import { Brand, Combination, inTransaction, Person, sequelize, SignUp, speakFor } from '@/models'
 
 import { accountClosedLetter } from './letters'
 import { fateOf } from './queries'
@@ -39,11 +31,7 @@ export async function closeAccount(
       await speakFor({ brandId, personId: id }, transaction)
       // Held until the end, so that the other owner cannot go at the same moment.
       const brand = await Brand.findByPk(brandId, { lock: transaction.LOCK.UPDATE, transaction })
-      const members = await Membership.findAll({
-        where: { brandId },
-        lock: transaction.LOCK.UPDATE,
-        transaction,
-      })
+      const members = await lockMembers(brandId, transaction)
       // It was removed, or they left it, since the page was asked for.
       if (!brand || members.every(({ personId }) => personId !== id)) continue
       const fate = fateOf(id, members)

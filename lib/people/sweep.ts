@@ -1,17 +1,18 @@
 import { Op, QueryTypes } from 'sequelize'
 
 import { SESSION_IDLE } from '@/lib/auth/sessions'
-import { AccountToken, Letter, sequelize, Session, SignUp } from '@/models'
+import { AccountToken, Invitation, Letter, sequelize, Session, SignUp } from '@/models'
 
 const DAY = 24 * 60 * 60_000
-/** How long it is known that a letter was sent, in milliseconds. */
-const LETTER_KEPT = 30 * DAY
+/** How long it is known that a letter was sent, or somebody invited, in milliseconds. */
+const KEPT = 30 * DAY
 
 /** What a sweep removed. */
 export interface PeopleSweepResult {
   signUps: number
   links: number
   sessions: number
+  invitations: number
   letters: number
   limits: number
 }
@@ -28,8 +29,9 @@ export async function sweepPeople(now = Date.now()): Promise<PeopleSweepResult> 
     sessions: await Session.destroy({
       where: { [Op.or]: [{ expiresAt: before(0) }, { lastSeenAt: before(SESSION_IDLE) }] },
     }),
+    invitations: await Invitation.destroy({ where: { expiresAt: before(KEPT) } }),
     letters: await Letter.destroy({
-      where: { [Op.or]: [{ sentAt: before(LETTER_KEPT) }, { failedAt: before(LETTER_KEPT) }] },
+      where: { [Op.or]: [{ sentAt: before(KEPT) }, { failedAt: before(KEPT) }] },
     }),
     limits: await sequelize().query('DELETE FROM rate_limits WHERE expire < $now', {
       bind: { now },

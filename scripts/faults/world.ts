@@ -3,6 +3,8 @@ import { setTimeout as sleep } from 'node:timers/promises'
 
 import pg from 'pg'
 
+import { LINE_FORM } from '@/tests/fixtures/line-form'
+
 import { startJobs, startWeb } from '../lib/product.mjs'
 import type { Fleet } from '../lib/processes.mjs'
 
@@ -74,7 +76,7 @@ export class World {
     world.owner = await world.visitor().signIn('owner')
     world.designer = await world.visitor().signIn('designer')
     const made = await world.owner.act('createLineAction', `/${BRAND}/lines/new`, {
-      ...LINE_VALUES,
+      ...LINE_FORM,
       name: 'Line of Bad Days',
       requestKey: randomUUID(),
     })
@@ -265,21 +267,6 @@ const through = (gate: Gate, url: string): string => {
   address.hostname = '127.0.0.1'
   address.port = String(gate.port)
   return address.toString().replace(/\/$/, '')
-}
-
-const LINE_VALUES = {
-  fibres: [{ fibre: 'wool', percent: 100 }],
-  ply: 3,
-  weightNumber: 3,
-  netGrams: 100,
-  length: 225,
-  lengthUnit: 'm',
-  needleMm: 4,
-  gaugeStitches: 22,
-  gaugeRows: 30,
-  currency: 'GBP',
-  price: 21.5,
-  launchDate: '',
 }
 
 /**

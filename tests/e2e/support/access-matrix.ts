@@ -22,6 +22,8 @@ import { randomUUID } from 'node:crypto'
 import type { ErrorCode } from '@/lib/errors'
 import type { Role } from '@/lib/people/constants'
 
+import { LINE_FORM } from '../../fixtures/line-form'
+
 import type { Place } from './places'
 
 /** A status of a page or route, where it leads (`→ /sign-in`), or the code of an action. */
@@ -221,12 +223,12 @@ export const ACTIONS: Record<string, ActionRule> = {
   createLineAction: {
     who: OWNER,
     // The brand has a line of that name.
-    input: ({ lineName }) => ({ ...LINE, name: lineName, requestKey: randomUUID() }),
+    input: ({ lineName }) => ({ ...LINE_FORM, name: lineName, requestKey: randomUUID() }),
     answer: 'conflict',
   },
   updateLineAction: {
     who: OWNER,
-    input: ({ line, lineName }) => ({ ...LINE, name: lineName, lineSlug: line, version: -1 }),
+    input: ({ line, lineName }) => ({ ...LINE_FORM, name: lineName, lineSlug: line, version: -1 }),
     answer: 'conflict',
   },
 
@@ -359,20 +361,6 @@ export const ACTIONS: Record<string, ActionRule> = {
   },
 }
 
-const LINE = {
-  fibres: [{ fibre: 'wool', percent: 100 }],
-  ply: 3,
-  weightNumber: 3,
-  netGrams: 100,
-  length: 225,
-  lengthUnit: 'm',
-  needleMm: 4,
-  gaugeStitches: 22,
-  gaugeRows: 30,
-  currency: 'GBP',
-  price: 21.5,
-  launchDate: null,
-}
 const CSV = 'number,hex\nNobody has this,#808080\n'
 const COLUMNS = {
   number: 0,

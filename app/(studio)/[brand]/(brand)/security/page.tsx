@@ -21,7 +21,7 @@ export default async function SecurityPage({ params }: PageProps<'/[brand]/secur
       <SheetHeader
         title="Signing in"
         meta={brandName}
-        back={{ href: `/${brand}`, label: 'Lines' }}
+        back={{ href: `/${brand}/team`, label: 'Team' }}
       />
       <SecondFactorSetting brand={brand} {...requirement} require={requireSecondFactorAction} />
     </Sheet>
