@@ -27,10 +27,10 @@ import {
   type Question,
   type Reply,
 } from './support/ask'
+import { database } from './support/database'
 import { bypassAddresses, bypassHeaders, partsOf } from './support/bypasses'
 import {
   clearPlace,
-  connect,
   findModels,
   makePlace,
   withRowsOf,
@@ -56,7 +56,7 @@ let actors: MatrixActor[]
 let secrets: Secrets
 
 test.beforeAll(async () => {
-  client = await connect()
+  client = await database()
   const demo = async () => (models = (await findModels(client))!)
   await expect.poll(demo, { timeout: 60_000 }).not.toBeNull()
   ours = await makePlace(client, models, BRANDS[0], 'heronsway-dk')

@@ -1,8 +1,7 @@
-import { readFileSync } from 'node:fs'
-
-import pg from 'pg'
+import type pg from 'pg'
 
 import { BRAND, LINE, signIn } from './support/accounts'
+import { crashDatabase, database } from './support/database'
 import { expect, test, type Page } from './support/test'
 
 async function fillLine(page: Page, name: string) {
@@ -22,22 +21,8 @@ async function fillLine(page: Page, name: string) {
   for (const [label, value] of Object.entries(numbers)) await page.getByLabel(label).fill(value)
 }
 
-async function database() {
-  const client = new pg.Client({ connectionString: process.env.DATABASE_URL })
-  client.on('error', () => {})
-  await client.connect()
-  return client
-}
-
 const countLines = async (client: pg.Client, name: string) =>
   (await client.query('SELECT count(*)::int AS n FROM lines WHERE name = $1', [name])).rows[0].n
-
-/** Stops PostgreSQL as a power cut would; the launcher starts it again. */
-async function crashDatabase(client: pg.Client) {
-  const { pid } = (await client.query('SELECT pg_backend_pid() AS pid')).rows[0]
-  const server = Number(/^PPid:\s*(\d+)/m.exec(readFileSync(`/proc/${pid}/status`, 'utf8'))![1])
-  process.kill(server, 'SIGQUIT')
-}
 
 test('a restart of the database during a save is told, keeps the form, and makes one row after all', async ({
   page,

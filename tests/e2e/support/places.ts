@@ -1,6 +1,6 @@
 import { randomBytes, randomUUID } from 'node:crypto'
 
-import pg from 'pg'
+import type pg from 'pg'
 
 /** One line of a brand with its rows: what addresses and inputs are filled with. */
 export interface Place {
@@ -71,14 +71,6 @@ export function wordsOf(
     .replace(/\$[A-Za-z@]?[0-9a-f]{1,3}\b/g, ' ')
   const words = unnumbered.match(/[\p{L}\p{N}_.:/-]+/gu) ?? []
   return [...new Set(words)].filter((word) => !/^[BPS]?:?[0-9a-f]{1,2}(:\w*)?$/.test(word)).sort()
-}
-
-/** A connection to the database of the product under test, as its owner. */
-export async function connect(): Promise<pg.Client> {
-  const client = new pg.Client({ connectionString: process.env.DATABASE_URL })
-  client.on('error', () => {})
-  await client.connect()
-  return client
 }
 
 /** A copy of a row with some of its columns changed. */

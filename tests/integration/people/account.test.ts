@@ -2,7 +2,7 @@ import { randomUUID } from 'node:crypto'
 
 import { beforeEach, describe, expect, it } from 'vitest'
 
-import { RATE_LIMITS } from '@/lib/auth/rate-limits'
+import { RATE_LIMITS } from '@/lib/auth/constants'
 import { findSignedInPerson, type SignedInPerson } from '@/lib/auth/sessions'
 import { signIn } from '@/lib/auth/sign-in'
 import { NotFoundError, TooManyError } from '@/lib/errors'

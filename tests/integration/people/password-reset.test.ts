@@ -3,7 +3,7 @@ import { randomUUID } from 'node:crypto'
 import { TOTP } from 'otpauth'
 import { beforeEach, describe, expect, it } from 'vitest'
 
-import { RATE_LIMITS } from '@/lib/auth/rate-limits'
+import { RATE_LIMITS } from '@/lib/auth/constants'
 import { digest } from '@/lib/auth/seal'
 import { makeTotpSecret } from '@/lib/auth/second-factor'
 import { findSignedInPerson } from '@/lib/auth/sessions'

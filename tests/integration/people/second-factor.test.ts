@@ -5,7 +5,7 @@ import sharp from 'sharp'
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest'
 
 import { hashPassword } from '@/lib/auth/password'
-import { RATE_LIMITS } from '@/lib/auth/rate-limits'
+import { RATE_LIMITS } from '@/lib/auth/constants'
 import { digest, unseal } from '@/lib/auth/seal'
 import { RECOVERY_CODES } from '@/lib/auth/second-factor'
 import { findSignedInPerson, type SignedInPerson } from '@/lib/auth/sessions'

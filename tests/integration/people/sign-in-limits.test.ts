@@ -4,7 +4,7 @@ import { TOTP } from 'otpauth'
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest'
 
 import { hashPassword } from '@/lib/auth/password'
-import { RATE_LIMITS } from '@/lib/auth/rate-limits'
+import { RATE_LIMITS } from '@/lib/auth/constants'
 import { makeRecoveryCodes, makeTotpSecret } from '@/lib/auth/second-factor'
 import { signIn } from '@/lib/auth/sign-in'
 import { Activity, inTransaction, Membership, Person } from '@/models'

@@ -3,7 +3,7 @@ import { randomUUID } from 'node:crypto'
 import { beforeAll, beforeEach, describe, expect, it } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
-import { RATE_LIMITS } from '@/lib/auth/rate-limits'
+import { RATE_LIMITS } from '@/lib/auth/constants'
 import { digest } from '@/lib/auth/seal'
 import type { SignedInPerson } from '@/lib/auth/sessions'
 import { findSignedInPerson } from '@/lib/auth/sessions'
