@@ -1,19 +1,11 @@
 import { describe, expect, it } from 'vitest'
 
 import { createLineSchema } from '@/lib/lines/schema'
+import { LINE_FORM } from '@/tests/fixtures/line-form'
 
 const values = {
   name: 'A line',
-  fibres: [{ fibre: 'wool', percent: 100 }],
-  ply: 3,
-  weightNumber: 3,
-  netGrams: 100,
-  length: 225,
-  lengthUnit: 'm',
-  needleMm: 4,
-  gaugeStitches: 22,
-  gaugeRows: 30,
-  currency: 'GBP',
+  ...LINE_FORM,
   price: '21.50',
   launchDate: '',
   requestKey: '0b0e6f0a-4c9e-4f6e-9a4f-8a3f0a2d9c11',
