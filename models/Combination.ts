@@ -8,6 +8,7 @@ import {
 } from 'sequelize'
 
 import type { ReadingKind } from '@/lib/color/match'
+import type { Lane } from '@/lib/combinations/constants'
 
 import type { CombinationPlace } from './CombinationPlace'
 import { idColumn, versionColumn } from './columns'
@@ -26,6 +27,12 @@ export class Combination extends Model<
   declare photographId: CreationOptional<string | null>
   /** Which reading of the photograph it began as. */
   declare reading: CreationOptional<ReadingKind | null>
+  /** Where it stands on the board. */
+  declare lane: CreationOptional<Lane>
+  /** Its place in the lane, by byte order. */
+  declare rank: string
+  /** What the five tell, in a few sentences; may be empty. */
+  declare story: CreationOptional<string>
   declare createdById: string | null
   declare requestKey: CreationOptional<string | null>
   declare version: CreationOptional<number>
@@ -44,6 +51,9 @@ Combination.init(
     title: { type: DataTypes.TEXT, allowNull: false },
     photographId: { type: DataTypes.UUID },
     reading: { type: DataTypes.TEXT },
+    lane: { type: DataTypes.TEXT, allowNull: false, defaultValue: 'sketched' },
+    rank: { type: DataTypes.TEXT, allowNull: false },
+    story: { type: DataTypes.TEXT, allowNull: false, defaultValue: '' },
     createdById: { type: DataTypes.UUID },
     requestKey: { type: DataTypes.UUID },
     version: versionColumn,

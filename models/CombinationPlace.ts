@@ -7,6 +7,8 @@ import {
   type NonAttribute,
 } from 'sequelize'
 
+import type { PlaceRole } from '@/lib/combinations/constants'
+
 import { idColumn } from './columns'
 import { sequelize } from './sequelize'
 import type { Shade } from './Shade'
@@ -21,10 +23,15 @@ export class CombinationPlace extends Model<
   declare combinationId: string
   /** 1 to 5, top to bottom of the wrap card. */
   declare place: number
-  declare shadeId: string
+  /** Null where the place is still empty. */
+  declare shadeId: string | null
   /** Share of the combination, 0 to 1; the five sum to 1. */
   declare share: number
-  declare shade?: NonAttribute<Shade>
+  /** What it is called in a pattern; the five are different. */
+  declare role: PlaceRole
+  /** Whoever completes or swaps leaves it. */
+  declare locked: CreationOptional<boolean>
+  declare shade?: NonAttribute<Shade | null>
 }
 
 CombinationPlace.init(
@@ -33,7 +40,9 @@ CombinationPlace.init(
     brandId: { type: DataTypes.UUID, allowNull: false },
     combinationId: { type: DataTypes.UUID, allowNull: false },
     place: { type: DataTypes.INTEGER, allowNull: false },
-    shadeId: { type: DataTypes.UUID, allowNull: false },
+    shadeId: { type: DataTypes.UUID },
+    role: { type: DataTypes.TEXT, allowNull: false },
+    locked: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
     share: { type: DataTypes.DOUBLE, allowNull: false },
   },
   {

@@ -40,6 +40,12 @@ export class Line extends Model<InferAttributes<Line>, InferCreationAttributes<L
   declare launchDate: CreationOptional<string | null>
   /** Goes up with every change to the line's shades; a stored match remembers the one it saw. */
   declare shadesRevision: CreationOptional<number>
+  /** Goes up with every change to the line's families: what an edit of them says it saw. */
+  declare familiesVersion: CreationOptional<number>
+  /** How many families were asked for; null leaves it to the computation. */
+  declare familyCount: CreationOptional<number | null>
+  /** Goes up with every change to the line's combinations. */
+  declare boardRevision: CreationOptional<number>
   declare requestKey: CreationOptional<string | null>
   declare version: CreationOptional<number>
   declare createdAt: CreationOptional<Date>
@@ -65,6 +71,9 @@ Line.init(
     priceMinor: { type: DataTypes.INTEGER, allowNull: false },
     launchDate: { type: DataTypes.DATEONLY },
     shadesRevision: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
+    familiesVersion: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
+    familyCount: { type: DataTypes.INTEGER },
+    boardRevision: { type: DataTypes.INTEGER, allowNull: false, defaultValue: 1 },
     requestKey: { type: DataTypes.UUID },
     version: versionColumn,
     createdAt: DataTypes.DATE,

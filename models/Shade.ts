@@ -28,6 +28,12 @@ export class Shade extends Model<InferAttributes<Shade>, InferCreationAttributes
   declare status: ShadeStatus
   /** Place in the line's own order, from 0. */
   declare position: number
+  /** Its tonal family; null while it is in none. */
+  declare familyId: CreationOptional<string | null>
+  /** Somebody put it there: computing the families anew leaves it. */
+  declare familyPinned: CreationOptional<boolean>
+  /** Place in its family where somebody ordered it; null stands by lightness. */
+  declare familyPosition: CreationOptional<number | null>
   declare requestKey: CreationOptional<string | null>
   declare version: CreationOptional<number>
   declare createdAt: CreationOptional<Date>
@@ -50,6 +56,9 @@ Shade.init(
     hex: { type: DataTypes.TEXT },
     status: { type: DataTypes.TEXT, allowNull: false },
     position: { type: DataTypes.INTEGER, allowNull: false },
+    familyId: { type: DataTypes.UUID },
+    familyPinned: { type: DataTypes.BOOLEAN, allowNull: false, defaultValue: false },
+    familyPosition: { type: DataTypes.INTEGER },
     requestKey: { type: DataTypes.UUID },
     version: versionColumn,
     createdAt: DataTypes.DATE,

@@ -3,7 +3,9 @@ import { Activity } from './Activity'
 import { Brand } from './Brand'
 import { Combination } from './Combination'
 import { CombinationPlace } from './CombinationPlace'
+import { Family } from './Family'
 import { Invitation } from './Invitation'
+import { Kit } from './Kit'
 import { Letter } from './Letter'
 import { Line } from './Line'
 import { Membership } from './Membership'
@@ -23,9 +25,14 @@ AccountToken.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
 Invitation.belongsTo(Person, { as: 'invitedBy', foreignKey: 'invitedById' })
 Activity.belongsTo(Person, { as: 'person', foreignKey: 'personId' })
 
+Line.hasMany(Family, { as: 'families', foreignKey: 'lineId' })
+Line.hasMany(Kit, { as: 'kits', foreignKey: 'lineId' })
 Line.hasMany(Shade, { as: 'shades', foreignKey: 'lineId' })
 Line.hasMany(Photograph, { as: 'photographs', foreignKey: 'lineId' })
 Line.hasMany(Combination, { as: 'combinations', foreignKey: 'lineId' })
+
+Family.hasMany(Shade, { as: 'shades', foreignKey: 'familyId' })
+Shade.belongsTo(Family, { as: 'family', foreignKey: 'familyId' })
 
 Photograph.hasOne(Reading, { as: 'reading', foreignKey: 'photographId' })
 
@@ -40,7 +47,9 @@ export {
   Brand,
   Combination,
   CombinationPlace,
+  Family,
   Invitation,
+  Kit,
   Letter,
   Line,
   Membership,

@@ -9,6 +9,8 @@ import { enqueue } from '@/lib/jobs/queue'
 import { decodePhotograph } from '@/lib/photographs/decode'
 import { originalKey } from '@/lib/photographs/keys'
 import { putObject } from '@/lib/storage/objects'
+import { PLACE_ROLES } from '@/lib/combinations/constants'
+import { topRank } from '@/lib/combinations/lane-rank'
 import { Brand, Combination, CombinationPlace, Line, Membership, Photograph, Shade } from '@/models'
 
 import { demoCombinations } from './demo/combinations'
@@ -57,6 +59,7 @@ export async function seedPhotographs(transaction: Transaction): Promise<void> {
           reading,
           photographId: photograph.id,
           createdById: designer.personId,
+          rank: await topRank({ brandId, lineId: line.id, lane: 'sketched' }, transaction),
         },
         { transaction },
       )
@@ -67,6 +70,7 @@ export async function seedPhotographs(transaction: Transaction): Promise<void> {
           place: at + 1,
           shadeId,
           share,
+          role: PLACE_ROLES[at]!,
         })),
         { transaction },
       )

@@ -9,10 +9,11 @@ import { Button } from '@/components/ui/button'
 import { LedgerList } from '@/components/ui/ledger'
 import { Notice } from '@/components/ui/notice'
 import { toastDone } from '@/components/ui/toast'
-import type { CombinationView, PlaceView } from '@/lib/combinations/present'
+import type { CombinationView } from '@/lib/combinations/present'
 import type { ActionResult } from '@/lib/errors'
 
 import { PlaceRow } from './place-row'
+import { filled, type FilledPlace } from './words'
 
 // Only those who change the order need what drags.
 const SortablePlaces = dynamic(() =>
@@ -31,7 +32,7 @@ export type ReorderCombination = (
 /** An order that was made from a version of the combination. */
 interface Draft {
   version: number
-  places: PlaceView[]
+  places: FilledPlace[]
 }
 
 /** The five places in their order; changing it is kept until it is saved. */
@@ -53,9 +54,11 @@ export function FivePlaces({
   const [closed, setClosed] = useState(false)
   const [pending, setPending] = useState(false)
   const { id, version } = combination
-  const places = draft?.version === version ? draft.places : combination.places
+  const places = draft?.version === version ? draft.places : filled(combination.places)
   const problem = failure?.version === version ? failure : undefined
-  const changed = places.some(({ shade }, at) => shade.id !== combination.places[at]?.shade.id)
+  const changed = places.some(
+    ({ shade }, at) => shade.id !== filled(combination.places)[at]?.shade.id,
+  )
 
   function close() {
     setSorting(false)

@@ -1,8 +1,9 @@
 import type { ReactNode } from 'react'
 
 import { WoundSample } from '@/components/yarn/wound-sample'
-import type { PlaceView } from '@/lib/combinations/present'
 import { PLACE_ROLES } from '@/lib/combinations/constants'
+
+import type { FilledPlace } from './words'
 
 /** One of the five in running text: its role by its place, name, number and share. */
 export function PlaceRow({
@@ -11,7 +12,7 @@ export function PlaceRow({
   before,
   after,
 }: {
-  place: PlaceView
+  place: FilledPlace
   /** 0 to 4. */
   at: number
   before?: ReactNode

@@ -24,17 +24,17 @@ import { useId } from 'react'
 
 import { IconButton } from '@/components/ui/icon-button'
 import { LedgerList } from '@/components/ui/ledger'
-import type { PlaceView } from '@/lib/combinations/present'
 
 import { PlaceRow } from './place-row'
+import type { FilledPlace } from './words'
 
 /** The five, to be put in another order: by dragging, by keyboard, or a press at a time. */
 export function SortablePlaces({
   places,
   onChange,
 }: {
-  places: PlaceView[]
-  onChange: (places: PlaceView[]) => void
+  places: FilledPlace[]
+  onChange: (places: FilledPlace[]) => void
 }) {
   const id = useId()
   const sensors = useSensors(
@@ -100,7 +100,7 @@ function SortableRow({
   last,
   onMove,
 }: {
-  place: PlaceView
+  place: FilledPlace
   at: number
   last: boolean
   onMove: (by: 1 | -1) => void

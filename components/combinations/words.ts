@@ -1,9 +1,16 @@
-import type { CombinationView } from '@/lib/combinations/present'
+import type { CombinationView, PlaceView } from '@/lib/combinations/present'
 import type { Band } from '@/components/yarn/bands'
+
+/** A place that holds a shade. */
+export type FilledPlace = PlaceView & { shade: NonNullable<PlaceView['shade']> }
+
+/** The places that hold a shade, in order. */
+export const filled = (places: readonly PlaceView[]) =>
+  places.filter((place): place is FilledPlace => place.shade !== null)
 
 /** The five as bands for the card and the cloth, top to bottom. */
 export const bandsOf = ({ places }: Pick<CombinationView, 'places'>): Band[] =>
-  places.map(({ shade, share }) => ({ hex: shade.hex, share, name: shade.label }))
+  filled(places).map(({ shade, share }) => ({ hex: shade.hex, share, name: shade.label }))
 
 const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' })
 
@@ -13,4 +20,6 @@ export const keptInWords = ({ keptBy, keptAt }: Pick<CombinationView, 'keptBy' |
 
 /** The five by name, top to bottom, as a sentence would list them. */
 export const namesInWords = ({ places }: Pick<CombinationView, 'places'>) =>
-  places.map(({ shade }) => shade.label).join(', ')
+  filled(places)
+    .map(({ shade }) => shade.label)
+    .join(', ')

@@ -3,6 +3,7 @@ import type { ReadingKind } from '@/lib/color/readings'
 /** The bounds of a kept combination. */
 export const COMBINATION_LIMITS = {
   title: 80,
+  story: 1200,
   places: 5,
   search: 80,
   perPage: 24,
@@ -17,6 +18,17 @@ export const COMBINATION_LIMITS = {
 export const PLACE_ROLES = ['MC', 'CC1', 'CC2', 'CC3', 'CC4'] as const
 /** One of PLACE_ROLES. */
 export type PlaceRole = (typeof PLACE_ROLES)[number]
+
+/** The lanes of the board, from first idea to what is published. */
+export const LANES = ['sketched', 'short-listed', 'chosen'] as const
+/** One of LANES. */
+export type Lane = (typeof LANES)[number]
+/** What the lanes are called. */
+export const LANE_WORDS: Record<Lane, string> = {
+  sketched: 'Sketched',
+  'short-listed': 'Short-listed',
+  chosen: 'Chosen',
+}
 
 const DRAFT_ENDINGS: Record<ReadingKind, string> = {
   true: 'in five',

@@ -6,6 +6,7 @@ import { inTransaction } from '@/models'
 import { canDeleteCombination } from './policy'
 import { loadCombination } from './queries'
 import type { CombinationIdInput } from './schema'
+import { touchBoard } from './touch-board'
 
 /**
  * Takes a combination out of every list; `restoreCombination` brings it back.
@@ -18,6 +19,7 @@ export async function deleteCombination(
   authorize(actor, canDeleteCombination)
   await inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction })
+    await touchBoard(actor, combination.lineId, transaction)
     await combination.destroy({ transaction })
     const object = combinationObject(combination)
     await recordActivity(actor, { action: 'combination.deleted', object }, transaction)

@@ -13,8 +13,11 @@ import {
   Shade,
 } from '@/models'
 
+import { PLACE_ROLES } from './constants'
+import { topRank } from './lane-rank'
 import { canKeepCombination } from './policy'
 import type { KeepCombinationInput } from './schema'
+import { touchBoard } from './touch-board'
 
 /**
  * Keeps five shades of a line, in the order given, as they were matched to a photograph. The same
@@ -47,6 +50,8 @@ export async function keepCombination(
         'One of these five is not a shade of the line any more. Nothing was kept: read the photograph again, then keep the five it finds.',
       )
     }
+    await touchBoard(actor, line.id, transaction)
+    const rank = await topRank({ ...inLine, lane: 'sketched' }, transaction)
     const made = await createOnce(
       Combination,
       {
@@ -54,6 +59,7 @@ export async function keepCombination(
         title,
         photographId,
         reading,
+        rank,
         createdById: actor.personId,
         requestKey,
       },
@@ -68,6 +74,7 @@ export async function keepCombination(
           place: at + 1,
           shadeId,
           share,
+          role: PLACE_ROLES[at]!,
         })),
         { transaction },
       )

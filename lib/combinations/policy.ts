@@ -6,6 +6,10 @@ export const canReadCombinations = allow('owner', 'designer', 'marketer')
 export const canKeepCombination = allow('owner', 'designer')
 /** Changes a combination's title. */
 export const canRenameCombination = allow('owner', 'designer', 'marketer')
+/** Changes a combination's places, story and photograph, and begins an empty one. */
+export const canEditCombination = allow('owner', 'designer')
+/** Moves combinations on the board. */
+export const canMoveCombination = allow('owner', 'designer')
 /** Changes the order of the five. */
 export const canReorderCombination = allow('owner', 'designer')
 /** Deletes a combination, and takes that back. */

@@ -4,7 +4,7 @@ import { presentShade, type ShadeView } from '@/lib/shades/present'
 
 import { canDeleteCombination, canRenameCombination, canReorderCombination } from './policy'
 import type { KeptCombination } from './queries'
-import { PLACE_ROLES, type PlaceRole } from './constants'
+import type { Lane, PlaceRole } from './constants'
 
 /** One of the five places of a kept combination. */
 export interface PlaceView {
@@ -12,7 +12,9 @@ export interface PlaceView {
   role: PlaceRole
   /** 0 to 1; the five sum to 1. */
   share: number
-  shade: ShadeView
+  locked: boolean
+  /** Null where the place is still empty. */
+  shade: ShadeView | null
   /** The shade was deleted from the line since; it stays here as it was. */
   gone: boolean
 }
@@ -21,6 +23,9 @@ export interface PlaceView {
 export interface CombinationView {
   id: string
   title: string
+  /** What the five tell; may be empty. */
+  story: string
+  lane: Lane
   version: number
   reading: ReadingKind | null
   /** ISO 8601. */
@@ -43,16 +48,19 @@ export function presentCombination(
   return {
     id: combination.id,
     title: combination.title,
+    story: combination.story,
+    lane: combination.lane,
     version: combination.version,
     reading: combination.reading,
     keptAt: combination.createdAt.toISOString(),
     keptBy,
-    places: (combination.places ?? []).map(({ place, share, shade }) => ({
+    places: (combination.places ?? []).map(({ place, role, share, locked, shade }) => ({
       place,
-      role: PLACE_ROLES[place - 1]!,
+      role,
       share,
-      shade: presentShade(shade!),
-      gone: shade!.deletedAt !== null,
+      locked,
+      shade: shade ? presentShade(shade) : null,
+      gone: shade ? shade.deletedAt !== null : false,
     })),
     photograph: photograph
       ? { id: photograph.id, title: photograph.title, photographer: photograph.photographer }

@@ -6,6 +6,7 @@ import { Combination, inTransaction, updateVersioned } from '@/models'
 import { canRenameCombination } from './policy'
 import { loadCombination } from './queries'
 import type { RenameCombinationInput } from './schema'
+import { touchBoard } from './touch-board'
 
 /**
  * Changes a combination's title.
@@ -18,6 +19,7 @@ export async function renameCombination(
   authorize(actor, canRenameCombination)
   return inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction })
+    await touchBoard(actor, combination.lineId, transaction)
     const row = { id: combination.id, brandId: actor.brandId, version }
     await updateVersioned(Combination, row, { title }, transaction)
     await recordChanges(

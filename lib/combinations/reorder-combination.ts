@@ -10,6 +10,7 @@ import { Combination, CombinationPlace, inTransaction, Shade, updateVersioned } 
 import { canReorderCombination } from './policy'
 import { loadCombination } from './queries'
 import type { ReorderCombinationInput } from './schema'
+import { touchBoard } from './touch-board'
 
 /**
  * Puts a combination's five shades in a new order; each keeps its share.
@@ -24,6 +25,7 @@ export async function reorderCombination(
   const { brandId } = actor
   return inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction })
+    await touchBoard(actor, combination.lineId, transaction)
     await updateVersioned(Combination, { id: combination.id, brandId, version }, {}, transaction)
     const before = await listPlaces(actor, combinationId, transaction)
     for (const [at, shadeId] of shadeIds.entries()) {

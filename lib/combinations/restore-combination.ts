@@ -6,6 +6,7 @@ import { inTransaction } from '@/models'
 import { canDeleteCombination } from './policy'
 import { loadCombination } from './queries'
 import type { CombinationIdInput } from './schema'
+import { touchBoard } from './touch-board'
 
 /**
  * Brings a deleted combination back as it was; one that is not deleted stays as it is.
@@ -19,6 +20,7 @@ export async function restoreCombination(
   await inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction, deleted: true })
     if (!combination.deletedAt) return
+    await touchBoard(actor, combination.lineId, transaction)
     await combination.restore({ transaction })
     const object = combinationObject(combination)
     await recordActivity(actor, { action: 'combination.restored', object }, transaction)

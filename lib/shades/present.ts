@@ -28,6 +28,12 @@ export interface ShadeView {
   status: ShadeStatus
   /** Place in the line's order, from 0; gaps and ties are allowed. */
   position: number
+  /** Its tonal family; null while it is in none. */
+  familyId: string | null
+  /** Somebody put it there. */
+  familyPinned: boolean
+  /** Place in its family where somebody ordered it; null stands by lightness. */
+  familyPosition: number | null
   version: number
 }
 
@@ -44,6 +50,9 @@ export const SHADE_VIEW_COLUMNS = [
   'hex',
   'status',
   'position',
+  'familyId',
+  'familyPinned',
+  'familyPosition',
   'version',
 ] as const
 
@@ -72,6 +81,9 @@ export function presentShade(shade: ShadeRow): ShadeView {
     enteredHex: shade.hex,
     status: shade.status,
     position: shade.position,
+    familyId: shade.familyId,
+    familyPinned: shade.familyPinned,
+    familyPosition: shade.familyPosition,
     version: shade.version,
   }
 }

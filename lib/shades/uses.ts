@@ -37,6 +37,6 @@ export async function findUses(
       .slice(0, NAMED)
       .map(({ id, title }) => ({ combinationId: id, title })),
     total: combinations.length,
-    shadeIds: [...new Set(places.map(({ shadeId }) => shadeId))],
+    shadeIds: [...new Set(places.flatMap(({ shadeId }) => shadeId ?? []))],
   }
 }

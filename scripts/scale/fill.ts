@@ -67,17 +67,17 @@ export async function fillLine(brandId: string, slug: string, size: LineSize): P
   // The checks of references are planned by what PostgreSQL believes to be there.
   await sequelize().query('ANALYZE shades, photographs')
   await run(
-    `INSERT INTO combinations (brand_id, line_id, title, photograph_id, reading, created_at)
+    `INSERT INTO combinations (brand_id, line_id, title, photograph_id, reading, rank, created_at)
      SELECT $brandId::uuid, $lineId::uuid, 'Five of hillside ' || n, p.ids[1 + n % $photographs::int],
-       'true', now() - n * interval '1 minute'
+       'true', 'e' || lpad(n::text, 5, '0'), now() - n * interval '1 minute'
      FROM generate_series(1, $count::int) n
      CROSS JOIN (SELECT array_agg(id) AS ids FROM photographs WHERE line_id = $lineId::uuid) p`,
     { brandId, lineId, count: size.combinations, photographs: size.photographs },
   )
   await sequelize().query('ANALYZE combinations')
   await run(
-    `INSERT INTO combination_places (brand_id, combination_id, place, shade_id, share)
-     SELECT $brandId::uuid, c.id, place, s.ids[1 + (c.n * 5 + place) % $shades::int], 0.2
+    `INSERT INTO combination_places (brand_id, combination_id, place, role, shade_id, share)
+     SELECT $brandId::uuid, c.id, place, (ARRAY['MC', 'CC1', 'CC2', 'CC3', 'CC4'])[place], s.ids[1 + (c.n * 5 + place) % $shades::int], 0.2
      FROM (SELECT id, row_number() OVER () AS n FROM combinations WHERE line_id = $lineId::uuid) c
      CROSS JOIN generate_series(1, 5) place
      CROSS JOIN (SELECT array_agg(id) AS ids FROM shades WHERE line_id = $lineId::uuid) s`,

@@ -1,24 +1,29 @@
+import { PLACE_ROLES } from '@/lib/combinations/constants'
+import { topRank } from '@/lib/combinations/lane-rank'
 import { Combination, CombinationPlace, type Line, type Shade } from '@/models'
 
-/** A kept combination of the first five of these shades, in equal shares. */
+/** A combination of the first five of these shades, in equal shares; of fewer, the rest is empty. */
 export async function makeCombination(
   { brandId, id: lineId }: Pick<Line, 'brandId' | 'id'>,
   shades: readonly Shade[],
-  values: Partial<Pick<Combination, 'title' | 'photographId' | 'createdById'>> = {},
+  values: Partial<Pick<Combination, 'title' | 'photographId' | 'createdById' | 'lane'>> = {},
 ): Promise<Combination> {
+  const lane = values.lane ?? 'sketched'
   const combination = await Combination.create({
     brandId,
     lineId,
+    rank: await topRank({ brandId, lineId, lane }),
     title: 'A combination',
     createdById: null,
     ...values,
   })
   await CombinationPlace.bulkCreate(
-    shades.slice(0, 5).map((shade, at) => ({
+    PLACE_ROLES.map((role, at) => ({
       brandId,
       combinationId: combination.id,
       place: at + 1,
-      shadeId: shade.id,
+      role,
+      shadeId: shades[at]?.id ?? null,
       share: 0.2,
     })),
   )

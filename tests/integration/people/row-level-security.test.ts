@@ -6,7 +6,16 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { digest } from '@/lib/auth/seal'
-import { inTransaction, Invitation, Line, Photograph, Reading, sequelize } from '@/models'
+import {
+  Family,
+  inTransaction,
+  Invitation,
+  Kit,
+  Line,
+  Photograph,
+  Reading,
+  sequelize,
+} from '@/models'
 import { withinScope } from '@/models/scope'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
 import { makeCombination } from '@/tests/factories/combination'
@@ -73,6 +82,9 @@ async function fillBrand(owner: Actor): Promise<void> {
     shadesRevision: 1,
   })
   await makeCombination(line, shades, { photographId: photograph.id })
+  const { id: lineId } = line
+  await Family.create({ brandId, lineId, name: 'Browns', position: 0 })
+  await Kit.create({ brandId, lineId, selection: [], createdById: personId })
   await Invitation.create({
     brandId,
     email: 'guest@people.example',

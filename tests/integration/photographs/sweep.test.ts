@@ -8,8 +8,9 @@ import { readPhotograph } from '@/lib/photographs/read-photograph'
 import { UNDO_WINDOW } from '@/lib/photographs/constants'
 import { sweepUploads } from '@/lib/photographs/sweep'
 import { listObjects, putObject } from '@/lib/storage/objects'
-import { Combination, Photograph, Reading, sequelize, type Line } from '@/models'
+import { Photograph, Reading, sequelize, type Line } from '@/models'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
+import { makeCombination } from '@/tests/factories/combination'
 import { makeLine } from '@/tests/factories/line'
 import { makePhotograph, makePicture, uploadTo } from '@/tests/factories/photograph'
 import { makeShades } from '@/tests/factories/shade'
@@ -63,10 +64,7 @@ describe('the sweep', () => {
     const photographId = await uploadTo(actor, line, await makePicture())
     await confirmUpload(actor, { photographId })
     await readPhotograph(photographId)
-    const combination = await Combination.create({
-      brandId: actor.brandId,
-      lineId: line.id,
-      title: 'Kept',
+    const combination = await makeCombination(line, [], {
       photographId,
       createdById: actor.personId,
     })

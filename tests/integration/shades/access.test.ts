@@ -202,6 +202,9 @@ describe('a shade leaves the server', () => {
     expect(Object.keys(detail.shade).sort()).toEqual(
       [
         'enteredHex',
+        'familyId',
+        'familyPinned',
+        'familyPosition',
         'hex',
         'id',
         'illuminant',

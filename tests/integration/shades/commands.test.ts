@@ -13,8 +13,9 @@ import { restoreShades } from '@/lib/shades/restore-shades'
 import { createShadeSchema } from '@/lib/shades/schema'
 import { setShadeStatus } from '@/lib/shades/set-shade-status'
 import { updateShade } from '@/lib/shades/update-shade'
-import { Combination, CombinationPlace, Shade, type Line } from '@/models'
+import { CombinationPlace, Shade, type Line } from '@/models'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
+import { makeCombination } from '@/tests/factories/combination'
 import { makeLine } from '@/tests/factories/line'
 import { makeShade, makeShades } from '@/tests/factories/shade'
 
@@ -49,24 +50,7 @@ const order = async () => {
 }
 
 /** A kept combination of these shades. */
-async function keep(title: string, shades: readonly Shade[]): Promise<Combination> {
-  const combination = await Combination.create({
-    brandId: line.brandId,
-    lineId: line.id,
-    title,
-    createdById: null,
-  })
-  await CombinationPlace.bulkCreate(
-    shades.map(({ id }, at) => ({
-      brandId: line.brandId,
-      combinationId: combination.id,
-      place: at + 1,
-      shadeId: id,
-      share: 1 / shades.length,
-    })),
-  )
-  return combination
-}
+const keep = (title: string, shades: readonly Shade[]) => makeCombination(line, shades, { title })
 
 describe('adding a shade', () => {
   it('keeps a reading to the last digit, with its terms, and goes to the end', async () => {

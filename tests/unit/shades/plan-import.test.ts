@@ -17,6 +17,9 @@ const shade = (values: Partial<ShadeRow>): ShadeRow => ({
   hex: null,
   status: 'approved',
   position: 4,
+  familyId: null,
+  familyPinned: false,
+  familyPosition: null,
   version: 3,
   ...values,
 })

@@ -1,0 +1,21 @@
+import { generateKeyBetween } from 'fractional-indexing'
+import type { Transaction } from 'sequelize'
+
+import { Combination } from '@/models'
+
+import type { Lane } from './constants'
+
+/**
+ * A rank above everything in a lane of a line. The caller holds the board (touchBoard), so that no
+ * two get the same.
+ */
+export async function topRank(
+  { brandId, lineId, lane }: { brandId: string; lineId: string; lane: Lane },
+  transaction?: Transaction,
+): Promise<string> {
+  const first = await Combination.min<string | null, Combination>('rank', {
+    where: { brandId, lineId, lane },
+    transaction,
+  })
+  return generateKeyBetween(null, first)
+}
