@@ -1,9 +1,11 @@
-/** `npm run bench -- match`: prints each figure beside its bar; exits 1 when one misses. */
+/** `npm run bench -- match board`: prints each figure beside its bar; exits 1 when one misses. */
 import { printFigures, type Figure } from '../lib/figures.mjs'
+import { benchBoard } from './board'
 import { benchMatch } from './match'
 
 const BENCHES: Record<string, () => Promise<Figure[]>> = {
   match: benchMatch,
+  board: benchBoard,
 }
 
 async function main(names: string[]): Promise<number> {

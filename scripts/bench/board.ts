@@ -1,0 +1,7 @@
+import type { Figure } from '../lib/figures.mjs'
+import { benchFamilies } from './families'
+
+/** The figures of tonal families and of the board. */
+export async function benchBoard(): Promise<Figure[]> {
+  return [...(await benchFamilies())]
+}
