@@ -21,6 +21,35 @@ function xyzToLab(x: number, y: number, z: number): Lab {
   return [116 * fy - 16, 500 * (f(x / WHITE_X) - fy), 200 * (fy - f(z / WHITE_Z))]
 }
 
+/** Light of the sRGB primaries, linear, 0–1 on a screen; beyond where the colour is. */
+export type LinearRgb = readonly [number, number, number]
+
+/** Linear sRGB to Lab D65, in and beyond the screen's range. @source CSS Color 4, sample code */
+export const linearToLab = ([r, g, b]: LinearRgb): Lab =>
+  xyzToLab(
+    0.4123907992659593 * r + 0.357584339383878 * g + 0.1804807884018343 * b,
+    0.2126390058715102 * r + 0.715168678767756 * g + 0.0721923153607337 * b,
+    0.0193308187155918 * r + 0.119194779794626 * g + 0.9505321522496607 * b,
+  )
+
+const unf = (t: number): number => (t ** 3 > EPSILON ? t ** 3 : (116 * t - 16) / KAPPA)
+
+/**
+ * Lab D65 to linear sRGB, channels under 0 or over 1 where a screen cannot show the colour.
+ * @source CIE 15:2018 § 8.2.1 inverted; matrix of CSS Color 4, sample code
+ */
+export function labToLinear([lightness, a, b]: Lab): LinearRgb {
+  const fy = (lightness + 16) / 116
+  const x = WHITE_X * unf(fy + a / 500)
+  const y = unf(fy)
+  const z = WHITE_Z * unf(fy - b / 200)
+  return [
+    3.2409699419045213 * x - 1.5373831775700935 * y - 0.4986107602930033 * z,
+    -0.9692436362808798 * x + 1.8759675015077206 * y + 0.0415550574071756 * z,
+    0.0556300796969936 * x - 0.203976958888977 * y + 1.0569715142428786 * z,
+  ]
+}
+
 /**
  * Encoded sRGB channels (0–1) to Lab D65; equal channels give an exact neutral.
  * @source IEC 61966-2-1:1999; matrix of CSS Color 4, sample code
@@ -28,13 +57,7 @@ function xyzToLab(x: number, y: number, z: number): Lab {
 export function srgbToLab(red: number, green: number, blue: number): Lab {
   const r = decodeChannel(red)
   if (red === green && green === blue) return [116 * f(r) - 16, 0, 0]
-  const g = decodeChannel(green)
-  const b = decodeChannel(blue)
-  return xyzToLab(
-    0.4123907992659593 * r + 0.357584339383878 * g + 0.1804807884018343 * b,
-    0.2126390058715102 * r + 0.715168678767756 * g + 0.0721923153607337 * b,
-    0.0193308187155918 * r + 0.119194779794626 * g + 0.9505321522496607 * b,
-  )
+  return linearToLab([r, decodeChannel(green), decodeChannel(blue)])
 }
 
 /**
