@@ -98,25 +98,24 @@ export function pairsLost(
   for (const limit of [apart, together]) {
     if (!(limit >= 0)) throw new RangeError(`A limit of ΔE00 ${limit} says nothing.`)
   }
-  const packed = packLabs(shades)
-  const row = new Float64Array(shades.length)
-  return VISIONS.flatMap((vision) => {
-    const seen = shades.map((lab) => seenAs(lab, vision))
-    const packedSeen = packLabs(seen)
-    const seenRow = new Float64Array(shades.length)
-    const lost: LostPair[] = []
-    for (let first = 0; first < shades.length; first++) {
-      const after = 3 * (first + 1)
-      deltaE00Row(shades[first]!, packed.subarray(after), row)
-      deltaE00Row(seen[first]!, packedSeen.subarray(after), seenRow)
-      for (let second = first + 1; second < shades.length; second++) {
-        const deltaE = row[second - first - 1]!
-        const seenDeltaE = seenRow[second - first - 1]!
-        if (deltaE >= apart && seenDeltaE < together) {
-          lost.push({ first, second, vision, deltaE, seenDeltaE })
-        }
+  const normal = { labs: shades, packed: packLabs(shades), row: new Float64Array(shades.length) }
+  const visions = VISIONS.map((vision) => {
+    const labs = shades.map((lab) => seenAs(lab, vision))
+    const row = new Float64Array(shades.length)
+    return { vision, labs, packed: packLabs(labs), row, lost: [] as LostPair[] }
+  })
+  for (let first = 0; first < shades.length; first++) {
+    for (const { labs, packed, row } of [normal, ...visions]) {
+      deltaE00Row(labs[first]!, packed.subarray(3 * (first + 1)), row)
+    }
+    for (let second = first + 1; second < shades.length; second++) {
+      const deltaE = normal.row[second - first - 1]!
+      if (deltaE < apart) continue
+      for (const { vision, row, lost } of visions) {
+        const seenDeltaE = row[second - first - 1]!
+        if (seenDeltaE < together) lost.push({ first, second, vision, deltaE, seenDeltaE })
       }
     }
-    return lost.sort((one, other) => one.seenDeltaE - other.seenDeltaE)
-  })
+  }
+  return visions.flatMap(({ lost }) => lost.sort((one, other) => one.seenDeltaE - other.seenDeltaE))
 }
