@@ -126,20 +126,20 @@ function largestBall(
   let best: { target: Lab; middle: Point } | null = null
   let radius = 0
   for (let level = [box]; level.length > 0;) {
-    const open = level.filter((cube) => {
+    const open: Cube[] = []
+    for (const cube of level) {
       cube.empty = Math.min(cube.empty, nearestOf(cube.middle, targets.slice(cube.told)))
       cube.told = targets.length
-      if (cube.empty + cube.reach <= radius + GAP_TOLERANCE) return false
+      if (cube.empty + cube.reach <= radius + GAP_TOLERANCE) continue
       const inside = insideOf(cube, hull)
-      if (inside?.onScreen) {
-        const least = Math.min(nearestOf(inside.point, cube.near), nearestOf(inside.point, targets))
-        if (least > radius) {
-          best = { target: inside.target, middle: inside.point }
-          radius = least
-        }
+      if (!inside) continue
+      if (inside.onScreen) {
+        const { target, point: middle } = inside
+        const least = Math.min(nearestOf(middle, cube.near), nearestOf(middle, targets))
+        if (least > radius) [best, radius] = [{ target, middle }, least]
       }
-      return inside !== null && cube.reach > GAP_TOLERANCE
-    })
+      if (cube.reach > GAP_TOLERANCE) open.push(cube)
+    }
     level = open
       .filter(({ empty, reach }) => empty + reach > radius + GAP_TOLERANCE)
       .flatMap(eighthsOf)

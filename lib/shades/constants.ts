@@ -83,3 +83,13 @@ export type CsvMapping = Record<CsvField, number | null>
 export const SHADE_SORTS = ['order', 'number', 'name', 'status', 'L', 'a', 'b'] as const
 /** One of SHADE_SORTS. */
 export type ShadeSort = (typeof SHADE_SORTS)[number]
+
+/** What a range study takes and shows. */
+export const STUDY_LIMITS = {
+  /** Every pair is compared: of a larger line the study would hold up everybody else. */
+  shades: 1_000,
+  /** The ΔE00 under which a pair may be asked for as near-twins. */
+  twins: [0.5, 12],
+  /** Pairs that are told of one kind; how many there are is told besides. */
+  pairs: 100,
+} as const

@@ -1,11 +1,13 @@
 import { screenColor } from '@/lib/color/gamut'
+import type { LightnessLadder } from '@/lib/color/range-study'
 import type { Lab, Observer } from '@/lib/color/types'
+import type { Vision } from '@/lib/color/vision'
 import type { Shade } from '@/models'
 
 import { describeColor } from './color'
 import { describeError } from './csv'
 import type { ImportCounts, PlannedField, PlannedRow, PlannedShade } from './plan-import'
-import type { CsvMapping, ShadeStatus } from './constants'
+import type { CsvMapping, ReadingTerms, ShadeStatus } from './constants'
 
 /** A shade as it leaves the server. */
 export interface ShadeView {
@@ -182,4 +184,62 @@ function describeChange(field: PlannedField, before: ShadeRow, after: PlannedSha
       order: String(shade.position + 1),
     })[field]
   return `${field === 'color' ? 'colour' : field}: ${say(before)} → ${say(after)}`
+}
+
+/** Two shades near each other, and how near. */
+export interface ShadePair {
+  first: ShadeView
+  second: ShadeView
+  /** ΔE00. */
+  deltaE: number
+}
+
+/** Two shades that fall together under one vision. */
+export interface LostShadePair extends ShadePair {
+  /** ΔE00 of the two as seen. */
+  seenDeltaE: number
+  /** How each is seen, `#rrggbb`. */
+  seen: [first: string, second: string]
+}
+
+/** The first so many of some pairs, and how many there are. */
+export interface Told<Pair> {
+  pairs: Pair[]
+  total: number
+}
+
+/** A family of a line under study. */
+export interface StudiedFamily {
+  /** Null for the shades in no family. */
+  id: string | null
+  name: string
+  /** Light first. */
+  shades: ShadeView[]
+  ladder: Pick<LightnessLadder, 'span' | 'widest' | 'evenness'>
+}
+
+/** An empty region of the range, and the shade to aim for. */
+export interface StudiedGap {
+  lab: Lab
+  /** `#rrggbb` for a screen. */
+  hex: string
+  /** A number that no shade has, another for each gap. */
+  number: string
+  /** Nearest first. */
+  nearest: { shade: ShadeView; deltaE: number }[]
+}
+
+/** What a study finds in the range of a line. */
+export interface RangeStudy {
+  /** Shades studied: those not retired. */
+  shadeCount: number
+  retiredCount: number
+  /** Some of them were read with the other observer. */
+  isMixed: boolean
+  /** The terms of most readings, which a target takes on. */
+  terms: ReadingTerms
+  twins: Told<ShadePair>
+  lost: Record<Vision, Told<LostShadePair>>
+  families: StudiedFamily[]
+  gaps: StudiedGap[]
 }

@@ -1,5 +1,7 @@
 import { z } from 'zod'
 
+import { NEAR_TWIN_LIMIT } from '@/lib/color/range-study'
+
 import {
   SHADE_STATUSES,
   READING_TERMS,
@@ -11,6 +13,7 @@ import {
   CSV_FIELDS,
   type CsvField,
   SHADE_SORTS,
+  STUDY_LIMITS,
 } from './constants'
 
 const kept = z
@@ -204,3 +207,12 @@ export const shadeTableSchema = z.object({
 })
 /** A parsed address of the table. */
 export type ShadeTableFilter = z.output<typeof shadeTableSchema>
+
+/** The range study's address: under which ΔE00 a pair is a near-twin. */
+export const rangeStudySchema = z.object({
+  twins: z.coerce
+    .number()
+    .min(STUDY_LIMITS.twins[0])
+    .max(STUDY_LIMITS.twins[1])
+    .catch(NEAR_TWIN_LIMIT),
+})

@@ -94,6 +94,7 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]/shades/[shade]': { who: EVERYBODY },
   '/[brand]/lines/[line]/shades/new': { who: EDITORS },
   '/[brand]/lines/[line]/shades/import': { who: EDITORS },
+  '/[brand]/lines/[line]/shades/study': { who: EVERYBODY },
   '/[brand]/lines/[line]/photographs': { who: STUDIO },
   '/[brand]/lines/[line]/photographs/[photograph]': { who: STUDIO },
   '/[brand]/lines/[line]/combinations': { who: STUDIO },

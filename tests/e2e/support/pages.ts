@@ -39,6 +39,7 @@ export const PAGES: readonly StudioPage[] = [
   { name: 'a shade', roles: EVERYBODY, find: firstLink('shades', new RegExp(`/shades/${ID}`)) },
   { name: 'a new shade', roles: EDITORS, find: () => `${LINE}/shades/new` },
   { name: 'importing shades', roles: EDITORS, find: () => `${LINE}/shades/import` },
+  { name: 'the range study', roles: EVERYBODY, find: () => `${LINE}/shades/study` },
   { name: 'photographs', roles: STUDIO, find: () => `${LINE}/photographs` },
   {
     name: 'a photograph',

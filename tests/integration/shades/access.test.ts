@@ -18,6 +18,7 @@ import {
   listShadeTable,
   readSampleBook,
 } from '@/lib/shades/queries'
+import { readRangeStudy } from '@/lib/shades/range-study'
 import { reorderShades } from '@/lib/shades/reorder-shades'
 import { restoreShades } from '@/lib/shades/restore-shades'
 import { createShadeSchema, shadeTableSchema } from '@/lib/shades/schema'
@@ -72,6 +73,11 @@ const DOINGS: Doing[] = [
     roles: ROLES,
     do: (actor, line, shade) => getShade(actor, line.slug, shade.id),
     ofShade: true,
+  },
+  {
+    name: 'study the range',
+    roles: ROLES,
+    do: (actor, line) => readRangeStudy(actor, line.slug, { twins: 4 }),
   },
   { name: 'list all', roles: ROLES, do: (actor, line) => listAllShades(actor, line.slug) },
   { name: 'export', roles: ROLES, do: (actor, line) => exportShades(actor, line.slug) },

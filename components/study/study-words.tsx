@@ -1,0 +1,29 @@
+import { TextLink } from '@/components/ui/text-link'
+import { shadesHref, type LinePlace } from '@/components/shades/shades-actions'
+import type { Vision } from '@/lib/color/vision'
+import type { ShadeView } from '@/lib/shades/present'
+
+/** A difference or a lightness, with one decimal. */
+export const showNumber = (value: number): string => value.toFixed(1).replace('-', '−')
+
+/** "1 pair", "335 pairs". */
+export const showCount = (count: number, one: string): string =>
+  `${count.toLocaleString('en-GB')} ${one}${count === 1 ? '' : 's'}`
+
+/** The three visions as they are told. */
+export const VISION_WORDS: Record<Vision, { name: string; lacks: string }> = {
+  protan: {
+    name: 'Protan',
+    lacks: 'Long-wave cones missing: reds look dark, and red and green alike.',
+  },
+  deutan: { name: 'Deutan', lacks: 'Middle-wave cones missing: red and green look alike.' },
+  tritan: {
+    name: 'Tritan',
+    lacks: 'Short-wave cones missing, which is rare: blue and green look alike.',
+  },
+}
+
+/** A shade by its name, which leads to its page. */
+export function ShadeLink({ place, shade }: { place: LinePlace; shade: ShadeView }) {
+  return <TextLink href={shadesHref(place, `/${shade.id}`)}>{shade.label}</TextLink>
+}
