@@ -2,6 +2,7 @@ import type { Transaction } from 'sequelize'
 
 import { hashPassword } from '@/lib/auth/password'
 import { hexToLab } from '@/lib/color/srgb'
+import { placeNewShades } from '@/lib/families/place-new-shades'
 import { Brand, inTransaction, Line, Membership, Person, Shade } from '@/models'
 
 import { demoAccounts } from './demo/accounts'
@@ -41,11 +42,12 @@ export async function seedDemo(): Promise<string> {
 
 async function seedLines(brand: Brand, demo: DemoBrand, transaction: Transaction): Promise<void> {
   for (const { shades, ...line } of demo.lines) {
-    const { id } = await Line.create({ ...lineColumns(line), brandId: brand.id }, { transaction })
+    const made = await Line.create({ ...lineColumns(line), brandId: brand.id }, { transaction })
     await Shade.bulkCreate(
-      shades.map((shade) => ({ ...shadeColumns(shade), brandId: brand.id, lineId: id })),
+      shades.map((shade) => ({ ...shadeColumns(shade), brandId: brand.id, lineId: made.id })),
       { transaction },
     )
+    await placeNewShades(made, transaction)
   }
 }
 

@@ -23,6 +23,12 @@ const shades = ({ label, after }: Told) =>
 const photographs = ({ label, after }: Told) =>
   after.count ? `${String(after.count)} photographs` : `the photograph ${label}`
 
+/** "the shade Moss" or "3 shades" of a family's line. */
+const familyShades = ({ after }: Told) =>
+  after.count === 1
+    ? `the shade ${String((after.named as string[])[0])}`
+    : `${String(after.count)} shades`
+
 const role = (values: Told['after']) => ROLE_WORDS[values.role as Role] ?? 'no role'
 
 /** "restoreCombination" → "restore combination". */
@@ -159,6 +165,52 @@ export const ACTIONS = {
     says: ({ label, after }) =>
       `took the ${String(after.count)} shades of ${label} away as a CSV file`,
   },
+  'family.sorted': {
+    label: 'Shades sorted into families',
+    says: ({ label, after }) =>
+      `sorted the shades of ${label} into ${String(after.families)} families anew`,
+  },
+  'family.renamed': {
+    label: 'Family renamed',
+    says: ({ label, after }) => `renamed the family ${label} to ${String(after.name)}`,
+    saysAll: true,
+  },
+  'family.merged': {
+    label: 'Families merged',
+    says: ({ label, after }) => `put the family ${label} into ${String(after.into)}`,
+  },
+  'family.split': {
+    label: 'Family split',
+    says: ({ label, after }) => `split ${String(after.name)} off the family ${label}`,
+  },
+  'family.shades-moved': {
+    label: 'Shades moved to a family',
+    says: (told) => `moved ${familyShades(told)} to the family ${told.label}`,
+  },
+  'family.shades-pinned': {
+    label: 'Shades pinned in their family',
+    says: (told) => `pinned ${familyShades(told)} of ${told.label} in their family`,
+  },
+  'family.shades-unpinned': {
+    label: 'Shades let go from their family',
+    says: (told) => `unpinned ${familyShades(told)} of ${told.label}`,
+  },
+  'family.shades-ordered': {
+    label: 'Shades of a family ordered',
+    says: ({ label, after }) =>
+      after.order === 'by hand'
+        ? `put the shades of the family ${label} in another order`
+        : `put the shades of the family ${label} in order from light to dark`,
+    saysAll: true,
+  },
+  'family.ordered': {
+    label: 'Families ordered',
+    says: ({ label }) => `put the families of ${label} in another order`,
+  },
+  'family.put-back': {
+    label: 'Change of families taken back',
+    says: ({ label }) => `put the families of ${label} back as they were`,
+  },
   'photograph.added': {
     label: 'Photograph added',
     says: ({ label }) => `added the photograph ${label}`,
@@ -213,6 +265,7 @@ export const ACTIVITY_KINDS = {
   person: 'Accounts',
   line: 'Lines',
   shade: 'Shades',
+  family: 'Tonal families',
   photograph: 'Photographs',
   combination: 'Combinations',
 } as const satisfies Record<KindOf<ActivityAction>, string>

@@ -1,5 +1,5 @@
 import { shadeLabel } from '@/lib/shades/present'
-import type { Combination, Line, Photograph, Shade } from '@/models'
+import type { Combination, Family, Line, Photograph, Shade } from '@/models'
 
 import { ACTIVITY_LIMITS } from './constants'
 import type { ActivityEntry, ActivityObject } from './record'
@@ -20,6 +20,12 @@ export const shadeObject = (
   id: shade.id,
   label: `${shadeLabel(shade)} of ${line.name}`,
 })
+
+/** A tonal family as the record names it: "Blues of Heronsway DK". */
+export const familyObject = (
+  { id, name }: Pick<Family, 'id' | 'name'>,
+  line: Pick<Line, 'name'>,
+): ActivityObject => ({ kind: 'family', id, label: `${name} of ${line.name}` })
 
 /** A photograph as the record names it. */
 export const photographObject = ({

@@ -2,6 +2,7 @@ import { col, fn, Op, UniqueConstraintError, where, type Transaction } from 'seq
 
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { ConflictError, NotFoundError } from '@/lib/errors'
+import { placeNewShades } from '@/lib/families/place-new-shades'
 import { getLine } from '@/lib/lines/queries'
 import { inTransaction, Shade, type Line } from '@/models'
 
@@ -16,8 +17,8 @@ export interface Change<T> {
 
 /**
  * The one way to change the shades of a line: authorises, opens the transaction, takes the line's
- * row so that changes to one line happen one after another, and raises its `shadesRevision` when
- * something changed, so that stored matches are known to be stale.
+ * row so that changes to one line happen one after another. When something changed, new shades fall
+ * into a family, and `shadesRevision` is raised, so that stored matches are known to be stale.
  * @throws ForbiddenError, NotFoundError
  * @throws ConflictError when the database finds a number taken
  */
@@ -33,7 +34,10 @@ export async function changeShades<T>(
       // Not FOR UPDATE: a photograph being added holds a key share on the line and need not wait.
       await line.reload({ transaction, lock: transaction.LOCK.NO_KEY_UPDATE })
       const { answer, changed } = await work(line, transaction)
-      if (changed) await line.increment('shadesRevision', { transaction })
+      if (changed) {
+        await placeNewShades(line, transaction)
+        await line.increment('shadesRevision', { transaction })
+      }
       return answer
     })
   } catch (error) {

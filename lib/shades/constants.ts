@@ -93,3 +93,8 @@ export const STUDY_LIMITS = {
   /** Pairs that are told of one kind; how many there are is told besides. */
   pairs: 100,
 } as const
+
+/** The orders of the sample book. */
+export const BOOK_ORDERS = ['family', 'lightness', 'number'] as const
+/** One of BOOK_ORDERS. */
+export type BookOrder = (typeof BOOK_ORDERS)[number]

@@ -1,4 +1,4 @@
-import { col, fn, literal, Op, type Order, type WhereOptions } from 'sequelize'
+import { col, fn, literal, Op, QueryTypes, type Order, type WhereOptions } from 'sequelize'
 import type { Fn, Literal } from 'sequelize/types/utils'
 import { z } from 'zod'
 
@@ -8,8 +8,9 @@ import { screenColor } from '@/lib/color/gamut'
 import type { Lab } from '@/lib/color/types'
 import { canReadCombinations } from '@/lib/combinations/policy'
 import { NotFoundError } from '@/lib/errors'
+import { listFamilies } from '@/lib/families/queries'
 import { getLine } from '@/lib/lines/queries'
-import { Shade, type Line } from '@/models'
+import { sequelize, Shade, type Line } from '@/models'
 
 import { canReadShades } from './policy'
 import {
@@ -19,9 +20,8 @@ import {
   type ShadeUses,
   type ShadeView,
 } from './present'
-import { BOOK_FAMILY_SQL, bookGroups } from './sample-book'
-import { SHADE_LIMITS, SHADE_STATUSES, type ShadeSort } from './constants'
-import type { ShadeTableFilter } from './schema'
+import { SHADE_LIMITS, SHADE_STATUSES, type BookOrder, type ShadeSort } from './constants'
+import type { SampleBookFilter, ShadeTableFilter } from './schema'
 import { findUses } from './uses'
 
 /** The line's own order; ties fall by age. */
@@ -129,26 +129,147 @@ export async function listShadeTable(
   return { line, shades: rows.map(presentShade), total: outside.length }
 }
 
-/** Neutrals first, then round the hues; light to dark. */
-// Made of constants alone, in sample-book.ts.
-// eslint-disable-next-line sql/fixed
-const BY_BOOK: Order = [literal(BOOK_FAMILY_SQL), ['labL', 'DESC'], ...BY_POSITION]
+/** A part of the sample book's page with what stands in its margin. */
+export interface BookGroup {
+  /** Names it among the groups. */
+  id: string
+  /** Null where the whole book is one part. */
+  heading: string | null
+  /** How many shades it has on all pages together. */
+  total: number
+  shades: ShadeView[]
+}
 
-/** A page of the sample book, by family. Three queries. @throws NotFoundError */
+/** A page of the sample book. */
+export interface SampleBookPage {
+  line: Line
+  groups: BookGroup[]
+  total: number
+}
+
+/**
+ * A page of the sample book: by family (shades that are in none come last), by lightness, or by
+ * number. Four queries at most, however many shades. @throws NotFoundError
+ */
 export async function readSampleBook(
   actor: Actor,
   lineSlug: string,
-  page: number,
-): Promise<{ line: Line; groups: { family: string; shades: ShadeView[] }[]; total: number }> {
+  { order, page }: SampleBookFilter,
+): Promise<SampleBookPage> {
   authorize(actor, canReadShades)
   const line = await getLine(actor, lineSlug)
-  const where = { brandId: actor.brandId, lineId: line.id }
-  const limit = SHADE_LIMITS.bookPage
+  const from = (page - 1) * SHADE_LIMITS.bookPage
+  return order === 'family' ? readByFamily(actor, line, from) : readInOneOrder(line, order, from)
+}
+
+const NO_FAMILY = 'Not in a family yet'
+
+async function readByFamily(actor: Actor, line: Line, from: number): Promise<SampleBookPage> {
+  const { brandId, id: lineId } = line
+  const [families, counted] = await Promise.all([
+    listFamilies(actor, lineId),
+    Shade.count({ where: { brandId, lineId }, group: ['familyId'] }),
+  ])
+  const counts = new Map(
+    (counted as unknown as { familyId: string | null; count: number }[]).map(
+      ({ familyId, count }) => [familyId, Number(count)],
+    ),
+  )
+  let passed = 0
+  const parts = [...families, { id: null, name: NO_FAMILY }].map(({ id, name }) => {
+    const total = counts.get(id) ?? 0
+    const begins = Math.max(0, from - passed)
+    const ends = Math.min(total, from + SHADE_LIMITS.bookPage - passed)
+    passed += total
+    return { id, name, total, begins, size: Math.max(0, ends - begins) }
+  })
+  const shown = parts.filter(({ size }) => size > 0)
+  const rows = await sequelize().query<ShadeRow>(BOOK_PAGE, {
+    bind: {
+      brandId,
+      lineId,
+      families: shown.map(({ id }) => id),
+      begins: shown.map(({ begins }) => begins),
+      sizes: shown.map(({ size }) => size),
+    },
+    type: QueryTypes.SELECT,
+  })
+  return {
+    line,
+    total: passed,
+    groups: shown.map(({ id, name, total }) => ({
+      id: id ?? 'none',
+      heading: name,
+      total,
+      shades: rows.filter(({ familyId }) => familyId === id).map(presentShade),
+    })),
+  }
+}
+
+/** Each family's part of a page, and that of no family, along its own stretch of shades_book. */
+const BOOK_PAGE = `SELECT shade.id, number, name, lab_l AS "labL", lab_a AS "labA", lab_b AS "labB",
+    illuminant, observer, hex, status, position, shade.family_id AS "familyId",
+    family_pinned AS "familyPinned", family_position AS "familyPosition", version
+  FROM unnest($families::uuid[], $begins::integer[], $sizes::integer[])
+    WITH ORDINALITY AS part (family_id, begins, size, place)
+  CROSS JOIN LATERAL (
+    (SELECT id FROM shades
+      WHERE line_id = $lineId AND brand_id = $brandId AND deleted_at IS NULL
+        AND family_id = part.family_id
+      ORDER BY family_position, lab_l DESC, position, created_at, id
+      OFFSET part.begins LIMIT part.size)
+    UNION ALL
+    (SELECT id FROM shades
+      WHERE line_id = $lineId AND brand_id = $brandId AND deleted_at IS NULL
+        AND part.family_id IS NULL AND family_id IS NULL
+      ORDER BY family_position, lab_l DESC, position, created_at, id
+      OFFSET part.begins LIMIT part.size)
+  ) AS found
+  JOIN shades AS shade ON shade.id = found.id
+  ORDER BY part.place, family_position, lab_l DESC, position, created_at, shade.id`
+
+/** Shades in one order, put together by ten steps of lightness, or not at all. */
+async function readInOneOrder(
+  line: Line,
+  order: Exclude<BookOrder, 'family'>,
+  offset: number,
+): Promise<SampleBookPage> {
+  const where = { brandId: line.brandId, lineId: line.id }
+  const byLightness: Order = [['labL', 'DESC'], ...BY_POSITION]
+  const byNumber: Order = [
+    ...BY_NUMBER.map((by): [Literal, string] => [by, 'ASC NULLS LAST']),
+    ...BY_POSITION,
+  ]
   const [total, rows] = await Promise.all([
     Shade.count({ where }),
-    Shade.findAll({ ...VIEW, where, order: BY_BOOK, offset: (page - 1) * limit, limit }),
+    Shade.findAll({
+      ...VIEW,
+      where,
+      order: order === 'lightness' ? byLightness : byNumber,
+      offset,
+      limit: SHADE_LIMITS.bookPage,
+    }),
   ])
-  return { line, groups: bookGroups(rows.map(presentShade)), total }
+  const shades = rows.map(presentShade)
+  const groups = order === 'lightness' ? byTens(shades) : []
+  if (order === 'number' && total > 0) groups.push({ id: 'all', heading: null, total, shades })
+  return { line, total, groups }
+}
+
+/** Shades from light to dark, put together by ten steps of L*. */
+function byTens(shades: readonly ShadeView[]): BookGroup[] {
+  const groups: BookGroup[] = []
+  for (const shade of shades) {
+    const ten = Math.min(90, Math.floor(shade.lab[0] / 10) * 10)
+    const id = `L${ten}`
+    if (groups.at(-1)?.id !== id) {
+      groups.push({ id, heading: `L* ${ten} to ${ten + 10}`, total: 0, shades: [] })
+    }
+    const group = groups.at(-1)!
+    group.shades.push(shade)
+    group.total += 1
+  }
+  return groups
 }
 
 /** How many neighbours a shade's page names. */

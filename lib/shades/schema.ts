@@ -14,6 +14,7 @@ import {
   type CsvField,
   SHADE_SORTS,
   STUDY_LIMITS,
+  BOOK_ORDERS,
 } from './constants'
 
 const kept = z
@@ -216,3 +217,11 @@ export const rangeStudySchema = z.object({
     .max(STUDY_LIMITS.twins[1])
     .catch(NEAR_TWIN_LIMIT),
 })
+
+/** The sample book's address. Nonsense in it gives the default of that part. */
+export const sampleBookSchema = z.object({
+  order: z.enum(BOOK_ORDERS).catch('family'),
+  page: z.coerce.number().int().min(1).max(10_000).catch(1),
+})
+/** A parsed address of the sample book. */
+export type SampleBookFilter = z.output<typeof sampleBookSchema>

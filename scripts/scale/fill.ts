@@ -44,6 +44,17 @@ export async function fillLine(brandId: string, slug: string, size: LineSize): P
     { brandId, lineId, count: size.shades },
   )
   await run(
+    `INSERT INTO families (brand_id, line_id, name, position)
+     SELECT $brandId::uuid, $lineId::uuid, 'Family ' || n, n FROM generate_series(0, 7) n`,
+    { brandId, lineId },
+  )
+  await run(
+    `UPDATE shades SET family_id = families.id FROM families
+     WHERE shades.line_id = $lineId::uuid AND families.line_id = $lineId::uuid
+       AND families.position = shades.position % 8`,
+    { lineId },
+  )
+  await run(
     `INSERT INTO photographs (brand_id, line_id, title, photographer, licence, alt_text, file_name,
        object_key, content_type, byte_length, sha256, width, height, state, derivatives, created_at)
      SELECT $brandId::uuid, $lineId::uuid, 'Hillside ' || n, 'Somebody of ours', CASE WHEN n % 5 > 0 THEN 'own-work' END,

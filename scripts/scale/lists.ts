@@ -42,7 +42,7 @@ const STEPS: { name: string; size: LineSize }[] = [
 type Read = (actor: Actor, lineSlug: string) => Promise<unknown>
 
 const LISTS: Record<string, Read> = {
-  'sample book': (actor, slug) => readSampleBook(actor, slug, 1),
+  'sample book': (actor, slug) => readSampleBook(actor, slug, { order: 'family', page: 1 }),
   'shade table': (actor, slug) => listShadeTable(actor, slug, shadeTableSchema.parse({})),
   gallery: async (actor, slug) => {
     const line = await getLine(actor, slug)

@@ -91,6 +91,7 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]': { who: EVERYBODY },
   '/[brand]/lines/[line]/edit': { who: OWNER },
   '/[brand]/lines/[line]/shades': { who: EVERYBODY },
+  '/[brand]/lines/[line]/shades/families': { who: EVERYBODY },
   '/[brand]/lines/[line]/shades/[shade]': { who: EVERYBODY },
   '/[brand]/lines/[line]/shades/new': { who: EDITORS },
   '/[brand]/lines/[line]/shades/import': { who: EDITORS },
@@ -291,6 +292,30 @@ export const ACTIONS: Record<string, ActionRule> = {
     }),
     answer: 'conflict',
   },
+
+  // An edit of families says first whether it saw them as they are, whatever rows it names.
+  ...Object.fromEntries(
+    Object.entries<(place: Place) => object>({
+      sortIntoFamiliesAction: () => ({ count: null }),
+      renameFamilyAction: ({ shade }) => ({ familyId: shade, name: 'Mine now' }),
+      mergeFamiliesAction: ({ shade }) => ({ familyId: shade, intoId: shade }),
+      splitFamilyAction: ({ shade }) => ({ familyId: shade }),
+      moveShadesToFamilyAction: ({ shade }) => ({ shadeIds: [shade], familyId: null }),
+      pinShadesAction: ({ shade }) => ({ shadeIds: [shade], pinned: true }),
+      orderFamilyShadesAction: ({ shade }) => ({ familyId: shade, shadeIds: null }),
+      orderFamiliesAction: ({ shade }) => ({ familyIds: [shade] }),
+      restoreFamiliesAction: () => ({ former: { count: null, families: [], shades: [] } }),
+    }).map(([action, input]): [string, ActionRule] => [
+      action,
+      {
+        who: action === 'renameFamilyAction' ? STUDIO : EDITORS,
+        input: (place) => ({ lineSlug: place.line, version: -1, ...input(place) }),
+        answer: 'conflict',
+        unknown: 'conflict',
+      },
+    ]),
+  ),
+  previewSortAction: { who: EDITORS, input: ({ line }) => ({ lineSlug: line, count: 5 }) },
 
   deletePhotographsAction: {
     who: EDITORS,

@@ -36,6 +36,8 @@ export const PAGES: readonly StudioPage[] = [
   { name: 'changing a line', roles: ['owner'], find: () => `${LINE}/edit` },
   { name: 'the sample book', roles: EVERYBODY, find: () => `${LINE}/shades` },
   { name: 'the shade table', roles: EVERYBODY, find: () => `${LINE}/shades?view=table` },
+  { name: 'shades by lightness', roles: EVERYBODY, find: () => `${LINE}/shades?order=lightness` },
+  { name: 'families', roles: EVERYBODY, find: () => `${LINE}/shades/families` },
   { name: 'a shade', roles: EVERYBODY, find: firstLink('shades', new RegExp(`/shades/${ID}`)) },
   { name: 'a new shade', roles: EDITORS, find: () => `${LINE}/shades/new` },
   { name: 'importing shades', roles: EDITORS, find: () => `${LINE}/shades/import` },

@@ -66,7 +66,7 @@ const DOINGS: Doing[] = [
   {
     name: 'see the sample book',
     roles: ROLES,
-    do: (actor, line) => readSampleBook(actor, line.slug, 1),
+    do: (actor, line) => readSampleBook(actor, line.slug, { order: 'family', page: 1 }),
   },
   {
     name: 'see one shade',

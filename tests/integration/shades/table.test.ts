@@ -1,11 +1,11 @@
 import { beforeAll, describe, expect, it } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
-import type { Lab } from '@/lib/color/types'
+import { BOOK_ORDERS, type BookOrder } from '@/lib/shades/constants'
+import type { ShadeView } from '@/lib/shades/present'
 import { getShade, listShadeTable, readSampleBook } from '@/lib/shades/queries'
-import { BOOK_FAMILIES, bookFamily } from '@/lib/shades/sample-book'
 import { shadeTableSchema } from '@/lib/shades/schema'
-import { Shade, type Line } from '@/models'
+import { Family, Shade, type Line } from '@/models'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
 import { makeLine } from '@/tests/factories/line'
 import { makeShade, makeShades } from '@/tests/factories/shade'
@@ -82,7 +82,9 @@ describe('a page takes as many queries for 50 shades as for 5', () => {
     'the table': (slug: string) => listShadeTable(owner, slug, shadeTableSchema.parse({})),
     'what no screen shows': (slug: string) =>
       listShadeTable(owner, slug, shadeTableSchema.parse({ outside: '1' })),
-    'the sample book': (slug: string) => readSampleBook(owner, slug, 1),
+    'the sample book': (slug: string) => readSampleBook(owner, slug, { order: 'family', page: 1 }),
+    'the sample book by lightness': (slug: string) =>
+      readSampleBook(owner, slug, { order: 'lightness', page: 1 }),
     'a shade': async (slug: string) => {
       const { shades } = await listShadeTable(owner, slug, shadeTableSchema.parse({}))
       return getShade(owner, slug, shades[0]!.id)
@@ -106,18 +108,65 @@ describe('a page takes as many queries for 50 shades as for 5', () => {
 })
 
 describe('the sample book', () => {
+  const read = async ({ slug }: Line, order: BookOrder, page = 1) =>
+    (await readSampleBook(owner, slug, { order, page })).groups
+  const shadesIn = (groups: { shades: ShadeView[] }[]) => groups.flatMap(({ shades }) => shades)
+
   it('is read page by page, each shade once', async () => {
     const long = await makeLine({ id: owner.brandId })
     await makeShades(long, 230)
-    const pages = [
-      await readSampleBook(owner, long.slug, 1),
-      await readSampleBook(owner, long.slug, 2),
-    ]
-    const shades = pages.flatMap(({ groups }) => groups.flatMap((group) => group.shades))
-    expect(pages[0]!.groups.flatMap((group) => group.shades)).toHaveLength(200)
-    expect(shades.map(({ number }) => number)).toEqual(
-      Array.from({ length: 230 }, (_, at) => `S${at + 1}`),
+    for (const order of BOOK_ORDERS) {
+      const first = shadesIn(await read(long, order))
+      const second = shadesIn(await read(long, order, 2))
+      expect(first).toHaveLength(200)
+      expect([...first, ...second].map(({ number }) => number)).toEqual(
+        Array.from({ length: 230 }, (_, at) => `S${at + 1}`),
+      )
+    }
+  })
+
+  it('goes through the families in their order, over its pages, those in none last', async () => {
+    const wide = await makeLine({ id: owner.brandId })
+    const [blues, greens] = await Promise.all(
+      ['Blues', 'Greens'].map((name, position) =>
+        Family.create({ brandId: owner.brandId, lineId: wide.id, name, position }),
+      ),
     )
+    const shades = await makeShades(wide, 240)
+    const put = (at: number, familyId: string | null, familyPosition: number | null = null) =>
+      shades[at]!.update({ familyId, familyPosition })
+    await Promise.all(shades.map((_, at) => put(at, at % 2 ? blues!.id : greens!.id)))
+    await put(0, null)
+    // Two that people put in front of the others, the darker one first.
+    await put(101, blues!.id, 1)
+    await put(201, blues!.id, 0)
+
+    const first = await read(wide, 'family')
+    expect(first.map(({ heading, total }) => [heading, total])).toEqual([
+      ['Blues', 120],
+      ['Greens', 119],
+    ])
+    expect(first[0]!.shades.slice(0, 3).map(({ number }) => number)).toEqual(['S202', 'S102', 'S2'])
+    const second = await read(wide, 'family', 2)
+    expect(second.map(({ heading }) => heading)).toEqual(['Greens', 'Not in a family yet'])
+    expect(shadesIn([...first, ...second])).toHaveLength(240)
+  })
+
+  it('has steps of lightness, and counts numbers as people do', async () => {
+    const line = await makeLine({ id: owner.brandId })
+    const [nine, ten, odd] = await makeShades(line, 3)
+    await ten!.update({ number: '10', labL: 95 })
+    await nine!.update({ number: '9', labL: 41 })
+    await odd!.update({ number: 'A1', labL: 40 })
+    expect((await read(line, 'lightness')).map(({ heading }) => heading)).toEqual([
+      'L* 90 to 100',
+      'L* 40 to 50',
+    ])
+    expect(shadesIn(await read(line, 'number')).map(({ number }) => number)).toEqual([
+      '9',
+      '10',
+      'A1',
+    ])
   })
 })
 
@@ -130,27 +179,5 @@ describe('the neighbours of a shade', () => {
     const differences = neighbours.map(({ difference }) => difference)
     expect(differences).toEqual([...differences].sort((a, b) => a - b))
     expect(differences[0]).toBeGreaterThan(0)
-  })
-})
-
-describe('the sample book', () => {
-  it('goes through the families in order, light to dark, over its pages', async () => {
-    const wide = await makeLine({ id: owner.brandId })
-    // Round the hue circle in steps of 1.7°, some of it near grey; with the axes themselves.
-    const angles = [0, 90, 180, 270, ...Array.from({ length: 220 }, (_, n) => (n * 1.7) % 360)]
-    const labs = angles.map((degrees, n): Lab => {
-      const chroma = n % 9 === 8 ? 5 : 40
-      const radians = (degrees * Math.PI) / 180
-      return [(n * 37) % 100, chroma * Math.cos(radians), chroma * Math.sin(radians)]
-    })
-    await Promise.all(
-      labs.map(([labL, labA, labB], position) => makeShade(wide, { position, labL, labA, labB })),
-    )
-    const read = async (page: number) =>
-      (await readSampleBook(owner, wide.slug, page)).groups.flatMap(({ shades }) => shades)
-    const shown = [...(await read(1)), ...(await read(2))].map(({ lab }) => lab)
-    const place = (lab: Lab) => BOOK_FAMILIES.indexOf(bookFamily(lab))
-    const expected = [...labs].sort((one, other) => place(one) - place(other) || other[0] - one[0])
-    expect(shown).toEqual(expected)
   })
 })

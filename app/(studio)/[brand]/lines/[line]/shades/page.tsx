@@ -5,22 +5,23 @@ import { Note } from '@/components/layout/note'
 import { ScreenCaution } from '@/components/layout/screen-caution'
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader } from '@/components/layout/sheet-header'
+import { BookOrderChoice, bookHref } from '@/components/shades/book-order'
 import { SampleBook } from '@/components/shades/sample-book'
 import { ShadeTable } from '@/components/shades/shade-table'
 import { shadesHref } from '@/components/shades/shades-actions'
+import { ShadesTabs } from '@/components/shades/shades-tabs'
 import { tableHref } from '@/components/shades/table-address'
 import { buttonClass } from '@/components/ui/button-class'
 import { LinkButton } from '@/components/ui/link-button'
-import { NavTabs } from '@/components/ui/nav-tabs'
 import { Pagination } from '@/components/ui/pagination'
 import { EmptyState, NotFoundState } from '@/components/ui/states'
 import { GroundSwitch } from '@/components/yarn/ground-switch'
 import { readForPage } from '@/lib/server/page'
-import { pageNumber, pagesOf } from '@/lib/server/paging'
+import { pagesOf } from '@/lib/server/paging'
 import { canEditShades } from '@/lib/shades/policy'
 import { listShadeTable, readSampleBook } from '@/lib/shades/queries'
 import { SHADE_LIMITS } from '@/lib/shades/constants'
-import { shadeTableSchema } from '@/lib/shades/schema'
+import { sampleBookSchema, shadeTableSchema } from '@/lib/shades/schema'
 
 import {
   deleteShadesAction,
@@ -40,7 +41,7 @@ export default async function ShadesPage({ params, searchParams }: Props) {
   const place = { brand, lineSlug }
   const view = address.view === 'table' ? 'table' : 'book'
   const filter = shadeTableSchema.parse(address)
-  const page = pageNumber(address.page)
+  const { order, page } = sampleBookSchema.parse(address)
   const isNarrowed = filter.q !== '' || filter.status.length > 0 || filter.outside
 
   const { edits, line, book, table } = await readForPage(brand, async (actor) => {
@@ -49,7 +50,7 @@ export default async function ShadesPage({ params, searchParams }: Props) {
       const table = await listShadeTable(actor, lineSlug, filter)
       return { edits, line: table.line.name, table, book: null }
     }
-    const book = await readSampleBook(actor, lineSlug, page)
+    const book = await readSampleBook(actor, lineSlug, { order, page })
     return { edits, line: book.line.name, book, table: null }
   })
   const total = (book ?? table)!.total
@@ -68,7 +69,7 @@ export default async function ShadesPage({ params, searchParams }: Props) {
     total,
     noun: 'shades',
     hrefOf: (next) =>
-      table ? tableHref(place, { ...filter, page: next }) : shadesHref(place, `?page=${next}`),
+      table ? tableHref(place, { ...filter, page: next }) : bookHref(place, order, next),
   })
 
   if (isEmpty) {
@@ -146,14 +147,13 @@ export default async function ShadesPage({ params, searchParams }: Props) {
         }
       />
       <div className="mb-4 flex flex-wrap items-end justify-between gap-x-6 gap-y-2 print:hidden">
-        <NavTabs
-          label="How the shades are shown"
-          items={[
-            { href: shadesHref(place), label: 'Sample book', current: view === 'book' },
-            { href: shadesHref(place, '?view=table'), label: 'Table', current: view === 'table' },
-          ]}
-        />
-        {book ? <GroundSwitch /> : null}
+        <ShadesTabs place={place} current={view} />
+        {book ? (
+          <div className="flex flex-wrap items-center gap-x-6 gap-y-2">
+            <BookOrderChoice place={place} order={order} />
+            <GroundSwitch />
+          </div>
+        ) : null}
       </div>
       {book ? <SampleBook place={place} groups={book.groups} /> : null}
       {table ? (
