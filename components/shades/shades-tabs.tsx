@@ -7,6 +7,7 @@ const TABS = {
   book: { label: 'Sample book', under: '' },
   table: { label: 'Table', under: '?view=table' },
   families: { label: 'Families', under: '/families' },
+  study: { label: 'Range study', under: '/study' },
 } as const
 
 /** The ways to look at a line's shades. */

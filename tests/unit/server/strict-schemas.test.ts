@@ -14,6 +14,7 @@ const LENIENT = new Map([
   ['combinationFilterSchema', 'the address of a page'],
   ['galleryFilterSchema', 'the address of a page'],
   ['shadeTableSchema', 'the address of a page'],
+  ['sampleBookSchema', 'the address of a page'],
   ['rangeStudySchema', 'the address of a page'],
   ['signInSchema', 'next-auth sends its own fields beside; none of them is looked at'],
   ['shadeFormSchema', 'what a form holds, never what is sent'],

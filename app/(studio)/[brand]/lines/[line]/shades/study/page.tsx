@@ -4,11 +4,11 @@ import type { Metadata } from 'next'
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader } from '@/components/layout/sheet-header'
 import { shadesHref } from '@/components/shades/shades-actions'
+import { ShadesTabs } from '@/components/shades/shades-tabs'
 import { RangeStudySections } from '@/components/study/range-study'
 import { StudyNotes } from '@/components/study/study-notes'
 import { showCount } from '@/components/study/study-words'
 import { LinkButton } from '@/components/ui/link-button'
-import { NavTabs } from '@/components/ui/nav-tabs'
 import { EmptyState } from '@/components/ui/states'
 import { GroundSwitch } from '@/components/yarn/ground-switch'
 import { readForPage } from '@/lib/server/page'
@@ -33,16 +33,7 @@ export default async function RangeStudyPage({
     edits: canEditShades(actor),
   }))
 
-  const tabs = (
-    <NavTabs
-      label="How the shades are shown"
-      items={[
-        { href: shadesHref(place), label: 'Sample book' },
-        { href: shadesHref(place, '?view=table'), label: 'Table' },
-        { href: shadesHref(place, '/study'), label: 'Range study', current: true },
-      ]}
-    />
-  )
+  const tabs = <ShadesTabs place={place} current="study" />
 
   if (!study) {
     return (
