@@ -113,8 +113,8 @@ function byHue({ families, shades }: Arrangement): ArrangedFamily[] {
 /**
  * Sorts a line into families anew. Pinned shades stay in their family and are left out of the cut;
  * the others are sorted at the optimum. Each new family is the former one with which it shares most
- * shades, if any: it keeps that one's id, and its name if a person gave it. A pinned shade counts
- * for the new family whose hue it is nearest to.
+ * shades, if any: it keeps that one's id, and its name if a person gave it. Where it shares
+ * none, or as many with two, the pinned shades nearest to it in hue decide.
  * @param count how many hue families; null chooses
  */
 export function sortAnew(former: Arrangement, count: number | null, makeId: MakeId): Arrangement {
@@ -135,6 +135,7 @@ export function sortAnew(former: Arrangement, count: number | null, makeId: Make
     }
     return counts
   })
+  const claims = sorted.map(() => new Map<string, number>())
   for (const { lab, familyId } of pinned) {
     const color = labToOklch(lab)
     const nearest = sorted
@@ -142,19 +143,33 @@ export function sortAnew(former: Arrangement, count: number | null, makeId: Make
       .filter(({ neutral }) => neutral === isNeutral(color))
       .sort((one, other) => one.off - other.off)[0]
     if (!nearest || familyId === null) continue
-    const counts = shared[nearest.at]!
+    const counts = claims[nearest.at]!
     counts.set(familyId, (counts.get(familyId) ?? 0) + 1)
   }
   const pairs = sorted
     .flatMap(({ neutral }, at) =>
       former.families.flatMap((family, place) =>
         family.neutral === neutral
-          ? [{ at, family, place, shares: shared[at]!.get(family.id) ?? 0 }]
+          ? [
+              {
+                at,
+                family,
+                place,
+                shares: shared[at]!.get(family.id) ?? 0,
+                claim: claims[at]!.get(family.id) ?? 0,
+              },
+            ]
           : [],
       ),
     )
-    .filter(({ shares }) => shares > 0)
-    .sort((one, other) => other.shares - one.shares || one.place - other.place || one.at - other.at)
+    .filter(({ shares, claim }) => shares + claim > 0)
+    .sort(
+      (one, other) =>
+        other.shares - one.shares ||
+        other.claim - one.claim ||
+        one.place - other.place ||
+        one.at - other.at,
+    )
   const heirs = new Map<number, ArrangedFamily>()
   const inherited = new Set<string>()
   for (const { at, family } of pairs) {
