@@ -3,10 +3,42 @@ import type { StudiedFamily, StudiedGap } from '@/lib/shades/present'
 
 import { outlineOf, spreadLabels, type PlotPoint } from './plot-layout'
 
-const SIZE = 420
-const MIDDLE = SIZE / 2
-/** From the middle to where the outermost ring is. */
-const REACH = 160
+const WIDTH = 420
+const TALLEST = 480
+/** Round the shades, for the families' names. */
+const MARGIN = { x: 58, y: 24 }
+
+/** Where Lab lies in the figure. */
+interface Frame {
+  at: (lab: Lab) => PlotPoint
+  /** Lengths to one unit of Lab. */
+  scale: number
+  height: number
+  origin: PlotPoint
+}
+
+function frameOf(labs: readonly Lab[]): Frame {
+  // The neutral point is always in the picture, and a grey line does not fill it.
+  const span = (axis: 1 | 2) => {
+    const values = labs.map((lab) => lab[axis])
+    return { low: Math.min(-10, ...values), high: Math.max(10, ...values) }
+  }
+  const [a, b] = [span(1), span(2)]
+  const scale = Math.min(
+    (WIDTH - 2 * MARGIN.x) / (a.high - a.low),
+    (TALLEST - 2 * MARGIN.y) / (b.high - b.low),
+  )
+  const left = (WIDTH - (a.high - a.low) * scale) / 2
+  return {
+    at: (lab) => [left + (lab[1] - a.low) * scale, MARGIN.y + (b.high - lab[2]) * scale],
+    scale,
+    height: (b.high - b.low) * scale + 2 * MARGIN.y,
+    origin: [left - a.low * scale, MARGIN.y + b.high * scale],
+  }
+}
+
+/** Keeps words readable over lines. */
+const HALO = { stroke: 'var(--paper)', strokeWidth: 3, paintOrder: 'stroke' } as const
 
 /** How gaps are called, in the figure and in the list. */
 export const gapLetter = (index: number): string => String.fromCharCode(65 + index)
@@ -20,32 +52,17 @@ export function ColorPlane({
   gaps: readonly StudiedGap[]
 }) {
   const labs = families.flatMap(({ shades }) => shades.map(({ lab }) => lab))
-  const most = Math.max(20, ...labs.map(chromaOf))
-  const rings = Array.from({ length: Math.ceil(most / 20) }, (_, at) => 20 * (at + 1))
-  const scale = REACH / rings.at(-1)!
-  const at = ([, a, b]: Lab): PlotPoint => [MIDDLE + a * scale, MIDDLE - b * scale]
+  const frame = frameOf([...labs, ...gaps.map(({ lab }) => lab)])
+  const { at, height } = frame
   return (
     <svg
-      viewBox={`0 0 ${SIZE} ${SIZE}`}
+      viewBox={`0 0 ${WIDTH} ${height.toFixed(0)}`}
       fill="none"
       role="img"
-      aria-label={`The shades on the a*b* plane: ${families.map(({ name, shades }) => `${name} ${shades.length}`).join(', ')}. Chroma reaches ${Math.round(most)}.`}
+      aria-label={`The shades on the a*b* plane: ${families.map(({ name, shades }) => `${name} ${shades.length}`).join(', ')}. Chroma reaches ${Math.round(Math.max(...labs.map(chromaOf)))}.`}
       className="mx-auto block h-auto w-full max-w-144"
     >
-      {rings.map((chroma) => (
-        <g key={chroma}>
-          <circle cx={MIDDLE} cy={MIDDLE} r={chroma * scale} stroke="var(--hairline)" />
-          <text
-            x={MIDDLE + 3}
-            y={MIDDLE + chroma * scale - 3}
-            fontSize="10"
-            fill="var(--ink-faint)"
-          >
-            {chroma}
-          </text>
-        </g>
-      ))}
-      <Axes />
+      <Paper frame={frame} most={Math.max(20, ...labs.map(chromaOf))} />
       {families.map(({ id, shades }) => (
         <path
           key={id ?? 'none'}
@@ -75,50 +92,46 @@ export function ColorPlane({
           )
         }),
       )}
-      {families.length > 1 ? <FamilyNames families={families} scale={scale} at={at} /> : null}
-      {gaps.map(({ lab, number }, index) => {
-        const [x, y] = at(lab)
-        return (
-          <g key={number}>
-            <path
-              d={`M${x - 6} ${y}h12M${x} ${y - 6}v12`}
-              stroke="var(--sheet)"
-              strokeWidth="3.5"
-            />
-            <path d={`M${x - 6} ${y}h12M${x} ${y - 6}v12`} stroke="var(--ink)" strokeWidth="1.5" />
-            <text
-              x={x + 5}
-              y={y - 5}
-              fontSize="12"
-              fontWeight="600"
-              fill="var(--ink)"
-              stroke="var(--sheet)"
-              strokeWidth="3"
-              paintOrder="stroke"
-            >
-              {gapLetter(index)}
-            </text>
-          </g>
-        )
-      })}
+      {families.length > 1 ? <FamilyNames families={families} frame={frame} /> : null}
+      <GapMarks points={gaps.map(({ lab }) => at(lab))} />
     </svg>
   )
 }
 
-function Axes() {
+/** Axes through the neutral point and rings of chroma about it. */
+function Paper({ frame: { origin, scale, height }, most }: { frame: Frame; most: number }) {
+  const [x0, y0] = origin
+  const rings = Array.from({ length: Math.ceil(most / 20) }, (_, at) => 20 * (at + 1))
   const ends = [
-    { text: '+a*', x: SIZE - 4, y: MIDDLE - 5, anchor: 'end' },
-    { text: '−a*', x: 4, y: MIDDLE - 5, anchor: 'start' },
-    { text: '+b*', x: MIDDLE + 5, y: 12, anchor: 'start' },
-    { text: '−b*', x: MIDDLE + 5, y: SIZE - 4, anchor: 'start' },
+    { text: '+a*', x: WIDTH - 2, y: y0 - 4, anchor: 'end' },
+    { text: '−a*', x: 2, y: y0 - 4, anchor: 'start' },
+    { text: '+b*', x: x0 - 4, y: 10, anchor: 'end' },
+    { text: '−b*', x: x0 - 4, y: height - 3, anchor: 'end' },
   ] as const
+  // Half-way between two axes, where the rings can be read.
+  const slant = Math.SQRT1_2 * scale
   return (
     <>
-      <path d={`M4 ${MIDDLE}H${SIZE - 4}M${MIDDLE} 4V${SIZE - 4}`} stroke="var(--rule)" />
+      <path d={`M0 ${y0}H${WIDTH}M${x0} 0V${height}`} stroke="var(--rule)" strokeWidth="0.75" />
       {ends.map(({ text, x, y, anchor }) => (
-        <text key={text} x={x} y={y} textAnchor={anchor} fontSize="11" fill="var(--ink-faint)">
+        <text key={text} x={x} y={y} textAnchor={anchor} fontSize="10" fill="var(--ink-faint)">
           {text}
         </text>
+      ))}
+      {rings.map((chroma) => (
+        <g key={chroma}>
+          <circle cx={x0} cy={y0} r={chroma * scale} stroke="var(--hairline)" />
+          <text
+            x={x0 - chroma * slant}
+            y={y0 + chroma * slant + 3}
+            textAnchor="middle"
+            fontSize="9"
+            fill="var(--ink-faint)"
+            {...HALO}
+          >
+            {chroma}
+          </text>
+        </g>
       ))}
     </>
   )
@@ -127,12 +140,10 @@ function Axes() {
 /** Each family's name beyond its fullest shade, on the side it lies on. */
 function FamilyNames({
   families,
-  scale,
-  at,
+  frame: { at, scale, height, origin },
 }: {
   families: readonly StudiedFamily[]
-  scale: number
-  at: (lab: Lab) => PlotPoint
+  frame: Frame
 }) {
   const placed = families.map(({ id, name, shades }) => {
     const sum = (axis: 1 | 2) => shades.reduce((total, { lab }) => total + lab[axis], 0)
@@ -140,30 +151,28 @@ function FamilyNames({
     const angle = (hueOf(middle) * Math.PI) / 180
     const beyond = Math.max(...shades.map(({ lab }) => chromaOf(lab))) + 12 / scale
     const [x, y] = at([0, beyond * Math.cos(angle), beyond * Math.sin(angle)])
-    return { key: id ?? 'none', name, x, y, isRight: x >= MIDDLE }
+    return { key: id ?? 'none', name, x, y, isRight: x >= origin[0] }
   })
   return [true, false].map((side) => {
     const names = placed.filter(({ isRight }) => isRight === side)
     const heights = spreadLabels(
       names.map(({ y }) => y),
-      15,
       14,
-      SIZE - 10,
+      10,
+      height - 8,
     )
     return names.map(({ key, name, x }, index) => {
-      const room = name.length * 6.5
-      const left = side ? Math.min(x, SIZE - 4 - room) : Math.max(x, 4 + room)
+      const room = name.length * 6.2
+      const left = side ? Math.min(x, WIDTH - 2 - room) : Math.max(x, 2 + room)
       return (
         <text
           key={key}
           x={left.toFixed(1)}
           y={(heights[index]! + 4).toFixed(1)}
           textAnchor={side ? 'start' : 'end'}
-          fontSize="13"
+          fontSize="12"
           fill="var(--ink)"
-          stroke="var(--sheet)"
-          strokeWidth="4"
-          paintOrder="stroke"
+          {...HALO}
           style={{ fontFamily: 'var(--font-besley-ext), var(--font-besley), Georgia, serif' }}
         >
           {name}
@@ -171,4 +180,36 @@ function FamilyNames({
       )
     })
   })
+}
+
+/** Where a letter may stand by its cross. */
+const CORNERS: readonly PlotPoint[] = [
+  [5, -5],
+  [5, 13],
+  [-13, -5],
+  [-13, 13],
+]
+
+/** Crosses, each with its letter where no other letter is. */
+function GapMarks({ points }: { points: readonly PlotPoint[] }) {
+  const letters: PlotPoint[] = []
+  for (const [x, y] of points) {
+    const corners = CORNERS.map(([dx, dy]): PlotPoint => [x + dx, y + dy])
+    const free = corners.find(([cx, cy]) =>
+      letters.every(([lx, ly]) => Math.abs(lx - cx) > 10 || Math.abs(ly - cy) > 12),
+    )
+    letters.push(free ?? corners[0]!)
+  }
+  const crosses = points.map(([x, y]) => `M${x - 5} ${y}h10M${x} ${y - 5}v10`).join('')
+  return (
+    <>
+      <path d={crosses} stroke="var(--paper)" strokeWidth="3" />
+      <path d={crosses} stroke="var(--ink)" strokeWidth="1.5" />
+      {letters.map(([x, y], index) => (
+        <text key={index} x={x} y={y} fontSize="11" fontWeight="600" fill="var(--ink)" {...HALO}>
+          {gapLetter(index)}
+        </text>
+      ))}
+    </>
+  )
 }

@@ -8,7 +8,7 @@ const WIDTH = 132
 const SCALE = 2
 const TOP = 10
 const HEIGHT = 2 * TOP + 100 * SCALE
-const POST = 44
+const POST = 46
 const RUNG = 24
 const GAP = 12
 /** With more rungs only the ends are labelled. */
@@ -45,8 +45,8 @@ export function LightnessLadder({ family }: { family: StudiedFamily }) {
       >
         {TICKS.map((tick) => (
           <g key={tick}>
-            <path d={`M20 ${yOf(tick)}H${WIDTH}`} stroke="var(--hairline)" />
-            <text x="16" y={yOf(tick) + 4} textAnchor="end" fontSize="11" fill="var(--ink-faint)">
+            <path d={`M24 ${yOf(tick)}H${WIDTH}`} stroke="var(--hairline)" />
+            <text x="20" y={yOf(tick) + 4} textAnchor="end" fontSize="11" fill="var(--ink-faint)">
               {tick}
             </text>
           </g>

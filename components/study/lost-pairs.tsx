@@ -25,7 +25,7 @@ export function LostPairs({
 }) {
   const { name, lacks } = VISION_WORDS[vision]
   return (
-    <section aria-label={name} className="mt-6 first:mt-0">
+    <section aria-label={name} className="mt-6 print:break-inside-avoid">
       <h3 className="text-lg">
         {name} <span className="text-ink-faint">· {showCount(total, 'pair')}</span>
       </h3>

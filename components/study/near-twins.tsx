@@ -38,27 +38,29 @@ export function TwinLimit({ limit, here }: { limit: number; here: string }) {
 export function NearTwins({
   place,
   twins: { pairs, total },
+  nearest,
   limit,
 }: {
   place: LinePlace
   twins: Told<ShadePair>
+  /** Shown where there are none. */
+  nearest: ShadePair | null
   limit: number
 }) {
-  if (total === 0) {
-    return <p>No two shades are under ΔE00 {limit} of each other.</p>
-  }
+  const wound = total === 0 && nearest ? [nearest] : pairs.slice(0, WOUND)
   return (
     <>
       <p className="mb-4 max-w-measure text-ink-soft">
-        {showCount(total, 'pair')} under ΔE00 {limit}, the nearest first. Where both are needed,
-        keep them apart in a combination and on the shelf.
+        {total === 0
+          ? `No two shades are under ΔE00 ${limit} of each other. These two are the nearest:`
+          : `${showCount(total, 'pair')} under ΔE00 ${limit}, the nearest first. Where both are needed, keep them apart in a combination and on the shelf.`}
       </p>
       <Ground>
         <ul
           role="list"
           className="grid grid-cols-[repeat(auto-fill,minmax(13rem,1fr))] gap-x-6 gap-y-6"
         >
-          {pairs.slice(0, WOUND).map(({ first, second, deltaE }) => (
+          {wound.map(({ first, second, deltaE }) => (
             <li key={first.id + second.id} className="flex items-center gap-4">
               <WrapCard
                 compact
@@ -79,26 +81,37 @@ export function NearTwins({
           ))}
         </ul>
       </Ground>
-      <TableBehind
-        summary={tableWords(pairs.length, total)}
-        caption={`Near-twins under ΔE00 ${limit}`}
-        columns={[
-          { label: 'Shade' },
-          { label: 'Its near-twin' },
-          { label: 'ΔE00', number: true },
-          { label: 'L* apart', number: true },
-        ]}
-        rows={pairs.map(({ first, second, deltaE }) => ({
-          key: first.id + second.id,
-          cells: [
-            <ShadeLink key="first" place={place} shade={first} />,
-            <ShadeLink key="second" place={place} shade={second} />,
-            showNumber(deltaE),
-            showNumber(Math.abs(first.lab[0] - second.lab[0])),
-          ],
-        }))}
-      />
+      {total > 0 ? <TwinTable {...{ place, pairs, total, limit }} /> : null}
     </>
+  )
+}
+
+function TwinTable({
+  place,
+  pairs,
+  total,
+  limit,
+}: Told<ShadePair> & { place: LinePlace; limit: number }) {
+  return (
+    <TableBehind
+      summary={tableWords(pairs.length, total)}
+      caption={`Near-twins under ΔE00 ${limit}`}
+      columns={[
+        { label: 'Shade' },
+        { label: 'Its near-twin' },
+        { label: 'ΔE00', number: true },
+        { label: 'L* apart', number: true },
+      ]}
+      rows={pairs.map(({ first, second, deltaE }) => ({
+        key: first.id + second.id,
+        cells: [
+          <ShadeLink key="first" place={place} shade={first} />,
+          <ShadeLink key="second" place={place} shade={second} />,
+          showNumber(deltaE),
+          showNumber(Math.abs(first.lab[0] - second.lab[0])),
+        ],
+      }))}
+    />
   )
 }
 

@@ -36,13 +36,14 @@ export function RangeStudySections({
     <>
       <SheetSection title="Near-twins" className="mt-6">
         <TwinLimit limit={limit} here={shadesHref(place, '/study')} />
-        <NearTwins place={place} twins={twins} limit={limit} />
+        <NearTwins place={place} twins={twins} nearest={study.nearest} limit={limit} />
       </SheetSection>
 
       <SheetSection title="Lost to colour vision">
-        <p className="mb-5 max-w-measure text-ink-soft">
+        <p className="max-w-measure text-ink-soft">
           Pairs clearly apart to most people, ΔE00 {CLEARLY_APART} and over, that fall under ΔE00{' '}
-          {FALL_TOGETHER} for somebody who lacks one kind of cone.
+          {FALL_TOGETHER} for somebody who lacks one kind of cone. It is a model, of that kind
+          missing altogether.
         </p>
         {VISIONS.map((vision) => (
           <LostPairs key={vision} place={place} vision={vision} lost={lost[vision]} />

@@ -17,8 +17,8 @@ export function StudyNotes({ isMixed }: { isMixed: boolean }) {
       </Note>
       <Note title="How others see">
         <p>
-          The three visions are a model of one kind of cone missing altogether. Milder forms lose
-          less, and no two people see the same. Where it matters, ask somebody.
+          Milder forms of colour-vision deficiency lose less than the model, and no two people see
+          the same. Where it matters, ask somebody.
         </p>
         <p className="text-sm text-ink-faint">
           Protan and deutan after Machado 2009, tritan after Brettel 1997.

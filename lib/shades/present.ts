@@ -239,6 +239,8 @@ export interface RangeStudy {
   /** The terms of most readings, which a target takes on. */
   terms: ReadingTerms
   twins: Told<ShadePair>
+  /** The two that are nearest each other, near-twins or not; null of fewer than two. */
+  nearest: ShadePair | null
   lost: Record<Vision, Told<LostShadePair>>
   families: StudiedFamily[]
   gaps: StudiedGap[]

@@ -66,6 +66,8 @@ export async function readRangeStudy(
     total: pairs.length,
   })
 
+  const twins = nearTwins(labs, limit)
+  const nearest = twins[0] ?? nearTwins(labs, Infinity)[0]
   const lostPairs = pairsLost(labs)
   const lostTo = (vision: Vision) =>
     told(
@@ -89,7 +91,8 @@ export async function readRangeStudy(
       retiredCount: rows.length - shades.length,
       isMixed: wide > 0 && wide < shades.length,
       terms: termsOf({ observer: 2 * wide > shades.length ? 10 : 2 }),
-      twins: told(nearTwins(labs, limit), pairOf),
+      twins: told(twins, pairOf),
+      nearest: nearest ? pairOf(nearest) : null,
       lost: Object.fromEntries(VISIONS.map((vision) => [vision, lostTo(vision)])) as Record<
         Vision,
         ReturnType<typeof lostTo>

@@ -48,7 +48,12 @@ describe('a range study', () => {
     expect(none).toMatchObject({ shadeCount: 0, families: [], gaps: [], twins: { total: 0 } })
     await makeShade(line)
     const one = (await study(line)).study!
-    expect(one).toMatchObject({ shadeCount: 1, gaps: [], twins: { pairs: [], total: 0 } })
+    expect(one).toMatchObject({
+      shadeCount: 1,
+      gaps: [],
+      nearest: null,
+      twins: { pairs: [], total: 0 },
+    })
     expect(one.families).toMatchObject([{ id: null, name: 'The whole line' }])
   })
 
@@ -69,7 +74,9 @@ describe('a range study', () => {
     expect([pairs[0]!.first.number, pairs[0]!.second.number].sort()).toEqual(['03', '06'])
     const deltaE = deltaE00([45, 50, 28], [46.5, 50, 28])
     expect(pairs[0]!.deltaE).toBeCloseTo(deltaE, 9)
-    expect((await study(line, deltaE - 0.01)).study!.twins.total).toBe(0)
+    const closer = (await study(line, deltaE - 0.01)).study!
+    expect(closer.twins.total).toBe(0)
+    expect(closer.nearest!.deltaE).toBeCloseTo(deltaE, 9)
     await twin.update({ status: 'retired' })
     expect((await study(line)).study!.twins.total).toBe(0)
   })

@@ -1,0 +1,73 @@
+import { LINE, signIn } from './support/accounts'
+import { overflowOf, violationsOf } from './support/page-checks'
+import { expect, test } from './support/test'
+
+const STUDY = `${LINE}/shades/study`
+
+test('an owner looks for near-twins, reads the tables, and fills a gap with a target', async ({
+  page,
+}) => {
+  await signIn(page, 'owner')
+  await page.goto(STUDY)
+  await expect(page.getByRole('heading', { level: 1, name: 'Range study' })).toBeVisible()
+
+  // Another limit is another address; nonsense in it is the default.
+  await page.getByLabel('Under ΔE00').fill('12')
+  await page.getByRole('button', { name: 'Show pairs' }).click()
+  await expect(page).toHaveURL(/twins=12$/)
+  await expect(page.getByText(/pairs? under ΔE00 12/)).toBeVisible()
+  await page.goto(`${STUDY}?twins=nonsense`)
+  await expect(page.getByLabel('Under ΔE00')).toHaveValue('4')
+
+  // Every figure has its table, open on a phone too without breaking anything.
+  await page.goto(`${STUDY}?twins=12`)
+  for (const summary of await page.locator('main summary').all()) await summary.click()
+  await expect(page.getByRole('table')).toHaveCount(6)
+  await page.setViewportSize({ width: 320, height: 640 })
+  expect(await overflowOf(page)).toBeLessThanOrEqual(0)
+  expect(await violationsOf(page)).toEqual([])
+  await page.setViewportSize({ width: 1280, height: 900 })
+
+  // A pair leads to its shades.
+  const [name] = await page
+    .getByRole('table', { name: /Near-twins/ })
+    .getByRole('link')
+    .allInnerTexts()
+  await page
+    .getByRole('table', { name: /Near-twins/ })
+    .getByRole('link')
+    .first()
+    .click()
+  await expect(page.getByRole('heading', { level: 1, name: name! })).toBeVisible()
+  await page.goBack()
+
+  // The target takes the number proposed, and can be taken back.
+  const gaps = page.getByRole('region', { name: 'Gaps' })
+  const number = gaps.getByLabel('Number').first()
+  const proposed = await number.inputValue()
+  await gaps.getByRole('button', { name: 'Add as target shade: gap A' }).click()
+  await expect(page.getByText(`Target shade ${proposed} added.`)).toBeVisible()
+  await expect(gaps).toBeFocused()
+  await expect(number).not.toHaveValue(proposed)
+  await page.getByRole('button', { name: 'Undo' }).click()
+  await expect(page.getByText('The target shade is taken back.')).toBeVisible()
+  await expect(number).toHaveValue(proposed)
+
+  // A number that is taken is refused at its field, and stays typed.
+  const taken = await page
+    .getByRole('table', { name: 'The shades by family' })
+    .locator('td')
+    .first()
+  const held = (await taken.textContent())!
+  await number.fill(held)
+  await gaps.getByRole('button', { name: 'Add as target shade: gap A' }).click()
+  await expect(gaps.getByText(/already|taken/)).toBeVisible()
+  await expect(number).toHaveValue(held)
+})
+
+test('a dyer reads the study and adds nothing', async ({ page }) => {
+  await signIn(page, 'dyer')
+  await page.goto(STUDY)
+  await expect(page.getByRole('heading', { name: 'Gap A' })).toBeVisible()
+  await expect(page.getByRole('button', { name: /target shade/ })).toHaveCount(0)
+})
