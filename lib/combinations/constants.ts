@@ -9,6 +9,9 @@ export const COMBINATION_LIMITS = {
   perPage: 24,
   /** How far the five shares may be from 1 before they are no shares of one thing. */
   shareTolerance: 0.01,
+  /** The least share of a place, in percent: less is no band on the card. */
+  leastPercent: 2,
+  story: 600,
 } as const
 
 /**
