@@ -61,7 +61,7 @@ export function wholePercents(shares: readonly number[]): number[] {
 export interface DraftSource {
   title: string
   story: string
-  photograph: { id: string } | null
+  photographId: string | null
   places: readonly {
     role: PlaceRole
     share: number
@@ -71,12 +71,12 @@ export interface DraftSource {
 }
 
 /** A combination as a draft, its shares as whole percents. */
-export function draftOf({ title, story, photograph, places }: DraftSource): CombinationDraft {
+export function draftOf({ title, story, photographId, places }: DraftSource): CombinationDraft {
   const percents = wholePercents(places.map(({ share }) => share))
   return {
     title,
     story,
-    photographId: photograph?.id ?? null,
+    photographId,
     places: places.map(({ role, locked, shade }, at) => ({
       shadeId: shade?.id ?? null,
       share: percents[at]! / 100,

@@ -20,6 +20,8 @@ import {
 } from '@/components/combinations/draft-history'
 import { PLACE_ROLES } from '@/lib/combinations/constants'
 
+import { draftWith, shadeIdsOf } from './fixtures'
+
 const SHADES = ['fern', 'moss', 'slate', 'peat', 'curlew', 'heather', 'rust', 'dawn'] as const
 
 const shadesArb = fc
@@ -41,7 +43,7 @@ const draftArb: fc.Arbitrary<CombinationDraft> = fc
     draftOf({
       title: 'Hillside',
       story: '',
-      photograph: null,
+      photographId: null,
       places: ids.map((id, at) => ({
         role: roles[at]!,
         share: shares[at]!,
@@ -71,21 +73,7 @@ const editArb: fc.Arbitrary<DraftEdit> = fc.oneof(
 )
 const editsArb = fc.array(editArb, { maxLength: 30 })
 
-const ids = (draft: CombinationDraft) => draft.places.map((one) => one.shadeId)
 const percents = (draft: CombinationDraft) => draft.places.map(({ share }) => percentOf(share))
-const start = (...held: (string | null)[]): CombinationDraft =>
-  draftOf({
-    title: 'Hillside',
-    story: '',
-    photograph: null,
-    places: PLACE_ROLES.map((role, at) => ({
-      role,
-      share: 0.2,
-      locked: false,
-      shade: held[at] ? { id: held[at] } : null,
-    })),
-  })
-
 describe('the draft of a combination', () => {
   it('keeps shares whole and together 100 %, roles all different and no shade twice, whatever is edited', () => {
     fc.assert(
@@ -99,7 +87,7 @@ describe('the draft of a combination', () => {
           expect(share * 100).toBeCloseTo(percentOf(share), 9)
         }
         expect(after.places.map(({ role }) => role).sort()).toEqual([...PLACE_ROLES].sort())
-        const filled = ids(after).filter((id) => id !== null)
+        const filled = shadeIdsOf(after).filter((id) => id !== null)
         expect(new Set(filled).size).toBe(filled.length)
       }),
     )
@@ -126,13 +114,13 @@ describe('the draft of a combination', () => {
   })
 
   it('fills only empty, unlocked places when it is completed', () => {
-    const draft = applyEdit(start('fern', null, 'slate', null, null), {
+    const draft = applyEdit(draftWith('fern', null, 'slate', null, null), {
       kind: 'lock',
       place: 3,
       locked: true,
     })
     const shadeIds = ['rust', 'moss', 'rust', 'peat', 'slate']
-    expect(ids(applyEdit(draft, { kind: 'complete', shadeIds }))).toEqual([
+    expect(shadeIdsOf(applyEdit(draft, { kind: 'complete', shadeIds }))).toEqual([
       'fern',
       'moss',
       'slate',
@@ -143,11 +131,11 @@ describe('the draft of a combination', () => {
   })
 
   it('swaps with the place a shade comes from, and leaves share and role with the place', () => {
-    const draft = start('fern', 'moss', null, null, null)
+    const draft = draftWith('fern', 'moss', null, null, null)
     const moved = applyEdit(draft, { kind: 'place', place: 1, shadeId: 'fern' })
-    expect(ids(moved)).toEqual(['moss', 'fern', null, null, null])
+    expect(shadeIdsOf(moved)).toEqual(['moss', 'fern', null, null, null])
     expect(moved.places.map(({ role }) => role)).toEqual(PLACE_ROLES)
-    expect(ids(applyEdit(draft, { kind: 'place', place: 4, shadeId: 'fern' }))).toEqual([
+    expect(shadeIdsOf(applyEdit(draft, { kind: 'place', place: 4, shadeId: 'fern' }))).toEqual([
       null,
       'moss',
       null,
@@ -157,7 +145,7 @@ describe('the draft of a combination', () => {
   })
 
   it('moves an edge between two places only, down to the least share', () => {
-    const draft = start()
+    const draft = draftWith()
     expect(percents(applyEdit(draft, { kind: 'edge', place: 1, percent: 31 }))).toEqual([
       20, 31, 9, 20, 20,
     ])
@@ -171,7 +159,7 @@ describe('the draft of a combination', () => {
   })
 
   it('gives a place a share and lets the others keep their proportions', () => {
-    const draft = start()
+    const draft = draftWith()
     expect(percents(applyEdit(draft, { kind: 'share', place: 0, percent: 60 }))).toEqual([
       60, 10, 10, 10, 10,
     ])
@@ -186,8 +174,8 @@ describe('the draft of a combination', () => {
 
   it('reads shares of nothing and of thirds as whole percents', () => {
     const source = (shares: number[]) => ({
-      ...start(),
-      photograph: null,
+      ...draftWith(),
+      photographId: null,
       places: shares.map((share, at) => ({
         role: PLACE_ROLES[at]!,
         share,
@@ -220,7 +208,7 @@ describe('the history of a draft', () => {
 
   it('keeps at least twenty steps and forgets only the oldest', () => {
     expect(HISTORY_STEPS).toBeGreaterThanOrEqual(20)
-    let history = beginHistory(start())
+    let history = beginHistory(draftWith())
     for (let step = 0; step <= HISTORY_STEPS + 5; step += 1) {
       history = doEdit(history, { kind: 'title', title: `Title ${step}` })
     }
@@ -231,13 +219,13 @@ describe('the history of a draft', () => {
   it('takes a run of typing back in one step, until it is ended', () => {
     const type = (history: ReturnType<typeof beginHistory>, title: string) =>
       doEdit(history, { kind: 'title', title }, 'title')
-    const typed = type(type(beginHistory(start()), 'Fel'), 'Fell')
+    const typed = type(type(beginHistory(draftWith()), 'Fel'), 'Fell')
     expect(undo(typed).present.title).toBe('Hillside')
     expect(undo(type(endRun(typed), 'Fell asleep')).present.title).toBe('Fell')
   })
 
   it('forgets what was undone when something else is done, but not when nothing is', () => {
-    const done = doEdit(beginHistory(start()), { kind: 'title', title: 'Fell' })
+    const done = doEdit(beginHistory(draftWith()), { kind: 'title', title: 'Fell' })
     const back = undo(done)
     expect(doEdit(back, { kind: 'title', title: 'Hillside' })).toBe(back)
     expect(redo(doEdit(back, { kind: 'story', story: 'Rain.' })).present.title).toBe('Hillside')
