@@ -34,6 +34,11 @@ export function doEdit(
   const present = applyEdit(history.present, edit)
   if (present === history.present) return history
   const goesOn = run !== null && run === history.run && history.past.length > 0
+  const before = history.past.at(-1)
+  if (goesOn && JSON.stringify(before) === JSON.stringify(present)) {
+    // The run came back to where it began: there is nothing to undo.
+    return { past: history.past.slice(0, -1), present, future: [], run: null }
+  }
   const past = goesOn ? history.past : [...history.past, history.present].slice(-HISTORY_STEPS)
   return { past, present, future: [], run }
 }

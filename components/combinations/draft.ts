@@ -51,7 +51,7 @@ export const MOST_PERCENT = 100 - (PLACES - 1) * LEAST_PERCENT
 /** Shares as whole percents that sum to 100, each at least LEAST_PERCENT. */
 export function wholePercents(shares: readonly number[]): number[] {
   return shareOut(
-    shares.map((share) => ({ share, hex: '', name: '' })),
+    shares.map((share) => ({ share })),
     100,
     LEAST_PERCENT,
   )
@@ -174,7 +174,7 @@ function giveShare(places: DraftPlace[], at: number, percent: number): DraftPlac
   const given = within(percent, MOST_PERCENT)
   const others = places.filter((_, index) => index !== at)
   const rest = shareOut(
-    others.map(({ share }) => ({ share, hex: '', name: '' })),
+    others.map(({ share }) => ({ share })),
     100 - given,
     LEAST_PERCENT,
   )

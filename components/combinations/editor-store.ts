@@ -41,7 +41,7 @@ export interface EditorWorld {
   initial: SavedDraft
   /** Under which name edits are kept in `storage`. */
   key: string
-  storage: Pick<Storage, 'getItem' | 'setItem'>
+  storage: () => Pick<Storage, 'getItem' | 'setItem'>
   save: (saved: SavedDraft) => Promise<ActionResult<{ version: number }>>
   /** What the server has now; null when it cannot be asked. */
   load: () => Promise<SavedDraft | null>
@@ -101,12 +101,12 @@ export function createEditorStore(world: EditorWorld) {
   function keep() {
     const { base, history } = state
     try {
-      world.storage.setItem(world.key, JSON.stringify({ base, history }))
+      world.storage().setItem(world.key, JSON.stringify({ base, history }))
     } catch {
       // The tab's storage is full: what is unsaved matters more than the steps before it.
       try {
         const short = beginHistory(history.present)
-        world.storage.setItem(world.key, JSON.stringify({ base, history: short }))
+        world.storage().setItem(world.key, JSON.stringify({ base, history: short }))
       } catch {
         // It is still on the page, and leaving that asks first.
       }
@@ -194,7 +194,7 @@ export function createEditorStore(world: EditorWorld) {
 
   /** Goes on where this tab was before the page was loaded again. */
   function restore() {
-    const kept = readKept(world.storage.getItem(world.key))
+    const kept = readKept(world.storage().getItem(world.key))
     if (!kept) return
     // A tab that was left while the same version was open elsewhere knows no more than the server.
     const { base } = state

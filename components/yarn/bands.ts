@@ -10,7 +10,11 @@ export interface Band {
  * Shares out a whole number of threads or rows among the bands in the order given, each at least
  * `least`, by largest remainder. Throws RangeError when there are more bands than fit.
  */
-export function shareOut(bands: readonly Band[], total: number, least: number): number[] {
+export function shareOut(
+  bands: readonly Pick<Band, 'share'>[],
+  total: number,
+  least: number,
+): number[] {
   const free = total - least * bands.length
   if (free < 0) throw new RangeError(`${bands.length} bands of ${least} do not fit ${total}.`)
   const weights = bands.map((band) => Math.max(0, band.share) || 0)
@@ -33,7 +37,7 @@ export function shareOut(bands: readonly Band[], total: number, least: number): 
 }
 
 /** The bands in words: "Curlew at Dusk 16 %, Fell Asleep 31 %". */
-export function bandsInWords(bands: readonly Band[]): string {
+export function bandsInWords(bands: readonly Omit<Band, 'hex'>[]): string {
   const whole = bands.reduce((sum, band) => sum + Math.max(0, band.share), 0) || 1
   return bands
     .map((band) => `${band.name} ${Math.round((100 * Math.max(0, band.share)) / whole)} %`)

@@ -1,10 +1,13 @@
 import { bandsInWords, shareOut, type Band } from './bands'
 import { Threads } from './threads'
 
+/** A band of a card; without a colour the card stays bare there. */
+export type CardBand = Omit<Band, 'hex'> & { hex: string | null }
+
 /** Props of {@link WrapCard}. */
 export interface WrapCardProps {
   /** Top to bottom, in the order given. */
-  bands: readonly Band[]
+  bands: readonly CardBand[]
   title: string
   orientation?: 'portrait' | 'landscape'
   /** The small card of a list: no title on it, no motion. */
@@ -52,6 +55,36 @@ const SHAPES: Record<'portrait' | 'landscape' | 'compact', CardShape> = {
   },
 }
 
+/** How long and wide the winding is, and where it begins, in the card's own units. */
+function windingOf({ width, height, margin, head, pitch, threads, rise }: CardShape, end: number) {
+  const left = margin + 3
+  return {
+    left,
+    width: width - left - pitch * 0.7 - end,
+    top: head + (height - 2 * head - threads * pitch) / 2 + rise / 2,
+  }
+}
+
+/**
+ * Where the bands lie on the portrait card, for what is laid over it.
+ * @returns fractions of the card's width, and of its height the edges: one more than bands
+ */
+export function portraitEdges(bands: readonly CardBand[]): {
+  left: number
+  right: number
+  edges: number[]
+} {
+  const { width, height, threads, least, pitch } = SHAPES.portrait
+  const winding = windingOf(SHAPES.portrait, 4)
+  let thread = 0
+  const edges = [0, ...shareOut(bands, threads, least).map((count) => (thread += count))]
+  return {
+    left: winding.left / width,
+    right: (winding.left + winding.width) / width,
+    edges: edges.map((at) => (winding.top + at * pitch) / height),
+  }
+}
+
 /**
  * A combination: its yarns wound round one card as bands from top to bottom, each as tall as its
  * share. The yarn goes through a slit at the left, so that the card's edge stays bare for the
@@ -66,12 +99,9 @@ export function WrapCard({
   className,
 }: WrapCardProps) {
   const shape = SHAPES[compact ? 'compact' : orientation]
-  const { width, height, margin, head, pitch, rise } = shape
+  const { width, height, pitch, rise } = shape
   const counts = bands.length > 0 ? shareOut(bands, shape.threads, shape.least) : []
-  const tooth = pitch
-  const left = margin + 3
-  const blockWidth = width - left - tooth * 0.7 - (compact ? 2 : 4)
-  const top = head + (height - 2 * head - shape.threads * pitch) / 2 + rise / 2
+  const { left, top, width: blockWidth } = windingOf(shape, compact ? 2 : 4)
   const blocks = bands.map((band, index) => ({
     band,
     count: counts[index] ?? 0,
@@ -90,21 +120,23 @@ export function WrapCard({
       <Card shape={shape} compact={compact} />
       {compact ? null : <Title title={title} shape={shape} />}
       <g data-yarn="" className={winds ? 'animate-wind-on motion-reduce:animate-none' : undefined}>
-        {blocks.map(({ band, count, offset }, index) => (
-          <Threads
-            key={index}
-            hex={band.hex}
-            block={{
-              x: left,
-              y: top + offset * pitch,
-              width: blockWidth,
-              pitch,
-              count,
-              rise,
-              offset,
-            }}
-          />
-        ))}
+        {blocks.map(({ band, count, offset }, index) =>
+          band.hex === null ? null : (
+            <Threads
+              key={index}
+              hex={band.hex}
+              block={{
+                x: left,
+                y: top + offset * pitch,
+                width: blockWidth,
+                pitch,
+                count,
+                rise,
+                offset,
+              }}
+            />
+          ),
+        )}
         {compact ? null : <Tails shape={shape} bands={bands} left={left} top={top} />}
       </g>
     </svg>
@@ -146,13 +178,12 @@ function Tails({
   top,
 }: {
   shape: CardShape
-  bands: readonly Band[]
+  bands: readonly CardBand[]
   left: number
   top: number
 }) {
-  const first = bands[0]
-  const last = bands.at(-1)
-  if (!first || !last) return null
+  const first = bands[0]?.hex
+  const last = bands.at(-1)?.hex
   const { width, head, pitch, threads } = shape
   const bottom = top + threads * pitch
   const stroke = { strokeWidth: pitch * 0.8, strokeLinecap: 'round' as const }
@@ -160,16 +191,20 @@ function Tails({
   const far = left + (width - left) * 0.72
   return (
     <>
-      <path
-        d={`M${far} ${head * 0.45}q${-18} 2-30 ${top - head * 0.45}`}
-        stroke={first.hex}
-        {...stroke}
-      />
-      <path
-        d={`M${near + 26} ${bottom - 2}q${-4} ${head * 0.4}-24 ${head * 0.5}`}
-        stroke={last.hex}
-        {...stroke}
-      />
+      {first ? (
+        <path
+          d={`M${far} ${head * 0.45}q${-18} 2-30 ${top - head * 0.45}`}
+          stroke={first}
+          {...stroke}
+        />
+      ) : null}
+      {last ? (
+        <path
+          d={`M${near + 26} ${bottom - 2}q${-4} ${head * 0.4}-24 ${head * 0.5}`}
+          stroke={last}
+          {...stroke}
+        />
+      ) : null}
     </>
   )
 }

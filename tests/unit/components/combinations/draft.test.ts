@@ -224,6 +224,14 @@ describe('the history of a draft', () => {
     expect(undo(type(endRun(typed), 'Fell asleep')).present.title).toBe('Fell')
   })
 
+  it('holds no step for a run that comes back to where it began', () => {
+    const drag = (history: ReturnType<typeof beginHistory>, percent: number) =>
+      doEdit(history, { kind: 'edge', place: 0, percent }, 'edge')
+    const back = drag(drag(drag(beginHistory(draftWith()), 25), 30), 20)
+    expect(back.past).toEqual([])
+    expect(drag(back, 25).past).toHaveLength(1)
+  })
+
   it('forgets what was undone when something else is done, but not when nothing is', () => {
     const done = doEdit(beginHistory(draftWith()), { kind: 'title', title: 'Fell' })
     const back = undo(done)

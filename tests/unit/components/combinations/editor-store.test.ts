@@ -41,7 +41,7 @@ function open(world: Pick<EditorWorld, 'save' | 'load'>, more: Partial<EditorWor
   const store = createEditorStore({
     initial,
     key: 'combination',
-    storage: window.sessionStorage,
+    storage: () => window.sessionStorage,
     ...world,
     ...more,
   })
