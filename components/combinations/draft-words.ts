@@ -11,7 +11,8 @@ export interface Names {
 }
 
 /** "place 2 of 5", for the place at 1. */
-export const placeInWords = (at: number): string => `place ${at + 1} of ${COMBINATION_LIMITS.places}`
+export const placeInWords = (at: number): string =>
+  `place ${at + 1} of ${COMBINATION_LIMITS.places}`
 
 /** A part as it is named to a person: "Title", "Place 2". */
 export const partInWords = (part: DraftPart): string => part[0]!.toUpperCase() + part.slice(1)

@@ -19,7 +19,7 @@ import { useId, type ReactNode } from 'react'
 import { WoundSample } from '@/components/yarn/wound-sample'
 import type { ShadeView } from '@/lib/shades/present'
 
-import { heldId, type Held } from './held'
+import type { Held } from './held'
 
 const heldOf = ({ active }: Pick<DragStartEvent, 'active'>) => active.data.current as Held
 const placeOf = ({ over }: Pick<DragOverEvent, 'over'>) =>
@@ -85,18 +85,18 @@ export function EditorDrag({
   )
 }
 
-/** Makes an element something that can be dragged. */
-export function useHeldDrag(held: Held, disabled: boolean) {
+/** Makes an element something that can be dragged. @param spot tells several of one thing apart */
+export function useHeldDrag(held: Held, spot: string, disabled: boolean) {
   const { setNodeRef, listeners, isDragging } = useDraggable({
-    id: heldId(held),
+    id: `${spot} ${held.kind === 'shade' ? held.shadeId : held.place}`,
     data: held,
     disabled,
   })
-  return { ref: setNodeRef, listeners, isDragging }
+  return { setNode: setNodeRef, listeners, isDragging }
 }
 
 /** Makes an element a place to drop on. @param spot tells several of one place apart */
 export function usePlaceDrop(place: number, spot: string, disabled: boolean) {
   const { setNodeRef, isOver } = useDroppable({ id: `${spot} ${place}`, data: { place }, disabled })
-  return { ref: setNodeRef, isOver }
+  return { setNode: setNodeRef, isOver }
 }

@@ -239,9 +239,9 @@ export const ACTIONS = {
     label: 'Combination renamed',
     says: ({ label, after }) => `renamed the combination ${label} to ${String(after.title)}`,
   },
-  'combination.reordered': {
-    label: 'Combination ordered',
-    says: ({ label }) => `put the shades of the combination ${label} in another order`,
+  'combination.edited': {
+    label: 'Combination changed',
+    says: ({ label }) => `changed the combination ${label}`,
   },
   'combination.deleted': {
     label: 'Combination deleted',

@@ -11,7 +11,6 @@ export const COMBINATION_LIMITS = {
   shareTolerance: 0.01,
   /** The least share of a place, in percent: less is no band on the card. */
   leastPercent: 2,
-  story: 600,
 } as const
 
 /**

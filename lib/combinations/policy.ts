@@ -10,7 +10,5 @@ export const canRenameCombination = allow('owner', 'designer', 'marketer')
 export const canEditCombination = allow('owner', 'designer')
 /** Moves combinations on the board. */
 export const canMoveCombination = allow('owner', 'designer')
-/** Changes the order of the five. */
-export const canReorderCombination = allow('owner', 'designer')
 /** Deletes a combination, and takes that back. */
 export const canDeleteCombination = allow('owner', 'designer')

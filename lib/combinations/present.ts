@@ -2,7 +2,7 @@ import type { Actor } from '@/lib/auth/actor'
 import type { ReadingKind } from '@/lib/color/readings'
 import { presentShade, type ShadeView } from '@/lib/shades/present'
 
-import { canDeleteCombination, canRenameCombination, canReorderCombination } from './policy'
+import { canDeleteCombination, canEditCombination, canRenameCombination } from './policy'
 import type { KeptCombination } from './queries'
 import type { Lane, PlaceRole } from './constants'
 
@@ -33,9 +33,13 @@ export interface CombinationView {
   /** Null when that person's account is gone. */
   keptBy: string | null
   places: PlaceView[]
+  photographId: string | null
+  /** Null when there is none, and when it was deleted. */
   photograph: { id: string; title: string; photographer: string } | null
+  /** May change its title. */
   canRename: boolean
-  canReorder: boolean
+  /** May change everything else too. */
+  canEdit: boolean
   canDelete: boolean
 }
 
@@ -62,11 +66,12 @@ export function presentCombination(
       shade: shade ? presentShade(shade) : null,
       gone: shade ? shade.deletedAt !== null : false,
     })),
+    photographId: combination.photographId,
     photograph: photograph
       ? { id: photograph.id, title: photograph.title, photographer: photograph.photographer }
       : null,
     canRename: canRenameCombination(actor),
-    canReorder: canReorderCombination(actor),
+    canEdit: canEditCombination(actor),
     canDelete: canDeleteCombination(actor),
   }
 }

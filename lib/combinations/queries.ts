@@ -77,6 +77,16 @@ async function withNames(rows: Combination[]): Promise<KeptCombination[]> {
   }))
 }
 
+async function readCombination(where: WhereOptions): Promise<KeptCombination> {
+  const combination = await Combination.findOne({
+    where,
+    include: [{ model: Photograph, as: 'photograph' }, PLACES],
+  })
+  if (!combination) throw new NotFoundError()
+  const [kept] = await withNames([combination])
+  return kept!
+}
+
 /**
  * One combination of a line, with everything its page shows.
  * @throws NotFoundError
@@ -89,13 +99,24 @@ export async function getCombination(
   authorize(actor, canReadCombinations)
   if (!z.uuid().safeParse(combinationId).success) throw new NotFoundError()
   const line = await getLine(actor, lineSlug)
-  const combination = await Combination.findOne({
-    where: { brandId: actor.brandId, lineId: line.id, id: combinationId },
-    include: [{ model: Photograph, as: 'photograph' }, PLACES],
-  })
-  if (!combination) throw new NotFoundError()
-  const [kept] = await withNames([combination])
-  return kept!
+  return readCombination({ brandId: actor.brandId, lineId: line.id, id: combinationId })
+}
+
+/**
+ * One combination when it is not of the version known any more, else null. One query while nothing
+ * changed.
+ * @throws NotFoundError
+ */
+export async function getNewerCombination(
+  actor: Actor,
+  combinationId: string,
+  version: number,
+): Promise<KeptCombination | null> {
+  authorize(actor, canReadCombinations)
+  const where = { brandId: actor.brandId, id: combinationId }
+  const now = await Combination.findOne({ attributes: ['version'], where })
+  if (!now) throw new NotFoundError()
+  return now.version === version ? null : readCombination(where)
 }
 
 /**

@@ -2,7 +2,7 @@ import { z } from 'zod'
 
 import { READING_KINDS } from '@/lib/color/readings'
 
-import { COMBINATION_LIMITS } from './constants'
+import { COMBINATION_LIMITS, PLACE_ROLES } from './constants'
 
 const title = z
   .string()
@@ -41,25 +41,58 @@ export type KeepCombinationValues = z.input<typeof keepCombinationSchema>
 /** A parsed combination to keep. */
 export type KeepCombinationInput = z.output<typeof keepCombinationSchema>
 
-const edit = { combinationId: z.uuid(), version: z.number().int() }
-
-/** A new title. */
-export const renameCombinationSchema = z.strictObject({ ...edit, title })
-/** What the form holds before parsing. */
-export type RenameCombinationValues = z.input<typeof renameCombinationSchema>
-/** A parsed new title. */
-export type RenameCombinationInput = z.output<typeof renameCombinationSchema>
-
-/** The five in their new order, by shade. */
-export const reorderCombinationSchema = z.strictObject({
-  ...edit,
-  shadeIds: z
-    .array(z.uuid())
-    .length(COMBINATION_LIMITS.places)
-    .refine(areDifferent, { message: 'The five must be different shades.' }),
+const draftPlace = z.strictObject({
+  shadeId: z.uuid().nullable(),
+  share: z
+    .number()
+    .min(COMBINATION_LIMITS.leastPercent / 100)
+    .max(1),
+  role: z.enum(PLACE_ROLES),
+  locked: z.boolean(),
 })
-/** A parsed new order. */
-export type ReorderCombinationInput = z.output<typeof reorderCombinationSchema>
+
+/**
+ * An open combination as the editor saves it: whole, or the title alone by those who may change
+ * nothing else. The shares are whole percents.
+ */
+export const saveCombinationSchema = z.strictObject({
+  combinationId: z.uuid(),
+  version: z.number().int(),
+  title,
+  story: z
+    .string()
+    .trim()
+    .max(
+      COMBINATION_LIMITS.story,
+      `Keep the story to ${COMBINATION_LIMITS.story.toLocaleString('en-GB')} characters.`,
+    )
+    .optional(),
+  photographId: z.uuid().nullish(),
+  places: z
+    .array(draftPlace)
+    .length(COMBINATION_LIMITS.places, 'A combination has five places.')
+    .refine((places) => areDifferent(places.flatMap(({ shadeId }) => shadeId ?? [])), {
+      message: 'The shades of a combination must be different.',
+    })
+    .refine((places) => areDifferent(places.map(({ role }) => role)), {
+      message: 'Each role is given once.',
+    })
+    .refine(
+      (places) => places.reduce((sum, { share }) => sum + Math.round(share * 100), 0) === 100,
+      { message: 'The five shares must come to 100 %.' },
+    )
+    .optional(),
+})
+/** What the editor sends. */
+export type SaveCombinationValues = z.input<typeof saveCombinationSchema>
+/** A parsed combination to save; what is undefined stays as it is. */
+export type SaveCombinationInput = z.output<typeof saveCombinationSchema>
+
+/** Which combination an editor has open, and the version it knows. */
+export const newerCombinationSchema = z.strictObject({
+  combination: z.uuid(),
+  version: z.coerce.number().int(),
+})
 
 /** Which combination to delete or to restore. */
 export const combinationIdSchema = z.strictObject({ combinationId: z.uuid() })

@@ -34,6 +34,8 @@ export const PHOTOGRAPH_LIMITS = {
   fileName: 255,
   search: 80,
   perPage: 24,
+  /** Offered to choose one from. */
+  choices: 200,
   perLine: 2_000,
   /** Deleted, restored or followed in one request. */
   atOnce: 100,

@@ -47,22 +47,33 @@ export interface PhotographView {
   canReread: boolean
 }
 
+/** Where a photograph's copies are. */
+function pictureOf(
+  { brandSlug }: Actor,
+  photograph: Photograph,
+): Pick<PhotographView, 'sources' | 'fallbackSrc'> {
+  const path = `/api/brands/${brandSlug}/photographs/${photograph.id}/derivatives/`
+  const sourcesOf = (format: Derivative['format']): PictureSource[] =>
+    photograph.derivatives
+      .filter((one) => one.format === format)
+      .sort((a, b) => a.width - b.width)
+      .map((one) => ({ src: path + derivativeName(photograph, one), width: one.width }))
+  const webp = sourcesOf('webp')
+  return {
+    sources: { avif: sourcesOf('avif'), webp },
+    fallbackSrc: (webp.findLast(({ width }) => width <= 960) ?? webp[0])?.src ?? null,
+  }
+}
+
 /** A photograph with its reading's age, as its view. */
 export function presentPhotograph(
   actor: Actor,
   line: Line,
   photograph: Photograph,
 ): PhotographView {
-  const { id, reading, derivatives } = photograph
-  const path = `/api/brands/${actor.brandSlug}/photographs/${id}/derivatives/`
-  const sourcesOf = (format: Derivative['format']): PictureSource[] =>
-    derivatives
-      .filter((one) => one.format === format)
-      .sort((a, b) => a.width - b.width)
-      .map((one) => ({ src: path + derivativeName(photograph, one), width: one.width }))
-  const webp = sourcesOf('webp')
+  const { reading } = photograph
   return {
-    id,
+    id: photograph.id,
     title: photograph.title,
     photographer: photograph.photographer,
     licence: photograph.licence,
@@ -77,14 +88,26 @@ export function presentPhotograph(
     height: photograph.height,
     byteLength: photograph.byteLength,
     addedAt: photograph.createdAt.toISOString(),
-    sources: { avif: sourcesOf('avif'), webp },
-    fallbackSrc: (webp.findLast(({ width }) => width <= 960) ?? webp[0])?.src ?? null,
+    ...pictureOf(actor, photograph),
     version: photograph.version,
     stale: reading ? reading.shadesRevision !== line.shadesRevision : false,
     canEdit: canEditPhotograph(actor),
     canDelete: canDeletePhotographs(actor),
     canReread: canRereadPhotograph(actor),
   }
+}
+
+/** A photograph to choose for a combination. */
+export type PhotographChoice = Pick<
+  PhotographView,
+  'id' | 'title' | 'photographer' | 'altText' | 'width' | 'height' | 'fallbackSrc'
+>
+
+/** A photograph as a choice: what its picture and its credit need. */
+export function presentPhotographChoice(actor: Actor, photograph: Photograph): PhotographChoice {
+  const { id, title, photographer, altText, width, height } = photograph
+  const { fallbackSrc } = pictureOf(actor, photograph)
+  return { id, title, photographer, altText, width, height, fallbackSrc }
 }
 
 /** A colour of a photograph worth offering for a lock. */

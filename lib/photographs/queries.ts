@@ -54,6 +54,19 @@ export async function listPhotographs(
   return { photographs, total }
 }
 
+/** The line's photographs to choose one from, newest first; the last of many are left out. */
+export async function listPhotographChoices(actor: Actor, line: Line): Promise<Photograph[]> {
+  authorize(actor, canReadPhotographs)
+  return Photograph.findAll({
+    where: { brandId: actor.brandId, lineId: line.id, state: CONFIRMED },
+    order: [
+      ['createdAt', 'DESC'],
+      ['id', 'ASC'],
+    ],
+    limit: PHOTOGRAPH_LIMITS.choices,
+  })
+}
+
 /** How many photographs of a line stand how. */
 export interface PhotographCounts {
   all: number
