@@ -38,14 +38,13 @@ export async function saveCombination(
   return inTransaction(async (transaction) => {
     const combination = await loadCombination(actor, combinationId, { transaction })
     await touchBoard(actor, combination.lineId, transaction)
+    if (photographId && photographId !== combination.photographId) {
+      await requirePhotograph(combination, photographId, transaction)
+    }
     const row = { id: combination.id, brandId, version }
     await updateVersioned(Combination, row, { title, story, photographId }, transaction)
     const before = await inWords(combination, transaction)
     const object = combinationObject(combination)
-
-    if (photographId && photographId !== combination.photographId) {
-      await requirePhotograph(combination, photographId, transaction)
-    }
     if (places) await putPlaces(combination, places, transaction)
 
     const saved = await combination.reload({ transaction })

@@ -1,3 +1,4 @@
+import { PLACE_ROLES } from '../../lib/combinations/constants'
 import { must, type Fault } from './fault'
 import type { Visitor } from './visitor'
 import { combinationValues } from './web'
@@ -90,20 +91,20 @@ export const EDITOR_FAULTS: readonly Fault[] = [
           shadeMoves++
           return
         }
-        const { version } = await stand()
+        const { version, title } = await stand()
         const change =
           kind < 0.75 ? { order: shuffled(five, random) } : { title: `Move ${n} of ${name}` }
-        const answer = change.order
-          ? await by.act<{ version: number }>('reorderCombinationAction', at, {
-              combinationId: id,
-              version,
-              shadeIds: change.order,
-            })
-          : await by.act<{ version: number }>('renameCombinationAction', at, {
-              combinationId: id,
-              version,
-              title: change.title,
-            })
+        const answer = await by.act<{ version: number }>('saveCombinationAction', at, {
+          combinationId: id,
+          version,
+          title: change.title ?? title,
+          places: change.order?.map((shadeId, place) => ({
+            shadeId,
+            share: 0.2,
+            role: PLACE_ROLES[place],
+            locked: false,
+          })),
+        })
         if (answer.ok) acknowledged.push({ version: answer.data.version, ...change })
         else {
           must(answer.code === 'conflict', `a move was answered ${JSON.stringify(answer)}`)

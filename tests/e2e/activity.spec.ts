@@ -46,7 +46,8 @@ async function renameCombination(page: Page, from: string, to: string) {
   await page.getByRole('link', { name: from }).first().click()
   await page.getByRole('button', { name: 'Rename combination' }).click()
   await page.getByLabel('Title').fill(to)
-  await page.getByRole('button', { name: 'Save title' }).click()
+  await page.getByLabel('Title').press('Enter')
+  await expect(page.locator('[data-saving=saved]')).toBeVisible()
   await expect(page.getByRole('heading', { level: 1 })).toContainText(to)
 }
 

@@ -19,6 +19,7 @@
  */
 import { randomUUID } from 'node:crypto'
 
+import { PLACE_ROLES } from '@/lib/combinations/constants'
 import type { ErrorCode } from '@/lib/errors'
 import type { Role } from '@/lib/people/constants'
 
@@ -123,6 +124,7 @@ export const ROUTES: Record<string, RouteRule> = {
     // Photographs that are not there are left out of its list.
     unknown: 200,
   },
+  'GET /api/brands/[brand]/combinations/[combination]': { who: STUDIO, query: () => '?version=0' },
   'GET /api/brands/[brand]/photographs/[photograph]/cells': { who: STUDIO },
   'GET /api/brands/[brand]/photographs/[photograph]/match': {
     who: STUDIO,
@@ -363,14 +365,22 @@ export const ACTIONS: Record<string, ActionRule> = {
     }),
   },
 
-  renameCombinationAction: {
-    who: STUDIO,
-    input: ({ combination }) => ({ combinationId: combination, version: -1, title: 'Mine now' }),
-    answer: 'conflict',
-  },
-  reorderCombinationAction: {
+  // Whole, which a marketer may not; the title alone is in combinations.test.ts.
+  saveCombinationAction: {
     who: EDITORS,
-    input: ({ combination, five }) => ({ combinationId: combination, version: -1, shadeIds: five }),
+    input: ({ combination, five }) => ({
+      combinationId: combination,
+      version: -1,
+      title: 'Mine now',
+      story: '',
+      photographId: null,
+      places: five.map((shadeId, at) => ({
+        shadeId,
+        share: 0.2,
+        role: PLACE_ROLES[at],
+        locked: false,
+      })),
+    }),
     answer: 'conflict',
   },
   deleteCombinationAction: {

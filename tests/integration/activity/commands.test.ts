@@ -5,11 +5,11 @@ import { beforeAll, describe, expect, it } from 'vitest'
 import { exportActivity } from '@/lib/activity/export-activity'
 import { activityFilterSchema } from '@/lib/activity/schema'
 import type { Actor } from '@/lib/auth/actor'
+import { PLACE_ROLES } from '@/lib/combinations/constants'
 import { deleteCombination } from '@/lib/combinations/delete-combination'
 import { keepCombination } from '@/lib/combinations/keep-combination'
-import { renameCombination } from '@/lib/combinations/rename-combination'
-import { reorderCombination } from '@/lib/combinations/reorder-combination'
 import { restoreCombination } from '@/lib/combinations/restore-combination'
+import { saveCombination } from '@/lib/combinations/save-combination'
 import { ConflictError } from '@/lib/errors'
 import { createLine } from '@/lib/lines/create-line'
 import { presentLine } from '@/lib/lines/present'
@@ -295,7 +295,7 @@ const DOINGS: Doing[] = [
     action: 'combination.renamed',
     do: async ({ line, shades }) => {
       const { id, version } = await makeCombination(line, shades, { title: 'Low Sun' })
-      return () => renameCombination(owner, { combinationId: id, version, title: 'Late Sun' })
+      return () => saveCombination(owner, { combinationId: id, version, title: 'Late Sun' })
     },
     row: () => ({
       objectLabel: 'Low Sun',
@@ -304,11 +304,16 @@ const DOINGS: Doing[] = [
     }),
   },
   {
-    action: 'combination.reordered',
+    action: 'combination.edited',
     do: async ({ line, shades }) => {
-      const { id, version } = await makeCombination(line, shades)
-      const shadeIds = [1, 0, 2, 3, 4].map((at) => shades[at]!.id)
-      return () => reorderCombination(owner, { combinationId: id, version, shadeIds })
+      const { id, version, title } = await makeCombination(line, shades)
+      const places = [1, 0, 2, 3, 4].map((at, place) => ({
+        shadeId: shades[at]!.id,
+        share: 0.2,
+        role: PLACE_ROLES[place]!,
+        locked: false,
+      }))
+      return () => saveCombination(owner, { combinationId: id, version, title, places })
     },
     row: () => ({
       before: { order: ['No. S1', 'No. S2', 'No. S3', 'No. S4', 'No. S5'] },
@@ -370,7 +375,7 @@ describe('the record', () => {
     const { id, version } = await makeCombination(line, shades, { title: 'Low Sun' })
     const requestId = randomUUID()
     await withinScope({ requestId }, async () => {
-      await renameCombination(owner, { combinationId: id, version, title: 'Low Sun' })
+      await saveCombination(owner, { combinationId: id, version, title: 'Low Sun' })
       await restoreCombination(owner, { combinationId: id })
       await restoreShades(owner, of(line, shades[0]!))
       await setShadeStatus(owner, { ...of(line, shades[0]!), status: 'target' })

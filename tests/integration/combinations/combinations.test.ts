@@ -3,14 +3,19 @@ import { randomUUID } from 'node:crypto'
 import { beforeAll, describe, expect, it } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
+import { PLACE_ROLES } from '@/lib/combinations/constants'
 import { deleteCombination } from '@/lib/combinations/delete-combination'
 import { keepCombination } from '@/lib/combinations/keep-combination'
 import { presentCombination } from '@/lib/combinations/present'
-import { getCombination, listCombinations } from '@/lib/combinations/queries'
-import { renameCombination } from '@/lib/combinations/rename-combination'
-import { reorderCombination } from '@/lib/combinations/reorder-combination'
+import { openCombination } from '@/lib/combinations/open-combination'
+import { getCombination, getNewerCombination, listCombinations } from '@/lib/combinations/queries'
 import { restoreCombination } from '@/lib/combinations/restore-combination'
-import { combinationFilterSchema, keepCombinationSchema } from '@/lib/combinations/schema'
+import { saveCombination } from '@/lib/combinations/save-combination'
+import {
+  combinationFilterSchema,
+  keepCombinationSchema,
+  saveCombinationSchema,
+} from '@/lib/combinations/schema'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
 import { ROLES, type Role } from '@/lib/people/constants'
 import { deleteShades } from '@/lib/shades/delete-shades'
@@ -51,11 +56,23 @@ const keeping = (changes: object = {}) =>
     ...changes,
   })
 const at = ({ id, version }: Combination) => ({ combinationId: id, version })
-const backwards = () =>
-  shades
-    .slice(0, 5)
-    .map(({ id }) => id)
-    .reverse()
+const placesOf = (ids: readonly (string | null)[]) =>
+  PLACE_ROLES.map((role, place) => ({
+    shadeId: ids[place] ?? null,
+    share: 0.2,
+    role,
+    locked: false,
+  }))
+const five = () => shades.slice(0, 5).map(({ id }) => id)
+const whole = (ids: readonly (string | null)[] = five(), changes: object = {}) => ({
+  title: 'A combination',
+  story: '',
+  photographId: null,
+  places: placesOf(ids),
+  ...changes,
+})
+const read = async ({ id }: Combination) =>
+  presentCombination(ours.owner, await getCombination(ours.owner, line.slug, id))
 
 interface Doing {
   name: string
@@ -73,16 +90,28 @@ const DOINGS: Doing[] = [
   },
   { name: 'keep five', roles: KEEPERS, do: (a) => keepCombination(a, keeping()) },
   {
+    name: 'open one to edit',
+    roles: READERS,
+    ofOne: true,
+    do: (a, one) => openCombination(a, line.slug, one.id),
+  },
+  {
+    name: 'ask whether one is newer',
+    roles: READERS,
+    ofOne: true,
+    do: (a, one) => getNewerCombination(a, one.id, one.version),
+  },
+  {
     name: 'rename one',
     roles: READERS,
     ofOne: true,
-    do: (a, one) => renameCombination(a, { ...at(one), title: 'New' }),
+    do: (a, one) => saveCombination(a, { ...at(one), title: 'New' }),
   },
   {
-    name: 'reorder one',
+    name: 'save one whole',
     roles: KEEPERS,
     ofOne: true,
-    do: (a, one) => reorderCombination(a, { ...at(one), shadeIds: backwards() }),
+    do: (a, one) => saveCombination(a, { ...at(one), ...whole() }),
   },
   {
     name: 'delete one',
@@ -186,29 +215,6 @@ describe('a kept combination', () => {
     expect(view.places.map(({ gone }) => gone)).toEqual([false, false, true, false, false])
   })
 
-  it('refuses a title or an order when somebody saved in between', async () => {
-    const combination = await makeCombination(line, shades)
-    await renameCombination(ours.marketer, { ...at(combination), title: 'Theirs' })
-    await expect(
-      renameCombination(ours.designer, { ...at(combination), title: 'Mine' }),
-    ).rejects.toThrow(ConflictError)
-    await expect(
-      reorderCombination(ours.designer, { ...at(combination), shadeIds: backwards() }),
-    ).rejects.toThrow(ConflictError)
-    expect((await combination.reload()).title).toBe('Theirs')
-  })
-
-  it('takes a new order of its own five only', async () => {
-    const combination = await makeCombination(line, shades)
-    await reorderCombination(ours.owner, { ...at(combination), shadeIds: backwards() })
-    const { combination: now } = await getCombination(ours.owner, line.slug, combination.id)
-    expect(now.places!.map(({ shadeId }) => shadeId)).toEqual(backwards())
-    const others = [...backwards().slice(1), shades[7]!.id]
-    await expect(reorderCombination(ours.owner, { ...at(now), shadeIds: others })).rejects.toThrow(
-      NotFoundError,
-    )
-  })
-
   it('is gone when deleted and back when restored', async () => {
     const combination = await makeCombination(line, shades)
     const id = { combinationId: combination.id }
@@ -218,6 +224,148 @@ describe('a kept combination', () => {
     )
     await restoreCombination(ours.owner, id)
     await expect(getCombination(ours.owner, line.slug, combination.id)).resolves.toBeDefined()
+  })
+})
+
+describe('saving an open combination', () => {
+  it('keeps every field and every place, also empty ones, in their order', async () => {
+    const combination = await makeCombination(line, shades)
+    const places = placesOf([shades[7]!.id, null, shades[0]!.id, null, shades[1]!.id]).map(
+      (place, index) => ({
+        ...place,
+        role: PLACE_ROLES[4 - index]!,
+        share: [0.52, 0.2, 0.02, 0.13, 0.13][index]!,
+        locked: index === 2,
+      }),
+    )
+    const values = { title: 'Fell', story: 'After rain.', photographId: photograph.id, places }
+    await saveCombination(ours.designer, { ...at(combination), ...values })
+    const view = await read(combination)
+    expect(view).toMatchObject({ title: 'Fell', story: 'After rain.', version: 2 })
+    expect(view.photograph?.id).toBe(photograph.id)
+    expect(
+      view.places.map(({ shade, role, share, locked }) => ({
+        shadeId: shade?.id ?? null,
+        share,
+        role,
+        locked,
+      })),
+    ).toEqual(places)
+  })
+
+  it('lets shades and roles change places in one save', async () => {
+    const combination = await makeCombination(line, shades)
+    const backwards = five().reverse()
+    await saveCombination(ours.owner, { ...at(combination), ...whole(backwards) })
+    expect((await read(combination)).places.map(({ shade }) => shade!.id)).toEqual(backwards)
+  })
+
+  it('refuses the second of two who save, whatever they changed, and leaves the first', async () => {
+    const combination = await makeCombination(line, shades)
+    const version = at(combination)
+    await saveCombination(ours.marketer, { ...version, title: 'Theirs' })
+    for (const values of [{ title: 'Mine' }, whole([...five()].reverse())]) {
+      await expect(saveCombination(ours.designer, { ...version, ...values })).rejects.toThrow(
+        ConflictError,
+      )
+    }
+    const view = await read(combination)
+    expect(view).toMatchObject({ title: 'Theirs', version: 2 })
+    expect(view.places.map(({ shade }) => shade!.id)).toEqual(five())
+  })
+
+  it('of ten who save at once takes one', async () => {
+    const combination = await makeCombination(line, shades)
+    const answers = await Promise.allSettled(
+      Array.from({ length: 10 }, (_, n) =>
+        saveCombination(ours.designer, { ...at(combination), ...whole(), title: `Title ${n}` }),
+      ),
+    )
+    expect(answers.filter(({ status }) => status === 'fulfilled')).toHaveLength(1)
+    expect((await combination.reload()).version).toBe(2)
+  })
+
+  it('lets a marketer change the title and nothing else', async () => {
+    const combination = await makeCombination(line, shades)
+    for (const more of [{ story: 'Mine.' }, { photographId: null }, { places: placesOf(five()) }]) {
+      await expect(
+        saveCombination(ours.marketer, { ...at(combination), title: 'Mine', ...more }),
+      ).rejects.toThrow(ForbiddenError)
+    }
+    await saveCombination(ours.marketer, { ...at(combination), title: 'Fell' })
+    expect(await read(combination)).toMatchObject({ title: 'Fell', story: '' })
+  })
+
+  it('refuses shades and photographs of another line and of another brand, and saves nothing', async () => {
+    const combination = await makeCombination(line, shades)
+    const other = await makeLine({ id: ours.owner.brandId })
+    const foreign = await makeLine({ id: theirs.owner.brandId })
+    for (const elsewhere of [other, foreign]) {
+      const [stranger] = await makeShades(elsewhere, 1)
+      const { id: photographId } = await makePhotograph(elsewhere)
+      for (const values of [
+        whole([...five().slice(1), stranger!.id]),
+        whole(five(), { photographId }),
+      ]) {
+        await expect(
+          saveCombination(ours.owner, { ...at(combination), ...values }),
+        ).rejects.toThrow(NotFoundError)
+      }
+    }
+    expect((await read(combination)).version).toBe(1)
+  })
+
+  it('puts a shade back that was deleted from the line since', async () => {
+    const own = await makeLine({ id: ours.owner.brandId })
+    const few = await makeShades(own, 6)
+    const combination = await makeCombination(own, few)
+    await deleteShades(ours.owner, { lineSlug: own.slug, shadeIds: [few[2]!.id], confirmed: true })
+    const ids = few.slice(0, 5).map(({ id }) => id)
+    const without = ids.map((id, place) => (place === 2 ? null : id))
+    await saveCombination(ours.owner, { ...at(combination), ...whole(without) })
+    await saveCombination(ours.owner, { ...at(await combination.reload()), ...whole(ids) })
+    const view = presentCombination(
+      ours.owner,
+      await getCombination(ours.owner, own.slug, combination.id),
+    )
+    expect(view.places.map(({ gone }) => gone)).toEqual([false, false, true, false, false])
+  })
+
+  it.each([
+    ['four places', (places: object[]) => places.slice(1)],
+    [
+      'one shade twice',
+      (places: object[]) => places.map((one) => ({ ...one, shadeId: five()[0] })),
+    ],
+    ['one role twice', (places: object[]) => places.map((one) => ({ ...one, role: 'MC' }))],
+    [
+      'shares beyond the whole',
+      (places: object[]) => places.map((one) => ({ ...one, share: 0.3 })),
+    ],
+    [
+      'a share below the least',
+      (places: object[]) =>
+        places.map((one, place) => ({ ...one, share: [0.4, 0.2, 0.2, 0.19, 0.01][place] })),
+    ],
+  ])('refuses %s', (_, spoil) => {
+    const values = {
+      ...whole(),
+      combinationId: randomUUID(),
+      version: 1,
+      places: spoil(placesOf(five())),
+    }
+    expect(saveCombinationSchema.safeParse(values).success).toBe(false)
+  })
+
+  it('raises the board’s revision, and asks once while there is nothing newer', async () => {
+    const combination = await makeCombination(line, shades)
+    const before = (await line.reload()).boardRevision
+    const same = await countQueries(() => getNewerCombination(ours.owner, combination.id, 1))
+    expect(same).toMatchObject({ answer: null, queries: 1 })
+    await saveCombination(ours.owner, { ...at(combination), title: 'Fell' })
+    expect((await line.reload()).boardRevision).toBe(before + 1)
+    const newer = await getNewerCombination(ours.owner, combination.id, 1)
+    expect(newer?.combination.title).toBe('Fell')
   })
 })
 
