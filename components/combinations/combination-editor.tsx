@@ -220,7 +220,7 @@ export function CombinationEditor(props: CombinationEditorProps) {
                   hint={`What the five tell, in a few sentences; it goes into the post. At most ${COMBINATION_LIMITS.story.toLocaleString('en-GB')} characters.`}
                 >
                   <Textarea
-                    rows={4}
+                    className="min-h-28"
                     value={draft.story}
                     maxLength={COMBINATION_LIMITS.story}
                     onChange={({ target }) => type({ kind: 'story', story: target.value })}

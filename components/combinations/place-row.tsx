@@ -40,7 +40,7 @@ export interface PlaceRowProps {
 
 /** One of the five places: its yarn, name, role, share and lock. */
 export function PlaceRow(props: PlaceRowProps) {
-  const { at, place, shade, gone, canEdit, puts, held, onPress, more } = props
+  const { at, place, shade, gone, canEdit, puts, held, onPress } = props
   const { locked, role, share } = place
   const name = shade?.label ?? 'Empty'
   const { setNode, isOver } = usePlaceDrop(at, 'row', locked || !canEdit)
@@ -54,26 +54,29 @@ export function PlaceRow(props: PlaceRowProps) {
       ) : (
         <Sample shade={shade} />
       )}
-      <div className="flex min-w-0 grow flex-wrap items-center justify-between gap-x-2 gap-y-1">
-        <div className="min-w-0 basis-full">
-          <p
-            className={cn(
-              'font-title text-lg leading-tight break-words',
-              !shade && 'text-ink-faint',
-            )}
-          >
-            {name}
-          </p>
-          <p className="text-sm text-ink-faint">
-            <span className={canEdit ? 'hidden print:inline' : undefined}>
-              {role} · {percentOf(share)} %{locked ? ' · locked' : ''}
-              {shade?.name || gone ? ' · ' : ''}
-            </span>
-            {shade?.name ? `No. ${shade.number}` : ''}
-            {gone ? `${shade?.name ? ' · ' : ''}no longer in the line` : ''}
-          </p>
+      <div className="min-w-0 grow">
+        <div className="flex items-start justify-between gap-2">
+          <div className="min-w-0">
+            <p
+              className={cn(
+                'font-title text-lg leading-tight break-words',
+                !shade && 'text-ink-faint',
+              )}
+            >
+              {name}
+            </p>
+            <p className="text-sm text-ink-faint">
+              <span className={canEdit ? 'hidden print:inline' : undefined}>
+                {role} · {percentOf(share)} %{locked ? ' · locked' : ''}
+                {shade?.name || gone ? ' · ' : ''}
+              </span>
+              {shade?.name ? `No. ${shade.number}` : ''}
+              {gone ? `${shade?.name ? ' · ' : ''}no longer in the line` : ''}
+            </p>
+          </div>
+          {canEdit ? <PlaceButtons {...props} /> : null}
         </div>
-        {canEdit ? <PlaceControls {...props} name={name} more={more} /> : null}
+        {canEdit ? <PlaceControls {...props} /> : null}
       </div>
     </li>
   )
@@ -101,10 +104,7 @@ function SampleButton({
     'row',
     locked || !shade,
   )
-  const name = shade?.label ?? 'Empty'
-  const label =
-    puts ??
-    (shade ? `Move ${name}, ${placeInWords(at)}` : `${placeInWords(at)} is empty`.replace('p', 'P'))
+  const label = puts ?? `${shade ? `Move ${shade.label}` : 'Empty'}, ${placeInWords(at)}`
   return (
     <button
       ref={setNode}
@@ -127,62 +127,56 @@ function SampleButton({
   )
 }
 
-function PlaceControls({
-  at,
-  place: { role, share, locked },
-  shade,
-  name,
-  onRole,
-  onShare,
-  onLock,
-  onEmpty,
-  more,
-}: PlaceRowProps & { name: string }) {
+/** What can be done with the shade that stands in the place. */
+function PlaceButtons({ at, place: { locked }, shade, onLock, onEmpty, more }: PlaceRowProps) {
+  return (
+    <div className="-mt-1.5 flex shrink-0 items-center print:hidden">
+      {more}
+      <IconButton
+        label={locked ? `Unlock place ${at + 1}` : `Lock place ${at + 1}`}
+        icon={locked ? <Lock /> : <LockOpen />}
+        aria-pressed={locked}
+        onClick={() => onLock(!locked)}
+      />
+      <IconButton
+        label={shade ? `Take ${shade.label} out` : `Place ${at + 1} is empty`}
+        icon={<X />}
+        disabled={locked || !shade}
+        onClick={onEmpty}
+      />
+    </div>
+  )
+}
+
+function PlaceControls({ at, place: { role, share }, onRole, onShare }: PlaceRowProps) {
   const percent = percentOf(share)
   const where = `place ${at + 1}`
   return (
-    <>
-      <div className="flex items-center gap-1 print:hidden">
-        <Select
-          aria-label={`Role of ${where}`}
-          value={role}
-          className="w-21"
-          onChange={({ target }) => onRole(target.value as PlaceRole)}
-        >
-          {PLACE_ROLES.map((one) => (
-            <option key={one}>{one}</option>
-          ))}
-        </Select>
-        <IconButton
-          label={`Less of ${where}`}
-          icon={<Minus />}
-          disabled={percent <= LEAST_PERCENT}
-          onClick={() => onShare(percent - 1)}
-        />
-        <PercentInput label={`Share of ${where}, %`} percent={percent} onChange={onShare} />
-        <IconButton
-          label={`More of ${where}`}
-          icon={<Plus />}
-          disabled={percent >= MOST_PERCENT}
-          onClick={() => onShare(percent + 1)}
-        />
-      </div>
-      <div className="flex items-center print:hidden">
-        {more}
-        <IconButton
-          label={locked ? `Unlock ${where}` : `Lock ${where}`}
-          icon={locked ? <Lock /> : <LockOpen />}
-          aria-pressed={locked}
-          onClick={() => onLock(!locked)}
-        />
-        <IconButton
-          label={shade ? `Take ${name} out` : `${where} is empty`.replace('p', 'P')}
-          icon={<X />}
-          disabled={locked || !shade}
-          onClick={onEmpty}
-        />
-      </div>
-    </>
+    <div className="mt-1.5 flex items-center gap-1 print:hidden">
+      <Select
+        aria-label={`Role of ${where}`}
+        value={role}
+        className="w-21"
+        onChange={({ target }) => onRole(target.value as PlaceRole)}
+      >
+        {PLACE_ROLES.map((one) => (
+          <option key={one}>{one}</option>
+        ))}
+      </Select>
+      <IconButton
+        label={`Less of ${where}`}
+        icon={<Minus />}
+        disabled={percent <= LEAST_PERCENT}
+        onClick={() => onShare(percent - 1)}
+      />
+      <PercentInput label={`Share of ${where}, %`} percent={percent} onChange={onShare} />
+      <IconButton
+        label={`More of ${where}`}
+        icon={<Plus />}
+        disabled={percent >= MOST_PERCENT}
+        onClick={() => onShare(percent + 1)}
+      />
+    </div>
   )
 }
 
