@@ -68,7 +68,8 @@ export interface NoMatch {
 /** Tells a match from a reason for none. */
 export const isMatch = (result: Match | NoMatch): result is Match => 'places' in result
 
-const RELAX = [1, 0.65, 0.65 ** 2, 0.65 ** 3, 0]
+/** What is left of the wish to stand apart, step by step, where it leaves no five. */
+export const RELAX = [1, 0.65, 0.65 ** 2, 0.65 ** 3, 0]
 /** Mean presence (ΔE00) beyond which the quiet five are no longer the picture. */
 const QUIET_PRESENCE = 9
 
