@@ -1,4 +1,5 @@
 import { deltaE00 } from './ciede2000'
+import { isNeutral } from './families'
 import { DEFAULT_APART, PLACES, RELAX } from './match'
 import { hueTurn, labToOklch, type Oklch } from './oklch'
 import type { MatchShade } from './readings'
@@ -12,8 +13,6 @@ export type RelationKind = (typeof RELATION_KINDS)[number]
 export const HUE_STEP = 5
 /** The least L* by which each of the five is darker than the one before, where one was chosen. */
 export const LIGHTNESS_STEP = 5
-/** Below this OKLCH chroma a shade has no hue to speak of, and none is counted against it. */
-export const NEUTRAL_CHROMA = 0.025
 /** From so many degrees on, a shade is off the hue it stands for. */
 export const STRAINED = 30
 
@@ -117,7 +116,7 @@ const mean = (values: readonly number[]) => values.reduce((sum, v) => sum + v, 0
 /** rank × step × candidate: what a candidate costs as the ideal of this rank at this hue. */
 function costsOf(pool: readonly Candidate[], { lightness }: Recipe): Float64Array {
   const filled = pool.filter((one) => one.filled)
-  const colored = pool.filter(({ color }) => color.c >= NEUTRAL_CHROMA)
+  const colored = pool.filter(({ color }) => !isNeutral(color))
   const held = colored.filter((one) => one.filled).map(({ color }) => color.c)
   // What is in place says how vivid the rest should be.
   const chroma =
@@ -367,7 +366,7 @@ function describe(
     const place: RelatedPlace = {
       shadeId: shade.id,
       side: job.pattern.sides[rank]!,
-      hueOff: color.c < NEUTRAL_CHROMA ? null : Math.abs(turn),
+      hueOff: isNeutral(color) ? null : Math.abs(turn),
     }
     return { held, place }
   })
