@@ -4,8 +4,11 @@ export type Motif = readonly (readonly boolean[])[]
 /** The longest float a knitter lets run behind the cloth, in stitches (common practice). */
 export const LONGEST_FLOAT = 4
 
-const COLUMNS = 8
-const ROWS = 9
+/** How many stitches a motif repeats over. */
+export const MOTIF_COLUMNS = 8
+/** How deep a motif may be, in rows: odd, so that a middle row mirrors it. */
+const DEPTHS = [15, 13, 11, 9, 7, 5, 3]
+const TRIES = 60
 
 /** Mulberry32: a small generator with a 32-bit seed (common practice). */
 function generator(seed: number): () => number {
@@ -34,33 +37,67 @@ export function longestRun(row: readonly boolean[]): number {
   return longest
 }
 
-/** The same left to right and upside down, as a knitter can keep in the head; knittable floats. */
+/** Single stitches, for a yarn of which there is little. */
+const SPOTS: Motif = [0, 2, 0].map((first) =>
+  Array.from({ length: MOTIF_COLUMNS }, (_, column) => column % 4 === first),
+)
+
+/** How far a stitch is from the middle of a figure: what the figure's rings are. */
+const METRICS: readonly ((dx: number, dy: number) => number)[] = [
+  (dx, dy) => dx + dy, // diamonds
+  (dx, dy) => Math.abs(dx - dy), // crosses
+  (dx, dy) => Math.max(dx, dy), // squares
+  (dx, dy) => dx + Math.ceil(dy / 2), // tall diamonds
+]
+
+/** The part of neighbouring stitches, across and up, that are of one colour. */
+function evenness(motif: Motif): number {
+  let alike = 0
+  let pairs = 0
+  motif.forEach((row, at) =>
+    row.forEach((stitch, column) => {
+      const above = motif[at - 1]?.[column]
+      alike += Number(stitch === row[(column + 1) % row.length]) + Number(stitch === above)
+      pairs += above === undefined ? 1 : 2
+    }),
+  )
+  return alike / pairs
+}
+
+/** Knittable floats, neither colour lost, and a figure rather than checks or stripes. */
 const holds = (motif: Motif): boolean => {
-  const share = motif.flat().filter(Boolean).length / (COLUMNS * ROWS)
-  const alike = motif.filter((row, index) => index > 0 && String(row) === String(motif[index - 1]))
+  const share = motif.flat().filter(Boolean).length / (MOTIF_COLUMNS * motif.length)
+  const even = evenness(motif)
   return (
-    share > 0.36 &&
-    share < 0.64 &&
-    alike.length < 2 &&
+    share >= 0.3 &&
+    share <= 0.62 &&
+    even >= 0.4 &&
+    even <= 0.62 &&
     motif.every((row) => longestRun(row) <= LONGEST_FLOAT)
   )
 }
 
 /**
- * A small motif, eight stitches by nine rows, drawn from a seed: symmetrical both ways, with no
- * float longer than {@link LONGEST_FLOAT}.
+ * A motif of eight stitches, drawn from a seed: rings about a middle, the same left to right and
+ * upside down, as a knitter can keep them in the head, every row in both colours with no float longer
+ * than {@link LONGEST_FLOAT}. The deepest of which `fits` takes one, or else three rows of single
+ * stitches; null when it takes none.
  */
-export function generateMotif(seed: number): Motif {
-  const next = generator(seed)
-  for (;;) {
-    const half = Array.from({ length: (ROWS + 1) / 2 }, () => {
-      const side = Array.from({ length: COLUMNS / 2 + 1 }, () => next() < 0.5)
-      return Array.from(
-        { length: COLUMNS },
-        (_, column) => side[Math.min(column, COLUMNS - column)] ?? false,
+export function generateMotif(seed: number, fits: (motif: Motif) => boolean): Motif | null {
+  for (const depth of DEPTHS) {
+    const next = generator(seed + depth)
+    const half = (depth - 1) / 2
+    for (let attempt = 0; attempt < TRIES; attempt++) {
+      const metric = METRICS[Math.floor(next() * METRICS.length)]!
+      const rings = Array.from({ length: half + MOTIF_COLUMNS }, () => next() < 0.5)
+      const motif = Array.from({ length: depth }, (_, row) =>
+        Array.from({ length: MOTIF_COLUMNS }, (_, column) => {
+          const dx = Math.min(column, MOTIF_COLUMNS - column)
+          return rings[metric(dx, Math.abs(row - half))]!
+        }),
       )
-    })
-    const motif = [...half, ...half.slice(0, -1).reverse()]
-    if (holds(motif)) return motif
+      if (fits(motif) && holds(motif)) return motif
+    }
   }
+  return fits(SPOTS) ? SPOTS : null
 }

@@ -1,17 +1,90 @@
 /** One knitted stitch is this wide and this high. */
-export const STITCH = { width: 12, height: 9.5 } as const
+export const STITCH = { width: 12, height: 9 } as const
 
-/** The two legs of a knitted stitch, from the top left of its cell; they reach into the row below. */
-const LEGS = 'c-.5-2.2 2.9-3.6 4.2-1.5l1.5 6.8c.3 2 .2 4.2-.1 6.2-3.6-2.4-5.2-6.8-5.6-11.5z'
+const round = (value: number): string => String(Math.round(value * 10) / 10)
 
-/** A row of knitted stitches: the outlines of those whose column is asked for. */
-export function knitRow(columns: readonly number[]): string {
-  return columns
-    .map((column) => {
-      const x = column * STITCH.width
-      return `M${x + 0.3} 1.1${LEGS}M${x + STITCH.width - 0.3} 1.1${mirrored}`
-    })
-    .join('')
+/** A drawing of a leg is mirrored for the right one: every x of its path changes its sign. */
+interface Leg {
+  left: string
+  right: string
 }
 
-const mirrored = 'c.5-2.2-2.9-3.6-4.2-1.5l-1.5 6.8c-.3 2-.2 4.2.1 6.2 3.6-2.4 5.2-6.8 5.6-11.5z'
+/** From the outer top of a stitch; the legs reach into the row below. */
+const BODY: Leg = {
+  left: 'c-.5-2.6 3.3-4.2 4.8-1.9l1.1 6.2c.3 2.4 .1 4.9-.2 7.3-3.9-2.3-5.5-6.9-5.7-11.6z',
+  right: 'c.5-2.6-3.3-4.2-4.8-1.9l-1.1 6.2c-.3 2.4-.1 4.9 .2 7.3 3.9-2.3 5.5-6.9 5.7-11.6z',
+}
+/** The two plies of the yarn, twisted: short strokes across the leg. */
+const TWIST: Leg = {
+  left: 'm.6 2.2l3.6-2m-2.9 4.9l3.6-2m-2.5 4.7l2.8-1.6',
+  right: 'm-.6 2.2l-3.6-2m2.9 4.9l-3.6-2m2.5 4.7l-2.8-1.6',
+}
+/** The light along the back of the leg. */
+const LIGHT: Leg = { left: 'm2.1 .1l1.5 6.2', right: 'm-2.1 .1l-1.5 6.2' }
+
+const rowOf =
+  (leg: Leg) =>
+  (columns: readonly number[]): string =>
+    columns
+      .map((column) => {
+        const x = column * STITCH.width
+        return `M${round(x + 0.3)} 1.1${leg.left}M${round(x + STITCH.width - 0.3)} 1.1${leg.right}`
+      })
+      .join('')
+
+/** A row of knitted stitches: the outlines of those whose column is asked for. */
+export const knitRow = rowOf(BODY)
+/** The twist of their plies, as strokes. */
+export const knitTwist = rowOf(TWIST)
+/** The light on them, as strokes. */
+export const knitLight = rowOf(LIGHT)
+
+/** How many strokes a leg of marled yarn is laid from. */
+export const GRAINS_PER_LEG = 4
+
+/** One turn of marled yarn on a leg of a stitch, as a stroke: 0 at the top of the leg. */
+export function legGrain(column: number, row: number, right: boolean, grain: number): string {
+  const side = right ? -1 : 1
+  const x = column * STITCH.width + (right ? STITCH.width : 0)
+  const y = row * STITCH.height + grain * 3.1
+  return `M${round(x - side)} ${round(y + 1.6)}l${7 * side} -2.9`
+}
+
+/** The height of a crocheted treble, the depth of a round. */
+export const TREBLE = 13
+
+/**
+ * The trebles of one side of a round of a square, worked outwards: round 1 fans from the centre,
+ * which lies at 0 0; the side is the upper one, its corners on the diagonals.
+ */
+export function trebles(
+  round1: number,
+  count: number,
+): { posts: string; tops: string; wraps: string } {
+  const inner = (round1 - 1) * TREBLE
+  const outer = round1 * TREBLE
+  const posts: string[] = []
+  const tops: string[] = []
+  const wraps: string[] = []
+  for (let stitch = 0; stitch < count; stitch++) {
+    const along = (part: number, half: number) => -half + (2 * half * (stitch + part)) / count
+    const head = outer - 4.6
+    const [a, b] = [along(0.14, head), along(0.86, head)]
+    const foot = along(0.5, inner + 1)
+    const wide = round1 === 1 ? 0.6 : 2
+    const mid = (a + b) / 2
+    const level = (part: number) => inner + (head - inner) * part
+    const at = (part: number) => foot + (mid - foot) * part
+    posts.push(
+      `M${round(foot - wide)} ${round(-inner + 1)}C${round(at(0.4) - 3)} ${round(-level(0.4))} ${round(a)} ${round(-level(0.7))} ${round(a)} ${round(-head)}L${round(b)} ${round(-head)}C${round(b)} ${round(-level(0.7))} ${round(at(0.4) + 3)} ${round(-level(0.4))} ${round(foot + wide)} ${round(-inner + 1)}z`,
+    )
+    wraps.push(
+      `M${round(at(0.42) - 2.4)} ${round(-level(0.36))}l4.8 -2.6M${round(at(0.72) - 2.7)} ${round(-level(0.66))}l5.4 -2.6`,
+    )
+    const [c, d] = [along(0.02, outer - 2), along(0.98, outer - 2)]
+    tops.push(
+      `M${round(c)} ${round(-outer + 4)}C${round(c + 1)} ${round(-outer - 0.6)} ${round(d - 2)} ${round(-outer - 0.4)} ${round(d + 1)} ${round(-outer + 2)}C${round(d - 1)} ${round(-outer + 5.6)} ${round(c + 2)} ${round(-outer + 6)} ${round(c)} ${round(-outer + 4)}z`,
+    )
+  }
+  return { posts: posts.join(''), tops: tops.join(''), wraps: wraps.join('') }
+}
