@@ -67,7 +67,13 @@ const RUN_PAUSE = 1_500
 export function CombinationEditor(props: CombinationEditorProps) {
   const { brand, lineSlug, personId, combination, shades, families, photographs, save } = props
   const { canEdit, canRename } = combination
-  const { store, heard } = useCombinationEditor({ brand, personId, view: combination, save })
+  const { store, heard } = useCombinationEditor({
+    brand,
+    personId,
+    view: combination,
+    save,
+    knowsPhotograph: (id) => photographs.some((one) => one.id === id),
+  })
   const { history, base, theirs, saving, news } = useEditorState(store)
 
   const [edge, setEdge] = useState<{ place: number; percent: number } | null>(null)
@@ -82,21 +88,13 @@ export function CombinationEditor(props: CombinationEditorProps) {
   const known = useMemo(
     () =>
       new Map(
-        [
-          ...combination.places.flatMap(({ shade }) => shade ?? []),
-          ...heard.values(),
-          ...shades,
-        ].map((shade) => [shade.id, shade]),
+        [...heard.flatMap(({ shade }) => shade ?? []), ...shades].map((one) => [one.id, one]),
       ),
-    [combination, heard, shades],
+    [heard, shades],
   )
-  const inLine = useMemo(() => new Set(shades.map(({ id }) => id)), [shades])
   const gone = useMemo(
-    () =>
-      new Set(
-        combination.places.flatMap((place) => (place.gone && place.shade ? place.shade.id : [])),
-      ),
-    [combination],
+    () => new Set(heard.flatMap((place) => (place.gone && place.shade ? place.shade.id : []))),
+    [heard],
   )
   const shadeOf: ShadeOf = (id) => (id === null ? null : (known.get(id) ?? null))
   const nameOf = (id: string | null) =>
@@ -288,7 +286,9 @@ export function CombinationEditor(props: CombinationEditorProps) {
             </>
           }
         />
-        <LiveRegion>{said}</LiveRegion>
+        <div data-said="">
+          <LiveRegion>{said}</LiveRegion>
+        </div>
         {theirs && conflicts.length > 0 ? (
           <ConflictNotice
             parts={conflicts}
@@ -340,7 +340,7 @@ export function CombinationEditor(props: CombinationEditorProps) {
                       at={at}
                       place={place}
                       shade={shade}
-                      gone={shade !== null && gone.has(shade.id) && !inLine.has(shade.id)}
+                      gone={shade !== null && gone.has(shade.id)}
                       canEdit={canEdit}
                       held={isHeld}
                       puts={puts ? `Put ${puts.label} in ${where}: ${nameOf(place.shadeId)}` : null}

@@ -52,6 +52,14 @@ export const SAVE_DELAY = 700
 /** Milliseconds until an unanswered save is tried again: 1 s at first, 10 s in the end. */
 export const retryDelay = (tries: number): number => Math.min(10_000, 1_000 * 1.6 ** tries)
 
+/** What is tried again by itself: no answer, or one that says nothing of the edit. */
+const UNREACHED: ReadonlySet<string> = new Set([
+  'conflict',
+  'unavailable',
+  'too-many',
+  'unexpected',
+])
+
 const NO_TITLE = 'give the combination a title.'
 
 interface Kept {
@@ -172,23 +180,29 @@ export function createEditorStore(world: EditorWorld) {
       tries = 0
       set({ base: { version: answer.data.version, draft }, saving: { kind: 'saved' } })
       settle()
-    } else if (theirs && theirs.version > state.base.version) {
+      return
+    }
+    if (theirs && theirs.version > state.base.version) {
       tries = 0
       set({ saving: { kind: 'waiting' } })
       hear(theirs)
-    } else if (['conflict', 'unavailable', 'too-many', 'unexpected'].includes(answer.code)) {
-      set({ saving: { kind: 'unreached' } })
+      return
+    }
+    const unreached = UNREACHED.has(answer.code)
+    set({
+      saving: unreached ? { kind: 'unreached' } : { kind: 'refused', words: answer.message },
+    })
+    // Somebody whose session has ended may sign in again in another tab.
+    if (unreached || answer.code === 'unauthenticated') {
       schedule(retryDelay(tries))
       tries += 1
-    } else {
-      set({ saving: { kind: 'refused', words: answer.message } })
     }
   }
 
   function change(history: DraftHistory) {
     if (history === state.history) return
     const unchanged = history.present === state.history.present
-    set({ history })
+    set({ history, news: [] })
     if (!unchanged) settle()
   }
 

@@ -1,14 +1,13 @@
 'use client'
 
-import { unstable_isUnrecognizedActionError as isUnknownAction } from 'next/navigation'
-import { useEffect, useMemo, useState, useSyncExternalStore } from 'react'
+import { unstable_isUnrecognizedActionError as isUnknownAction, useRouter } from 'next/navigation'
+import { useEffect, useState, useSyncExternalStore } from 'react'
 import useSWR from 'swr'
 
 import { reach } from '@/components/reach'
-import type { CombinationView } from '@/lib/combinations/present'
+import type { CombinationView, PlaceView } from '@/lib/combinations/present'
 import type { SaveCombinationValues } from '@/lib/combinations/schema'
 import type { ActionResult, Failure } from '@/lib/errors'
-import type { ShadeView } from '@/lib/shades/present'
 
 import { draftOf } from './draft'
 import { createEditorStore, type EditorStore, type SavedDraft } from './editor-store'
@@ -44,22 +43,26 @@ async function fetchNewer(address: string, version: number): Promise<Combination
  * Opens a combination for editing: what is done is kept in this tab and saved by itself, and what
  * others save is heard of every three seconds.
  * @param view as the server rendered it
- * @returns the store, and every shade heard of since by its id
+ * @param knowsPhotograph whether a photograph is among those to choose from
+ * @returns the store, and the places of all versions heard of, for the shades in them
  */
 export function useCombinationEditor({
   brand,
   personId,
   view,
   save,
+  knowsPhotograph,
 }: {
   brand: string
   personId: string
   view: CombinationView
   save: SaveCombination
-}): { store: EditorStore; heard: ReadonlyMap<string, ShadeView> } {
+  knowsPhotograph: (id: string) => boolean
+}): { store: EditorStore; heard: readonly PlaceView[] } {
   const { id, canEdit } = view
   const address = `/api/brands/${brand}/combinations/${id}`
-  const [heard, setHeard] = useState<ReadonlyMap<string, ShadeView>>(new Map())
+  const router = useRouter()
+  const [heard, setHeard] = useState<readonly PlaceView[]>(view.places)
   const [store] = useState(() =>
     createEditorStore({
       initial: savedOf(view),
@@ -82,9 +85,13 @@ export function useCombinationEditor({
     }),
   )
 
-  function note({ places }: CombinationView) {
-    const shades = places.flatMap(({ shade }) => shade ?? [])
-    setHeard((known) => new Map([...known, ...shades.map((one) => [one.id, one] as const)]))
+  function note({ places, photographId, photograph }: CombinationView) {
+    setHeard((known) => [
+      ...known.filter((one) => !places.some(({ shade }) => shade?.id === one.shade?.id)),
+      ...places,
+    ])
+    // One that was added since this page was made: its picture comes with the page.
+    if (photograph && !knowsPhotograph(photographId!)) router.refresh()
   }
 
   useEffect(() => store.start(), [store])
@@ -101,7 +108,7 @@ export function useCombinationEditor({
       store.hear(savedOf(newer))
     },
   })
-  return useMemo(() => ({ store, heard }), [store, heard])
+  return { store, heard }
 }
 
 /** The state of an editor, for whoever draws it. */
