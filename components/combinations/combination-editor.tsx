@@ -2,7 +2,7 @@
 
 import { Redo2, Undo2 } from 'lucide-react'
 import dynamic from 'next/dynamic'
-import { useEffect, useMemo, useRef, useState, type ReactNode } from 'react'
+import { useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react'
 
 import { Note } from '@/components/layout/note'
 import { ScreenCaution } from '@/components/layout/screen-caution'
@@ -39,6 +39,8 @@ import {
   type SaveCombination,
 } from './use-combination-editor'
 
+// The page answers before its cloth is drawn.
+const AsCloth = dynamic(() => import('@/components/yarn/as-cloth').then((it) => it.AsCloth))
 // Only those whom somebody overtook need it.
 const ConflictNotice = dynamic(() => import('./conflict-notice').then((it) => it.ConflictNotice))
 
@@ -106,6 +108,11 @@ export function CombinationEditor(props: CombinationEditorProps) {
         ? 'none'
         : (photographs.find((one) => one.id === id)?.title ?? 'one that is gone'),
   }
+  const clothId = useId()
+  const cloth = draft.places.flatMap(({ shadeId, share }) => {
+    const shade = shadeOf(shadeId)
+    return shade ? [{ color: shade.hex, share, name: shade.label }] : []
+  })
   const placeOf = (shadeId: string) => draft.places.findIndex((one) => one.shadeId === shadeId)
   const heldShade = held && shadeOf(shadeIdOf(held))
   const heldFrom = held ? (held.kind === 'place' ? held.place : placeOf(held.shadeId)) : -1
@@ -309,7 +316,7 @@ export function CombinationEditor(props: CombinationEditorProps) {
 
         <div className="grid gap-x-8 gap-y-8 min-[1000px]:grid-cols-[minmax(0,5fr)_minmax(0,6fr)] print:grid-cols-[75mm_minmax(0,1fr)]">
           <div className="min-w-0">
-            <div className="space-y-2 min-[1000px]:sticky min-[1000px]:top-7">
+            <div className="space-y-2 min-[1000px]:[@media(min-height:64rem)]:sticky min-[1000px]:[@media(min-height:64rem)]:top-7">
               <Ground className="border border-hairline p-4 sm:p-6 print:border-0 print:p-0">
                 <CardStage
                   draft={draft}
@@ -324,6 +331,12 @@ export function CombinationEditor(props: CombinationEditorProps) {
                 />
               </Ground>
               <GroundSwitch />
+              <section aria-labelledby={clothId} className="pt-6 print:hidden">
+                <h2 id={clothId} className="mb-3 text-xl">
+                  As cloth
+                </h2>
+                <AsCloth bands={cloth} />
+              </section>
             </div>
           </div>
           <div className="min-w-0 space-y-8">
