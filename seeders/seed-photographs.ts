@@ -7,6 +7,7 @@ import { isMatch, matchPhotograph } from '@/lib/color/match'
 import { readPhotographColors, type PhotographCell } from '@/lib/color/photograph-colors'
 import { enqueue } from '@/lib/jobs/queue'
 import { decodePhotograph } from '@/lib/photographs/decode'
+import type { Role } from '@/lib/people/constants'
 import { originalKey } from '@/lib/photographs/keys'
 import { putObject } from '@/lib/storage/objects'
 import { PLACE_ROLES } from '@/lib/combinations/constants'
@@ -29,11 +30,8 @@ export async function seedPhotographs(transaction: Transaction): Promise<void> {
     rejectOnEmpty: true,
     transaction,
   })
-  const designer = await Membership.findOne({
-    where: { brandId, role: 'designer' },
-    rejectOnEmpty: true,
-    transaction,
-  })
+  const members = await Membership.findAll({ where: { brandId }, transaction })
+  const personOf = (by: Role) => members.find(({ role }) => role === by)!.personId
   const shades = await Shade.findAll({
     where: { brandId, lineId: line.id, status: { [Op.ne]: 'retired' } },
     order: [['position', 'ASC']],
@@ -45,8 +43,13 @@ export async function seedPhotographs(transaction: Transaction): Promise<void> {
   }))
 
   for (const demo of demoPhotographs) {
-    const { photograph, cells } = await seedPhotograph(demo, line, designer.personId, transaction)
-    for (const { title, reading } of demoCombinations.filter(
+    const { photograph, cells } = await seedPhotograph(
+      demo,
+      line,
+      personOf('designer'),
+      transaction,
+    )
+    for (const { title, reading, lane, by } of demoCombinations.filter(
       (one) => one.photograph === demo.slug,
     )) {
       const match = matchPhotograph({ cells }, shadesToMatch, reading)
@@ -58,8 +61,9 @@ export async function seedPhotographs(transaction: Transaction): Promise<void> {
           title,
           reading,
           photographId: photograph.id,
-          createdById: designer.personId,
-          rank: await topRank({ brandId, lineId: line.id, lane: 'sketched' }, transaction),
+          createdById: personOf(by),
+          lane,
+          rank: await topRank({ brandId, lineId: line.id, lane }, transaction),
         },
         { transaction },
       )

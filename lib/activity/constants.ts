@@ -1,3 +1,4 @@
+import { LANE_WORDS, type Lane } from '@/lib/combinations/constants'
 import { ROLE_WORDS, type Role } from '@/lib/people/constants'
 
 /** The bounds of what the activity record shows and keeps. */
@@ -30,6 +31,8 @@ const familyShades = ({ after }: Told) =>
     : `${String(after.count)} shades`
 
 const role = (values: Told['after']) => ROLE_WORDS[values.role as Role] ?? 'no role'
+
+const laneWords = (values: Told['after']) => LANE_WORDS[values.lane as Lane] ?? 'no lane'
 
 /** "restoreCombination" → "restore combination". */
 const inWords = (name: unknown) =>
@@ -234,6 +237,18 @@ export const ACTIONS = {
   'combination.kept': {
     label: 'Combination kept',
     says: ({ label }) => `kept the combination ${label}`,
+  },
+  'combination.sketched': {
+    label: 'Combination begun',
+    says: ({ label }) => `began the combination ${label}`,
+  },
+  'combination.moved': {
+    label: 'Combination moved',
+    says: ({ label, before, after }) =>
+      after.lane === before.lane
+        ? `moved the combination ${label} within ${laneWords(after)}`
+        : `moved the combination ${label} from ${laneWords(before)} to ${laneWords(after)}`,
+    saysAll: true,
   },
   'combination.renamed': {
     label: 'Combination renamed',

@@ -6,7 +6,6 @@ export const COMBINATION_LIMITS = {
   story: 1200,
   places: 5,
   search: 80,
-  perPage: 24,
   /** How far the five shares may be from 1 before they are no shares of one thing. */
   shareTolerance: 0.01,
   /** The least share of a place, in percent: less is no band on the card. */
@@ -31,6 +30,9 @@ export const LANE_WORDS: Record<Lane, string> = {
   'short-listed': 'Short-listed',
   chosen: 'Chosen',
 }
+
+/** What a combination is called until somebody gives it a title. */
+export const SKETCH_TITLE = 'A new sketch'
 
 const DRAFT_ENDINGS: Record<ReadingKind, string> = {
   true: 'in five',

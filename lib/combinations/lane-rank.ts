@@ -6,7 +6,8 @@ import { Combination } from '@/models'
 import type { Lane } from './constants'
 
 /**
- * A rank above everything in a lane of a line. The caller holds the board (touchBoard), so that no
+ * A rank above everything in a lane of a line, deleted ones too: they keep theirs for when they come
+ * back. The caller holds the board (touchBoard), so that no
  * two get the same.
  */
 export async function topRank(
@@ -15,6 +16,7 @@ export async function topRank(
 ): Promise<string> {
   const first = await Combination.min<string | null, Combination>('rank', {
     where: { brandId, lineId, lane },
+    paranoid: false,
     transaction,
   })
   return generateKeyBetween(null, first)

@@ -75,3 +75,34 @@ export function presentCombination(
     canDelete: canDeleteCombination(actor),
   }
 }
+
+/** A shade on the board, sent once however many combinations hold it. */
+export interface BoardShade {
+  id: string
+  label: string
+  hex: string
+  familyId: string | null
+}
+
+/** A combination on the board; numbers are indices into the board's lists. */
+export interface BoardCard {
+  id: string
+  title: string
+  lane: Lane
+  /** Top to bottom; null for an empty place. Shares are 0 to 1. */
+  places: [shade: number | null, share: number][]
+  photograph: number | null
+  /** Null when that person's account is gone. */
+  author: number | null
+}
+
+/** A line's board, compact: cards lane by lane, each top to bottom. */
+export interface BoardView {
+  /** Goes up with every change to a combination of the line. */
+  revision: number
+  cards: BoardCard[]
+  shades: BoardShade[]
+  families: { id: string; name: string }[]
+  photographs: { id: string; title: string }[]
+  authors: { id: string; name: string }[]
+}

@@ -1,4 +1,4 @@
-import { literal, Op, where, type Transaction, type WhereOptions } from 'sequelize'
+import type { Transaction, WhereOptions } from 'sequelize'
 import { z } from 'zod'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
@@ -7,8 +7,6 @@ import { getLine } from '@/lib/lines/queries'
 import { Combination, CombinationPlace, Person, Photograph, Shade } from '@/models'
 
 import { canReadCombinations } from './policy'
-import { COMBINATION_LIMITS } from './constants'
-import type { CombinationFilter } from './schema'
 
 /** A combination with its places, shades and photograph, and the name of who kept it. */
 export interface KeptCombination {
@@ -25,47 +23,6 @@ const PLACES = {
   order: [['place', 'ASC']] as [string, string][],
   include: [{ model: Shade, as: 'shade', paranoid: false }],
 }
-
-/**
- * A page of a line's combinations, newest first, of those whose title or one of whose shade names
- * holds the words searched for. Five queries, however many there are.
- */
-export async function listCombinations(
-  actor: Actor,
-  lineSlug: string,
-  { q, page }: CombinationFilter,
-): Promise<{ combinations: KeptCombination[]; total: number }> {
-  authorize(actor, canReadCombinations)
-  const line = await getLine(actor, lineSlug)
-  const inLine: WhereOptions = { brandId: actor.brandId, lineId: line.id }
-  const where =
-    q === '' ? inLine : { [Op.and]: [inLine, { [Op.or]: [titleHolds(q), shadeHolds(q)] }] }
-  const [total, rows] = await Promise.all([
-    Combination.count({ where }),
-    Combination.findAll({
-      where,
-      include: [{ model: Photograph, as: 'photograph' }, PLACES],
-      order: [
-        ['createdAt', 'DESC'],
-        ['id', 'ASC'],
-      ],
-      limit: COMBINATION_LIMITS.perPage,
-      offset: (page - 1) * COMBINATION_LIMITS.perPage,
-    }),
-  ])
-  return { combinations: await withNames(rows), total }
-}
-
-const pattern = (q: string) => `%${q.replace(/[\\%_]/g, '\\$&')}%`
-
-const titleHolds = (q: string) => ({ title: { [Op.iLike]: pattern(q) } })
-
-/** The names of a combination's shades, a line each. */
-const SHADE_NAMES = literal(`(SELECT string_agg(named.name, chr(10)) FROM combination_places AS held
-  JOIN shades AS named ON named.id = held.shade_id
-  WHERE held.combination_id = "Combination"."id")`)
-
-const shadeHolds = (q: string) => where(SHADE_NAMES, { [Op.iLike]: pattern(q) })
 
 async function withNames(rows: Combination[]): Promise<KeptCombination[]> {
   const ids = [...new Set(rows.flatMap(({ createdById }) => createdById ?? []))]

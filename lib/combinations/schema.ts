@@ -2,7 +2,7 @@ import { z } from 'zod'
 
 import { READING_KINDS } from '@/lib/color/readings'
 
-import { COMBINATION_LIMITS, PLACE_ROLES } from './constants'
+import { COMBINATION_LIMITS, LANES, PLACE_ROLES } from './constants'
 
 const title = z
   .string()
@@ -99,10 +99,27 @@ export const combinationIdSchema = z.strictObject({ combinationId: z.uuid() })
 /** A parsed id. */
 export type CombinationIdInput = z.output<typeof combinationIdSchema>
 
-/** The list's address: what is searched for, and which page. Nonsense gives the first page of all. */
-export const combinationFilterSchema = z.object({
-  q: z.string().trim().max(COMBINATION_LIMITS.search).catch(''),
-  page: z.coerce.number().int().min(1).max(10_000).catch(1),
+/** Where on the board a combination goes, and the lane it was seen in. */
+export const moveCombinationSchema = z.strictObject({
+  combinationId: z.uuid(),
+  from: z.enum(LANES),
+  lane: z.enum(LANES),
+  after: z.uuid().nullable(),
+  before: z.uuid().nullable(),
 })
-/** A parsed filter. */
-export type CombinationFilter = z.output<typeof combinationFilterSchema>
+/** A parsed move. */
+export type MoveCombinationInput = z.output<typeof moveCombinationSchema>
+
+/** A combination to begin. */
+export const sketchCombinationSchema = z.strictObject({
+  lineSlug: z.string(),
+  requestKey: z.uuid(),
+})
+/** A parsed beginning. */
+export type SketchCombinationInput = z.output<typeof sketchCombinationSchema>
+
+/** Which board, and the revision of it that is known. */
+export const boardSchema = z.strictObject({
+  line: z.string(),
+  revision: z.coerce.number().int().optional(),
+})

@@ -1,8 +1,7 @@
 import { QueryTypes, type Options } from 'sequelize'
 
 import type { Actor } from '@/lib/auth/actor'
-import { listCombinations } from '@/lib/combinations/queries'
-import { combinationFilterSchema } from '@/lib/combinations/schema'
+import { getBoard } from '@/lib/combinations/get-board'
 import { getLine } from '@/lib/lines/queries'
 import { PHOTOGRAPH_LIMITS } from '@/lib/photographs/constants'
 import { countPhotographs, listPhotographs } from '@/lib/photographs/queries'
@@ -49,8 +48,12 @@ const LISTS: Record<string, Read> = {
     await listPhotographs(actor, line, galleryFilterSchema.parse({}))
     await countPhotographs(actor, line)
   },
-  combinations: (actor, slug) => listCombinations(actor, slug, combinationFilterSchema.parse({})),
+  // The board itself is whole on one page; this is what every open one asks every few seconds.
+  'board, nothing new': (actor, slug) => getBoard(actor, slug, FIRST_REVISION),
 }
+
+/** Of a board on which nobody has moved anything. */
+const FIRST_REVISION = 1
 
 interface Cost {
   ms: number

@@ -85,4 +85,7 @@ export interface DemoCombination {
   /** slug of the photograph */
   photograph: string
   reading: DemoReadingKind
+  lane: 'sketched' | 'short-listed' | 'chosen'
+  /** Who kept it, by role. */
+  by: 'owner' | 'designer'
 }

@@ -125,7 +125,7 @@ test('the five are put in another order by keyboard alone, and a delete is taken
   await page.getByRole('button', { name: 'Delete combination' }).click()
   await expect(page).toHaveURL(/\/combinations$/)
   await expect(page.getByRole('link', { name: 'Low Sun, High Bracken' })).toHaveCount(0)
-  await page.getByRole('button', { name: 'Undo' }).click()
+  await page.getByRole('button', { name: 'Undo', exact: true }).click()
   await expect(page.getByRole('link', { name: 'Low Sun, High Bracken' })).toBeVisible()
 })
 

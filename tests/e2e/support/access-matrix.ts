@@ -118,6 +118,7 @@ export const ROUTES: Record<string, RouteRule> = {
   },
   'GET /api/brands/[brand]/activity.csv': { who: OWNER },
   'GET /api/brands/[brand]/lines/[line]/shades.csv': { who: EVERYBODY },
+  'GET /api/brands/[brand]/lines/[line]/board': { who: STUDIO },
   'GET /api/brands/[brand]/photographs/states': {
     who: STUDIO,
     query: ({ photograph }) => `?ids=${photograph}`,
@@ -365,6 +366,23 @@ export const ACTIONS: Record<string, ActionRule> = {
     }),
   },
 
+  // The submit that kept one, sent as if it had begun it.
+  sketchCombinationAction: {
+    who: EDITORS,
+    input: ({ line, requestKey }) => ({ lineSlug: line, requestKey }),
+  },
+  // Its neighbour is in no lane.
+  moveCombinationAction: {
+    who: EDITORS,
+    input: ({ combination, requestKey }) => ({
+      combinationId: combination,
+      from: 'chosen',
+      lane: 'short-listed',
+      after: requestKey,
+      before: null,
+    }),
+    answer: 'conflict',
+  },
   // Whole, which a marketer may not; the title alone is in combinations.test.ts.
   saveCombinationAction: {
     who: EDITORS,

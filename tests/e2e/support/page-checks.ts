@@ -17,6 +17,8 @@ export const overflowOf = (page: Page): Promise<number> =>
 
 /** Bytes of script, gzipped, that a page may need before it answers. */
 export const SCRIPT_BAR = 200_000
+/** The same of the board, which drags from the start. */
+export const BOARD_SCRIPT_BAR = 260_000
 
 const sizes = new Map<string, number>()
 

@@ -8,14 +8,10 @@ import { deleteCombination } from '@/lib/combinations/delete-combination'
 import { keepCombination } from '@/lib/combinations/keep-combination'
 import { presentCombination } from '@/lib/combinations/present'
 import { openCombination } from '@/lib/combinations/open-combination'
-import { getCombination, getNewerCombination, listCombinations } from '@/lib/combinations/queries'
+import { getCombination, getNewerCombination } from '@/lib/combinations/queries'
 import { restoreCombination } from '@/lib/combinations/restore-combination'
 import { saveCombination } from '@/lib/combinations/save-combination'
-import {
-  combinationFilterSchema,
-  keepCombinationSchema,
-  saveCombinationSchema,
-} from '@/lib/combinations/schema'
+import { keepCombinationSchema, saveCombinationSchema } from '@/lib/combinations/schema'
 import { ConflictError, ForbiddenError, NotFoundError } from '@/lib/errors'
 import { ROLES, type Role } from '@/lib/people/constants'
 import { deleteShades } from '@/lib/shades/delete-shades'
@@ -29,7 +25,6 @@ import { countQueries } from '@/tests/integration/setup/count-queries'
 
 const READERS: readonly Role[] = ['owner', 'marketer', 'designer']
 const KEEPERS: readonly Role[] = ['owner', 'designer']
-const ALL = combinationFilterSchema.parse({})
 
 let ours: Record<Role, Actor>
 let theirs: Record<Role, Actor>
@@ -81,7 +76,6 @@ interface Doing {
   ofOne?: boolean
 }
 const DOINGS: Doing[] = [
-  { name: 'see the list', roles: READERS, do: (a) => listCombinations(a, line.slug, ALL) },
   {
     name: 'open one',
     roles: READERS,
@@ -366,41 +360,5 @@ describe('saving an open combination', () => {
     expect((await line.reload()).boardRevision).toBe(before + 1)
     const newer = await getNewerCombination(ours.owner, combination.id, 1)
     expect(newer?.combination.title).toBe('Fell')
-  })
-})
-
-describe('the list', () => {
-  it('asks the database as often for 50 combinations as for 5', async () => {
-    const lineOf = async (count: number) => {
-      const one = await makeLine({ id: ours.owner.brandId })
-      const six = await makeShades(one, 6)
-      const { personId: createdById } = ours.designer
-      for (let made = 0; made < count; made++) await makeCombination(one, six, { createdById })
-      return one
-    }
-    const [few, many] = [await lineOf(5), await lineOf(50)]
-    const show = (one: Line) => countQueries(() => listCombinations(ours.owner, one.slug, ALL))
-    const [five, fifty] = [await show(few), await show(many)]
-    expect(five.answer.combinations).toHaveLength(5)
-    expect(fifty.answer).toMatchObject({ total: 50, combinations: { length: 24 } })
-    expect(fifty.queries).toBe(five.queries)
-  })
-
-  it('finds by title and by the name of a shade, as written', async () => {
-    const one = await makeLine({ id: ours.owner.brandId })
-    const six = await makeShades(one, 6)
-    await six[3]!.update({ name: 'Fern 50%' })
-    await makeCombination(one, six, { title: 'By the beck' })
-    await makeCombination(one, [...six.slice(4), six[0]!, six[1]!, six[2]!], {
-      title: 'Under_score',
-    })
-    const find = async (q: string) =>
-      (
-        await listCombinations(ours.owner, one.slug, combinationFilterSchema.parse({ q }))
-      ).combinations.map(({ combination }) => combination.title)
-    expect(await find('beck')).toEqual(['By the beck'])
-    expect(await find('fern 50%')).toEqual(['By the beck'])
-    expect(await find('_')).toEqual(['Under_score'])
-    expect(await find("' OR 1=1 --")).toEqual([])
   })
 })

@@ -1,7 +1,6 @@
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 
-import { combinationFilterSchema } from '@/lib/combinations/schema'
 import { GALLERY_MISSING, GALLERY_STATES } from '@/lib/photographs/constants'
 import { galleryFilterSchema, matchParamsSchema } from '@/lib/photographs/schema'
 import { SHADE_SORTS, SHADE_STATUSES } from '@/lib/shades/constants'
@@ -60,16 +59,6 @@ describe('whatever stands in an address, what is sorted and filtered by is one o
         expect([null, ...GALLERY_MISSING]).toContain(filter.missing)
         expect(isPage(filter.page)).toBe(true)
         expect(Object.keys(filter).sort()).toEqual(['missing', 'page', 'q', 'state'])
-      }),
-    )
-  })
-
-  it('among the combinations', () => {
-    fc.assert(
-      fc.property(address('q', 'page', 'x'), (given) => {
-        const filter = combinationFilterSchema.parse(given)
-        expect(isPage(filter.page)).toBe(true)
-        expect(Object.keys(filter).sort()).toEqual(['page', 'q'])
       }),
     )
   })
