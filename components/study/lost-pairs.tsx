@@ -7,7 +7,7 @@ import type { Vision } from '@/lib/color/vision'
 import type { LostShadePair, Told } from '@/lib/shades/present'
 
 import { tableWords } from './near-twins'
-import { ShadeLink, showCount, showNumber, VISION_WORDS } from './study-words'
+import { PairNames, ShadeLink, showCount, showNumber, VISION_WORDS } from './study-words'
 import { TableBehind } from './table-behind'
 
 /** Pairs of one vision that are wound; the others stand in the table. */
@@ -92,12 +92,7 @@ function LostPair({
         />
       </div>
       <div className="min-w-24 grow basis-24">
-        <p className="font-title leading-snug break-words">
-          <ShadeLink place={place} shade={first} />
-          <span className="sr-only"> and</span>
-          <br />
-          <ShadeLink place={place} shade={second} />
-        </p>
+        <PairNames {...{ place, first, second }} />
         <p className="mt-0.5 text-sm text-ink-soft">
           ΔE00 {showNumber(deltaE)} → {showNumber(seenDeltaE)}
         </p>

@@ -7,7 +7,7 @@ import { WrapCard } from '@/components/yarn/wrap-card'
 import { STUDY_LIMITS } from '@/lib/shades/constants'
 import type { ShadePair, Told } from '@/lib/shades/present'
 
-import { ShadeLink, showCount, showNumber } from './study-words'
+import { PairNames, ShadeLink, showCount, showNumber } from './study-words'
 import { TableBehind } from './table-behind'
 
 /** Pairs that are wound; the others stand in the table. */
@@ -69,12 +69,7 @@ export function NearTwins({
                 className="w-20 shrink-0"
               />
               <div className="min-w-0">
-                <p className="font-title leading-snug break-words">
-                  <ShadeLink place={place} shade={first} />
-                  <span className="sr-only"> and</span>
-                  <br />
-                  <ShadeLink place={place} shade={second} />
-                </p>
+                <PairNames {...{ place, first, second }} />
                 <p className="mt-0.5 text-sm text-ink-soft">ΔE00 {showNumber(deltaE)}</p>
               </div>
             </li>

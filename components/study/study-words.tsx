@@ -24,6 +24,38 @@ export const VISION_WORDS: Record<Vision, { name: string; lacks: string }> = {
 }
 
 /** A shade by its name, which leads to its page. */
-export function ShadeLink({ place, shade }: { place: LinePlace; shade: ShadeView }) {
-  return <TextLink href={shadesHref(place, `/${shade.id}`)}>{shade.label}</TextLink>
+export function ShadeLink({
+  place,
+  shade,
+  className,
+}: {
+  place: LinePlace
+  shade: ShadeView
+  className?: string
+}) {
+  return (
+    <TextLink href={shadesHref(place, `/${shade.id}`)} className={className}>
+      {shade.label}
+    </TextLink>
+  )
+}
+
+/** The names of a pair, one under the other, each tall enough for a finger. */
+export function PairNames({
+  place,
+  first,
+  second,
+}: {
+  place: LinePlace
+  first: ShadeView
+  second: ShadeView
+}) {
+  const name = 'block w-fit py-0.5 leading-5 break-words pointer-coarse:py-1.5'
+  return (
+    <p className="font-title">
+      <ShadeLink place={place} shade={first} className={name} />
+      <span className="sr-only"> and </span>
+      <ShadeLink place={place} shade={second} className={name} />
+    </p>
+  )
 }
