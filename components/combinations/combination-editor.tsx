@@ -39,8 +39,12 @@ import {
   type SaveCombination,
 } from './use-combination-editor'
 
-// The page answers before its cloth is drawn.
+// Cloth and help are drawn after the page: they need the most script, and not at once.
 const AsCloth = dynamic(() => import('@/components/yarn/as-cloth').then((it) => it.AsCloth))
+const HelpTabs = dynamic(() => import('@/components/help/help-tabs').then((it) => it.HelpTabs))
+const ClashNotes = dynamic(() =>
+  import('@/components/help/clash-notes').then((it) => it.ClashNotes),
+)
 // Only those whom somebody overtook need it.
 const ConflictNotice = dynamic(() => import('./conflict-notice').then((it) => it.ConflictNotice))
 
@@ -113,6 +117,7 @@ export function CombinationEditor(props: CombinationEditorProps) {
     const shade = shadeOf(shadeId)
     return shade ? [{ color: shade.hex, share, name: shade.label }] : []
   })
+  const photograph = photographs.find((one) => one.id === draft.photographId)
   const placeOf = (shadeId: string) => draft.places.findIndex((one) => one.shadeId === shadeId)
   const heldShade = held && shadeOf(shadeIdOf(held))
   const heldFrom = held ? (held.kind === 'place' ? held.place : placeOf(held.shadeId)) : -1
@@ -392,6 +397,26 @@ export function CombinationEditor(props: CombinationEditorProps) {
                   share: each is at least {LEAST_PERCENT} %, together they are always 100 %.
                 </p>
               ) : null}
+            </section>
+            <section aria-label="Help" className="print:hidden">
+              {canEdit ? (
+                <HelpTabs
+                  places={draft.places}
+                  shades={shades}
+                  shadeOf={shadeOf}
+                  photograph={photograph ?? null}
+                  matchUrl={
+                    photograph ? `/api/brands/${brand}/photographs/${photograph.id}/match` : null
+                  }
+                  onComplete={(shadeIds, words) => edit({ kind: 'complete', shadeIds }, words)}
+                  onExchange={(place, shadeId) => {
+                    const words = `${nameOf(shadeId)}, ${placeInWords(place)}.`
+                    edit({ kind: 'place', place, shadeId }, words)
+                  }}
+                />
+              ) : (
+                <ClashNotes places={draft.places} shadeOf={shadeOf} />
+              )}
             </section>
             <p className="hidden max-w-measure whitespace-pre-line print:block">{draft.story}</p>
             {canEdit ? (

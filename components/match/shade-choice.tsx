@@ -8,10 +8,13 @@ import type { MatchShadeView } from './types'
 export function ShadeChoice({
   shade,
   deltaE,
+  note,
   children,
 }: {
   shade: MatchShadeView
   deltaE: number
+  /** What more is said of it. */
+  note?: ReactNode
   children: ReactNode
 }) {
   return (
@@ -23,6 +26,7 @@ export function ShadeChoice({
           {shade.name ? `No. ${shade.number} · ` : ''}
           <span className="whitespace-nowrap">ΔE00 {deltaE.toFixed(1)}</span>
         </span>
+        {note ? <span className="flex flex-col">{note}</span> : null}
       </span>
       <span className="flex shrink-0 gap-1 max-[23rem]:w-full">{children}</span>
     </li>
