@@ -19,8 +19,12 @@ export const zones = [
   zone('logger', 'lib/logger.ts'),
   zone('schema', ['lib/*/schema.ts', 'lib/*/{constants,formats,wishes}.ts']),
   zone('present', 'lib/*/present.ts', { more: true }),
+  // What goes out in a kit, from a description and nothing else.
+  zone('exports', 'lib/exports/**'),
   zone('noun', 'lib/*/**'),
   zone('models', 'models/**'),
+  // How yarn is drawn, as figures: what React, an SVG file and a PDF draw alike.
+  zone('drawing', 'components/yarn/*.ts'),
   zone('components', 'components/**'),
   // A file of lib/ that the table does not know may neither import nor be imported.
   zone('unplaced', 'lib/*'),
@@ -57,8 +61,16 @@ export const importTable = {
     from('schema', local('schema', 'color'), packages('zod')),
     from(
       'noun',
-      local(...DOMAIN, ...FOUNDATION, 'auth', 'storage', 'jobs'),
+      local(...DOMAIN, ...FOUNDATION, 'auth', 'storage', 'jobs', 'exports'),
       anyPackageBut(...NEXT, 'react', 'react-dom'),
+      node(),
+    ),
+
+    from('drawing', local('drawing', 'color')),
+    from(
+      'exports',
+      local('exports', 'drawing', 'color', 'schema', 'noun'),
+      packages('fontkit', 'pdfkit', 'fflate', 'sharp'),
       node(),
     ),
 
@@ -74,13 +86,13 @@ export const importTable = {
 
     from(
       'components',
-      local('components', 'color', 'schema'),
+      local('components', 'drawing', 'color', 'schema'),
       types('present', 'errors'),
       anyPackage(),
     ),
     from(
       'app',
-      local('app', 'noun', 'schema', 'present', 'auth', 'server', 'components'),
+      local('app', 'noun', 'schema', 'present', 'auth', 'server', 'components', 'drawing'),
       anyPackageBut('sequelize', 'pg', 'pg-boss'),
     ),
   ],

@@ -1,4 +1,5 @@
-import { Threads, type ThreadBlock } from './threads'
+import type { ThreadBlock } from './thread-strokes'
+import { Threads } from './threads'
 
 /** How large a sample is drawn: in a ledger row, in a picker, alone. */
 export type SampleSize = 'row' | 'card' | 'large'
