@@ -9,14 +9,28 @@ import {
 import { idColumn } from './columns'
 import { sequelize } from './sequelize'
 
-/** A combination that a kit holds, as it was called when the kit was built. */
+/** A picture of a kit, and where its bytes lie within the zip, which stores it as it is. */
+export interface KitPicture {
+  width: number
+  height: number
+  offset: number
+  byteLength: number
+}
+
+/** A combination that a kit holds, as it was called when the kit was built, with its texts. */
 export interface KitEntry {
   id: string
   title: string
+  alt: string
+  caption: string
+  html: string
+  pictures: KitPicture[]
 }
 
 /** A combination that was asked for and is not in the kit, with the reasons in words. */
-export interface KitLeftOut extends KitEntry {
+export interface KitLeftOut {
+  id: string
+  title: string
   reasons: string[]
 }
 

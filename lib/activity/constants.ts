@@ -30,6 +30,9 @@ const familyShades = ({ after }: Told) =>
     ? `the shade ${String((after.named as string[])[0])}`
     : `${String(after.count)} shades`
 
+const combinationsOf = ({ count }: Told['after']) =>
+  count === 1 ? 'one combination' : `${String(count)} combinations`
+
 const role = (values: Told['after']) => ROLE_WORDS[values.role as Role] ?? 'no role'
 
 const laneWords = (values: Told['after']) => LANE_WORDS[values.lane as Lane] ?? 'no lane'
@@ -266,6 +269,21 @@ export const ACTIONS = {
     label: 'Combination brought back',
     says: ({ label }) => `brought back the combination ${label}`,
   },
+  'kit.requested': {
+    label: 'Kit asked for',
+    says: ({ label, after }) => `asked for a kit of ${combinationsOf(after)} of ${label}`,
+    saysAll: true,
+  },
+  'kit.downloaded': {
+    label: 'Kit downloaded',
+    says: ({ label, after }) => `took away a kit of ${combinationsOf(after)} of ${label}`,
+    saysAll: true,
+  },
+  'kit.deleted': {
+    label: 'Kit deleted',
+    says: ({ label, before }) => `deleted a kit of ${combinationsOf(before)} of ${label}`,
+    saysAll: true,
+  },
 } as const satisfies Record<`${string}.${string}`, ActionWords>
 /** One of ACTIONS: the noun and what happened to it. */
 export type ActivityAction = keyof typeof ACTIONS
@@ -283,6 +301,7 @@ export const ACTIVITY_KINDS = {
   family: 'Tonal families',
   photograph: 'Photographs',
   combination: 'Combinations',
+  kit: 'Kits',
 } as const satisfies Record<KindOf<ActivityAction>, string>
 /** One of ACTIVITY_KINDS. */
 export type ActivityKind = keyof typeof ACTIVITY_KINDS

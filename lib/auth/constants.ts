@@ -16,6 +16,7 @@ export const RATE_LIMITS = {
   /** By brand. */
   invitation: { points: 30, duration: HOUR },
   upload: { points: 600, duration: HOUR },
+  kit: { points: 40, duration: HOUR },
   /** Lines of the activity record about the same person refused the same thing. */
   refusal: { points: 1, duration: MINUTE },
   /** Those about the same person, whatever it was. */

@@ -1,8 +1,10 @@
+import { sweepKits } from '@/lib/kits/sweep'
 import { sendLetter, sendLetters } from '@/lib/mail/send-letters'
 import { sweepPeople } from '@/lib/people/sweep'
 import { copyPhotograph } from '@/lib/photographs/read-photograph'
 import { sweepUploads } from '@/lib/photographs/sweep'
 
+import { buildKitJob } from './build-kit.job'
 import type { JobData, JobName } from './queue'
 import { readPhotographJob } from './read-photograph.job'
 
@@ -20,6 +22,8 @@ export const HANDLERS: { [Name in JobName]: JobHandler<Name> } = {
   'send-letter': ({ letterId }) => sendLetter(letterId),
   'send-letters': () => sendLetters(),
   'sweep-people': () => sweepPeople(),
+  'build-kit': buildKitJob,
+  'sweep-kits': () => sweepKits(),
 }
 
 /** When the jobs that nobody asks for are done. @see crontab(5) */
@@ -27,4 +31,5 @@ export const SCHEDULES: Partial<Record<JobName, string>> = {
   'sweep-uploads': '*/5 * * * *',
   'send-letters': '* * * * *',
   'sweep-people': '17 * * * *',
+  'sweep-kits': '*/15 * * * *',
 }

@@ -14,6 +14,8 @@ export interface JobData {
   'send-letter': { letterId: string }
   'send-letters': Record<string, never>
   'sweep-people': Record<string, never>
+  'build-kit': { kitId: string }
+  'sweep-kits': Record<string, never>
 }
 /** One of the queues. */
 export type JobName = keyof JobData
@@ -32,6 +34,8 @@ export const QUEUES: Record<
   'send-letter': { retryLimit: 3, retryDelay: 5, expireInSeconds: 60 },
   'send-letters': { retryLimit: 0, retryDelay: 0, expireInSeconds: 300 },
   'sweep-people': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
+  'build-kit': { retryLimit: 3, retryDelay: 2, expireInSeconds: 120 },
+  'sweep-kits': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
 }
 
 // Never started and never connected: it only words the insert, which runs in our transaction.

@@ -3,6 +3,7 @@ import { literal, type ProjectionAlias, type Transaction } from 'sequelize'
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { canReadCombinations } from '@/lib/combinations/policy'
 import { NotFoundError } from '@/lib/errors'
+import { canReadKits } from '@/lib/kits/policy'
 import { canReadPhotographs } from '@/lib/photographs/policy'
 import { Line, Shade } from '@/models'
 
@@ -70,10 +71,20 @@ const CHAPTERS = {
     count: literal(`(SELECT count(*)::int FROM combinations c
       WHERE c.brand_id = "Line".brand_id AND c.line_id = "Line".id AND c.deleted_at IS NULL)`),
   },
+  kits: {
+    opens: canReadKits,
+    count: literal(`(SELECT count(*)::int FROM kits c
+      WHERE c.brand_id = "Line".brand_id AND c.line_id = "Line".id)`),
+  },
 }
 
 /** How many rows stand in a chapter; a chapter that the role may not open is left out. */
-export type ChapterCounts = { shades: number; photographs?: number; combinations?: number }
+export type ChapterCounts = {
+  shades: number
+  photographs?: number
+  combinations?: number
+  kits?: number
+}
 
 /** The names and addresses of all the brand's lines, for the switch between them. */
 const SIBLINGS =

@@ -9,6 +9,7 @@ import {
   S3Client,
 } from '@aws-sdk/client-s3'
 import { createPresignedPost, type PresignedPost } from '@aws-sdk/s3-presigned-post'
+import { getSignedUrl } from '@aws-sdk/s3-request-presigner'
 
 import { env } from '@/lib/env'
 import { UnavailableError } from '@/lib/errors'
@@ -109,6 +110,48 @@ export async function getObject(key: string): Promise<Buffer | null> {
     if (isMissing(error)) return null
     throw error
   }
+}
+
+/**
+ * A part of a stored object, or null when there is none.
+ * @param part from its first byte on @throws UnavailableError
+ */
+export async function getObjectPart(
+  key: string,
+  { offset, byteLength }: { offset: number; byteLength: number },
+): Promise<Buffer | null> {
+  const Range = `bytes=${offset}-${offset + byteLength - 1}`
+  try {
+    return await ask(async (store, Bucket) => {
+      const { Body } = await store.send(new GetObjectCommand({ Bucket, Key: key, Range }))
+      return Buffer.from(await Body!.transformToByteArray())
+    })
+  } catch (error) {
+    if (isMissing(error)) return null
+    throw error
+  }
+}
+
+/**
+ * An address from which whoever has it can fetch one object, as a file of a name, for some seconds.
+ * Nothing is sent to the store, so this answers even when the store is away.
+ */
+export function presignDownload(object: {
+  key: string
+  fileName: string
+  seconds: number
+}): Promise<string> {
+  const { S3_PUBLIC_ENDPOINT, S3_ENDPOINT, S3_BUCKET } = env()
+  const command = new GetObjectCommand({
+    Bucket: S3_BUCKET,
+    Key: object.key,
+    ResponseContentDisposition: `attachment; filename="${object.fileName}"`,
+    ResponseContentType: 'application/zip',
+    ResponseCacheControl: 'private, no-store',
+  })
+  return getSignedUrl(client(S3_PUBLIC_ENDPOINT ?? S3_ENDPOINT), command, {
+    expiresIn: object.seconds,
+  })
 }
 
 /** Stores an object, replacing one of the same key. @throws UnavailableError */

@@ -95,7 +95,10 @@ export async function keysOfRows(client: pg.Client): Promise<string[]> {
     `SELECT id, brand_id AS "brandId", object_key AS "objectKey", sha256, derivatives
      FROM photographs WHERE state <> 'pending'`,
   )
-  return rows.flatMap(objectKeysOf)
+  const kits = await client.query<{ objectKey: string }>(
+    `SELECT object_key AS "objectKey" FROM kits WHERE object_key IS NOT NULL`,
+  )
+  return [...rows.flatMap(objectKeysOf), ...kits.rows.map(({ objectKey }) => objectKey)]
 }
 
 /** Whether the database holds no table, view or sequence of anybody's. */
