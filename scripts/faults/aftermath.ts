@@ -43,11 +43,13 @@ export async function findDamage(world: World): Promise<string[]> {
     { sweepUploads },
     { listObjects },
     { derivativeKey, DERIVATIVES, ORIGINALS },
-    { Photograph },
+    { KITS },
+    { Kit, Photograph },
   ] = await Promise.all([
     import('@/lib/photographs/sweep'),
     import('@/lib/storage/objects'),
     import('@/lib/photographs/keys'),
+    import('@/lib/kits/keys'),
     import('@/models'),
   ])
   await settled(world)
@@ -64,14 +66,16 @@ export async function findDamage(world: World): Promise<string[]> {
     damage.push(`a second sweep still found ${JSON.stringify(again)}`)
   }
   const rows = await Photograph.findAll({ paranoid: false })
-  const wanted = new Set(
-    rows.flatMap((row) => [
+  const kits = await Kit.findAll({ attributes: ['objectKey'] })
+  const wanted = new Set([
+    ...rows.flatMap((row) => [
       row.objectKey,
       ...row.derivatives.map((copy) => derivativeKey(row, copy)),
     ]),
-  )
+    ...kits.flatMap(({ objectKey }) => objectKey ?? []),
+  ])
   const stored = new Set<string>()
-  for (const prefix of [ORIGINALS, DERIVATIVES]) {
+  for (const prefix of [ORIGINALS, DERIVATIVES, KITS]) {
     for await (const { key } of listObjects(prefix)) stored.add(key)
   }
   const orphans = [...stored].filter((key) => !wanted.has(key))

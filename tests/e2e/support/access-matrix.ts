@@ -101,6 +101,8 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]/photographs/[photograph]': { who: STUDIO },
   '/[brand]/lines/[line]/combinations': { who: STUDIO },
   '/[brand]/lines/[line]/combinations/[combination]': { who: STUDIO },
+  '/[brand]/lines/[line]/kits': { who: STUDIO },
+  '/[brand]/lines/[line]/kits/[kit]': { who: STUDIO },
 }
 
 /** Every method of every route. HEAD answers as GET does, which the test asks as well. */
@@ -132,6 +134,15 @@ export const ROUTES: Record<string, RouteRule> = {
     query: () => '?reading=true',
   },
   'GET /api/brands/[brand]/photographs/[photograph]/derivatives/[name]': { who: STUDIO },
+  'GET /api/brands/[brand]/kits/states': {
+    who: STUDIO,
+    query: ({ kit }) => `?ids=${kit}`,
+    // Kits that are not there are left out of its list.
+    unknown: 200,
+  },
+  // Expired, it leads nowhere and records nothing.
+  'GET /api/brands/[brand]/kits/[kit]/download': { who: STUDIO, answer: 409 },
+  'GET /api/brands/[brand]/kits/[kit]/pictures/[picture]': { who: STUDIO, answer: 404 },
   'POST /api/brands/[brand]/photographs': {
     who: EDITORS,
     // A file that the line has already is not sent again.
@@ -412,6 +423,26 @@ export const ACTIONS: Record<string, ActionRule> = {
   restoreCombinationAction: {
     who: EDITORS,
     input: ({ combination }) => ({ combinationId: combination }),
+  },
+
+  // The submit that asked for it, sent again.
+  requestKitAction: {
+    who: STUDIO,
+    input: ({ line, combination, requestKey }) => ({
+      lineSlug: line,
+      combinationIds: [combination],
+      requestKey,
+    }),
+  },
+  deleteKitAction: {
+    who: STUDIO,
+    input: ({ spareKit }) => ({ kitId: spareKit }),
+    before: ({ kit, spareKit }) => [
+      `INSERT INTO kits (id, brand_id, line_id, state, selection)
+       SELECT $2, brand_id, line_id, 'failed', selection FROM kits WHERE id = $1
+       ON CONFLICT DO NOTHING`,
+      [kit, spareKit],
+    ],
   },
 }
 

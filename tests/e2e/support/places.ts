@@ -35,10 +35,25 @@ export interface Place {
   requestKey: string
   /** A combination to delete. */
   spareCombination: string
+  /** Built once of the combination, and expired since. */
+  kit: string
+  /** The name of one of the kit's pictures. */
+  picture: string
+  /** A kit to delete; its row is made when it is wanted. */
+  spareKit: string
 }
 
 /** The fields of a place that name a row by its id. */
-const IDS = ['shade', 'photograph', 'waiting', 'spare', 'pending', 'combination'] as const
+const IDS = [
+  'shade',
+  'photograph',
+  'waiting',
+  'spare',
+  'pending',
+  'combination',
+  'kit',
+  'spareKit',
+] as const
 
 /** A place of the brand whose rows are another place's. */
 export function withRowsOf(other: Place, own: Place): Place {
@@ -171,6 +186,12 @@ export async function makePlace(
      FROM unnest($3::uuid[]) WITH ORDINALITY AS five (shade_id, place)`,
     [brand_id, combination, five],
   )
+  const kit = randomUUID()
+  await client.query(
+    `INSERT INTO kits (id, brand_id, line_id, state, selection, request_key, expires_at)
+     VALUES ($1, $2, $3, 'ready', $4, $5, now() - interval '1 day')`,
+    [kit, brand_id, line_id, JSON.stringify([combination]), requestKey],
+  )
   const owner = await client.query(
     `SELECT email FROM people JOIN memberships ON person_id = people.id
      WHERE brand_id = $1 AND role = 'owner' ORDER BY people.created_at, people.id LIMIT 1`,
@@ -196,6 +217,9 @@ export async function makePlace(
     combination,
     requestKey,
     spareCombination: await addCombination(`Spared with ${line_name}`, randomUUID()),
+    kit,
+    picture: `${combination}-1080x1080.png`,
+    spareKit: randomUUID(),
   }
 }
 
@@ -203,8 +227,9 @@ export async function makePlace(
 export async function clearPlace(
   client: pg.Client,
   models: Models,
-  { photograph, waiting, spare, pending, combination, spareCombination }: Place,
+  { photograph, waiting, spare, pending, combination, spareCombination, kit, spareKit }: Place,
 ): Promise<void> {
+  await client.query('DELETE FROM kits WHERE id = ANY ($1)', [[kit, spareKit]])
   await client.query('DELETE FROM combinations WHERE id = ANY ($1)', [
     [combination, spareCombination],
   ])
