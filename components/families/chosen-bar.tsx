@@ -47,15 +47,20 @@ export function ChosenBar({
       className="sticky bottom-0 z-20 mt-4 border border-rule bg-paper px-4 py-3 print:hidden"
     >
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2">
-        <p className="font-medium">{shadesInWords(shades.length)} chosen</p>
+        <p className="grow font-medium sm:grow-0">{shadesInWords(shades.length)} chosen</p>
+        <div className="flex">
+          <IconButton label="Pin shades" icon={<Pin />} onClick={() => onPin(true)} />
+          <IconButton label="Unpin shades" icon={<PinOff />} onClick={() => onPin(false)} />
+          <IconButton label="Choose none" icon={<X />} onClick={onClear} />
+        </div>
         <form
-          className="flex min-w-0 grow flex-wrap items-center gap-2"
+          className="flex min-w-0 grow items-center gap-2 max-sm:w-full sm:justify-end"
           onSubmit={(event) => {
             event.preventDefault()
             if (isTarget && !pending) onMove(target === NEW ? null : target)
           }}
         >
-          <Field hideLabel label="Family to move them to" className="min-w-44 grow sm:max-w-64">
+          <Field hideLabel label="Family to move them to" className="min-w-0 grow sm:max-w-64">
             <Select
               value={isTarget ? target : ''}
               onChange={(event) => setTarget(event.target.value)}
@@ -69,15 +74,16 @@ export function ChosenBar({
               <option value={NEW}>A new family</option>
             </Select>
           </Field>
-          <Button type="submit" variant="primary" disabled={!isTarget} pending={pending}>
+          <Button
+            type="submit"
+            variant="primary"
+            className="shrink-0"
+            disabled={!isTarget}
+            pending={pending}
+          >
             Move shades
           </Button>
         </form>
-        <div className="flex">
-          <IconButton label="Pin shades" icon={<Pin />} onClick={() => onPin(true)} />
-          <IconButton label="Unpin shades" icon={<PinOff />} onClick={() => onPin(false)} />
-          <IconButton label="Choose none" icon={<X />} onClick={onClear} />
-        </div>
       </div>
     </div>
   )

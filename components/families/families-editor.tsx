@@ -25,7 +25,6 @@ import { EmptyState } from '@/components/ui/states'
 import { Ground } from '@/components/yarn/ground'
 import type { FamilyWithShades } from '@/lib/families/present'
 
-import { ChosenBar } from './chosen-bar'
 import {
   shadesInWords,
   withMovedShades,
@@ -33,10 +32,11 @@ import {
   type FamiliesRights,
 } from './families-actions'
 import { CarriedTile, FamilyTile, StillTile } from './family-tile'
-import { FamilyTools } from './family-tools'
 import { useFamilies } from './use-families'
 
-// Only those who order the shades of a family need what sorts.
+// What is opened by a press comes with it.
+const FamilyTools = dynamic(() => import('./family-tools').then((it) => it.FamilyTools))
+const ChosenBar = dynamic(() => import('./chosen-bar').then((it) => it.ChosenBar))
 const OrderShades = dynamic(() => import('./order-shades').then((it) => it.OrderShades))
 const SortDialog = dynamic(() => import('./sort-dialog').then((it) => it.SortDialog))
 
@@ -78,6 +78,7 @@ export function FamiliesEditor({
   )
   const [chosen, setChosen] = useState<ReadonlySet<string>>(new Set())
   const [open, setOpen] = useState<{ familyId: string; what: 'tools' | 'order' }>()
+  const [sorting, setSorting] = useState(false)
   const [carried, setCarried] = useState<string>()
   const bar = useRef<HTMLDivElement>(null)
   const sensors = useSensors(
@@ -220,7 +221,10 @@ export function FamiliesEditor({
               }}
             />
           ) : (
-            <ul role="list" className="-m-1.5 flex flex-wrap gap-x-2 gap-y-3">
+            <ul
+              role="list"
+              className="-m-1.5 grid grid-cols-[repeat(auto-fill,minmax(6rem,1fr))] gap-x-1 gap-y-2 sm:grid-cols-[repeat(auto-fill,minmax(6.75rem,1fr))]"
+            >
               {family.shades.map((shade) => (
                 <li key={shade.id}>
                   {can.edit ? (
@@ -231,9 +235,7 @@ export function FamiliesEditor({
                       onKey={(event) => onTileKey(event, shade.id)}
                     />
                   ) : (
-                    <div className="p-1.5">
-                      <StillTile shade={shade} />
-                    </div>
+                    <StillTile shade={shade} />
                   )}
                 </li>
               ))}
@@ -254,7 +256,19 @@ export function FamiliesEditor({
             Drag a shade to another family, or press shades to choose them and then say where they
             go.
           </p>
-          <SortDialog place={place} count={count} actions={actions} edit={edit} />
+          <Button aria-haspopup="dialog" onClick={() => setSorting(true)}>
+            Sort anew
+          </Button>
+          {sorting ? (
+            <SortDialog
+              place={place}
+              version={version}
+              count={count}
+              actions={actions}
+              edit={edit}
+              onClose={() => setSorting(false)}
+            />
+          ) : null}
         </div>
       ) : null}
       {unplaced > 0 ? (

@@ -30,8 +30,8 @@ function TileWords({ shade }: { shade: ShadeView }) {
 /** A shade in its family, only to be looked at. */
 export function StillTile({ shade }: { shade: ShadeView }) {
   return (
-    <div className="w-24">
-      <WoundSample hex={shade.hex} />
+    <div className="p-1.5">
+      <WoundSample hex={shade.hex} className="h-auto max-w-full" />
       <TileWords shade={shade} />
     </div>
   )
@@ -59,12 +59,12 @@ export function FamilyTile({
       onClick={onChoose}
       onKeyDown={onKey}
       className={cn(
-        'relative block w-28 touch-manipulation scroll-mb-40 rounded border-2 p-1.5 text-left',
+        'relative block size-full touch-manipulation scroll-mb-40 rounded border-2 p-1.5 text-left',
         chosen ? 'border-woad bg-wash' : 'border-transparent hover:border-hairline',
         isDragging && 'opacity-40',
       )}
     >
-      <WoundSample hex={shade.hex} />
+      <WoundSample hex={shade.hex} className="h-auto max-w-full" />
       {chosen ? (
         <span className="absolute top-1 right-1 inline-flex size-5 items-center justify-center rounded bg-woad text-on-woad">
           <Check aria-hidden="true" className="size-3.5" strokeWidth={3} />

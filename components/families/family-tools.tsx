@@ -76,7 +76,7 @@ export function FamilyTools({
   }
 
   return (
-    <div className="mb-4 grid gap-4 border-y border-hairline py-4 sm:grid-cols-2">
+    <div className="mb-4 grid gap-4 border-y border-hairline py-4 xl:grid-cols-2">
       <form className="flex items-end gap-2" onSubmit={(event) => void rename(event)}>
         <Field label="Name" error={error} className="min-w-0 grow">
           <Input
@@ -99,7 +99,7 @@ export function FamilyTools({
           <form className="flex items-end gap-2" onSubmit={(event) => void merge(event)}>
             <Field label="Put all its shades into" className="min-w-0 grow">
               <Select value={into} onChange={(event) => setInto(event.target.value)}>
-                <option value="">Choose a family…</option>
+                <option value="">Choose…</option>
                 {others.map((other) => (
                   <option key={other.id} value={other.id}>
                     {other.name}
@@ -111,7 +111,7 @@ export function FamilyTools({
               Merge families
             </Button>
           </form>
-          <div className="flex flex-wrap gap-2 sm:col-span-2">
+          <div className="flex flex-wrap gap-2 xl:col-span-2">
             <Button
               disabled={family.shades.length < 2}
               onClick={() =>

@@ -1,6 +1,7 @@
 'use client'
 
 import { useState } from 'react'
+import useSWR from 'swr'
 
 import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
@@ -24,31 +25,32 @@ const COUNTS = Array.from(
 /** Sorts all shades anew, after it has shown what would change. */
 export function SortDialog({
   place,
+  version,
   count,
   actions,
   edit,
+  onClose,
 }: {
   place: { brand: string; lineSlug: string }
+  /** Of the families as they are shown. */
+  version: number
   /** How many families were asked for last; null left it open. */
   count: number | null
   actions: Pick<FamiliesActions, 'preview' | 'sort'>
   edit: SendEdit
+  onClose: () => void
 }) {
   const { brand, lineSlug } = place
-  const [open, setOpen] = useState(false)
   const [wished, setWished] = useState(count)
-  const [preview, setPreview] = useState<SortPreview>()
-  const [problem, setProblem] = useState<string>()
+  const [refusal, setRefusal] = useState<string>()
   const [sorting, setSorting] = useState(false)
-
-  async function look(next: number | null) {
-    setWished(next)
-    setPreview(undefined)
-    setProblem(undefined)
-    const answer = await reach(actions.preview(brand, { lineSlug, count: next }))
-    if (answer.ok) setPreview(answer.data)
-    else setProblem(answer.message)
-  }
+  const { data: looked, mutate: lookAgain } = useSWR(
+    ['what sorting would change', place, version, wished],
+    () => reach(actions.preview(brand, { lineSlug, count: wished })),
+    { revalidateOnFocus: false },
+  )
+  const preview = looked?.ok ? looked.data : undefined
+  const problem = refusal ?? (looked?.ok === false ? looked.message : undefined)
 
   async function sort() {
     if (!preview) return
@@ -60,23 +62,20 @@ export function SortDialog({
       quiet: true,
     })
     setSorting(false)
-    if (answer.ok) setOpen(false)
-    else setProblem(answer.message)
+    if (answer.ok) return onClose()
+    setRefusal(answer.message)
+    void lookAgain()
   }
 
   return (
     <Dialog
       title="Sort shades anew"
       description="Look at what changes before you sort. It can be taken back right after."
-      open={open}
-      onOpenChange={(opens) => {
-        setOpen(opens)
-        if (opens) void look(count)
-      }}
-      trigger={<Button>Sort anew</Button>}
+      open
+      onOpenChange={onClose}
       footer={
         <>
-          <Button onClick={() => setOpen(false)}>Leave them as they are</Button>
+          <Button onClick={onClose}>Leave them as they are</Button>
           <Button
             variant="primary"
             disabled={!preview}
@@ -93,9 +92,10 @@ export function SortDialog({
         <Field label="Hue families" hint="Neutrals stand apart and are not counted.">
           <Select
             value={wished ?? SUITS}
-            onChange={({ target }) =>
-              void look(target.value === SUITS ? null : Number(target.value))
-            }
+            onChange={({ target }) => {
+              setRefusal(undefined)
+              setWished(target.value === SUITS ? null : Number(target.value))
+            }}
           >
             <option value={SUITS}>As many as suit the line</option>
             {COUNTS.map((number) => (

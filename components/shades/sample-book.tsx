@@ -29,7 +29,7 @@ export function SampleBook({ place, groups }: { place: LinePlace; groups: readon
           <section
             key={id}
             aria-label={heading}
-            className="gap-x-6 border-b border-hairline py-5 first:pt-0 last:border-b-0 last:pb-0 lg:grid lg:grid-cols-[7.5rem_minmax(0,1fr)] print:grid print:grid-cols-[7rem_minmax(0,1fr)] print:py-4"
+            className="gap-x-6 border-b border-hairline py-5 first:pt-0 last:border-b-0 last:pb-0 lg:grid lg:grid-cols-[7rem_minmax(0,1fr)] print:grid print:grid-cols-[7rem_minmax(0,1fr)] print:py-4"
           >
             <div className="mb-3 lg:mb-0 print:mb-0">
               <h2 className="text-lg">{heading}</h2>
@@ -50,7 +50,7 @@ function Samples({ place, shades }: { place: LinePlace; shades: readonly ShadeVi
   return (
     <ul
       role="list"
-      className="grid grid-cols-[repeat(auto-fill,minmax(7rem,1fr))] gap-x-4 gap-y-6 sm:grid-cols-[repeat(auto-fill,minmax(9.25rem,1fr))] sm:gap-x-5 print:grid-cols-[repeat(auto-fill,minmax(6.5rem,1fr))] print:gap-x-4 print:gap-y-4"
+      className="grid grid-cols-[repeat(auto-fill,minmax(7rem,1fr))] gap-x-4 gap-y-6 sm:grid-cols-[repeat(auto-fill,minmax(8.25rem,1fr))] sm:gap-x-4 print:grid-cols-[repeat(auto-fill,minmax(6.5rem,1fr))] print:gap-x-4 print:gap-y-4"
     >
       {shades.map((shade) => (
         <li key={shade.id} className="min-w-0">

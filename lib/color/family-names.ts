@@ -34,20 +34,24 @@ export interface NamedColors {
   labs: readonly Lab[]
 }
 
-/** A second term is named too from this share of the shades on. */
+/** A second term is named too from this share of the family's chroma on. */
 const SECOND_SHARE = 1 / 3
 
-/** What the shades of a family are called: "Blues", or "Oranges and browns". */
+/**
+ * What a family is called: "Blues", or "Oranges and browns". As in the cut of the hues, a vivid
+ * shade counts for more than a pale one.
+ */
 function plainName(colors: readonly Oklch[]): string {
-  const counts = new Map<BasicTermName, number>()
+  const shares = new Map<BasicTermName, number>()
   for (const color of colors) {
     const term = termOf(color)
-    counts.set(term, (counts.get(term) ?? 0) + 1)
+    shares.set(term, (shares.get(term) ?? 0) + color.c)
   }
-  // Of equal counts the term that stands first in the table, so that a name is the same every time.
-  const order = TERMS.map(([name]) => name).filter((name) => counts.has(name))
-  const [first, second] = order.sort((a, b) => counts.get(b)! - counts.get(a)!)
-  const named = second && counts.get(second)! / colors.length > SECOND_SHARE
+  // Of equal shares the term that stands first in the table, so that a name is the same every time.
+  const order = TERMS.map(([name]) => name).filter((name) => shares.has(name))
+  const [first, second] = order.sort((a, b) => shares.get(b)! - shares.get(a)!)
+  const whole = colors.reduce((sum, { c }) => sum + c, 0)
+  const named = second && shares.get(second)! > whole * SECOND_SHARE
   return named ? `${capital(first!)}s and ${second}s` : `${capital(first!)}s`
 }
 
@@ -113,7 +117,7 @@ function differences(own: Middle, all: Middle, plain: string, neutral: boolean):
 }
 
 /**
- * Names for the families of a line from their colours, no two alike: what most of their shades are
+ * Names for the families of a line from their colours, no two alike: what most of their colour is
  * called, and where two would be called the same, what sets them apart most ("Deep blues",
  * "Yellow-greens").
  * @param taken names that other families of the line have, in any case

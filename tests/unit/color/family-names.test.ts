@@ -51,7 +51,7 @@ describe('what a colour is called', () => {
 })
 
 describe('the names of families', () => {
-  test('say what most of their shades are called', () => {
+  test('say what most of their colour is called', () => {
     expect(
       nameFamilies([
         { neutral: true, labs: [lab('#777777')] },
@@ -63,7 +63,7 @@ describe('the names of families', () => {
 
   test('name a second colour where it holds more than a third', () => {
     expect(nameFamilies([dyed('#ffa500', '#ff8c00', '#8b4513', '#8b4513')])).toEqual([
-      'Browns and oranges',
+      'Oranges and browns',
     ])
   })
 

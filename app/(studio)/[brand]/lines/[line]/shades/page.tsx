@@ -128,7 +128,11 @@ export default async function ShadesPage({ params, searchParams }: Props) {
     >
       <SheetHeader
         title="Shades"
-        meta={<span className="hidden print:inline">{line}</span>}
+        meta={
+          <span className="hidden print:inline">
+            {book ? `${line}, sample book by ${order}` : line}
+          </span>
+        }
         actions={
           edits && (
             <>
