@@ -36,6 +36,7 @@ async function first(chapter: string, text: string): Promise<string> {
 
 await take('sample-book', `${LINE}/shades`)
 await take('shade-table', `${LINE}/shades?view=table`)
+await take('range-study', `${LINE}/shades/study?twins=10`)
 const photograph = await first('photographs', 'The tarn in bracken time')
 await take('match', photograph)
 await take('combination', await first('combinations', 'Low Sun, High Bracken'))
