@@ -4,10 +4,9 @@ import { expect, test } from './support/test'
 
 const STUDY = `${LINE}/shades/study`
 
-test('an owner looks for near-twins, reads the tables, and fills a gap with a target', async ({
-  page,
-}) => {
-  await signIn(page, 'owner')
+test('near-twins are asked for in the address, and every figure has a table', async ({ page }) => {
+  test.setTimeout(180_000)
+  await signIn(page, 'designer')
   await page.goto(STUDY)
   await expect(page.getByRole('heading', { level: 1, name: 'Range study' })).toBeVisible()
 
@@ -39,7 +38,12 @@ test('an owner looks for near-twins, reads the tables, and fills a gap with a ta
     .first()
     .click()
   await expect(page.getByRole('heading', { level: 1, name: name! })).toBeVisible()
-  await page.goBack()
+})
+
+test('an owner fills a gap with a target shade, and takes it back', async ({ page }) => {
+  test.setTimeout(120_000)
+  await signIn(page, 'owner')
+  await page.goto(STUDY)
 
   // The target takes the number proposed, and can be taken back.
   const gaps = page.getByRole('region', { name: 'Gaps' })
