@@ -26,7 +26,9 @@ export function CardFace({
   const photograph = card.photograph === null ? undefined : board.photographs[card.photograph]
   const author = card.author === null ? undefined : board.authors[card.author]
   return (
-    <div className={cn('flex items-start gap-4 @max-[17rem]:flex-wrap @max-[22rem]:gap-3', className)}>
+    <div
+      className={cn('flex items-start gap-4 @max-[22rem]:gap-3 @max-[17rem]:flex-wrap', className)}
+    >
       <div {...wrap} className={cn('w-28 shrink-0 @max-[22rem]:w-22', wrap?.className)}>
         <WrapCard compact bands={bandsOf(board, card)} title={card.title} className="w-full" />
       </div>

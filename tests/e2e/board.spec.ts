@@ -226,10 +226,14 @@ test('the filter is in the address, and finds by title, shade, photograph and au
   await page.goto(BOARD)
   await page.getByLabel('Search title or shade').fill('lilac gloves')
   await expect(page).toHaveURL(/\?q=lilac\+gloves$/)
-  await expect(page.locator('main').getByRole('listitem').getByRole('link')).toHaveText(['The Long Way Down'])
+  await expect(page.locator('main').getByRole('listitem').getByRole('link')).toHaveText([
+    'The Long Way Down',
+  ])
   await page.reload()
   await expect(page.getByLabel('Search title or shade')).toHaveValue('lilac gloves')
-  await expect(page.locator('main').getByRole('listitem').getByRole('link')).toHaveText(['The Long Way Down'])
+  await expect(page.locator('main').getByRole('listitem').getByRole('link')).toHaveText([
+    'The Long Way Down',
+  ])
   await page.getByLabel('Photograph').selectOption({ label: 'Birches in mist' })
   await page.getByRole('button', { name: 'Show all combinations' }).click()
   await expect(page).toHaveURL(/\/combinations$/)
