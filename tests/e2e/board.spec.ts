@@ -181,7 +181,7 @@ test('what one moves the other sees within 5 s, and a move beside what has gone 
   const under = place.locator('option', { hasText: `under ${title}` })
   await place.selectOption((await under.getAttribute('value'))!)
   await dialog.getByRole('button', { name: 'Move combination' }).click()
-  await expect(other.getByRole('alert')).toContainText(
+  await expect(other.locator('main').getByRole('alert')).toContainText(
     `“${stale}” was not moved: the combinations beside its new place have been moved or deleted meanwhile`,
   )
   expect(await titles(other, 'Sketched')).toContain(stale)
