@@ -1,11 +1,13 @@
-/** `npm run bench -- match board`: prints each figure beside its bar; exits 1 when one misses. */
+/** `npm run bench -- match board kit`: prints each figure beside its bar; exits 1 when one misses. */
 import { printFigures, type Figure } from '../lib/figures.mjs'
 import { benchBoard } from './board'
+import { benchKit } from './kit'
 import { benchMatch } from './match'
 
 const BENCHES: Record<string, () => Promise<Figure[]>> = {
   match: benchMatch,
   board: benchBoard,
+  kit: benchKit,
 }
 
 async function main(names: string[]): Promise<number> {

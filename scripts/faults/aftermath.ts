@@ -18,6 +18,10 @@ const HALF_STATES: Record<string, string> = {
     SELECT id FROM photographs WHERE state = 'failed' AND coalesce(failure, '') = ''`,
   'a photograph that is waited for in vain': `
     SELECT id FROM photographs WHERE state IN ('pending', 'waiting', 'reading')`,
+  'a kit that is ready and has no file': `
+    SELECT id FROM kits WHERE state = 'ready' AND object_key IS NULL AND expires_at > now()`,
+  'a kit that is waited for in vain': `
+    SELECT id FROM kits WHERE state IN ('waiting', 'building')`,
   'a transaction that somebody left open': `
     SELECT pid FROM pg_stat_activity
     WHERE state LIKE 'idle in transaction%' AND application_name LIKE 'woadmap%'

@@ -98,7 +98,7 @@ describe('pictures of a combination', () => {
         }
         expect(thirds).toBeGreaterThan(0)
         const mean = meanLab(pixels[picture]!, width, inside)
-        expect(deltaE00(mean, hexToLab(band.hex)), `${band.hex} at ${width}`).toBeLessThan(0.5)
+        expect(deltaE00(mean, hexToLab(band.hex!)), `${band.hex} at ${width}`).toBeLessThan(0.5)
       })
     })
   })
