@@ -1,6 +1,6 @@
 'use client'
 
-import { Redo2, Undo2 } from 'lucide-react'
+import { Redo2, Undo2, WandSparkles } from 'lucide-react'
 import dynamic from 'next/dynamic'
 import { useEffect, useId, useMemo, useRef, useState, type ReactNode } from 'react'
 
@@ -28,6 +28,7 @@ import { EditorDrag, type DragTold } from './editor-drag'
 import { HandBar } from './hand-bar'
 import type { Held } from './held'
 import { PhotographField } from './photograph-field'
+import { PlaceNeighbours } from './place-neighbours'
 import { PlaceRow } from './place-row'
 import { SaveStatus } from './save-status'
 import type { ShadeOf } from './shade-of'
@@ -39,11 +40,13 @@ import {
   type SaveCombination,
 } from './use-combination-editor'
 
-// Cloth and help are drawn after the page: they need the most script, and not at once.
+// The page answers before its cloth is drawn.
 const AsCloth = dynamic(() => import('@/components/yarn/as-cloth').then((it) => it.AsCloth))
-const HelpTabs = dynamic(() => import('@/components/help/help-tabs').then((it) => it.HelpTabs))
 const ClashNotes = dynamic(() =>
   import('@/components/help/clash-notes').then((it) => it.ClashNotes),
+)
+const CompletePanel = dynamic(() =>
+  import('@/components/help/complete-panel').then((it) => it.CompletePanel),
 )
 // Only those whom somebody overtook need it.
 const ConflictNotice = dynamic(() => import('./conflict-notice').then((it) => it.ConflictNotice))
@@ -112,12 +115,13 @@ export function CombinationEditor(props: CombinationEditorProps) {
         ? 'none'
         : (photographs.find((one) => one.id === id)?.title ?? 'one that is gone'),
   }
+  const photograph = photographs.find(({ id }) => id === draft.photographId) ?? null
+  const [completing, setCompleting] = useState(false)
   const clothId = useId()
   const cloth = draft.places.flatMap(({ shadeId, share }) => {
     const shade = shadeOf(shadeId)
     return shade ? [{ color: shade.hex, share, name: shade.label }] : []
   })
-  const photograph = photographs.find((one) => one.id === draft.photographId)
   const placeOf = (shadeId: string) => draft.places.findIndex((one) => one.shadeId === shadeId)
   const heldShade = held && shadeOf(shadeIdOf(held))
   const heldFrom = held ? (held.kind === 'place' ? held.place : placeOf(held.shadeId)) : -1
@@ -240,6 +244,9 @@ export function CombinationEditor(props: CombinationEditorProps) {
               ) : (
                 <p className="whitespace-pre-line">{draft.story || 'None written yet.'}</p>
               )}
+            </Note>
+            <Note title="What clashes">
+              <ClashNotes places={draft.places} shadeOf={shadeOf} />
             </Note>
             <Note title="Photograph">
               <PhotographField
@@ -381,6 +388,23 @@ export function CombinationEditor(props: CombinationEditorProps) {
                           `${nameOf(place.shadeId)}, ${where}, ${locked ? 'locked' : 'unlocked'}.`,
                         )
                       }
+                      more={
+                        shade && !place.locked ? (
+                          <PlaceNeighbours
+                            place={at}
+                            places={draft.places}
+                            shade={shade}
+                            shades={shades}
+                            shadeOf={shadeOf}
+                            onChoose={(shadeId) =>
+                              edit(
+                                { kind: 'place', place: at, shadeId },
+                                `${nameOf(shadeId)}, ${where}.`,
+                              )
+                            }
+                          />
+                        ) : null
+                      }
                       onEmpty={() =>
                         edit(
                           { kind: 'place', place: at, shadeId: null },
@@ -397,26 +421,33 @@ export function CombinationEditor(props: CombinationEditorProps) {
                   share: each is at least {LEAST_PERCENT} %, together they are always 100 %.
                 </p>
               ) : null}
-            </section>
-            <section aria-label="Help" className="print:hidden">
               {canEdit ? (
-                <HelpTabs
-                  places={draft.places}
-                  shades={shades}
-                  shadeOf={shadeOf}
-                  photograph={photograph ?? null}
-                  matchUrl={
-                    photograph ? `/api/brands/${brand}/photographs/${photograph.id}/match` : null
-                  }
-                  onComplete={(shadeIds, words) => edit({ kind: 'complete', shadeIds }, words)}
-                  onExchange={(place, shadeId) => {
-                    const words = `${nameOf(shadeId)}, ${placeInWords(place)}.`
-                    edit({ kind: 'place', place, shadeId }, words)
-                  }}
-                />
-              ) : (
-                <ClashNotes places={draft.places} shadeOf={shadeOf} />
-              )}
+                <div className="mt-4 print:hidden">
+                  <Button
+                    icon={<WandSparkles aria-hidden="true" />}
+                    aria-expanded={completing}
+                    onClick={() => setCompleting(!completing)}
+                  >
+                    Complete the five
+                  </Button>
+                  {completing ? (
+                    <div className="mt-4 border-l border-rule pl-4">
+                      <CompletePanel
+                        places={draft.places}
+                        shades={shades}
+                        shadeOf={shadeOf}
+                        photograph={photograph}
+                        matchUrl={
+                          photograph && `/api/brands/${brand}/photographs/${photograph.id}/match`
+                        }
+                        onComplete={(shadeIds, words) =>
+                          edit({ kind: 'complete', shadeIds }, words)
+                        }
+                      />
+                    </div>
+                  ) : null}
+                </div>
+              ) : null}
             </section>
             <p className="hidden max-w-measure whitespace-pre-line print:block">{draft.story}</p>
             {canEdit ? (

@@ -3,7 +3,9 @@ import userEvent from '@testing-library/user-event'
 import { SWRConfig } from 'swr'
 import { beforeEach, describe, expect, test, vi } from 'vitest'
 
-import { HelpTabs, type HelpTabsProps } from '@/components/help/help-tabs'
+import { ClashNotes } from '@/components/help/clash-notes'
+import { CompletePanel, type CompletePanelProps } from '@/components/help/complete-panel'
+import { NeighbourPanel } from '@/components/help/neighbour-panel'
 import { screenColor } from '@/lib/color/gamut'
 import type { Match, NoMatch } from '@/lib/color/match'
 import type { Lab } from '@/lib/color/types'
@@ -27,37 +29,49 @@ const LINE = [
   ...dyedLine(30).map(({ lab }, at) => shade(`Dye ${at}`, lab)),
 ]
 
-const onComplete = vi.fn<HelpTabsProps['onComplete']>()
-const onExchange = vi.fn<HelpTabsProps['onExchange']>()
+const onComplete = vi.fn<CompletePanelProps['onComplete']>()
+const onChoose = vi.fn<(shadeId: string) => void>()
 
-function show({ places }: ReturnType<typeof draftWith>, more: Partial<HelpTabsProps> = {}) {
-  const known = new Map([...LINE, shade('Old Rose', [60, 30, 5])].map((one) => [one.id, one]))
+const known = new Map([...LINE, shade('Old Rose', [60, 30, 5])].map((one) => [one.id, one]))
+const shadeOf = (id: string | null) => (id === null ? null : (known.get(id) ?? null))
+type Draft = ReturnType<typeof draftWith>
+
+const showClashes = ({ places }: Draft) => render(<ClashNotes places={places} shadeOf={shadeOf} />)
+
+const showCompletion = ({ places }: Draft, more: Partial<CompletePanelProps> = {}) =>
   render(
     <SWRConfig value={{ provider: () => new Map() }}>
-      <HelpTabs
+      <CompletePanel
         places={places}
         shades={LINE}
-        shadeOf={(id) => (id === null ? null : (known.get(id) ?? null))}
+        shadeOf={shadeOf}
         photograph={null}
         matchUrl={null}
         onComplete={onComplete}
-        onExchange={onExchange}
         {...more}
       />
     </SWRConfig>,
   )
-}
 
-const open = (name: string) => userEvent.click(screen.getByRole('tab', { name }))
+const showNeighbours = (place: number, { places }: Draft) =>
+  render(
+    <NeighbourPanel
+      place={place}
+      places={places}
+      shades={LINE}
+      shadeOf={shadeOf}
+      onChoose={onChoose}
+    />,
+  )
 
 beforeEach(() => {
   onComplete.mockReset()
-  onExchange.mockReset()
+  onChoose.mockReset()
 })
 
 describe('what clashes', () => {
   test('is named before it is shown, with every pair in a table', () => {
-    show(draftWith('Chalk', 'Fern', 'Bracken', 'Madder', 'Tarn'))
+    showClashes(draftWith('Chalk', 'Fern', 'Bracken', 'Madder', 'Tarn'))
     const twins = screen.getByText('Near-twins').closest('div')!
     expect(within(twins).getByText('Fern and Bracken')).toBeTruthy()
     const muddy = screen.getByText('Muddy in value').closest('div')!
@@ -69,21 +83,20 @@ describe('what clashes', () => {
   })
 
   test('five that get on are said to', () => {
-    show(draftWith('Chalk', 'Fern', null, null, 'Tarn'))
+    showClashes(draftWith('Chalk', 'Fern', null, null, 'Tarn'))
     expect(screen.getByText('Nothing clashes')).toBeTruthy()
     expect(screen.getByText('All 3 pairs as a table')).toBeTruthy()
   })
 
   test('a place alone clashes with nothing yet', () => {
-    show(draftWith('Fern', null, null, null, null))
+    showClashes(draftWith('Fern', null, null, null, null))
     expect(screen.getByText(/With two shades in place/)).toBeTruthy()
   })
 })
 
 describe('completing the five', () => {
   test('fills the empty places by the relation chosen and leaves the filled ones', async () => {
-    show(draftWith('Chalk', null, 'Madder', null, null))
-    await open('Complete')
+    showCompletion(draftWith('Chalk', null, 'Madder', null, null))
     await userEvent.click(screen.getByRole('radio', { name: /Opposite hues/ }))
     expect(screen.getByText(/on one side of the hue circle/)).toBeTruthy()
     expect(screen.getAllByText('in place')).toHaveLength(2)
@@ -121,11 +134,10 @@ describe('completing the five', () => {
       asked.push(url)
       return Promise.resolve(Response.json(match))
     })
-    show(draftWith('Fern', null, 'Tarn', null, null), {
+    showCompletion(draftWith('Fern', null, 'Tarn', null, null), {
       photograph: { title: 'Hillside' },
       matchUrl: '/match',
     })
-    await open('Complete')
     await userEvent.click(await screen.findByRole('button', { name: 'Fill 3 empty places' }))
     expect(asked).toEqual(['/match?lock=Fern,Tarn'])
     expect(onComplete.mock.lastCall![0]).toEqual(['Fern', 'Chalk', 'Tarn', 'Madder', 'Dye 3'])
@@ -139,11 +151,10 @@ describe('completing the five', () => {
     }
     const answers = [Response.json(none), Response.json({ message: 'Too many.' }, { status: 429 })]
     vi.stubGlobal('fetch', () => Promise.resolve(answers.shift()!))
-    show(draftWith(null, null, null, null, null), {
+    showCompletion(draftWith(null, null, null, null, null), {
       photograph: { title: 'Hillside' },
       matchUrl: '/match',
     })
-    await open('Complete')
     expect(await screen.findByText(none.unavailable)).toBeTruthy()
     await userEvent.click(screen.getByRole('button', { name: 'Match again' }))
     await waitFor(() => expect(screen.getByText('Too many.')).toBeTruthy())
@@ -152,27 +163,24 @@ describe('completing the five', () => {
   test.each([
     [draftWith('Chalk', 'Fern', 'Bracken', 'Madder', 'Tarn'), /All five places are filled/],
     [draftWith('gone', null, null, null, null), /What stood in place 1 is gone/],
-  ])('says in words why nothing can be filled', async (draft, words) => {
-    show(draft)
-    await open('Complete')
+  ])('says in words why nothing can be filled', (draft, words) => {
+    showCompletion(draft)
     expect(screen.getByText(words)).toBeTruthy()
     expect(screen.queryByRole('button', { name: /Fill/ })).toBeNull()
   })
 
-  test('an empty place that is locked stays so', async () => {
+  test('an empty place that is locked stays so', () => {
     const draft = draftWith('Chalk', null, null, null, null)
     draft.places[2]!.locked = true
-    show(draft)
-    await open('Complete')
+    showCompletion(draft)
     expect(screen.getByText(/Place 3 is empty and locked/)).toBeTruthy()
   })
 
   test('a shade that has left the line is kept by a relation, and told of by the photograph', async () => {
-    show(draftWith('Old Rose', null, null, null, null), {
+    showCompletion(draftWith('Old Rose', null, null, null, null), {
       photograph: { title: 'Hillside' },
       matchUrl: '/match',
     })
-    await open('Complete')
     expect(screen.getByText(/Old Rose has left the line/)).toBeTruthy()
     await userEvent.click(screen.getByRole('radio', { name: /One family/ }))
     await userEvent.click(screen.getByRole('button', { name: 'Fill 4 empty places' }))
@@ -182,32 +190,27 @@ describe('completing the five', () => {
 
 describe('a better neighbour', () => {
   test('says what it would end and bring, and is taken for its place', async () => {
-    show(draftWith('Chalk', 'Fern', 'Bracken', 'Madder', 'Tarn'))
-    await open('Better neighbour')
-    await userEvent.selectOptions(screen.getByLabelText('For'), 'Place 2: Fern')
+    showNeighbours(1, draftWith('Chalk', 'Fern', 'Bracken', 'Madder', 'Tarn'))
     expect(screen.getByText('The nearest to Fern that are not among the five.')).toBeTruthy()
     expect(screen.getAllByText(/No longer near-twin of Bracken/).length).toBeGreaterThan(0)
     const [take] = screen.getAllByRole('button', { name: /^Take/ })
     await userEvent.click(take!)
-    const [place, id] = onExchange.mock.lastCall!
-    expect(place).toBe(1)
+    const [id] = onChoose.mock.lastCall!
     expect(['Chalk', 'Fern', 'Bracken', 'Madder', 'Tarn']).not.toContain(id)
   })
 
-  test('a locked place offers, and does not take', async () => {
+  test('a locked place offers, and does not take', () => {
     const draft = draftWith('Chalk', 'Fern', null, null, null)
     draft.places[0]!.locked = true
-    show(draft)
-    await open('Better neighbour')
+    showNeighbours(0, draft)
     expect(screen.getByText(/Chalk is locked; unlock it to exchange it/)).toBeTruthy()
     for (const button of screen.getAllByRole<HTMLButtonElement>('button', { name: /^Take/ })) {
       expect(button.disabled).toBe(true)
     }
   })
 
-  test('an empty place has no neighbours', async () => {
-    show(draftWith(null, 'Fern', null, null, null))
-    await open('Better neighbour')
+  test('an empty place has no neighbours', () => {
+    showNeighbours(0, draftWith(null, 'Fern', null, null, null))
     expect(screen.getByText(/Place 1 is empty/)).toBeTruthy()
   })
 })
