@@ -10,7 +10,7 @@ import { RadioGroup } from '@/components/ui/radio-group'
 import { Spinner } from '@/components/ui/spinner'
 import { Status } from '@/components/ui/status'
 import { Ground } from '@/components/yarn/ground'
-import { WoundSample } from '@/components/yarn/wound-sample'
+import { WrapCard } from '@/components/yarn/wrap-card'
 import { DEFAULT_APART, type Match } from '@/lib/color/match'
 import { completeByRelation, RELATION_KINDS, type RelationKind } from '@/lib/color/relations'
 import type { ShadeView } from '@/lib/shades/present'
@@ -201,26 +201,26 @@ function Proposed({
   const name = (id: string) => labelOf(id, { shades, shadeOf })
   return (
     <div className="space-y-3">
-      <Ground>
-        <ol role="list" className="grid grid-cols-1 gap-2 min-[420px]:grid-cols-5">
-          {shadeIds.map((id, at) => {
-            const shade = shadeOf(id) ?? byId.get(id)
-            const isNew = places[at]!.shadeId === null
-            return (
-              <li
-                key={id}
-                className="flex min-w-0 items-center gap-3 min-[420px]:flex-col min-[420px]:items-start min-[420px]:gap-1"
-              >
-                {shade ? <WoundSample hex={shade.hex} className="h-10 w-auto max-w-full" /> : null}
-                <span className="min-w-0 leading-tight">
-                  <span className="block font-title break-words">{name(id)}</span>
-                  <span className="text-sm text-ink-faint">
-                    {isNew ? `new in place ${at + 1}` : 'in place'}
-                  </span>
-                </span>
-              </li>
-            )
-          })}
+      <Ground className="flex items-center gap-5 border border-hairline p-4">
+        <WrapCard
+          compact
+          title="The five as they would be"
+          bands={shadeIds.map((id, at) => ({
+            hex: (shadeOf(id) ?? byId.get(id))?.hex ?? '#808080',
+            share: places[at]!.share,
+            name: name(id),
+          }))}
+          className="w-24 shrink-0"
+        />
+        <ol role="list" className="min-w-0 space-y-1">
+          {shadeIds.map((id, at) => (
+            <li key={id} className="leading-tight">
+              <span className="font-title break-words">{name(id)}</span>{' '}
+              <span className="text-sm whitespace-nowrap text-ink-faint">
+                {places[at]!.shadeId === null ? `new in place ${at + 1}` : 'in place'}
+              </span>
+            </li>
+          ))}
         </ol>
       </Ground>
       <p className="max-w-measure text-ink-soft">{why}</p>

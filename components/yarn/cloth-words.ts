@@ -10,9 +10,9 @@ export type FabricKind = (typeof FABRIC_KINDS)[number]
 /** The kinds as choices. */
 export const FABRIC_LABELS: Record<FabricKind, string> = {
   stripes: 'Stripes',
-  stranded: 'Stranded band',
-  square: 'Crocheted square',
-  marled: 'Marled strand',
+  stranded: 'Stranded',
+  square: 'Crochet',
+  marled: 'Marled',
 }
 
 const listed = new Intl.ListFormat('en-GB', { type: 'conjunction' })

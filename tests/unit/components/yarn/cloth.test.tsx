@@ -158,10 +158,8 @@ describe('the drawing', () => {
     expect(screen.getByRole('img').getAttribute('aria-label')).toMatch(/^Stripes/)
     await userEvent.tab()
     await userEvent.keyboard('{ArrowRight}')
-    expect(screen.getByRole<HTMLInputElement>('radio', { name: 'Stranded band' }).checked).toBe(
-      true,
-    )
-    expect(screen.getByRole('img').getAttribute('aria-label')).toMatch(/^Stranded band/)
+    expect(screen.getByRole<HTMLInputElement>('radio', { name: 'Stranded' }).checked).toBe(true)
+    expect(screen.getByRole('img').getAttribute('aria-label')).toMatch(/^Stranded/)
     expect(screen.getByText(/no float is longer/)).toBeTruthy()
   })
 
