@@ -32,8 +32,8 @@ export interface CardColors {
 export type CardBand = Omit<Band, 'hex'> & { hex: string | null }
 
 /** One band as it lies on its card. */
-export interface WoundBand<One extends CardBand = CardBand> {
-  band: One
+export interface WoundBand {
+  band: CardBand
   /** Of its first thread, at the left. */
   y: number
   height: number
@@ -42,23 +42,19 @@ export interface WoundBand<One extends CardBand = CardBand> {
   offset: number
 }
 
-/** Where the winding begins: its left edge, and its top at the left. */
-const windingOf = ({ margin, head, height, threads, pitch, rise }: CardShape) => ({
-  left: margin + pitch * (2 / 3),
-  top: head + (height - 2 * head - threads * pitch) / 2 + rise / 2,
-})
-
-/** Where the winding begins at the left, and how wide it is. */
-export function windingWidth(shape: CardShape): { left: number; width: number } {
-  const { left } = windingOf(shape)
-  return { left, width: shape.width - left - shape.pitch * 0.7 - shape.inset }
+/** How wide the winding is, and where it begins: its left edge, and its top at the left. */
+export function windingOf(shape: CardShape): { left: number; width: number; top: number } {
+  const { width, height, margin, head, threads, pitch, rise, inset } = shape
+  const left = margin + pitch * (2 / 3)
+  return {
+    left,
+    width: width - left - pitch * 0.7 - inset,
+    top: head + (height - 2 * head - threads * pitch) / 2 + rise / 2,
+  }
 }
 
 /** The bands as they lie on a card, top to bottom. */
-export function windBands<One extends CardBand>(
-  shape: CardShape,
-  bands: readonly One[],
-): WoundBand<One>[] {
+export function windBands(shape: CardShape, bands: readonly CardBand[]): WoundBand[] {
   const counts = bands.length > 0 ? shareOut(bands, shape.threads, shape.least) : []
   const { top } = windingOf(shape)
   return bands.map((band, index) => {
@@ -106,23 +102,23 @@ export function cardStrokes(shape: CardShape, { card, edge, ground }: CardColors
   return strokes
 }
 
-/** The yarn on a card, band by band. @param rim as of {@link threadStrokes} */
+/** The yarn on a card, from the bottom up. @param rim as of {@link threadStrokes} */
 export function windingStrokes(
   shape: CardShape,
   bands: readonly CardBand[],
   rim: string,
-): Stroke[][] {
-  const { left, width } = windingWidth(shape)
+): Stroke[] {
+  const { left, width } = windingOf(shape)
   const { pitch, rise } = shape
-  return windBands(shape, bands).map(({ band: { hex }, y, count, offset }) =>
-    hex === null ? [] : threadStrokes(hex, { x: left, y, width, pitch, count, rise, offset }, rim),
+  return windBands(shape, bands).flatMap(({ band, y, count, offset }) =>
+    band.hex === null
+      ? []
+      : threadStrokes(band.hex, { x: left, y, width, pitch, count, rise, offset }, rim),
   )
 }
 
 /** The first yarn comes in through a slit above the winding, the last goes out below it. */
 export function tailStrokes(shape: CardShape, bands: readonly CardBand[]): Stroke[] {
-  const first = bands[0]?.hex
-  const last = bands.at(-1)?.hex
   const { width, head, pitch, threads } = shape
   const { left, top } = windingOf(shape)
   const unit = pitch / 4.5
@@ -130,21 +126,20 @@ export function tailStrokes(shape: CardShape, bands: readonly CardBand[]): Strok
   const near = left + (width - left) * 0.2
   const far = left + (width - left) * 0.72
   const drawn = { width: pitch * 0.8, round: 'cap' as const }
-  const tails: (Stroke | null)[] = [
-    first
-      ? {
-          d: `M${far} ${head * 0.45}q${-18 * unit} ${2 * unit} ${-30 * unit} ${top - head * 0.45}`,
-          stroke: first,
-          ...drawn,
-        }
-      : null,
-    last
-      ? {
-          d: `M${near + 26 * unit} ${bottom - 2 * unit}q${-4 * unit} ${head * 0.4} ${-24 * unit} ${head * 0.5}`,
-          stroke: last,
-          ...drawn,
-        }
-      : null,
-  ]
-  return tails.filter((tail) => tail !== null)
+  const strokes: Stroke[] = []
+  const first = bands[0]?.hex
+  if (first)
+    strokes.push({
+      d: `M${far} ${head * 0.45}q${-18 * unit} ${2 * unit} ${-30 * unit} ${top - head * 0.45}`,
+      stroke: first,
+      ...drawn,
+    })
+  const last = bands.at(-1)?.hex
+  if (last)
+    strokes.push({
+      d: `M${near + 26 * unit} ${bottom - 2 * unit}q${-4 * unit} ${head * 0.4} ${-24 * unit} ${head * 0.5}`,
+      stroke: last,
+      ...drawn,
+    })
+  return strokes
 }

@@ -3,8 +3,8 @@ import {
   cardStrokes,
   tailStrokes,
   windBands,
+  windingOf,
   windingStrokes,
-  windingWidth,
   type CardBand,
   type CardShape,
 } from './card-strokes'
@@ -65,14 +65,13 @@ export function portraitEdges(bands: readonly CardBand[]): {
   right: number
   edges: number[]
 } {
-  const shape = SHAPES.portrait
-  const { left, width } = windingWidth(shape)
-  const wound = windBands(shape, bands)
-  const ends = wound.map(({ y, height }) => y + height)
+  const { width, height } = SHAPES.portrait
+  const { left, width: wound, top } = windingOf(SHAPES.portrait)
+  const ends = windBands(SHAPES.portrait, bands).map((band) => band.y + band.height)
   return {
-    left: left / shape.width,
-    right: (left + width) / shape.width,
-    edges: [wound[0]?.y ?? 0, ...ends].map((at) => at / shape.height),
+    left: left / width,
+    right: (left + wound) / width,
+    edges: [top, ...ends].map((at) => at / height),
   }
 }
 
@@ -104,7 +103,7 @@ export function WrapCard({
       <Strokes of={cardStrokes(shape, COLORS)} />
       {compact ? null : <Title title={title} shape={shape} />}
       <g data-yarn="" className={winds ? 'animate-wind-on motion-reduce:animate-none' : undefined}>
-        <Strokes of={windingStrokes(shape, bands, COLORS.edge).flat()} />
+        <Strokes of={windingStrokes(shape, bands, COLORS.edge)} />
         {compact ? null : <Strokes of={tailStrokes(shape, bands)} />}
       </g>
     </svg>

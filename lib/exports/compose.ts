@@ -241,7 +241,7 @@ export function drawCard(combination: ExportCombination, area: Area): DrawnCard 
     shape,
     strokes: [
       ...cardStrokes(shape, { card: INKS.card, edge: INKS.edge, ground: INKS.ground }),
-      ...windingStrokes(shape, bands, INKS.edge).flat(),
+      ...windingStrokes(shape, bands, INKS.edge),
       ...tailStrokes(shape, bands),
     ],
     edge: writeEdge(combination, shape),
