@@ -13,7 +13,7 @@ GRANT SELECT, INSERT, UPDATE, DELETE ON ALL TABLES IN SCHEMA public TO woadmap_w
 REVOKE UPDATE, DELETE ON activities FROM woadmap_web;
 REVOKE SELECT, UPDATE, DELETE ON letters FROM woadmap_web;
 REVOKE INSERT, UPDATE, DELETE ON migrations FROM woadmap_web;
-GRANT EXECUTE ON FUNCTION brand_of_invitation, forget_person TO woadmap_web;
+GRANT EXECUTE ON FUNCTION brand_of_invitation, forget_person, session_of TO woadmap_web;
 GRANT SELECT, INSERT ON pgboss.job TO woadmap_web;
 GRANT SELECT ON pgboss.queue TO woadmap_web;
 `

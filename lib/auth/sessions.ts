@@ -1,8 +1,7 @@
-import { Op } from 'sequelize'
+import { QueryTypes } from 'sequelize'
 
 import { SecondFactorNeededError } from '@/lib/errors'
-import { Membership, Person, Session } from '@/models'
-import { withinScope } from '@/models/scope'
+import { sequelize, Session } from '@/models'
 
 import type { Actor } from './actor'
 
@@ -37,43 +36,41 @@ export async function endSession(sessionId: string): Promise<void> {
   await Session.destroy({ where: { id: sessionId } })
 }
 
-/** The person behind a live session with their brands by name, or null. Two queries. */
+/** What `session_of` answers (migrations, session-of). */
+interface SessionRow {
+  personId: string
+  personName: string
+  email: string
+  hasSecondFactor: boolean
+  expiresAt: Date
+  lastSeenAt: Date
+  memberships: SignedInPerson['memberships']
+}
+
+const SESSION_OF = /* sql */ `
+  SELECT person_id AS "personId", person_name AS "personName", email,
+    has_second_factor AS "hasSecondFactor", expires_at AS "expiresAt",
+    last_seen_at AS "lastSeenAt", memberships
+  FROM session_of($sessionId)`
+
+/**
+ * The person behind a live session with their brands by name, or null. One query, without models:
+ * every request begins with it.
+ */
 export async function findSignedInPerson(sessionId: string): Promise<SignedInPerson | null> {
-  const now = Date.now()
-  const session = await Session.findOne({
-    where: {
-      id: sessionId,
-      expiresAt: { [Op.gt]: new Date(now) },
-      lastSeenAt: { [Op.gt]: new Date(now - SESSION_IDLE) },
-    },
-    include: [{ model: Person, as: 'person' }],
+  const [row] = await sequelize().query<SessionRow>(SESSION_OF, {
+    bind: { sessionId },
+    type: QueryTypes.SELECT,
   })
-  if (!session?.person) return null
-  if (now - session.lastSeenAt.getTime() > SEEN_EVERY) {
-    await session.update({ lastSeenAt: new Date(now) })
+  const now = Date.now()
+  if (!row || row.expiresAt.getTime() <= now) return null
+  const silence = now - row.lastSeenAt.getTime()
+  if (silence >= SESSION_IDLE) return null
+  if (silence > SEEN_EVERY) {
+    await Session.update({ lastSeenAt: new Date(now) }, { where: { id: sessionId } })
   }
-  const { personId } = session
-  const memberships = await withinScope({ personId }, () =>
-    Membership.findAll({
-      where: { personId },
-      include: ['brand'],
-      order: [['brand', 'name', 'ASC']],
-    }),
-  )
-  return {
-    id: session.person.id,
-    name: session.person.name,
-    email: session.person.email,
-    sessionId: session.id,
-    hasSecondFactor: session.person.totpConfirmedAt !== null,
-    memberships: memberships.map(({ brand, role }) => ({
-      brandId: brand!.id,
-      brandSlug: brand!.slug,
-      brandName: brand!.name,
-      role,
-      secondFactorRequired: brand!.secondFactorRequired,
-    })),
-  }
+  const { personId: id, personName: name, email, hasSecondFactor, memberships } = row
+  return { id, name, email, sessionId, hasSecondFactor, memberships }
 }
 
 /**
