@@ -1,11 +1,11 @@
-import { literal, type ProjectionAlias, type Transaction } from 'sequelize'
+import { QueryTypes, type Transaction } from 'sequelize'
 
 import { authorize, type Actor } from '@/lib/auth/actor'
 import { canReadCombinations } from '@/lib/combinations/policy'
 import { NotFoundError } from '@/lib/errors'
 import { canReadKits } from '@/lib/kits/policy'
 import { canReadPhotographs } from '@/lib/photographs/policy'
-import { Line, Shade } from '@/models'
+import { Line, sequelize, Shade } from '@/models'
 
 import { canReadLines } from './policy'
 
@@ -53,29 +53,12 @@ export async function getLine(
   return line
 }
 
-/** What stands in each chapter, counted beside the line's row, and who may open it. */
+/** Who may open a chapter, and see how much stands in it. */
 const CHAPTERS = {
-  shades: {
-    opens: canReadLines,
-    count: literal(`(SELECT count(*)::int FROM shades c
-      WHERE c.brand_id = "Line".brand_id AND c.line_id = "Line".id AND c.deleted_at IS NULL)`),
-  },
-  photographs: {
-    opens: canReadPhotographs,
-    count: literal(`(SELECT count(*)::int FROM photographs c
-      WHERE c.brand_id = "Line".brand_id AND c.line_id = "Line".id AND c.deleted_at IS NULL
-        AND c.state <> 'pending')`),
-  },
-  combinations: {
-    opens: canReadCombinations,
-    count: literal(`(SELECT count(*)::int FROM combinations c
-      WHERE c.brand_id = "Line".brand_id AND c.line_id = "Line".id AND c.deleted_at IS NULL)`),
-  },
-  kits: {
-    opens: canReadKits,
-    count: literal(`(SELECT count(*)::int FROM kits c
-      WHERE c.brand_id = "Line".brand_id AND c.line_id = "Line".id)`),
-  },
+  shades: canReadLines,
+  photographs: canReadPhotographs,
+  combinations: canReadCombinations,
+  kits: canReadKits,
 }
 
 /** How many rows stand in a chapter; a chapter that the role may not open is left out. */
@@ -86,10 +69,25 @@ export type ChapterCounts = {
   kits?: number
 }
 
-/** The names and addresses of all the brand's lines, for the switch between them. */
-const SIBLINGS =
-  literal(`(SELECT json_agg(json_build_object('slug', s.slug, 'name', s.name) ORDER BY s.name)
-  FROM lines s WHERE s.brand_id = "Line".brand_id)`)
+/**
+ * A line, the names and addresses of all the brand's lines, and what stands in each chapter that
+ * `chapters` names. Written out, since every page of a line asks it and to compose it costs more
+ * than to answer it.
+ */
+const LINE_WITH_MARGIN = /* sql */ `
+SELECT l.*,
+  (SELECT json_agg(json_build_object('slug', s.slug, 'name', s.name) ORDER BY s.name)
+    FROM lines s WHERE s.brand_id = l.brand_id) AS siblings,
+  CASE WHEN 'shades' = ANY ($chapters::text[]) THEN (SELECT count(*)::int FROM shades c
+    WHERE c.brand_id = l.brand_id AND c.line_id = l.id AND c.deleted_at IS NULL) END AS shades,
+  CASE WHEN 'photographs' = ANY ($chapters::text[]) THEN (SELECT count(*)::int FROM photographs c
+    WHERE c.brand_id = l.brand_id AND c.line_id = l.id AND c.deleted_at IS NULL
+      AND c.state <> 'pending') END AS photographs,
+  CASE WHEN 'combinations' = ANY ($chapters::text[]) THEN (SELECT count(*)::int FROM combinations c
+    WHERE c.brand_id = l.brand_id AND c.line_id = l.id AND c.deleted_at IS NULL) END AS combinations,
+  CASE WHEN 'kits' = ANY ($chapters::text[]) THEN (SELECT count(*)::int FROM kits c
+    WHERE c.brand_id = l.brand_id AND c.line_id = l.id) END AS kits
+FROM lines l WHERE l.brand_id = $brandId AND l.slug = $lineSlug`
 
 /**
  * One line of the actor's brand by its slug, with what its margin shows: the brand's lines, and how
@@ -101,22 +99,20 @@ export async function getLineWithMargin(
   lineSlug: string,
 ): Promise<{ line: Line; lines: Pick<Line, 'slug' | 'name'>[]; counts: ChapterCounts }> {
   authorize(actor, canReadLines)
-  const open = Object.entries(CHAPTERS).filter(([, { opens }]) => opens(actor))
-  const line = await Line.findOne({
-    attributes: {
-      include: [
-        [SIBLINGS, 'siblings'],
-        ...open.map(([name, { count }]): ProjectionAlias => [count, name]),
-      ],
-    },
-    where: { brandId: actor.brandId, slug: lineSlug },
+  const chapters = Object.entries(CHAPTERS).flatMap(([name, opens]) => (opens(actor) ? name : []))
+  const line: Line | null = await sequelize().query(LINE_WITH_MARGIN, {
+    bind: { brandId: actor.brandId, lineSlug, chapters },
+    type: QueryTypes.SELECT,
+    model: Line,
+    mapToModel: true,
+    plain: true,
   })
   if (!line) throw new NotFoundError()
   const beside = line.dataValues as unknown as ChapterCounts & {
     siblings: Pick<Line, 'slug' | 'name'>[]
   }
   const counts = Object.fromEntries(
-    open.map(([name]) => [name, beside[name as keyof ChapterCounts]]),
+    chapters.map((name) => [name, beside[name as keyof ChapterCounts]]),
   ) as ChapterCounts
   return { line, lines: beside.siblings, counts }
 }
