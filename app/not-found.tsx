@@ -1,14 +1,9 @@
 import type { Metadata } from 'next'
 
 import { NotFoundPage } from '@/components/layout/page-states'
-import { PlainPage } from '@/components/layout/plain-page'
 
 export const metadata: Metadata = { title: 'Not found' }
 
 export default function NotFound() {
-  return (
-    <PlainPage homeHref="/">
-      <NotFoundPage />
-    </PlainPage>
-  )
+  return <NotFoundPage frame="plain" />
 }
