@@ -1,3 +1,5 @@
+import { setTimeout as sleep } from 'node:timers/promises'
+
 import { QueryTypes } from 'sequelize'
 
 import { sequelize } from '@/models'
@@ -96,9 +98,30 @@ export async function fillLine(brandId: string, slug: string, size: LineSize): P
   )
 }
 
-/** What PostgreSQL does by itself, in time, after so many rows have come. */
+const TABLES = ['lines', 'shades', 'photographs', 'readings', 'combinations', 'combination_places']
+/** An autovacuum that began while rows came lasts seconds, on a busy machine more. */
+const SETTLED_WITHIN = 120_000
+
+/**
+ * What autovacuum does in time after so many rows have come, done now: the planner knows them, and
+ * every page is known to hold nothing but what everybody may see. A VACUUM beside which anything
+ * looks at the database as of before, autovacuum itself for one, leaves pages out; lists then read
+ * the table besides its index, and it is done again.
+ * @throws Error when something looks at the database as of before all the while
+ */
 export async function settle(): Promise<void> {
-  await sequelize().query(
-    'VACUUM (ANALYZE) lines, shades, photographs, readings, combinations, combination_places',
-  )
+  const deadline = performance.now() + SETTLED_WITHIN
+  do {
+    await sequelize().query(
+      'VACUUM (ANALYZE) lines, shades, photographs, readings, combinations, combination_places',
+    )
+    const [row] = await sequelize().query<{ pages: number }>(
+      `SELECT sum(relpages - relallvisible)::int AS pages FROM pg_class
+       WHERE oid = ANY ($tables::regclass[])`,
+      { bind: { tables: TABLES }, type: QueryTypes.SELECT },
+    )
+    if (row!.pages === 0) return
+    await sleep(1000)
+  } while (performance.now() < deadline)
+  throw new Error('Something looks at the database as of before it was filled; VACUUM has no end.')
 }
