@@ -1,18 +1,18 @@
 import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
 
-import pg from 'pg'
+import type pg from 'pg'
 import sharp from 'sharp'
 
 import { BRAND, LINE, signIn, signOut } from './support/accounts'
+import { database } from './support/database'
 import { expect, test, type Page } from './support/test'
 
-let database: pg.Client
+let client: pg.Client
 test.beforeAll(async () => {
-  database = new pg.Client({ connectionString: process.env.DATABASE_URL })
-  await database.connect()
+  client = await database()
 })
-test.afterAll(() => database.end())
+test.afterAll(() => client.end())
 
 interface LogLine {
   msg: string
@@ -34,7 +34,7 @@ function logOf(name: 'web' | 'jobs'): LogLine[] {
 
 const rowsOf = async (condition: string, values: unknown[] = []) =>
   (
-    await database.query(
+    await client.query(
       `SELECT activities.*, people.email FROM activities LEFT JOIN people ON people.id = person_id
        WHERE ${condition} ORDER BY activities.created_at`,
       values,
@@ -130,7 +130,7 @@ test('a refusal that cannot be recorded is still a refusal, and the log says so'
   page,
 }) => {
   await signIn(page, 'dyer')
-  await database.query('REVOKE INSERT ON activities FROM woadmap_web')
+  await client.query('REVOKE INSERT ON activities FROM woadmap_web')
   try {
     const answer = await page.goto(`${LINE}/edit`)
     expect(answer!.status()).toBe(403)
@@ -139,7 +139,7 @@ test('a refusal that cannot be recorded is still a refusal, and the log says so'
       .poll(() => logOf('web').filter((line) => line.requestId === requestId))
       .toContainEqual(expect.objectContaining({ msg: 'a refusal was not recorded' }))
   } finally {
-    await database.query('GRANT INSERT ON activities TO woadmap_web')
+    await client.query('GRANT INSERT ON activities TO woadmap_web')
   }
 })
 
@@ -173,7 +173,7 @@ test('one request’s id stands in its answer, its log line, the record, the job
   await expect
     .poll(() => logOf('web').filter((line) => line.requestId === requestId))
     .toEqual([expect.objectContaining({ msg: 'request', method: 'POST', status: 200 })])
-  const jobs = await database.query(
+  const jobs = await client.query(
     `SELECT data FROM pgboss.job WHERE name = 'read-photograph' AND data->>'requestId' = $1`,
     [requestId],
   )
@@ -188,7 +188,7 @@ test('an error that nobody expected is masked, and its reference finds its log l
   complaints,
 }) => {
   await signIn(page, 'owner')
-  await database.query('ALTER TABLE combinations RENAME TO combinations_away')
+  await client.query('ALTER TABLE combinations RENAME TO combinations_away')
   try {
     const response = await page.goto(`${LINE}/combinations`)
     expect(response!.status()).toBe(500)
@@ -198,10 +198,10 @@ test('an error that nobody expected is masked, and its reference finds its log l
     // React says in the console that the server has left out the error's words.
     for (const complaint of complaints.splice(0)) expect(complaint).toContain('React error #441')
   } finally {
-    await database.query('ALTER TABLE combinations_away RENAME TO combinations')
+    await client.query('ALTER TABLE combinations_away RENAME TO combinations')
   }
 
-  await database.query('ALTER TABLE shades RENAME TO shades_away')
+  await client.query('ALTER TABLE shades RENAME TO shades_away')
   try {
     const answer = await page.request.get(`/api/brands/${BRAND}/lines/heronsway-dk/shades.csv`)
     expect(answer.status()).toBe(500)
@@ -209,7 +209,7 @@ test('an error that nobody expected is masked, and its reference finds its log l
     expect(rest).toEqual({ ok: false, code: 'unexpected' })
     await expectLogged(message, message)
   } finally {
-    await database.query('ALTER TABLE shades_away RENAME TO shades')
+    await client.query('ALTER TABLE shades_away RENAME TO shades')
   }
 })
 
@@ -217,7 +217,7 @@ test('nor does signing in tell more, nor open, while it cannot be done', async (
   await page.goto('/sign-in')
   await page.getByLabel('E-mail').fill('owner@teasel.example')
   await page.getByLabel('Password').fill('not asked for')
-  await database.query('ALTER TABLE people RENAME TO people_away')
+  await client.query('ALTER TABLE people RENAME TO people_away')
   try {
     const answered = page.waitForResponse((one) => one.url().includes('/callback/credentials'))
     await page.getByRole('button', { name: 'Sign in' }).click()
@@ -225,7 +225,7 @@ test('nor does signing in tell more, nor open, while it cannot be done', async (
     await expect(told).toBeVisible()
     await expectLogged(await told.textContent(), await (await answered).text())
   } finally {
-    await database.query('ALTER TABLE people_away RENAME TO people')
+    await client.query('ALTER TABLE people_away RENAME TO people')
   }
   await expect(page).toHaveURL(/\/sign-in/)
 })

@@ -2,9 +2,9 @@ import { readdirSync, readFileSync } from 'node:fs'
 import { join } from 'node:path'
 
 import type { APIRequestContext, APIResponse } from '@playwright/test'
-import pg from 'pg'
 
 import { BRAND, LINE, signIn } from './support/accounts'
+import { database } from './support/database'
 import { PAGES } from './support/pages'
 import { expect, test, type Page } from './support/test'
 
@@ -87,8 +87,7 @@ test('so have a page that does not exist, one that is forbidden, and one that fa
     expect(answer.status(), address).toBe(status)
     await checkPage(answer, address)
   }
-  const client = new pg.Client({ connectionString: process.env.DATABASE_URL })
-  await client.connect()
+  const client = await database()
   try {
     await client.query('BEGIN; LOCK TABLE lines IN ACCESS EXCLUSIVE MODE')
     const answer = await page.request.get(`${LINE}/shades`)

@@ -1,6 +1,9 @@
 import { randomUUID } from 'node:crypto'
 
 import { Line } from '@/models'
+import { LINE_FORM } from '@/tests/fixtures/line-form'
+
+const { price, ...FORM } = LINE_FORM
 
 /** A line of the brand, with whatever matters to the test. */
 export function makeLine(
@@ -11,17 +14,9 @@ export function makeLine(
     brandId: brand.id,
     slug: `line-${randomUUID()}`,
     name: 'A line',
-    fibres: [{ fibre: 'wool', percent: 100 }],
-    ply: 3,
-    weightNumber: 3,
-    netGrams: 100,
-    length: 225,
-    lengthUnit: 'm',
-    needleMm: 4,
-    gaugeStitches: 22,
-    gaugeRows: 30,
-    currency: 'GBP',
-    priceMinor: 2150,
+    ...FORM,
+    fibres: [...FORM.fibres],
+    priceMinor: price * 100,
     ...values,
   })
 }

@@ -1,8 +1,8 @@
 import { randomUUID } from 'node:crypto'
 
-import pg from 'pg'
-
 import { hashPassword } from '../../../lib/auth/password'
+
+import { database } from './database'
 
 /** Somebody made for one test, whose account no other test signs in with. */
 export interface TestPerson {
@@ -18,11 +18,10 @@ export async function makeBrandWithPeople<Role extends string>(
   name: string,
   roles: readonly Role[],
 ): Promise<{ slug: string; people: Record<Role, TestPerson> }> {
-  const database = new pg.Client({ connectionString: process.env.DATABASE_URL })
-  await database.connect()
+  const client = await database()
   try {
     const slug = `brand-${randomUUID()}`
-    const made = await database.query<{ id: string }>(
+    const made = await client.query<{ id: string }>(
       'INSERT INTO brands (name, slug) VALUES ($1, $2) RETURNING id',
       [name, slug],
     )
@@ -34,7 +33,7 @@ export async function makeBrandWithPeople<Role extends string>(
           email: `${role}-${randomUUID()}@people.example`,
           password: PASSWORD,
         }
-        await database.query(
+        await client.query(
           `WITH person AS (
              INSERT INTO people (email, name, password_hash) VALUES ($2, $3, $4) RETURNING id
            ) INSERT INTO memberships (brand_id, person_id, role) SELECT $1, id, $5 FROM person`,
@@ -45,6 +44,6 @@ export async function makeBrandWithPeople<Role extends string>(
     )
     return { slug, people: Object.fromEntries(people) as Record<Role, TestPerson> }
   } finally {
-    await database.end()
+    await client.end()
   }
 }
