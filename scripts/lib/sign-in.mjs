@@ -10,23 +10,35 @@ export function demoOwner() {
 }
 
 /**
- * Signs in over HTTP, as the sign-in page does.
+ * Tries to sign in over HTTP, as next-auth's own form does.
  * @param {string} origin of the product
- * @returns {Promise<string>} the Cookie header of a signed-in browser; '' when refused
+ * @param {{email: string, password: string}} account
+ * @param {Record<string, string>} headers what else the browser says of itself
+ * @returns {Promise<Response>} 200, and the session's cookie, when it succeeded
  */
-export async function signIn(origin, { email, password }) {
-  const asked = await fetch(`${origin}/api/auth/csrf`)
-  const { csrfToken } = await asked.json()
-  const answer = await fetch(`${origin}/api/auth/callback/credentials`, {
+export async function trySigningIn(origin, { email, password }, headers = {}) {
+  const form = await fetch(`${origin}/api/auth/csrf`)
+  const { csrfToken } = await form.json()
+  return fetch(`${origin}/api/auth/callback/credentials`, {
     method: 'POST',
     redirect: 'manual',
-    headers: { Cookie: cookiesOf(asked), Origin: origin },
-    body: new URLSearchParams({ email, password, csrfToken, json: 'true', callbackUrl: origin }),
+    headers: { cookie: cookiesOf(form), origin, ...headers },
+    body: new URLSearchParams({ email, password, csrfToken, json: 'true' }),
   })
-  const cookies = cookiesOf(answer)
+}
+
+/**
+ * Signs in over HTTP.
+ * @param {string} origin of the product
+ * @param {{email: string, password: string}} account
+ * @returns {Promise<string>} the Cookie header of a signed-in browser; '' when refused
+ */
+export async function signIn(origin, account) {
+  const cookies = cookiesOf(await trySigningIn(origin, account))
   return cookies.includes('woadmap.session=') ? cookies : ''
 }
 
+/** @param {Response} response */
 function cookiesOf(response) {
   return response.headers
     .getSetCookie()

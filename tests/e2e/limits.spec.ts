@@ -2,29 +2,22 @@ import { randomUUID } from 'node:crypto'
 
 import { RATE_LIMITS } from '@/lib/auth/constants'
 
+import { trySigningIn } from '../../scripts/lib/sign-in.mjs'
 import { crashDatabase, database } from './support/database'
 import { expect, test } from './support/test'
 
 const ORIGIN = process.env.APP_ORIGIN!
 
-/** Tries to sign in as next-auth's own form does, from an address that it claims to have. */
-async function trySigningIn(email: string): Promise<Response> {
-  const form = await fetch(`${ORIGIN}/api/auth/csrf`)
-  const { csrfToken } = (await form.json()) as { csrfToken: string }
-  return fetch(`${ORIGIN}/api/auth/callback/credentials`, {
-    method: 'POST',
-    headers: {
-      cookie: form.headers
-        .getSetCookie()
-        .map((one) => one.split(';')[0])
-        .join('; '),
-      origin: ORIGIN,
+/** Fails to sign in, from an address that it claims to have. */
+const failToSignIn = () =>
+  trySigningIn(
+    ORIGIN,
+    { email: `${randomUUID()}@people.example`, password: 'not this one' },
+    {
       'x-forwarded-for': `203.0.113.${Math.floor(Math.random() * 256)}`,
       'x-woadmap-peer': `198.51.100.${Math.floor(Math.random() * 256)}`,
     },
-    body: new URLSearchParams({ csrfToken, email, password: 'not this one', json: 'true' }),
-  })
-}
+  )
 
 test('wrong passwords shut the door for a while, whatever address is claimed, also when the database restarts', async () => {
   let client = await database()
@@ -33,9 +26,9 @@ test('wrong passwords shut the door for a while, whatever address is claimed, al
   try {
     const { points, duration } = RATE_LIMITS['sign-in-address']
     for (let at = 0; at < points; at++) {
-      expect((await trySigningIn(`${randomUUID()}@people.example`)).status).toBe(401)
+      expect((await failToSignIn()).status).toBe(401)
     }
-    const refused = await trySigningIn(`${randomUUID()}@people.example`)
+    const refused = await failToSignIn()
     expect(refused.status).toBe(429)
     const wait = Number(refused.headers.get('retry-after'))
     expect(wait).toBeGreaterThan(duration - 120)
@@ -52,7 +45,7 @@ test('wrong passwords shut the door for a while, whatever address is claimed, al
     await crashDatabase(client)
     await expect(async () => (client = await database())).toPass()
     await expect.poll(async () => (await fetch(`${ORIGIN}/readyz`)).status).toBe(200)
-    expect((await trySigningIn(`${randomUUID()}@people.example`)).status).toBe(429)
+    expect((await failToSignIn()).status).toBe(429)
   } finally {
     // The other tests sign in from the same address.
     await forget()

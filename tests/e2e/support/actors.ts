@@ -1,6 +1,8 @@
 import type pg from 'pg'
 
 import type { Role } from '@/lib/people/constants'
+
+import { signIn } from '../../../scripts/lib/sign-in.mjs'
 import accounts from '../../../seeders/demo-accounts.json' with { type: 'json' }
 
 import type { Standing } from './access-matrix'
@@ -30,30 +32,13 @@ const emailOf = (name: string) => `as-${name.replaceAll(' ', '-')}@${DOMAIN}`
 const ROLES: readonly Role[] = ['owner', 'marketer', 'designer', 'dyer']
 
 /**
- * Signs in as next-auth's own form does.
+ * Signs in somebody of the matrix.
  * @returns the cookies of the new session, as a browser sends them
  */
 export async function openSessionOf(origin: string, email: string): Promise<string> {
-  const form = await fetch(`${origin}/api/auth/csrf`)
-  const { csrfToken } = (await form.json()) as { csrfToken: string }
-  const answer = await fetch(`${origin}/api/auth/callback/credentials`, {
-    method: 'POST',
-    headers: { cookie: cookiesOf(form), origin },
-    body: new URLSearchParams({ csrfToken, email, password: MODEL.password, json: 'true' }),
-    redirect: 'manual',
-  })
-  const cookie = cookiesOf(answer)
-  if (!cookie.includes('woadmap.session=')) {
-    throw new Error(`Signing in as ${email} answered ${answer.status}: ${await answer.text()}`)
-  }
+  const cookie = await signIn(origin, { email, password: MODEL.password })
+  if (!cookie) throw new Error(`${email} could not sign in.`)
   return cookie
-}
-
-function cookiesOf(response: Response): string {
-  return response.headers
-    .getSetCookie()
-    .map((cookie) => cookie.split(';')[0])
-    .join('; ')
 }
 
 /**
