@@ -108,7 +108,8 @@ export default async function SecondFactorPage({
           </div>
         }
       />
-      <div className="mt-10 print:hidden">
+      {/* The quiet button's words, not its edge, stand in line with the page. */}
+      <div className="mt-10 -ml-[0.6875rem] print:hidden">
         <SignOutButton signOut={signOutAction} />
       </div>
     </PlainPage>
