@@ -10,7 +10,7 @@ const UP = /* sql */ `
 CREATE FUNCTION session_of(wanted uuid) RETURNS TABLE (
   person_id uuid, person_name text, email text, has_second_factor boolean,
   expires_at timestamptz, last_seen_at timestamptz, memberships json
-) LANGUAGE plpgsql STABLE SECURITY DEFINER SET search_path = public AS $$
+) LANGUAGE plpgsql STABLE SECURITY DEFINER SET search_path = public, pg_temp AS $$
 BEGIN
   RETURN QUERY
   SELECT p.id, p.name, p.email, p.totp_confirmed_at IS NOT NULL, s.expires_at, s.last_seen_at, (

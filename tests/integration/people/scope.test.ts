@@ -123,6 +123,18 @@ describe('the function that tells who is behind a session', () => {
     expect(await Brand.count()).toBe(0)
   })
 
+  it('is not led astray by a temporary table that bears the name of one of ours', async () => {
+    await sequelize().query('CREATE TEMPORARY TABLE sessions AS TABLE sessions')
+    try {
+      await sequelize().query('UPDATE pg_temp.sessions SET person_id = $1', {
+        bind: [theirs.actor.personId],
+      })
+      expect((await findSignedInPerson(ours.sessionId))!.id).toBe(ours.actor.personId)
+    } finally {
+      await sequelize().query('DROP TABLE pg_temp.sessions')
+    }
+  })
+
   it('is one of three that answer as the owner of the tables, open to the web’s role by name', async () => {
     const functions = await sequelize().query<{ name: string; everybody: boolean }>(
       `SELECT proname AS name, EXISTS (
