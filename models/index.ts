@@ -63,4 +63,5 @@ export {
 }
 export { createOnce } from './create-once'
 export { inTransaction, sequelize, speakFor } from './sequelize'
+export { sessionOf } from './session-of'
 export { updateVersioned } from './update-versioned'

@@ -3,7 +3,7 @@ import { ConnectionError, Sequelize, type Transaction } from 'sequelize'
 import { building, env, serving } from '@/lib/env'
 
 import { dropWhenSilent } from './drop-when-silent'
-import { currentScope, type Scope } from './scope'
+import { currentScope, isForWhomever, type Scope } from './scope'
 
 const shared = globalThis as typeof globalThis & { woadmapSequelize?: Sequelize }
 
@@ -63,6 +63,7 @@ interface ScopedConnection {
  * the connection spoke for somebody else before.
  */
 async function setScope(sequelize: Sequelize, connection: ScopedConnection): Promise<void> {
+  if (isForWhomever()) return
   const { brandId = '', personId = '' } = currentScope()
   const scope = `${brandId}/${personId}`
   if (connection.woadmapScope === scope) return

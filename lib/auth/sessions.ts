@@ -1,7 +1,6 @@
-import { QueryTypes } from 'sequelize'
-
 import { SecondFactorNeededError } from '@/lib/errors'
-import { sequelize, Session } from '@/models'
+import { Session, sessionOf } from '@/models'
+import type { SessionRow } from '@/models/session-of'
 
 import type { Actor } from './actor'
 
@@ -21,14 +20,7 @@ export interface SignedInPerson {
   readonly email: string
   readonly sessionId: string
   readonly hasSecondFactor: boolean
-  readonly memberships: readonly {
-    brandId: string
-    brandSlug: string
-    brandName: string
-    role: Actor['role']
-    /** The brand's pages open only to who has a second factor. */
-    secondFactorRequired: boolean
-  }[]
+  readonly memberships: readonly Readonly<SessionRow['memberships'][number]>[]
 }
 
 /** Ends a session; ending one that is over is no error. */
@@ -36,32 +28,9 @@ export async function endSession(sessionId: string): Promise<void> {
   await Session.destroy({ where: { id: sessionId } })
 }
 
-/** What `session_of` answers (migrations, session-of). */
-interface SessionRow {
-  personId: string
-  personName: string
-  email: string
-  hasSecondFactor: boolean
-  expiresAt: Date
-  lastSeenAt: Date
-  memberships: SignedInPerson['memberships']
-}
-
-const SESSION_OF = /* sql */ `
-  SELECT person_id AS "personId", person_name AS "personName", email,
-    has_second_factor AS "hasSecondFactor", expires_at AS "expiresAt",
-    last_seen_at AS "lastSeenAt", memberships
-  FROM session_of($sessionId)`
-
-/**
- * The person behind a live session with their brands by name, or null. One query, without models:
- * every request begins with it.
- */
+/** The person behind a live session with their brands by name, or null. One query. */
 export async function findSignedInPerson(sessionId: string): Promise<SignedInPerson | null> {
-  const [row] = await sequelize().query<SessionRow>(SESSION_OF, {
-    bind: { sessionId },
-    type: QueryTypes.SELECT,
-  })
+  const row = await sessionOf(sessionId)
   const now = Date.now()
   if (!row || row.expiresAt.getTime() <= now) return null
   const silence = now - row.lastSeenAt.getTime()

@@ -8,7 +8,7 @@ import { actorIn, findSignedInPerson } from '@/lib/auth/sessions'
 import { openSession } from '@/lib/auth/sign-in'
 import { getLineWithMargin } from '@/lib/lines/queries'
 import { Brand, Line, sequelize } from '@/models'
-import { withinScope } from '@/models/scope'
+import { withinScope, withWhomever } from '@/models/scope'
 import { makeActor } from '@/tests/factories/brand'
 import { makeLine } from '@/tests/factories/line'
 
@@ -61,28 +61,74 @@ const answerOf = ({ actor: { personId, brandId } }: Side) => ({
   brands: [brandId],
 })
 
-/** Has the server refuse the next statement that names a scope. */
-async function failNextScope(): Promise<void> {
+type Connection = { query: (...args: unknown[]) => unknown }
+
+/** The one connection of the pool, made where there is none. */
+async function theConnection(): Promise<Connection> {
   const { connectionManager } = sequelize() as unknown as {
     connectionManager: {
-      getConnection(): Promise<{ query: (...args: unknown[]) => unknown }>
-      releaseConnection(connection: unknown): void
+      getConnection(): Promise<Connection>
+      releaseConnection(connection: Connection): void
     }
   }
   const connection = await connectionManager.getConnection()
+  connectionManager.releaseConnection(connection)
+  return connection
+}
+
+const namesScope = (text: unknown) => typeof text === 'string' && text.includes('set_config')
+
+/** Has the server refuse the next statement that names a scope. */
+async function failNextScope(): Promise<void> {
+  const connection = await withWhomever(theConnection)
   const ask = connection.query.bind(connection)
   connection.query = (text, ...rest) => {
-    if (typeof text !== 'string' || !text.includes('set_config')) return ask(text, ...rest)
+    if (!namesScope(text)) return ask(text, ...rest)
     connection.query = ask
     return ask('SELECT 1 / 0')
   }
-  connectionManager.releaseConnection(connection)
+}
+
+/** Does the work and counts how often the connection was told for whom it speaks. */
+async function countScopes(work: () => Promise<void>): Promise<number> {
+  const connection = await withWhomever(theConnection)
+  const ask = connection.query.bind(connection)
+  let told = 0
+  connection.query = (text, ...rest) => {
+    if (namesScope(text)) told += 1
+    return ask(text, ...rest)
+  }
+  await work()
+  connection.query = ask
+  return told
 }
 
 describe('one connection', () => {
   it('that requests of two brands share, statement by statement, shows each its own', async () => {
     const sides = Array.from({ length: 60 }, (_, at) => (at % 3 === 0 ? ours : theirs))
     expect(await Promise.all(sides.map(openLine))).toEqual(sides.map(answerOf))
+  })
+
+  it('is told for whom it speaks once as long as that stays, and anew before another reads', async () => {
+    const told = await countScopes(async () => {
+      for (const side of [ours, ours, ours, theirs, ours]) {
+        expect(await openLine(side)).toEqual(answerOf(side))
+      }
+    })
+    // The connection may have spoken for somebody else before the first.
+    expect(told).toBeLessThanOrEqual(3)
+    expect(told).toBeGreaterThanOrEqual(2)
+  })
+
+  it('that was asked who is behind a session shows nobody’s rows to who comes next', async () => {
+    await openLine(ours)
+    await findSignedInPerson(theirs.sessionId)
+    expect(await Line.count()).toBe(0)
+    await openLine(ours)
+    await findSignedInPerson(theirs.sessionId)
+    const { brandId } = theirs.actor
+    const seen = await withinScope({ brandId }, () => Line.findAll())
+    expect(seen.map((line) => line.brandId)).toEqual([brandId])
   })
 
   it('that could not be told for whom it speaks answers nothing, and is not used again', async () => {
