@@ -48,8 +48,8 @@ export async function readArrangement(line: Line, transaction: Transaction): Pro
   }
 }
 
-const isSameFamily = (one: ArrangedFamily | undefined, other: ArrangedFamily): boolean =>
-  one?.name === other.name && one.nameGiven === other.nameGiven && one.neutral === other.neutral
+const isSameFamily = (one: ArrangedFamily, other: ArrangedFamily): boolean =>
+  one.name === other.name && one.nameGiven === other.nameGiven && one.neutral === other.neutral
 
 /**
  * Saves what differs between two arrangements of one line; the caller has locked the line's row.
@@ -63,24 +63,22 @@ export async function saveArrangement(
   transaction: Transaction,
 ): Promise<boolean> {
   const { brandId, id: lineId } = line
-  const formerPlace = new Map(before.families.map(({ id }, place) => [id, place]))
-  const former = new Map(before.families.map((family) => [family.id, family]))
-  const changed = after.families.filter(
-    (family, place) =>
-      !isSameFamily(former.get(family.id), family) || formerPlace.get(family.id) !== place,
-  )
+  const former = new Map(before.families.map((family, place) => [family.id, { family, place }]))
+  const rows = after.families.map((family, position) => ({ ...family, brandId, lineId, position }))
+  const made = rows.filter(({ id }) => !former.has(id))
+  const changed = rows.filter((row) => {
+    const was = former.get(row.id)
+    return was && (was.place !== row.position || !isSameFamily(was.family, row))
+  })
   const kept = new Set(after.families.map(({ id }) => id))
   const gone = before.families.filter(({ id }) => !kept.has(id)).map(({ id }) => id)
+  // An id that another line has is refused, not taken over.
+  if (made.length > 0) await Family.bulkCreate(made, { transaction })
   if (changed.length > 0) {
-    await Family.bulkCreate(
-      changed.map((family) => ({
-        ...family,
-        brandId,
-        lineId,
-        position: after.families.indexOf(family),
-      })),
-      { updateOnDuplicate: ['name', 'nameGiven', 'neutral', 'position', 'updatedAt'], transaction },
-    )
+    await Family.bulkCreate(changed, {
+      updateOnDuplicate: ['name', 'nameGiven', 'neutral', 'position', 'updatedAt'],
+      transaction,
+    })
   }
   const stood = new Map(before.shades.map((shade) => [shade.id, shade]))
   const moved = after.shades.filter(({ id, familyId, pinned, position }) => {
@@ -112,5 +110,5 @@ export async function saveArrangement(
   if (gone.length > 0) {
     await Family.destroy({ where: { brandId, lineId, id: gone }, transaction })
   }
-  return changed.length + moved.length + gone.length > 0
+  return made.length + changed.length + moved.length + gone.length > 0
 }

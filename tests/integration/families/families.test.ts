@@ -343,27 +343,29 @@ describe('taking an edit back', () => {
   it('never takes the family of another line, nor leaves a shade in none', async () => {
     await sorted()
     const mine = await families()
-    const other = await makeLine({ id: stranger.brandId })
-    await makeShade(other, {})
-    await sortIntoFamilies(stranger, { lineSlug: other.slug, version: 1, count: null })
-    const [theirs] = (await readFamilies(stranger, other.slug)).families
     const asFormer = mine.map(({ id, name, nameGiven, neutral }) => ({
       id,
       name,
       nameGiven,
       neutral,
     }))
-    const stolen = restoreFamilies(owner, {
-      ...(await edit()),
-      former: {
+    for (const actor of [owner, stranger]) {
+      const other = await makeLine({ id: actor.brandId })
+      await makeShade(other, {})
+      await sortIntoFamilies(actor, { lineSlug: other.slug, version: 1, count: null })
+      const before = (await readFamilies(actor, other.slug)).families
+      const taken = { ...asFormer[0]!, id: before[0]!.id, name: 'Taken' }
+      const place = { familyId: taken.id, pinned: false, position: null }
+      const former = {
         count: null,
-        families: [...asFormer, { ...asFormer[0]!, id: theirs!.id, name: 'Taken' }],
-        shades: [
-          { id: mine[1]!.shades[0]!.id, familyId: theirs!.id, pinned: false, position: null },
-        ],
-      },
-    })
-    await expect(stolen).rejects.toThrow()
+        families: [...asFormer, taken],
+        shades: [{ id: mine[1]!.shades[0]!.id, ...place }],
+      }
+      await expect(restoreFamilies(owner, { ...(await edit()), former })).rejects.toThrow(
+        ConflictError,
+      )
+      expect((await readFamilies(actor, other.slug)).families).toEqual(before)
+    }
     await expect(
       restoreFamilies(owner, {
         ...(await edit()),
@@ -371,7 +373,6 @@ describe('taking an edit back', () => {
       }),
     ).rejects.toThrow(InvalidError)
     expect(await families()).toEqual(mine)
-    expect((await readFamilies(stranger, other.slug)).families).toEqual([theirs])
   })
 })
 
