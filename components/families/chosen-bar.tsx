@@ -1,7 +1,7 @@
 'use client'
 
 import { Pin, PinOff, X } from 'lucide-react'
-import { useState, type RefObject } from 'react'
+import { useEffect, useRef, useState } from 'react'
 
 import { Button } from '@/components/ui/button'
 import { Field } from '@/components/ui/field'
@@ -18,7 +18,7 @@ export function ChosenBar({
   families,
   chosen,
   pending,
-  focusAt,
+  sought,
   onMove,
   onPin,
   onClear,
@@ -26,14 +26,18 @@ export function ChosenBar({
   families: readonly FamilyWithShades[]
   chosen: ReadonlySet<string>
   pending: boolean
-  /** The select, for the key that leads to it. */
-  focusAt: RefObject<HTMLDivElement | null>
+  /** Another number than before brings the keyboard to the choice of a family; 0 leaves it. */
+  sought: number
   /** Null makes a new family. */
   onMove: (familyId: string | null) => void
   onPin: (pinned: boolean) => void
   onClear: () => void
 }) {
   const [target, setTarget] = useState('')
+  const bar = useRef<HTMLDivElement>(null)
+  useEffect(() => {
+    if (sought > 0) bar.current?.querySelector('select')?.focus()
+  }, [sought])
   const shades = families.flatMap((family) => family.shades.filter(({ id }) => chosen.has(id)))
   // Where they all stand already is no place to go.
   const from = new Set(shades.map(({ familyId }) => familyId))
@@ -41,7 +45,7 @@ export function ChosenBar({
   const isTarget = target === NEW || targets.some(({ id }) => id === target)
   return (
     <div
-      ref={focusAt}
+      ref={bar}
       role="region"
       aria-label="Chosen shades"
       className="sticky bottom-0 z-20 mt-4 border border-rule bg-paper px-4 py-3 print:hidden"

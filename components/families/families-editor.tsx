@@ -14,7 +14,7 @@ import {
 import { Settings2 } from 'lucide-react'
 import dynamic from 'next/dynamic'
 import { useRouter } from 'next/navigation'
-import { useId, useRef, useState, type KeyboardEvent, type ReactNode } from 'react'
+import { useId, useState, type KeyboardEvent, type ReactNode } from 'react'
 
 import type { LinePlace } from '@/components/shades/shades-actions'
 import { Button } from '@/components/ui/button'
@@ -80,7 +80,7 @@ export function FamiliesEditor({
   const [open, setOpen] = useState<{ familyId: string; what: 'tools' | 'order' }>()
   const [sorting, setSorting] = useState(false)
   const [carried, setCarried] = useState<string>()
-  const bar = useRef<HTMLDivElement>(null)
+  const [sought, setSought] = useState(0)
   const sensors = useSensors(
     useSensor(MouseSensor, { activationConstraint: { distance: 6 } }),
     // A finger that moves at once scrolls the page.
@@ -96,6 +96,7 @@ export function FamiliesEditor({
     const next = new Set(held)
     if (!next.delete(shadeId)) next.add(shadeId)
     setChosen(next)
+    setSought(0)
     speak(
       next.size > 0
         ? `${shadesInWords(next.size)} chosen. M leads to the choice of a family.`
@@ -108,8 +109,7 @@ export function FamiliesEditor({
     if (event.key !== 'm' || event.ctrlKey || event.metaKey || event.altKey) return
     event.preventDefault()
     if (held.size === 0) setChosen(new Set([shadeId]))
-    // The bar may only come with this choice.
-    setTimeout(() => bar.current?.querySelector('select')?.focus())
+    setSought(sought + 1)
   }
 
   const labelOf = (shadeIds: ReadonlySet<string>) =>
@@ -120,6 +120,7 @@ export function FamiliesEditor({
   async function move(shadeIds: ReadonlySet<string>, familyId: string | null) {
     const target = families.find((family) => family.id === familyId)
     setChosen(new Set())
+    setSought(0)
     const answer = await edit({
       send: (base) => actions.move(brand, { ...base, shadeIds: [...shadeIds], familyId }),
       done: `${labelOf(shadeIds)} moved to ${target?.name ?? 'a new family'} and pinned.`,
@@ -319,7 +320,7 @@ export function FamiliesEditor({
           families={families}
           chosen={held}
           pending={pending}
-          focusAt={bar}
+          sought={sought}
           onMove={(familyId) => void move(held, familyId)}
           onPin={(pinned) => void pin(pinned)}
           onClear={() => setChosen(new Set())}

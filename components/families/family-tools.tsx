@@ -57,10 +57,11 @@ export function FamilyTools({
     event.preventDefault()
     const target = others.find(({ id }) => id === into)
     if (!target) return
-    await edit({
+    const answer = await edit({
       send: (base) => actions.merge(brand, { ...base, familyId, intoId: target.id }),
       done: `${family.name} went into ${target.name}.`,
     })
+    if (answer.ok) onDone()
   }
 
   async function shift(by: 1 | -1) {
