@@ -103,14 +103,16 @@ export function Board({
       ? { ...others, [carry.lane]: others[carry.lane].toSpliced(carry.at, 0, carry.id) }
       : shown
 
+  const orderWith = (held: Carry) =>
+    applyMove(order, { combinationId: held.id, ...placeOfCarry(held) })
   const placeOfCarry = ({ id, lane, at }: Carry): Place =>
     placeAmong(order, id, { lane, at, shown: others[lane] })
   const standing = (id: string, now: Order) => {
     const { lane, at } = find(now, id)!
     return standsInWords(titleOf(state, id), { lane, at, of: now[lane].length })
   }
-  const wouldStand = (held: Carry) =>
-    standing(held.id, applyMove(order, { combinationId: held.id, ...placeOfCarry(held) }))
+  const wouldStand = (held: Carry) => standing(held.id, orderWith(held))
+  const drawnOrder = carry?.by === 'keys' ? orderWith(carry) : order
 
   function putAt(id: string, place: Place) {
     const from = find(order, id)?.lane
@@ -219,7 +221,7 @@ export function Board({
           <>
             {inWords(board.cards.length, count, isNarrowed(filter))}
             {canMove && count > 0 ? (
-              <span className="max-md:hidden">
+              <span className="max-lg:hidden">
                 {' '}
                 · drag a card by its yarn, or press its handle to choose a place
               </span>
@@ -308,7 +310,7 @@ export function Board({
                       }}
                       lane={lane}
                       ids={drawn[lane]}
-                      total={order[lane].length}
+                      total={drawnOrder[lane].length}
                       hands={hands}
                       className={lane === laneShown ? undefined : '@max-[40rem]/board:hidden'}
                     />

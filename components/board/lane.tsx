@@ -1,7 +1,7 @@
 'use client'
 
 import { useDraggable, useDroppable } from '@dnd-kit/core'
-import { defaultRangeExtractor, useVirtualizer } from '@tanstack/react-virtual'
+import { defaultRangeExtractor, measureElement, useVirtualizer } from '@tanstack/react-virtual'
 import { GripVertical } from 'lucide-react'
 import { useEffect, useImperativeHandle, useRef, type Ref } from 'react'
 
@@ -73,6 +73,10 @@ export function Lane({
     getScrollElement: () => scroller.current,
     estimateSize: () => CARD_HEIGHT,
     getItemKey: (index) => ids[index]!,
+    // A lane that is not shown has no heights: those of before are kept.
+    measureElement: (card, entry, lanes) =>
+      measureElement(card, entry, lanes) ||
+      (lanes.measurementsCache[lanes.indexFromElement(card)]?.size ?? CARD_HEIGHT),
     initialRect: { width: 320, height: 800 },
     overscan: 3,
     rangeExtractor: (range) => {
@@ -103,7 +107,10 @@ export function Lane({
       className={cn('@container flex min-h-0 min-w-0 flex-col', className)}
     >
       <header className="flex min-h-10 items-baseline justify-between gap-2 border-b border-rule pb-1 @max-[40rem]/board:justify-end">
-        <h2 id={`lane-${lane}`} className="text-xl @max-[40rem]/board:sr-only">
+        <h2
+          id={`lane-${lane}`}
+          className="text-xl whitespace-nowrap @max-[40rem]/board:sr-only @max-[17rem]:text-lg"
+        >
           {LANE_WORDS[lane]}{' '}
           <span className="font-body text-sm text-ink-faint">
             {ids.length === total ? total : `${ids.length} of ${total}`}
@@ -113,6 +120,7 @@ export function Lane({
           <Button
             variant="quiet"
             size="small"
+            className="shrink-0 whitespace-nowrap"
             aria-label={`${all ? 'Deselect' : 'Select'} all in ${LANE_WORDS[lane]}`}
             onClick={() => onSelect(ids, !all)}
           >
@@ -224,7 +232,7 @@ function LaneCard({
         }
         wrap={{ ref: setNodeRef, ...listeners, className: movable ? 'cursor-grab' : undefined }}
         controls={
-          <div className="flex shrink-0 flex-col items-center gap-1">
+          <div className="flex shrink-0 flex-col items-center gap-1 @max-[17rem]:ml-auto">
             {movable ? (
               <button
                 type="button"
