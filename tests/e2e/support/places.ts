@@ -181,8 +181,8 @@ export async function makePlace(
     })
   const combination = await addCombination(`Kept for ${line_name} alone`, requestKey)
   await client.query(
-    `INSERT INTO combination_places (brand_id, combination_id, place, shade_id, share)
-     SELECT $1, $2, place, shade_id, 0.2
+    `INSERT INTO combination_places (brand_id, combination_id, place, role, shade_id, share)
+     SELECT $1, $2, place, (ARRAY['MC', 'CC1', 'CC2', 'CC3', 'CC4'])[place], shade_id, 0.2
      FROM unnest($3::uuid[]) WITH ORDINALITY AS five (shade_id, place)`,
     [brand_id, combination, five],
   )
