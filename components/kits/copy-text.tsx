@@ -35,7 +35,7 @@ export function CopyText({
   return (
     <section className="border-t border-hairline py-3">
       <div className="flex flex-wrap items-center justify-between gap-3">
-        <h3 className="font-sans text-sm text-ink-faint">{what}</h3>
+        <h3 className="font-body text-sm text-ink-faint">{what}</h3>
         <Button
           size="small"
           icon={said === 'Copied' ? <Check aria-hidden="true" /> : <Copy aria-hidden="true" />}

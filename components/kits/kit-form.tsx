@@ -87,7 +87,7 @@ export function KitForm({
       return
     }
     requestKey.current = ''
-    setSaid('The kit is being built. It stands first in the list below.')
+    setSaid('The kit is begun. It stands first in the list below.')
     router.push(kits as never, { scroll: false })
   }
 
@@ -101,7 +101,7 @@ export function KitForm({
           <details key={lane} open={open} className="mb-3">
             <summary className="min-h-8 py-1 font-title text-lg">
               {LANE_WORDS[lane]}
-              <span className="font-sans ml-2 text-sm text-ink-faint">{inLane.length}</span>
+              <span className="ml-2 font-body text-sm text-ink-faint">{inLane.length}</span>
             </summary>
             <LedgerList>
               {inLane.map((candidate) => (

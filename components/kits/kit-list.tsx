@@ -122,7 +122,7 @@ function KitStandingLine({ kit }: { kit: KitView & KitStanding }) {
     )
   return (
     <Status kind="done">
-      Ready, {sizeInWords(kit.byteLength ?? 0)}
+      Ready{kit.byteLength ? `, ${sizeInWords(kit.byteLength)}` : ''}
       {kit.expiresAt ? `, until ${dayInWords(kit.expiresAt)}` : ''}
     </Status>
   )

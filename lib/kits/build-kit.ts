@@ -1,6 +1,8 @@
 import { createHash } from 'node:crypto'
 
 import { buildKit as buildFiles, stepsOf, type BuiltKit } from '@/lib/exports/build-kit'
+import { PICTURE_SIZES } from '@/lib/exports/constants'
+import { pictureName } from '@/lib/exports/file-names'
 import { Rasteriser } from '@/lib/exports/rasterise'
 import { deleteObjects, putObject } from '@/lib/storage/objects'
 import { Brand, Kit, Line, type Combination } from '@/models'
@@ -81,10 +83,10 @@ async function store(
     alt,
     caption,
     html,
-    pictures: files.flatMap(({ path, offset, byteLength }) => {
-      const size = path.startsWith(`${name}/`) ? /-(\d+)x(\d+)\.png$/.exec(path) : null
-      if (!size || offset === null) return []
-      return { width: Number(size[1]), height: Number(size[2]), offset, byteLength }
+    pictures: PICTURE_SIZES.flatMap(({ width, height }) => {
+      const file = files.find(({ path }) => path === pictureName(name, { width, height }))
+      if (!file || file.offset === null) return []
+      return { width, height, offset: file.offset, byteLength: file.byteLength }
     }),
   }))
   try {

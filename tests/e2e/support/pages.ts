@@ -54,6 +54,7 @@ export const PAGES: readonly StudioPage[] = [
     roles: STUDIO,
     find: firstLink('combinations', new RegExp(`/combinations/${ID}`)),
   },
+  { name: 'kits', roles: STUDIO, find: () => `${LINE}/kits` },
 ]
 
 /** The pages of whoever is signed in, in no brand. */

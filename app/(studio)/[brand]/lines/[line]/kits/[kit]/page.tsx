@@ -27,6 +27,9 @@ import { deleteKitAction } from '../actions'
 
 export const metadata: Metadata = { title: 'Kit' }
 
+/** How tall the pictures are shown. */
+const PICTURE_REM = 13
+
 export default async function KitPage({ params }: PageProps<'/[brand]/lines/[line]/kits/[kit]'>) {
   const { brand, line: lineSlug, kit: kitId } = await params
   const { kit, entries } = await readForPage(brand, async (actor) => {
@@ -107,7 +110,7 @@ function Entry({
       {there ? (
         <ul role="list" className="mb-4 flex flex-wrap items-start gap-4">
           {pictures.map(({ src, width, height }) => (
-            <li key={src} className="min-w-0">
+            <li key={src} style={{ width: `min(100%, ${(PICTURE_REM * width) / height}rem)` }}>
               {/* eslint-disable-next-line @next/next/no-img-element -- a private picture, as it is */}
               <img
                 src={src}
@@ -115,7 +118,7 @@ function Entry({
                 height={height}
                 alt={`The picture of ${width} × ${height} pixels`}
                 loading="lazy"
-                className="h-52 w-auto max-w-full border border-hairline object-contain sm:h-64"
+                className="h-auto w-full border border-hairline"
               />
               <p className="mt-1 text-sm text-ink-faint">
                 {width} × {height}
