@@ -1,6 +1,6 @@
 import { hexToLab } from '@/lib/color/srgb'
 import { shareOut, type Band } from './bands'
-import { generateMotif, MOTIF_COLUMNS, seedOf, type Motif } from './motif'
+import { contrastOf, generateMotif, MOTIF_COLUMNS, seedOf } from './motif'
 
 /** How many stitches a piece of knitting is wide, and how many rows long. */
 export const KNIT = { columns: 24, rows: 40 } as const
@@ -48,8 +48,6 @@ function strandedPair(bands: readonly Band[], shares: readonly number[]): [numbe
   return [main, others.reduce((best, band) => (far(band) > far(best) ? band : best))]
 }
 
-const inMotif = (motif: Motif) => motif.flat().filter(Boolean).length / MOTIF_COLUMNS
-
 /**
  * A stranded band in two yarns between stripes of the others, mirrored about it as far as whole rows
  * go: the largest share and the one that differs most from it in lightness, since stranded knitting
@@ -62,20 +60,8 @@ export function strandedRows(bands: readonly Band[]): ClothRow[] {
   const [main, contrast] = strandedPair(bands, shares)
   const seed = seedOf(bands.map(({ hex }) => hex).join())
   const room = (band: number) => shares[band]! * KNIT.rows
-  const motif = generateMotif(seed, (candidate) => {
-    const ground = candidate.length - inMotif(candidate)
-    return inMotif(candidate) <= room(contrast) && ground <= room(main)
-  })
-  const rest = bands.map((band, at) => {
-    const used = !motif
-      ? 0
-      : at === main
-        ? motif.length - inMotif(motif)
-        : at === contrast
-          ? inMotif(motif)
-          : 0
-    return { ...band, share: Math.max(0, room(at) - used) }
-  })
+  const motif = generateMotif(seed, { contrast: room(contrast), ground: room(main) })
+  const inContrast = motif ? contrastOf(motif) : 0
   const worked = (motif ?? []).map((row): ClothRow => {
     const columns = Array.from({ length: KNIT.columns }, (_, column) => column)
     return {
@@ -83,6 +69,14 @@ export function strandedRows(bands: readonly Band[]): ClothRow[] {
       contrast: { band: contrast, columns: columns.filter((at) => row[at % MOTIF_COLUMNS]) },
     }
   })
+  const used = new Map([
+    [main, worked.length - inContrast],
+    [contrast, inContrast],
+  ])
+  const rest = bands.map((band, at) => ({
+    ...band,
+    share: Math.max(0, room(at) - (used.get(at) ?? 0)),
+  }))
   const counts = plainRows(rest, KNIT.rows - worked.length, [main, contrast])
   // From the band outwards: its ground, the others, the contrast at the edge.
   const others = [...bands.keys()].filter((at) => at !== main && at !== contrast)

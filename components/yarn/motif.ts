@@ -9,6 +9,8 @@ export const MOTIF_COLUMNS = 8
 /** How deep a motif may be, in rows: odd, so that a middle row mirrors it. */
 const DEPTHS = [15, 13, 11, 9, 7, 5, 3]
 const TRIES = 60
+/** The part of a motif that is in the contrast colour. */
+const [LEAST, MOST] = [0.3, 0.62]
 
 /** Mulberry32: a small generator with a 32-bit seed (common practice). */
 function generator(seed: number): () => number {
@@ -66,25 +68,40 @@ function evenness(motif: Motif): number {
 
 /** Knittable floats, neither colour lost, and a figure rather than checks or stripes. */
 const holds = (motif: Motif): boolean => {
-  const share = motif.flat().filter(Boolean).length / (MOTIF_COLUMNS * motif.length)
+  const share = contrastOf(motif) / motif.length
   const even = evenness(motif)
   return (
-    share >= 0.3 &&
-    share <= 0.62 &&
+    share >= LEAST &&
+    share <= MOST &&
     even >= 0.4 &&
     even <= 0.62 &&
     motif.every((row) => longestRun(row) <= LONGEST_FLOAT)
   )
 }
 
+/** How many rows' worth of stitches there are of each yarn. */
+export interface MotifRoom {
+  contrast: number
+  ground: number
+}
+
+/** How much of a motif is in the contrast colour, in rows' worth of stitches. */
+export const contrastOf = (motif: Motif): number =>
+  motif.flat().filter(Boolean).length / MOTIF_COLUMNS
+
 /**
  * A motif of eight stitches, drawn from a seed: rings about a middle, the same left to right and
  * upside down, as a knitter can keep them in the head, every row in both colours with no float longer
- * than {@link LONGEST_FLOAT}. The deepest of which `fits` takes one, or else three rows of single
- * stitches; null when it takes none.
+ * than {@link LONGEST_FLOAT}. The deepest there is room for, or else three rows of single stitches;
+ * null when there is not even room for those.
  */
-export function generateMotif(seed: number, fits: (motif: Motif) => boolean): Motif | null {
+export function generateMotif(seed: number, room: MotifRoom): Motif | null {
+  const fits = (motif: Motif) => {
+    const contrast = contrastOf(motif)
+    return contrast <= room.contrast && motif.length - contrast <= room.ground
+  }
   for (const depth of DEPTHS) {
+    if (depth * LEAST > room.contrast || depth * (1 - MOST) > room.ground) continue
     const next = generator(seed + depth)
     const half = (depth - 1) / 2
     for (let attempt = 0; attempt < TRIES; attempt++) {
