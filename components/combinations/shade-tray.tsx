@@ -37,13 +37,14 @@ export function byFamily(
             : familyId === family.id,
         )
         .sort(
-          (one, other) =>
-            (one.familyPosition ?? Infinity) - (other.familyPosition ?? Infinity) ||
-            other.lab[0] - one.lab[0],
+          (one, other) => placeInFamily(one) - placeInFamily(other) || other.lab[0] - one.lab[0],
         ),
     }))
     .filter((group) => group.shades.length > 0)
 }
+
+/** By people's own order, then light to dark. */
+const placeInFamily = ({ familyPosition }: ShadeView) => familyPosition ?? Number.MAX_SAFE_INTEGER
 
 const holds = ({ label, number }: ShadeView, words: string) =>
   `${label} ${number}`.toLowerCase().includes(words)

@@ -221,6 +221,20 @@ describe('a kept combination', () => {
   })
 })
 
+describe('opening a combination', () => {
+  it('brings what may be put into it: shades not retired, families, photographs, of the line alone', async () => {
+    const own = await makeLine({ id: ours.owner.brandId })
+    const few = await makeShades(own, 7)
+    await few[6]!.update({ status: 'retired' })
+    const picture = await makePhotograph(own)
+    const { id } = await makeCombination(own, few)
+    const opened = await countQueries(() => openCombination(ours.designer, own.slug, id))
+    expect(opened.answer.shades.map((one) => one.id)).toEqual(few.slice(0, 6).map((one) => one.id))
+    expect(opened.answer.photographs.map((one) => one.id)).toEqual([picture.id])
+    expect(opened.queries).toBe(8)
+  })
+})
+
 describe('saving an open combination', () => {
   it('keeps every field and every place, also empty ones, in their order', async () => {
     const combination = await makeCombination(line, shades)
