@@ -38,7 +38,8 @@ export function stripeRows(bands: readonly Band[]): ClothRow[] {
 }
 
 /** The yarn of the largest share, and the one that stands out from it most in lightness. */
-function strandedPair(bands: readonly Band[], shares: readonly number[]): [number, number] {
+function strandedPair(bands: readonly Band[]): [number, number] {
+  const shares = sharesOf(bands)
   const main = shares.indexOf(Math.max(...shares))
   const lightness = bands.map(({ hex }) => hexToLab(hex)[0])
   // A thread of a yarn is not enough to work a motif with, unless there is no other.
@@ -56,53 +57,47 @@ function strandedPair(bands: readonly Band[], shares: readonly number[]): [numbe
  */
 export function strandedRows(bands: readonly Band[]): ClothRow[] {
   if (bands.length < 2) return stripeRows(bands)
-  const shares = sharesOf(bands)
-  const [main, contrast] = strandedPair(bands, shares)
+  const rooms = sharesOf(bands).map((share) => share * KNIT.rows)
+  const [main, contrast] = strandedPair(bands)
   const seed = seedOf(bands.map(({ hex }) => hex).join())
-  const room = (band: number) => shares[band]! * KNIT.rows
-  const motif = generateMotif(seed, { contrast: room(contrast), ground: room(main) })
-  const inContrast = motif ? contrastOf(motif) : 0
-  const worked = (motif ?? []).map((row): ClothRow => {
+  const motif = generateMotif(seed, { contrast: rooms[contrast]!, ground: rooms[main]! }) ?? []
+  const worked = motif.map((row): ClothRow => {
     const columns = Array.from({ length: KNIT.columns }, (_, column) => column)
     return {
       band: main,
       contrast: { band: contrast, columns: columns.filter((at) => row[at % MOTIF_COLUMNS]) },
     }
   })
-  const used = new Map([
-    [main, worked.length - inContrast],
-    [contrast, inContrast],
-  ])
-  const rest = bands.map((band, at) => ({
-    ...band,
-    share: Math.max(0, room(at) - (used.get(at) ?? 0)),
-  }))
-  const counts = plainRows(rest, KNIT.rows - worked.length, [main, contrast])
+  const inContrast = contrastOf(motif)
+  rooms[contrast]! -= inContrast
+  rooms[main]! -= motif.length - inContrast
+  const counts = plainRows(rooms, KNIT.rows - motif.length, [main, contrast])
   // From the band outwards: its ground, the others, the contrast at the edge.
   const others = [...bands.keys()].filter((at) => at !== main && at !== contrast)
-  const order = [main, ...others, contrast]
-  let odd = 0
-  const sides = order.map((band) => {
-    const count = counts[band]!
-    const above = count % 2 === 0 ? count / 2 : Math.floor(count / 2) + (odd++ % 2)
-    return { band, above, below: count - above }
-  })
-  return [
-    ...sides.toReversed().flatMap(({ band, above }) => plain(band, above)),
-    ...worked,
-    ...sides.flatMap(({ band, below }) => plain(band, below)),
-  ]
+  const { above, below } = mirrored([main, ...others, contrast], counts)
+  return [...above, ...worked, ...below]
 }
 
 /** Plain rows for what is left of each share; those not in the motif have one at least. */
-function plainRows(rest: readonly Band[], total: number, worked: readonly number[]): number[] {
-  const ones = rest.map((_, at) => (worked.includes(at) ? 0 : 1))
-  const least = ones.reduce<number>((sum, one) => sum + one, 0)
-  const owed = rest.map(({ share, ...band }, at) => ({
-    ...band,
-    share: Math.max(0, share - ones[at]!),
-  }))
-  return shareOut(owed, total - least, 0).map((count, at) => count + ones[at]!)
+function plainRows(rooms: readonly number[], total: number, inMotif: readonly number[]): number[] {
+  const least = rooms.map((_, at) => (inMotif.includes(at) ? 0 : 1))
+  const more = rooms.map((room, at) => ({ share: Math.max(0, room - least[at]!) }))
+  const left = least.reduce<number>((rest, count) => rest - count, total)
+  return shareOut(more, left, 0).map((count, at) => count + least[at]!)
+}
+
+/** Half of each yarn's rows on either side; odd ones by turns. */
+function mirrored(order: readonly number[], counts: readonly number[]) {
+  const above: ClothRow[] = []
+  const below: ClothRow[] = []
+  let odd = 0
+  for (const band of order) {
+    const count = counts[band]!
+    const up = count % 2 === 0 ? count / 2 : Math.floor(count / 2) + (odd++ % 2)
+    above.unshift(...plain(band, up))
+    below.push(...plain(band, count - up))
+  }
+  return { above, below }
 }
 
 /** How many trebles one side of a round has: four more in every round, as the area grows. */

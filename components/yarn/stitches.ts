@@ -1,7 +1,7 @@
 /** One knitted stitch is this wide and this high. */
 export const STITCH = { width: 12, height: 9 } as const
 
-const round = (value: number): string => String(Math.round(value * 10) / 10)
+const short = (value: number): string => String(Math.round(value * 10) / 10)
 
 /** A drawing of a leg is mirrored for the right one: every x of its path changes its sign. */
 interface Leg {
@@ -28,7 +28,7 @@ const rowOf =
     columns
       .map((column) => {
         const x = column * STITCH.width
-        return `M${round(x + 0.3)} 1.1${leg.left}M${round(x + STITCH.width - 0.3)} 1.1${leg.right}`
+        return `M${short(x + 0.3)} 1.1${leg.left}M${short(x + STITCH.width - 0.3)} 1.1${leg.right}`
       })
       .join('')
 
@@ -47,7 +47,7 @@ export function legGrain(column: number, row: number, right: boolean, grain: num
   const side = right ? -1 : 1
   const x = column * STITCH.width + (right ? STITCH.width : 0)
   const y = row * STITCH.height + grain * 3.1
-  return `M${round(x - side)} ${round(y + 1.6)}l${7 * side} -2.9`
+  return `M${short(x - side)} ${short(y + 1.6)}l${7 * side} -2.9`
 }
 
 /** The height of a crocheted treble, the depth of a round. */
@@ -58,11 +58,11 @@ export const TREBLE = 13
  * which lies at 0 0; the side is the upper one, its corners on the diagonals.
  */
 export function trebles(
-  round1: number,
+  round: number,
   count: number,
 ): { posts: string; tops: string; wraps: string } {
-  const inner = (round1 - 1) * TREBLE
-  const outer = round1 * TREBLE
+  const inner = (round - 1) * TREBLE
+  const outer = round * TREBLE
   const posts: string[] = []
   const tops: string[] = []
   const wraps: string[] = []
@@ -71,19 +71,19 @@ export function trebles(
     const head = outer - 4.6
     const [a, b] = [along(0.14, head), along(0.86, head)]
     const foot = along(0.5, inner + 1)
-    const wide = round1 === 1 ? 0.6 : 2
+    const wide = round === 1 ? 0.6 : 2
     const mid = (a + b) / 2
     const level = (part: number) => inner + (head - inner) * part
     const at = (part: number) => foot + (mid - foot) * part
     posts.push(
-      `M${round(foot - wide)} ${round(-inner + 1)}C${round(at(0.4) - 3)} ${round(-level(0.4))} ${round(a)} ${round(-level(0.7))} ${round(a)} ${round(-head)}L${round(b)} ${round(-head)}C${round(b)} ${round(-level(0.7))} ${round(at(0.4) + 3)} ${round(-level(0.4))} ${round(foot + wide)} ${round(-inner + 1)}z`,
+      `M${short(foot - wide)} ${short(-inner + 1)}C${short(at(0.4) - 3)} ${short(-level(0.4))} ${short(a)} ${short(-level(0.7))} ${short(a)} ${short(-head)}L${short(b)} ${short(-head)}C${short(b)} ${short(-level(0.7))} ${short(at(0.4) + 3)} ${short(-level(0.4))} ${short(foot + wide)} ${short(-inner + 1)}z`,
     )
     wraps.push(
-      `M${round(at(0.42) - 2.4)} ${round(-level(0.36))}l4.8 -2.6M${round(at(0.72) - 2.7)} ${round(-level(0.66))}l5.4 -2.6`,
+      `M${short(at(0.42) - 2.4)} ${short(-level(0.36))}l4.8 -2.6M${short(at(0.72) - 2.7)} ${short(-level(0.66))}l5.4 -2.6`,
     )
     const [c, d] = [along(0.02, outer - 2), along(0.98, outer - 2)]
     tops.push(
-      `M${round(c)} ${round(-outer + 4)}C${round(c + 1)} ${round(-outer - 0.6)} ${round(d - 2)} ${round(-outer - 0.4)} ${round(d + 1)} ${round(-outer + 2)}C${round(d - 1)} ${round(-outer + 5.6)} ${round(c + 2)} ${round(-outer + 6)} ${round(c)} ${round(-outer + 4)}z`,
+      `M${short(c)} ${short(-outer + 4)}C${short(c + 1)} ${short(-outer - 0.6)} ${short(d - 2)} ${short(-outer - 0.4)} ${short(d + 1)} ${short(-outer + 2)}C${short(d - 1)} ${short(-outer + 5.6)} ${short(c + 2)} ${short(-outer + 6)} ${short(c)} ${short(-outer + 4)}z`,
     )
   }
   return { posts: posts.join(''), tops: tops.join(''), wraps: wraps.join('') }
