@@ -40,10 +40,14 @@ import {
   type SaveCombination,
 } from './use-combination-editor'
 
-// The page answers before its cloth is drawn.
-const AsCloth = dynamic(() => import('@/components/yarn/as-cloth').then((it) => it.AsCloth))
-const ClashNotes = dynamic(() =>
-  import('@/components/help/clash-notes').then((it) => it.ClashNotes),
+// The page answers before its cloth is drawn and its pairs are compared.
+const AsCloth = dynamic(() => import('@/components/yarn/as-cloth').then((it) => it.AsCloth), {
+  ssr: false,
+  loading: () => <div className="min-h-[30rem]" />,
+})
+const ClashNotes = dynamic(
+  () => import('@/components/help/clash-notes').then((it) => it.ClashNotes),
+  { ssr: false, loading: () => <div className="min-h-32" /> },
 )
 const CompletePanel = dynamic(() =>
   import('@/components/help/complete-panel').then((it) => it.CompletePanel),
