@@ -35,6 +35,7 @@ async function first(chapter: string, text: string): Promise<string> {
 }
 
 await take('sample-book', `${LINE}/shades`)
+await take('families', `${LINE}/shades/families`)
 await take('shade-table', `${LINE}/shades?view=table`)
 await take('range-study', `${LINE}/shades/study?twins=10`)
 const photograph = await first('photographs', 'The tarn in bracken time')
