@@ -1,7 +1,7 @@
 import { chromaOf, hueOf, type Lab } from '@/lib/color/types'
 import type { StudiedFamily, StudiedGap } from '@/lib/shades/present'
 
-import { outlineOf, spreadLabels, type PlotPoint } from './plot-layout'
+import { outlineOf, type PlotPoint } from './plot-layout'
 
 const WIDTH = 420
 const TALLEST = 480
@@ -54,6 +54,7 @@ export function ColorPlane({
   const labs = families.flatMap(({ shades }) => shades.map(({ lab }) => lab))
   const frame = frameOf([...labs, ...gaps.map(({ lab }) => lab)])
   const { at, height } = frame
+  const marks = [...labs, ...gaps.map(({ lab }) => lab)].map(at)
   return (
     <svg
       viewBox={`0 0 ${WIDTH} ${height.toFixed(0)}`}
@@ -92,7 +93,7 @@ export function ColorPlane({
           )
         }),
       )}
-      {families.length > 1 ? <FamilyNames families={families} frame={frame} /> : null}
+      {families.length > 1 ? <FamilyNames families={families} marks={marks} frame={frame} /> : null}
       <GapMarks points={gaps.map(({ lab }) => at(lab))} />
     </svg>
   )
@@ -137,49 +138,69 @@ function Paper({ frame: { origin, scale, height }, most }: { frame: Frame; most:
   )
 }
 
-/** Each family's name beyond its fullest shade, on the side it lies on. */
+/** Of the type that families' names are set in: a letter's width at most, and a line's height. */
+const TYPE = { width: 7.3, height: 13 }
+/** How far from the place it would have a name may go, outward and round, the nearest first. */
+const WAYS = [0, 14, 30, 50]
+  .flatMap((out) =>
+    [0, 15, -15, 35, -35, 60, -60, 90, -90, 130, -130, 180].map((round) => ({ out, round })),
+  )
+  .sort((one, other) => one.out + Math.abs(one.round) / 2 - other.out - Math.abs(other.round) / 2)
+
+/** Each family's name beyond its fullest shade, on the side it lies on, where nothing else is. */
 function FamilyNames({
   families,
+  marks,
   frame: { at, scale, height, origin },
 }: {
   families: readonly StudiedFamily[]
+  /** What no name may cover. */
+  marks: readonly PlotPoint[]
   frame: Frame
 }) {
-  const placed = families.map(({ id, name, shades }) => {
+  const names: { key: string; name: string; x: number; y: number; width: number }[] = []
+  for (const { id, name, shades } of families) {
     const sum = (axis: 1 | 2) => shades.reduce((total, { lab }) => total + lab[axis], 0)
-    const middle: Lab = [0, sum(1) / shades.length, sum(2) / shades.length]
-    const angle = (hueOf(middle) * Math.PI) / 180
-    const beyond = Math.max(...shades.map(({ lab }) => chromaOf(lab))) + 12 / scale
-    const [x, y] = at([0, beyond * Math.cos(angle), beyond * Math.sin(angle)])
-    return { key: id ?? 'none', name, x, y, isRight: x >= origin[0] }
-  })
-  return [true, false].map((side) => {
-    const names = placed.filter(({ isRight }) => isRight === side)
-    const heights = spreadLabels(
-      names.map(({ y }) => y),
-      14,
-      10,
-      height - 8,
-    )
-    return names.map(({ key, name, x }, index) => {
-      const room = name.length * 6.2
-      const left = side ? Math.min(x, WIDTH - 2 - room) : Math.max(x, 2 + room)
-      return (
-        <text
-          key={key}
-          x={left.toFixed(1)}
-          y={(heights[index]! + 4).toFixed(1)}
-          textAnchor={side ? 'start' : 'end'}
-          fontSize="12"
-          fill="var(--ink)"
-          {...HALO}
-          style={{ fontFamily: 'var(--font-besley-ext), var(--font-besley), Georgia, serif' }}
-        >
-          {name}
-        </text>
-      )
+    const hue = hueOf([0, sum(1), sum(2)])
+    const reach = Math.max(...shades.map(({ lab }) => chromaOf(lab))) + 12 / scale
+    const width = name.length * TYPE.width
+    const boxes = WAYS.map(({ out, round }) => {
+      const angle = ((hue + round) * Math.PI) / 180
+      const beyond = reach + out / scale
+      const [x, y] = at([0, beyond * Math.cos(angle), beyond * Math.sin(angle)])
+      const left = x >= origin[0] ? x : x - width
+      return {
+        x: Math.max(2, Math.min(left, WIDTH - 2 - width)),
+        y: Math.max(TYPE.height, Math.min(y + TYPE.height / 3, height - 4)),
+      }
     })
-  })
+    const free = boxes.find(
+      ({ x, y }) =>
+        marks.every(
+          ([mx, my]) => mx < x - 6 || mx > x + width + 6 || my > y + 7 || my < y - TYPE.height - 3,
+        ) &&
+        names.every(
+          (other) =>
+            other.x > x + width || other.x + other.width < x || Math.abs(other.y - y) > TYPE.height,
+        ),
+    )
+    names.push({ key: id ?? 'none', name, width, ...(free ?? boxes[0]!) })
+  }
+  return names.map(({ key, name, x, y, width }) => (
+    <text
+      key={key}
+      // Set from the side that faces its shades, since the width is an estimate.
+      x={(x + width / 2 >= origin[0] ? x : x + width).toFixed(1)}
+      y={y.toFixed(1)}
+      textAnchor={x + width / 2 >= origin[0] ? 'start' : 'end'}
+      fontSize="12"
+      fill="var(--ink)"
+      {...HALO}
+      style={{ fontFamily: 'var(--font-besley-ext), var(--font-besley), Georgia, serif' }}
+    >
+      {name}
+    </text>
+  ))
 }
 
 /** Where a letter may stand by its cross. */

@@ -34,7 +34,8 @@ export function ShadeLink({
   className?: string
 }) {
   return (
-    <TextLink href={shadesHref(place, `/${shade.id}`)} className={className}>
+    // A study holds hundreds of them, most of which nobody follows.
+    <TextLink href={shadesHref(place, `/${shade.id}`)} prefetch={false} className={className}>
       {shade.label}
     </TextLink>
   )

@@ -50,11 +50,11 @@ test('an owner fills a gap with a target shade, and takes it back', async ({ pag
   const number = gaps.getByLabel('Number').first()
   const proposed = await number.inputValue()
   await gaps.getByRole('button', { name: 'Add as target shade: gap A' }).click()
-  await expect(page.getByText(`Target shade ${proposed} added.`)).toBeVisible()
+  await expect(page.getByText(`Target shade ${proposed} added.`)).toBeVisible({ timeout: 30_000 })
   await expect(gaps).toBeFocused()
   await expect(number).not.toHaveValue(proposed)
   await page.getByRole('button', { name: 'Undo' }).click()
-  await expect(page.getByText('The target shade is taken back.')).toBeVisible()
+  await expect(page.getByText('The target shade is taken back.')).toBeVisible({ timeout: 30_000 })
   await expect(number).toHaveValue(proposed)
 
   // A number that is taken is refused at its field, and stays typed.
