@@ -8,6 +8,7 @@ import { Button } from '@/components/ui/button'
 import { LinkButton } from '@/components/ui/link-button'
 import { toastDone, toastProblem, toastUndo } from '@/components/ui/toast'
 import type { ActionResult } from '@/lib/errors'
+import { KIT_LIMITS } from '@/lib/kits/constants'
 
 /** An action about one combination. */
 export type OnOne = (
@@ -94,7 +95,11 @@ export function SelectionBar({
           {selected.length === 1 ? 'Delete combination' : 'Delete combinations'}
         </Button>
       ) : null}
-      <LinkButton href={kitsHref + query}>Build a kit</LinkButton>
+      {selected.length > KIT_LIMITS.combinations ? (
+        <p className="text-ink-soft">A kit holds {KIT_LIMITS.combinations} at most.</p>
+      ) : (
+        <LinkButton href={kitsHref + query}>Build a kit</LinkButton>
+      )}
     </section>
   )
 }

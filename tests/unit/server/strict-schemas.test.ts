@@ -12,6 +12,7 @@ const MODULES = import.meta.glob<Record<string, unknown>>('../../../lib/*/schema
  */
 const LENIENT = new Map([
   ['galleryFilterSchema', 'the address of a page'],
+  ['kitsAddressSchema', 'the address of a page'],
   ['shadeTableSchema', 'the address of a page'],
   ['sampleBookSchema', 'the address of a page'],
   ['rangeStudySchema', 'the address of a page'],
