@@ -106,7 +106,7 @@ export function ShadeTray({
           ) : null}
         </div>
       </div>
-      <Ground className="border border-hairline px-4">
+      <Ground className="border border-hairline px-3">
         {shown.length === 0 ? (
           <p className="py-4">No shade fits that. Clear the search to see all of them.</p>
         ) : null}
@@ -116,10 +116,10 @@ export function ShadeTray({
             aria-label={family.name}
             className="border-b border-hairline py-4 last:border-b-0"
           >
-            {groups.length > 1 ? <h3 className="mb-2">{family.name}</h3> : null}
+            {groups.length > 1 ? <h3 className="mb-1 px-1.5">{family.name}</h3> : null}
             <ul
               role="list"
-              className="grid grid-cols-[repeat(auto-fill,minmax(6rem,1fr))] gap-x-3 gap-y-3"
+              className="grid grid-cols-[repeat(auto-fill,minmax(6rem,1fr))] gap-x-1 gap-y-1"
             >
               {members.map((shade) => (
                 <TrayShade
@@ -155,7 +155,8 @@ const TrayShade = memo(function TrayShade({
     false,
   )
   return (
-    <li className="min-w-0 [contain-intrinsic-size:auto_5.5rem] [content-visibility:auto]">
+    // Padded, since what is not drawn out of sight is cut at its edges, outlines too.
+    <li className="min-w-0 p-1 [contain-intrinsic-size:auto_5.5rem] [content-visibility:auto]">
       <button
         ref={setNode}
         type="button"
