@@ -59,7 +59,7 @@ export function FamilyTile({
       onClick={onChoose}
       onKeyDown={onKey}
       className={cn(
-        'relative block size-full touch-manipulation scroll-mb-40 rounded border-2 p-1.5 text-left',
+        'relative flex size-full touch-manipulation scroll-mb-40 flex-col items-start rounded border-2 p-1.5 text-left',
         chosen ? 'border-woad bg-wash' : 'border-transparent hover:border-hairline',
         isDragging && 'opacity-40',
       )}
