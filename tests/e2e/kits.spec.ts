@@ -16,8 +16,10 @@ test('a marketer builds a kit, follows it, looks through it, copies from it and 
 
   // Whichever lanes they stand in, two combinations are ticked by the keyboard.
   const form = page.getByRole('form', { name: 'Build a kit' })
-  for (const lane of await form.locator('details:not([open]) > summary').all()) await lane.click()
-  for (const box of await form.getByRole('checkbox', { checked: true }).all()) await box.uncheck()
+  const folded = form.locator('details:not([open]) > summary')
+  while ((await folded.count()) > 0) await folded.first().click()
+  const ticked = form.getByRole('checkbox', { checked: true })
+  while ((await ticked.count()) > 0) await ticked.first().uncheck()
   await expect(form.getByRole('button', { name: 'Build kit' })).toBeDisabled()
   for (const at of [0, 1]) {
     await form.getByRole('checkbox').nth(at).focus()
