@@ -10,6 +10,7 @@ export const governed = ['app', 'components', 'lib', 'models']
 /** A file belongs to the first zone that matches; present.ts is part of its noun besides. */
 export const zones = [
   zone('color', 'lib/color/**'),
+  zone('naming', 'lib/naming/**'),
   zone('auth', 'lib/auth/**'),
   zone('server', 'lib/server/**'),
   zone('jobs', 'lib/jobs/**'),
@@ -34,7 +35,7 @@ export const zones = [
 const NEXT = ['next', 'next/**', 'next-auth', 'next-auth/**']
 const FOUNDATION = ['env', 'errors', 'logger']
 const SERVICES = ['auth', 'server', 'jobs', 'storage']
-const DOMAIN = ['noun', 'schema', 'present', 'models', 'color']
+const DOMAIN = ['noun', 'schema', 'present', 'models', 'color', 'naming']
 
 /** The options of boundaries/dependencies. */
 export const importTable = {
@@ -47,6 +48,21 @@ export const importTable = {
   policies: [
     // lib/color: itself and pure packages, no Node.js
     from('color', local('color'), packages('culori', 'chroma-js', '@vibrant/quantizer-mmcq')),
+
+    // lib/naming: itself, colour science and pure packages. It holds a dictionary of some megabytes,
+    // so that the browser gets its types and its answers only.
+    from(
+      'naming',
+      local('naming', 'color'),
+      packages(
+        'cmu-pronouncing-dictionary',
+        'color-name-lists',
+        'munkres',
+        'obscenity',
+        'retext-*',
+        'unified',
+      ),
+    ),
 
     from(
       'models',
@@ -87,7 +103,7 @@ export const importTable = {
     from(
       'components',
       local('components', 'drawing', 'color', 'schema'),
-      types('present', 'errors'),
+      types('present', 'errors', 'naming'),
       anyPackage(),
     ),
     from(

@@ -9,7 +9,7 @@ import { sqlPlugin } from './eslint.sql.mjs'
 
 const ENVIRONMENT = 'Only lib/env.ts reads the environment: use env() of @/lib/env.'
 const IMPURE =
-  'lib/color is pure: the same input gives the same output, on any machine, at any time.'
+  'lib/color and lib/naming are pure: the same input gives the same output, on any machine, at any time.'
 
 const SHIPPED = [...governed, 'worker.ts', 'seeders/**/*.ts', 'migrations/**/*.ts']
 const HTML = 'What people see is written as elements: React escapes it, a string of HTML does not.'
@@ -92,7 +92,7 @@ export default defineConfig([
     },
   },
   {
-    files: ['lib/color/**'],
+    files: ['lib/color/**', 'lib/naming/**'],
     rules: {
       'no-restricted-globals': [
         'error',
