@@ -56,11 +56,11 @@ export const importTable = {
       local('naming', 'color'),
       packages(
         'cmu-pronouncing-dictionary',
-        'color-name-lists',
         'munkres',
         'obscenity',
         'retext-*',
         'unified',
+        'vfile',
       ),
     ),
 

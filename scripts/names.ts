@@ -5,29 +5,26 @@
  */
 import { parseArgs } from 'node:util'
 
-import { respell } from '@/lib/naming/arpabet'
 import { playOnWords } from '@/lib/naming/play'
-import { heardApart, pronounceName, type SpokenName } from '@/lib/naming/pronounce'
+import { heardApart, pronounceName, respellName } from '@/lib/naming/pronounce'
 import { NEAR, SAME } from '@/lib/naming/sound-distance'
 
 const USAGE = `npm run names -- hear "first name" "second name"
 npm run names -- play --lab 45,-20,10 [--limit 20] [--fibre wool]…`
 
-function printSpoken(name: string, { words, sounds, sure }: SpokenName): void {
-  console.log(name)
-  for (const sound of sounds) console.log(`  ${respell(sound)}   ${sound.join(' ')}`)
-  for (const { word, source } of sure ? [] : words)
+function printSpoken(name: string): void {
+  const spoken = pronounceName(name)
+  if (spoken.sounds.length === 0) throw new RangeError(`“${name}” has nothing to say.`)
+  console.log(`${name}: ${respellName(spoken)}`)
+  for (const sound of spoken.sounds) console.log(`  ${sound.join(' ')}`)
+  for (const { word, source } of spoken.words)
     if (source === 'guess') console.log(`  “${word}” is in no dictionary: guessed by its letters.`)
 }
 
 function hear(names: string[]): void {
   const [first, second] = names
   if (!first || !second || names.length > 2) throw new RangeError(USAGE)
-  for (const name of [first, second]) {
-    const spoken = pronounceName(name)
-    if (spoken.sounds.length === 0) throw new RangeError(`“${name}” has nothing to say.`)
-    printSpoken(name, spoken)
-  }
+  for (const name of [first, second]) printSpoken(name)
   const apart = heardApart(first, second)
   const verdict =
     apart <= SAME ? 'sounds the same' : apart <= NEAR ? 'sounds near' : 'sounds unlike'

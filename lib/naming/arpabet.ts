@@ -166,8 +166,24 @@ export const PHONEMES: readonly string[] = [
 ]
 
 const WRITTEN: Record<string, string> = {
-  AA: 'ah', AE: 'a', AH: 'uh', AO: 'aw', AW: 'ow', AY: 'y', EH: 'e', ER: 'ur', EY: 'ay', IH: 'i',
-  IY: 'ee', OW: 'oh', OY: 'oy', UH: 'uu', UW: 'oo', DH: 'th', HH: 'h', JH: 'j',
+  AA: 'ah',
+  AE: 'a',
+  AH: 'uh',
+  AO: 'aw',
+  AW: 'ow',
+  AY: 'y',
+  EH: 'e',
+  ER: 'ur',
+  EY: 'ay',
+  IH: 'i',
+  IY: 'ee',
+  OW: 'oh',
+  OY: 'oy',
+  UH: 'uu',
+  UW: 'oo',
+  DH: 'th',
+  HH: 'h',
+  JH: 'j',
 }
 
 /** Whether English begins a syllable with these consonants; all that respelling needs. */
@@ -200,7 +216,7 @@ export function respell(sound: Sound): string {
       const spelled = syllable
         .map((phoneme, at) => {
           const symbol = symbolOf(phoneme)
-          if (symbol === 'AY') return at === 0 ? 'eye' : at < syllable.length - 1 ? 'igh' : 'y'
+          if (symbol === 'AY') return at === 0 ? 'eye' : 'y'
           return WRITTEN[symbol] ?? symbol.toLowerCase()
         })
         .join('')

@@ -1,5 +1,5 @@
 import { heardApart } from './pronounce'
-import { headWords, stemOf, wordsOf } from './words'
+import { headWords, SMALL_WORDS, stemOf, wordsOf } from './words'
 
 /** A fibre, or an animal known for its fur, that a name may seem to promise. */
 export interface ImpliedFiber {
@@ -86,10 +86,19 @@ export function impliedFibers(name: string, fibers: readonly string[]): ImpliedF
   const held = new Set(fibers.flatMap((fiber) => fiber.toLowerCase().split(/\s+/)))
   if (['merino', 'lambswool', 'shetland', 'bluefaced'].some((breed) => held.has(breed)))
     held.add('wool')
-  return headWords(wordsOf(name)).flatMap((word) => {
-    const found = byWord(word)
-    return found && !found.fibers.some((fiber) => held.has(fiber)) ? [found.implied] : []
-  })
+  const words = wordsOf(name)
+  const absent = (found: Found | null) =>
+    found && !found.fibers.some((fiber) => held.has(fiber)) ? [found.implied] : []
+  const single = headWords(words).flatMap((word) => absent(byWord(word)))
+  if (single.length > 0) return single
+  // Two words that are one to the ear: mo hair, merry no.
+  return words
+    .slice(1)
+    .flatMap((word, before) =>
+      SMALL_WORDS.has(word) || SMALL_WORDS.has(words[before]!)
+        ? []
+        : absent(byWord(`${words[before]} ${word}`)),
+    )
 }
 
 interface Found {
@@ -109,7 +118,21 @@ function byWord(word: string): Found | null {
   return found
 }
 
+/** Two words must come nearer to be taken for one. */
+const ALIKE_AS_TWO = 0.12
+
+function lookAtTwo(words: string): Found | null {
+  for (const names of FIBERS)
+    for (const name of names) {
+      if (name.length < 5 || Math.abs(name.length + 1 - words.length) > 3) continue
+      if (heardApart(words, name) <= ALIKE_AS_TWO)
+        return { fibers: names, implied: implied(words, names[0]!, 'sounds alike', 0.5) }
+    }
+  return null
+}
+
 function lookAt(word: string): Found | null {
+  if (word.includes(' ')) return lookAtTwo(word)
   const stem = stemOf(word)
   for (const names of FIBERS)
     if (names.includes(word) || names.includes(stem))

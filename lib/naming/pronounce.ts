@@ -1,10 +1,10 @@
 import { dictionary } from 'cmu-pronouncing-dictionary'
 
-import { isVowel, parseSound, symbolOf, type Sound } from './arpabet'
+import { isVowel, parseSound, respell, symbolOf, type Sound } from './arpabet'
 import { guessSound } from './letters-to-sound'
-import { readySound, soundCost, soundDistance, type ReadySound } from './sound-distance'
+import { readySound, soundDistance, type ReadySound } from './sound-distance'
 import { TRADE_WORDS } from './trade-words'
-import { wordsOf } from './words'
+import { SMALL_WORDS, wordsOf } from './words'
 
 /**
  * Whence a pronunciation is: the CMU dictionary, our own list of trade words, put together of words
@@ -28,7 +28,7 @@ export interface SpokenName {
 }
 
 /** A name of five words with two ways each need not be said in 32 ways. */
-const MOST_WAYS = 6
+const MOST_WAYS = 4
 
 function lookUp(word: string): SpokenWord | null {
   const trade = Object.hasOwn(TRADE_WORDS, word) ? TRADE_WORDS[word] : undefined
@@ -103,12 +103,17 @@ export function pronounceWord(word: string): SpokenWord {
 export function pronounceName(text: string): SpokenName {
   const words = wordsOf(text).map(pronounceWord)
   let sounds: Sound[] = words.length > 0 ? [[]] : []
-  for (const { sounds: ways } of words) {
-    const next = sounds.flatMap((before) => ways.map((way) => [...before, ...way]))
-    sounds = next.slice(0, MOST_WAYS)
+  for (const { word, sounds: ways } of words) {
+    // How “the” is said before a vowel tells no names apart.
+    const told = SMALL_WORDS.has(word) ? ways.slice(0, 1) : ways
+    sounds = sounds.flatMap((before) => told.map((way) => [...before, ...way])).slice(0, MOST_WAYS)
   }
   return { words, sounds, sure: words.every(({ source }) => source !== 'guess') }
 }
+
+/** A name as English would spell what is heard: `STEM thuh DYD`. */
+export const respellName = ({ words }: SpokenName): string =>
+  words.map(({ sounds }) => respell(sounds[0]!)).join(' ')
 
 const heard = new Map<string, readonly ReadySound[]>()
 
@@ -122,22 +127,16 @@ export function earOf(text: string): readonly ReadySound[] {
   return ready
 }
 
-const least = (
-  ones: readonly ReadySound[],
-  others: readonly ReadySound[],
-  of: (one: ReadySound, other: ReadySound) => number,
-): number => Math.min(...ones.flatMap((one) => others.map((other) => of(one, other))))
-
 /**
  * How unlike two names sound, in the way of saying them in which they are nearest: 0 alike, NEAR
  * mistakable; Infinity when one cannot be said at all.
  */
-export const heardApart = (one: string, other: string): number =>
-  least(earOf(one), earOf(other), soundDistance)
-
-/** {@link heardApart} in whole sounds rather than per sound. */
-export const heardCost = (one: string, other: string): number =>
-  least(earOf(one), earOf(other), soundCost)
+export function heardApart(one: string, other: string): number {
+  let apart = Infinity
+  for (const a of earOf(one))
+    for (const b of earOf(other)) apart = Math.min(apart, soundDistance(a, b))
+  return apart
+}
 
 /** From the last stressed vowel on: two words rhyme when theirs are the same. */
 export function rimeOf(sound: Sound): string {
