@@ -142,7 +142,9 @@ export function tellColorStory(
     .map((draft) => ({
       draft,
       score:
-        draft.worth * clamp(1 - Math.max(...draft.things.map(({ apart }) => apart)) / (2 * FAR)),
+        draft.worth *
+        Math.min(...draft.things.map(({ thing }) => AS_NAME[thing.kind] ?? 1)) *
+        clamp(1 - Math.max(...draft.things.map(({ apart }) => apart)) / (2 * FAR)),
     }))
     .sort((a, b) => b.score - a.score || (a.draft.words < b.draft.words ? -1 : 1))
   return choose(scored, limit, fibers)

@@ -1,13 +1,15 @@
-/** `npm run bench -- match board kit`: prints each figure beside its bar; exits 1 when one misses. */
+/** `npm run bench -- match board kit names`: prints figures beside their bars; exits 1 when one misses. */
 import { printFigures, type Figure } from '../lib/figures.mjs'
 import { benchBoard } from './board'
 import { benchKit } from './kit'
 import { benchMatch } from './match'
+import { benchNames } from './names'
 
 const BENCHES: Record<string, () => Promise<Figure[]>> = {
   match: benchMatch,
   board: benchBoard,
   kit: benchKit,
+  names: benchNames,
 }
 
 async function main(names: string[]): Promise<number> {
