@@ -95,13 +95,12 @@ const AT_MOST_OF_ONE_IDIOM = 2
 const AT_MOST_OF_ONE_EXCHANGE = 4
 /** What each further name with the same word is worth less, so that a list is not all of thyme. */
 const AGAIN = 0.03
-/** Up to here, in ΔE00, a word's colour is the shade's; from there on it is another. */
-const COLOR_SAME = 6
+/** From here on, in ΔE00, a word's colour is another than the shade's. */
 const COLOR_FAR = 24
 /** What a trade word is worth that suits any shade, beside a colour word that fits. */
 const NO_COLOR = 0.3
 const MOST_CALLED = 0.9
-const WEIGHTS = { sound: 0.5, known: 0.1, fit: 0.34, short: 0.06 }
+const WEIGHTS = { sound: 0.44, known: 0.2, fit: 0.31, short: 0.05 }
 /** Names up to the first length (letters and spaces) stand well on a ball band; beyond the second, hardly. */
 const SHORT = 18
 const LONG = 36
@@ -243,9 +242,13 @@ function hear(
   // What is heard and seen in the new word is not lost: the o before live, the s before late.
   if (within && slot.text.length >= 3 && word.text.endsWith(slot.text))
     return { sound: 'within', value: 0.85, apart }
-  if (apart <= NEAR && sameLength) return { sound: 'near', value: 0.97 - 1.3 * apart, apart }
+  // Whoever hears the end of a word knows how it began: pine for nine, call it a grey.
+  const rhyme = rhymes && apart <= 0.45 ? 0.92 - 0.65 * apart : 0
+  const near =
+    apart <= NEAR && sameLength ? 0.97 - 1.3 * apart - 2.5 * Math.max(0, apart - 0.12) : 0
+  if (near > 0) return { sound: 'near', value: Math.max(near, rhyme), apart }
+  if (rhyme > 0) return { sound: 'rhyme', value: rhyme, apart }
   if (within && apart < 0.3) return { sound: 'within', value: 0.55, apart }
-  if (rhymes && apart <= 0.45) return { sound: 'rhyme', value: 0.66 - 0.7 * apart, apart }
   return null
 }
 
@@ -257,9 +260,9 @@ function grammarOf(word: PlayWord, slot: Slot, sound: PlaySound, apart: number):
   if (word.roles.has(slot.role)) return 1
   if (sound === 'same') return 0.97
   if (sound === 'rhyme') return 0
-  // A thing with a colour stands before a noun as well as a colour does.
-  if (slot.role === 'j' && word.colored && word.roles.has('n')) return 0.93
-  if (sound === 'within') return 0.93
+  // A thing stands before a noun as well as an adjective does: a tin box.
+  if (slot.role === 'j' && word.colored && word.roles.has('n')) return 0.98
+  if (sound === 'within') return word.roles.has('n') ? 0.93 : 0.82
   return 0.95 - 0.8 * apart
 }
 
@@ -293,7 +296,7 @@ function heardOf(word: PlayWord): readonly Heard[] {
 }
 
 const clamp = (value: number): number => Math.max(0, Math.min(1, value))
-const fitOf = (apart: number): number => clamp((COLOR_FAR - apart) / (COLOR_FAR - COLOR_SAME))
+const fitOf = (apart: number): number => clamp(1 - apart / COLOR_FAR)
 
 /** A word that has, or calls to mind, a colour near the shade. */
 interface Near {

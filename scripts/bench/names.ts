@@ -34,8 +34,14 @@ const fixture = <T>(name: string): T =>
 /** Only what differs: of “new leash on life” and “new lease on life”, leash and lease. */
 function coreOf(one: string, other: string): [string, string] {
   const [a, b] = [one.split(' '), other.split(' ')]
-  while (a.length > 1 && b.length > 1 && a[0] === b[0]) [a.shift(), b.shift()]
-  while (a.length > 1 && b.length > 1 && a.at(-1) === b.at(-1)) [a.pop(), b.pop()]
+  while (a.length > 1 && b.length > 1 && a[0] === b[0]) {
+    a.shift()
+    b.shift()
+  }
+  while (a.length > 1 && b.length > 1 && a.at(-1) === b.at(-1)) {
+    a.pop()
+    b.pop()
+  }
   return [a.join(' '), b.join(' ')]
 }
 
