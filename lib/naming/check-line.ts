@@ -124,7 +124,7 @@ function alikeBy(
   const [mine, theirs] = [heads.get(one.id)!, heads.get(other.id)!]
   const shared = mine.find((word) => theirs.includes(word))
   if (shared) return `share “${shared}”`
-  if (heardApart(one.name, other.name) <= NEAR) return 'sound alike'
+  if (heardApart(one.name, other.name, NEAR) <= NEAR) return 'sound alike'
   if (mine[0] && mine[0].slice(0, 4) === theirs[0]?.slice(0, 4)) return 'begin alike'
   return null
 }

@@ -14,7 +14,7 @@ export function checkSound(name: string, others: readonly OtherName[]): Finding[
   const spoken = pronounceName(name)
   if (spoken.sounds.length === 0) return []
   return others
-    .map((other) => ({ other, apart: heardApart(name, other.name) }))
+    .map((other) => ({ other, apart: heardApart(name, other.name, NEAR) }))
     .filter(({ other, apart }) => apart <= NEAR && !isSameName(name, other.name))
     .sort((a, b) => a.apart - b.apart)
     .map(({ other, apart }): Finding => {

@@ -53,7 +53,7 @@ const LIKE_NEIGHBOUR = 0.5
 function areAlike(one: string, other: string): boolean {
   const heads = headWords(wordsOf(one)).map(stemOf)
   const shared = headWords(wordsOf(other)).some((word) => heads.includes(stemOf(word)))
-  return shared || heardApart(one, other) <= NEAR
+  return shared || heardApart(one, other, NEAR) <= NEAR
 }
 
 /** How well a name suits a shade: by its colour words, less when a neighbour is called alike; 0–1. */
@@ -101,7 +101,9 @@ export const fitMatrix = (
 export function assign(fits: readonly (readonly number[])[]): [row: number, column: number][] {
   if (fits.length === 0 || fits[0]!.length === 0) return []
   const costs = fits.map((row) => row.map((fit) => 1 - fit))
-  return munkres(costs).filter(([row, column]) => fits[row]![column]! > 0)
+  return munkres(costs)
+    .filter(([row, column]) => fits[row]![column]! > 0)
+    .sort(([one], [other]) => one - other)
 }
 
 type Pair = [row: number, column: number]

@@ -85,6 +85,7 @@ interface ReadyIdiom {
   stems: ReadonlySet<string>
   /** sounds of each word, for how much of the saying stays */
   lengths: readonly number[]
+  total: number
   evoked: readonly (readonly [word: string, lab: Lab])[]
   /** colours it names outright */
   colors: readonly Lab[]
@@ -186,6 +187,9 @@ function gatherIdioms(): { idioms: ReadyIdiom[]; slots: Slot[] } {
     if (kind === 'color') colors.set(word, lab)
   }
   const idioms = IDIOMS.map((idiom, number): ReadyIdiom => {
+    const lengths = idiom.words.map(
+      ({ text }) => pronounceWord(text.toLowerCase()).sounds[0]!.length,
+    )
     const places = new Map<string, number[]>()
     idiom.words.forEach(({ text, role }, place) => {
       if (!role) return
@@ -199,7 +203,8 @@ function gatherIdioms(): { idioms: ReadyIdiom[]; slots: Slot[] } {
     return {
       idiom,
       stems: new Set(idiom.words.map(({ text }) => stemOf(text))),
-      lengths: idiom.words.map(({ text }) => pronounceWord(text.toLowerCase()).sounds[0]!.length),
+      lengths,
+      total: lengths.reduce((sum, length) => sum + length, 0),
       evoked: idiom.words.flatMap(({ text }) =>
         [...evokedBy(text), ...(labs.get(text) ?? labs.get(stemOf(text)) ?? [])].map(
           (lab) => [text, lab] as const,
@@ -329,7 +334,8 @@ const SOUNDS_LIKE: Record<PlaySound, string> = {
   rhyme: 'rhymes with',
 }
 
-interface Candidate extends Heard {
+interface Candidate {
+  heard: Heard
   word: PlayWord
   at: number
   places: readonly number[]
@@ -368,13 +374,12 @@ export function playOnWords(
     if (word.colored && ownFit === 0) continue
     for (const heard of heardOf(word))
       for (const { idiom: at, at: everywhere } of heard.slot.places) {
-        const { idiom, stems, lengths } = idioms[at]!
+        const { idiom, stems, lengths, total } = idioms[at]!
         if (contradicts[at] || stems.has(word.stem)) continue
         const near = word.colored ? null : called[at]!
         const fit = word.colored
           ? ownFit
           : NO_COLOR + (near ? (MOST_CALLED - NO_COLOR) * fitOf(near.apart) : 0)
-        const total = lengths.reduce((sum, length) => sum + length, 0)
         const short = clamp((LONG - idiom.phrase.length) / (LONG - SHORT))
         for (const places of everywhere.length > 1
           ? [everywhere, everywhere.slice(0, 1)]
@@ -390,7 +395,7 @@ export function playOnWords(
               WEIGHTS.known * ((idiom.known - 1) / 2) +
               WEIGHTS.fit * fit +
               WEIGHTS.short * short)
-          candidates.push({ ...heard, word, at, places, colored, called: near, score })
+          candidates.push({ heard, word, at, places, colored, called: near, score })
         }
       }
   }
@@ -405,9 +410,17 @@ export function playOnWords(
   return choose(left, limit, fibers)
 }
 
-function present({ slot, sound, word, at, places, colored, called, score }: Candidate): Play {
+function present({
+  heard: { slot, sound },
+  word,
+  at,
+  places,
+  colored,
+  called,
+  score,
+}: Candidate): Play {
   const { idiom } = lists().idioms[at]!
-  const heard = `“${word.text}” ${SOUNDS_LIKE[sound]} “${slot.text}”`
+  const alike = `“${word.text}” ${SOUNDS_LIKE[sound]} “${slot.text}”`
   const suits =
     colored !== null
       ? `; its colour is ΔE00 ${colored.toFixed(0)} from the shade.`
@@ -421,48 +434,45 @@ function present({ slot, sound, word, at, places, colored, called, score }: Cand
     heardAs: `“${word.text}” (${respell(word.said[0]!.sound)}) for “${slot.text}” (${respell(slot.said[0]!.sound)})`,
     sound,
     colorApart: colored ?? called?.apart ?? null,
-    why: heard + suits,
+    why: alike + suits,
     score,
   }
 }
 
 /** The best, each worth a little less for every one chosen before it that set in the same word. */
 function choose(candidates: Candidate[], limit: number, fibers: readonly string[]): Play[] {
-  let left = candidates
-    .sort((a, b) => b.score - a.score || a.at - b.at || (a.word.text < b.word.text ? -1 : 1))
-    .slice(0, 60 * limit)
+  const ranked = candidates.sort(
+    (a, b) => b.score - a.score || a.at - b.at || (a.word.text < b.word.text ? -1 : 1),
+  )
   const chosen: Play[] = []
+  const done = new Set<Candidate>()
   const counts = new Map<string, number>()
   const count = (key: string): number => counts.get(key) ?? 0
-  while (chosen.length < limit && left.length > 0) {
-    let best = left[0]!
+  const exchangeOf = ({ heard, word }: Candidate) => `${heard.slot.stem} for ${word.stem}`
+  while (chosen.length < limit) {
+    let best: Candidate | null = null
     let worth = -Infinity
-    for (const candidate of left) {
+    for (const candidate of ranked) {
       if (candidate.score <= worth) break
-      const now = candidate.score - AGAIN * count(`word ${candidate.word.stem}`)
-      if (now > worth) {
-        worth = now
-        best = candidate
-      }
+      if (done.has(candidate)) continue
+      const now = candidate.score - AGAIN * count(candidate.word.stem)
+      if (now <= worth) continue
+      if (count(`idiom ${candidate.at}`) >= AT_MOST_OF_ONE_IDIOM) continue
+      if (count(exchangeOf(candidate)) >= AT_MOST_OF_ONE_EXCHANGE) continue
+      worth = now
+      best = candidate
     }
+    if (!best) break
+    done.add(best)
     const play = present(best)
-    const exchange = `exchange ${best.slot.stem} ${best.word.stem}`
     // Sayings grow out of each other: rags to riches, from rags to riches.
     const fresh = chosen.every(
       ({ name }) => !contains(name, play.name) && !contains(play.name, name),
     )
-    if (fresh && impliedFibers(play.name, fibers).length === 0) {
-      chosen.push(play)
-      for (const key of [`idiom ${best.at}`, exchange, `word ${best.word.stem}`])
-        counts.set(key, count(key) + 1)
-    }
-    left = left.filter(
-      (other) =>
-        other !== best &&
-        (other.at !== best.at || count(`idiom ${other.at}`) < AT_MOST_OF_ONE_IDIOM) &&
-        (other.word !== best.word ||
-          count(`exchange ${other.slot.stem} ${other.word.stem}`) < AT_MOST_OF_ONE_EXCHANGE),
-    )
+    if (!fresh || impliedFibers(play.name, fibers).length > 0) continue
+    chosen.push(play)
+    for (const key of [`idiom ${best.at}`, exchangeOf(best), best.word.stem])
+      counts.set(key, count(key) + 1)
   }
   return chosen
 }

@@ -129,12 +129,12 @@ export function earOf(text: string): readonly ReadySound[] {
 
 /**
  * How unlike two names sound, in the way of saying them in which they are nearest: 0 alike, NEAR
- * mistakable; Infinity when one cannot be said at all.
+ * mistakable; Infinity when one cannot be said at all, or when it is more than `most`.
  */
-export function heardApart(one: string, other: string): number {
+export function heardApart(one: string, other: string, most = Infinity): number {
   let apart = Infinity
   for (const a of earOf(one))
-    for (const b of earOf(other)) apart = Math.min(apart, soundDistance(a, b))
+    for (const b of earOf(other)) apart = Math.min(apart, soundDistance(a, b, most))
   return apart
 }
 

@@ -76,10 +76,11 @@ let row: Float64Array = new Float64Array(64)
 
 /**
  * What it takes to turn one sound into the other, in whole sounds: the cheapest way of putting in,
- * leaving out and exchanging, each by how much is heard of it. Symmetric, ≥ 0. Costs n·m.
+ * leaving out and exchanging, each by how much is heard of it. Symmetric, ≥ 0. Gives up, with
+ * Infinity, as soon as it must be more than `most`. Costs n·m.
  * @source weighted edit distance (Wagner & Fischer 1974) over phonetic features, common practice
  */
-export function soundCost(one: ReadySound, other: ReadySound): number {
+export function soundCost(one: ReadySound, other: ReadySound, most = Infinity): number {
   const n = one.codes.length
   const m = other.codes.length
   if (row.length <= m) row = new Float64Array(2 * m + 1)
@@ -89,6 +90,7 @@ export function soundCost(one: ReadySound, other: ReadySound): number {
     let diagonal: number = row[0]!
     row[0] = diagonal + one.drop[i]!
     const a = one.codes[i]!
+    let least = row[0]!
     for (let j = 0; j < m; j++) {
       const b = other.codes[j]!
       const flapped =
@@ -101,11 +103,18 @@ export function soundCost(one: ReadySound, other: ReadySound): number {
       )
       diagonal = row[j + 1]!
       row[j + 1] = cost
+      if (cost < least) least = cost
     }
+    if (least > most) return Infinity
   }
   return row[m]!
 }
 
-/** {@link soundCost} per sound of the longer one: 0 alike, {@link NEAR} mistakable, 1 unlike. */
-export const soundDistance = (one: ReadySound, other: ReadySound): number =>
-  soundCost(one, other) / Math.max(one.codes.length, other.codes.length)
+/**
+ * {@link soundCost} per sound of the longer one: 0 alike, {@link NEAR} mistakable, 1 unlike; Infinity
+ * when it is certainly more than `most`.
+ */
+export function soundDistance(one: ReadySound, other: ReadySound, most = Infinity): number {
+  const longer = Math.max(one.codes.length, other.codes.length)
+  return soundCost(one, other, most * longer) / longer
+}

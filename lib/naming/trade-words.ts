@@ -175,6 +175,10 @@ export const TRADE_WORDS: Readonly<Record<string, string | readonly string[]>> =
   porridge: 'P AO1 R IH0 JH',
   treacle: 'T R IY1 K AH0 L',
   parkin: 'P AA1 R K IH0 N',
+  chive: 'CH AY1 V',
+  chives: 'CH AY1 V Z',
+  chilli: 'CH IH1 L IY0',
+  claret: 'K L EH1 R AH0 T',
   scone: ['S K AA1 N', 'S K OW1 N'],
   marmalade: 'M AA1 R M AH0 L EY2 D',
 }
