@@ -86,19 +86,21 @@ const THINGS: Record<ThingKind, string> = {
     pearl+ ece6da, coral+ ee7f66, amber dd922a, garnet+ 7a1f2d, topaz dca34a, emerald+ 1f8a5a,
     agate a9796a, onyx 26262b, beryl 7fc0a6, quartz e6dcd8, shale 5f6266, marl 9c947c, ochre+ c68a35,
     umber+ 69502f, sienna b0602f, sepia 6a4a33, brick+ a44a38, salt f2f1ec, 
-    shell+ ecd9c6, bone+ e8dfcb, cobble+ 8b8880, marble+ e3e0dc`,
+    shell+ ecd9c6, bone+ e8dfcb, cobble+ 8b8880, marble+ e3e0dc, slate+ 5a6f85, ink+ 1f3560`,
   metal: `
     copper b5683c, brass bf9a45, bronze 9a6a35, gold d6a92f, silver c2c5c8, steel 7f8a94, tin a9adb0,
-    iron 5a5c60, zinc 9aa1a6, pewter 8b8f92, verdigris 5aa092, nickel a8a79c, penny 9a5a35`,
+    iron 5a5c60, zinc 9aa1a6, pewter 8b8f92, verdigris 5aa092, nickel a8a79c, penny 9a5a35, steel 5f7f9a`,
   weather: `
     sky+ 86b5dd, cloud+ cfd5da, rain 8b9ba8, mist+ c5cccb, fog b9bdbd, dew d7e6dc, frost dfe9ee,
     snow f6f8f9, sleet b8c4cb, hail d9e2e6, ice cfe6ee, storm+ 56626f, thunder 4f5566, 
     dusk 6f6386, dawn e9b8a8, night+ 23294a, moon+ e8e4d3, star+ f0ead0, sun+ f2bd3a, 
-    drizzle b0b8bb, haze cfcad0, noon f0d57a `,
+    drizzle b0b8bb, haze cfcad0, noon f0d57a ,
+    sky+ 5f97cf, rain 6f8aa0, night+ 2f3a6a, storm+ 4a5f7a, ice a9cbdc`,
   water: `
     sea+ 3f7f94, wave+ 5f9fb0, tide+ 4a8296, shore+ cdb98f, cove+ 4f93a0, surf d9e8e8, brine 6f9c95,
     tarn+ 3a5a62, pond+ 5d7a66, brook+ 7fa5a5, beck+ 7f9ea0, creek+ 6f9590, lake+ 4a7fa5,
-    river+ 5f8a94, foam e8efec, lagoon+ 3fa5a5, quay+ 8b8f90 `,
+    river+ 5f8a94, foam e8efec, lagoon+ 3fa5a5, quay+ 8b8f90 ,
+    sea+ 2a5f80, wave+ 3f7fb0, tide+ 3f6f9a, lake+ 3a6a9a`,
   land: `
     moor+ 7f6078, fell+ 6f7a56, field+ 8a9f4f, meadow+ 7fa548, hill+ 7a9060, dale+ 86a35f, glen+ 5f7f4f,
     wood+ 6a5a3f, marsh 7d8455, fen+ 7a8258, bog+ 4f4433, hedge+ 55703f, orchard+ 7f9a4a,
@@ -128,7 +130,9 @@ const THINGS: Record<ThingKind, string> = {
     ultramarine* 2a3fa0, burgundy* 6a1a30, hazel* 8b6740, roan* 9a6458, rosy~ e3909a, bronze* 9a6a35,
     rusty~ a8502a, sandy~ d9c59a, golden~ dca83a, silvery~ c5c9cc, minty~ a8dcbb, peachy~ f3b893, smoky~ 8f9193,
     stormy~ 5a6672, sunny~ f2c94a, ruddy~ b5563f, ashen~ b3b3ac, mossy~ 6f7f36, milky~ f3efe4, inky~ 24304f,
-    heathery~ 9a6f97, misty~ c5cccb`,
+    heathery~ 9a6f97, misty~ c5cccb,
+    blue* 6f9fd0, blue* 24407a, green* 7fae6a, green* 2a5a3a, grey* b5b8ba, grey* 5f6264, brown* 9a7350,
+    brown* 4a3020, pink* d96a94, red* 9a1f2a, purple* 9a74b5, purple* 45245a, yellow* f3e08a, teal* 4a9aa0`,
   house: `
     kettle+ 4a4c50, lamp+ f0d9a0, brick+ a44a38, thatch b59a62, ribbon+ b8476a, quilt+ a58a9a,
     velvet 5a2a4a, candle+ f3e3b5, teapot+ 8f5a3a, slate+ 56606a, pebbledash b8ad98,
@@ -158,5 +162,5 @@ function readThings([kind, text]: [string, string]): ColorThing[] {
     })
 }
 
-/** Our things with a colour; a word may stand twice, as a thing and as a colour. */
+/** Our things with a colour; a word may stand more than once, in each of its colours. */
 export const COLOR_THINGS: readonly ColorThing[] = Object.entries(THINGS).flatMap(readThings)

