@@ -123,6 +123,21 @@ function mustFind(name: string, what: string): Figure {
   }
 }
 
+/** How much of what somebody thought of comes up; there is more that is good than twenty. */
+function thoughtOf(): Figure {
+  const { plays } = fixture<{ plays: { phrase: string; thing: string }[] }>('tuned-on')
+  const found = plays.filter(({ phrase, thing }) => {
+    const { lab } = COLOR_THINGS.find(({ word }) => word === thing)!
+    return rankOf({ phrase, source: '', lab }, lab) > 0
+  })
+  return {
+    what: 'wordplay made up while tuning',
+    value: `${found.length} of ${plays.length} in the top ${TOP} for the very colour of its word`,
+    bar: 'none',
+    met: true,
+  }
+}
+
 function wordplay(): Figure[] {
   const line = dyedLine(60, 5)
   let most = 0
@@ -140,6 +155,7 @@ function wordplay(): Figure[] {
     { what: 'sayings', value: `${IDIOMS.length}`, bar: '≥ 500', met: IDIOMS.length >= 500 },
     mustFind('must-find', 'wordplay that must be found'),
     mustFind('held-out', 'wordplay that the tuning never saw'),
+    thoughtOf(),
     {
       what: 'results of one saying, 60 shades',
       value: `at most ${most}; ${ms(median(times))} a shade`,

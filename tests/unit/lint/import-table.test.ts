@@ -9,6 +9,7 @@ const type = (source: string) =>
   `import type * as It from '${source}'; export type Its = keyof typeof It`
 
 const COLOR = 'lib/color/another.ts'
+const NAMING = 'lib/naming/another.ts'
 const MODEL = 'models/Another.ts'
 const COMMAND = 'lib/shades/another-command.ts'
 const SCHEMA = 'lib/lines/schema.ts'
@@ -20,6 +21,10 @@ describe('the import table', () => {
     [COLOR, value('@/lib/color/types')],
     [COLOR, value('culori/fn')],
     [COLOR, value('@vibrant/quantizer-mmcq')],
+    [NAMING, value('@/lib/color/types')],
+    [NAMING, value('cmu-pronouncing-dictionary')],
+    [COMMAND, value('@/lib/naming/play')],
+    [COMPONENT, type('@/lib/naming/finding')],
     [MODEL, value('sequelize')],
     [MODEL, value('@/lib/env')],
     [MODEL, value('@/lib/errors')],
@@ -70,6 +75,10 @@ describe('the import table', () => {
     [COLOR, type('@/models')],
     [COLOR, value('@/lib/errors')],
     [COLOR, value('../errors')],
+    [NAMING, value('node:fs')],
+    [NAMING, value('fontkit')],
+    [NAMING, value('@/models')],
+    [COMPONENT, value('@/lib/naming/play')],
     [MODEL, value('@/lib/color/types')],
     [MODEL, value('@/lib/lines/schema')],
     [MODEL, value('@/lib/lines/queries')],
