@@ -51,7 +51,12 @@ export const suggestedApart = (labs: readonly Lab[], shade: Lab): number =>
 export function checkColor(name: string, shade: Lab): Finding[] {
   const suggested = colorWordsIn(wordsOf(name)).map(({ words, labs, weak }) => {
     const apart = suggestedApart(labs, shade)
-    return { words, apart, weak, suits: isCalled(words, shade) ?? apart <= SUGGESTS_ANOTHER }
+    return {
+      words,
+      apart,
+      weak,
+      suits: isCalled(words, shade) === true || apart <= SUGGESTS_ANOTHER,
+    }
   })
   if (suggested.length === 0 || suggested.some(({ suits }) => suits)) return []
   const named = suggested.filter(({ weak }) => !weak)

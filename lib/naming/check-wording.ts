@@ -16,8 +16,18 @@ const reader = unified()
   // 0 is hardly ever meant badly (black, blow, bag): names would be full of it.
   .use(retextProfanities, { sureness: 1 })
 
-/** Black and white are colours here. */
-const COLORS = new Set(COLOR_THINGS.filter(({ kind }) => kind === 'color').map(({ word }) => word))
+/**
+ * What the kept lists stumble over and a name may well say: black and white are colours here, kings
+ * and aunts are themselves, and sayings have devils, cracks and balls.
+ */
+const LET_BE: ReadonlySet<string> = new Set([
+  ...COLOR_THINGS.filter(({ kind }) => kind === 'color').map(({ word }) => word),
+  ...(
+    'he him his she her hers man men woman women boy boys girl girls king kings queen queens lord lady ' +
+    'father fathers mother mothers son sons daughter daughters brother sister aunt uncle grandmother ' +
+    'easy simple simply just obvious devil crack cracks ball balls nip nips'
+  ).split(' '),
+])
 
 /** Words that a yarn should not carry, and why; ours. */
 const OURS: Readonly<Record<string, string>> = {
@@ -28,7 +38,7 @@ const OURS: Readonly<Record<string, string>> = {
   ...because('It recalls slavery or empire.', 'slave plantation colonial master coolie nigger negro'),
   ...because('It makes light of illness of the mind.', 'crazy insane psycho lunatic schizo bipolar bedlam madhouse'),
   ...because('It makes light of a body or a disability.', 'lame crippled spastic dumb retarded midget dwarf fatty'),
-  ...because('It brings death or wounds to a soft thing.', 'corpse blood bloody murder suicide cancer plague gore slaughter hanging noose'),
+  ...because('It brings death or wounds to a soft thing.', 'corpse blood bloody murder suicide cancer plague gore slaughter noose'),
   ...because('It belongs to a faith that may not wish it on a label.', 'buddha allah jesus christ krishna ganesh torah quran voodoo'),
 } // prettier-ignore
 
@@ -69,7 +79,7 @@ export function checkWording(name: string): Finding[] {
   reader.runSync(reader.parse(file), file)
   for (const { actual, expected, source } of file.messages) {
     const word = (actual ?? '').toLowerCase()
-    if (told.has(word) || COLORS.has(word)) continue
+    if (told.has(word) || LET_BE.has(word)) continue
     told.add(word)
     if (source === 'retext-profanities') {
       const why = 'A kept list of words that offend some people holds it.'

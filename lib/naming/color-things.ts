@@ -48,7 +48,7 @@ const THINGS: Record<ThingKind, string> = {
     reed+ a99a62, rush c2b280, sedge 8c8f4e, hay d3b869, straw e0ca82, wheat e0c07f, barley d2ad68,
     rye a98a56, corn edc64e, maize e9bd3c, grass 5f9138, grain d0ac6c, sheaf d6b464, bran b98a58,
     tansy e3b81f, yarrow eee3b8, sorrel 9a4a2f, mallow c98abf, lupin+ 6f63b3, aster+ 8f79b8,
-    iris 5f53a6, pansy+ 5a3a86, tulip+ d0413c, fuchsia+ b8327c, bluebell+ 5a68b8, harebell+ 8a97d2,
+    iris 5f53a6, tulip+ d0413c, fuchsia+ b8327c, bluebell+ 5a68b8, harebell+ 8a97d2,
     foxglove+ b1568f, primrose+ efe28d, cowslip+ e9cf4a, buttercup+ f2cc1e, marigold+ eb9a1d,
     dandelion+ efc21c, petal+ e6b3c0, bud+ b8c27a, thorn+ 6e4f41, briar+ b8586a, bramble+ 4b2a46,
     thrift d98aa8, campion+ d8658f, peony+ c8476f, wisteria a58fce, hop+ a3b457, nettle+ 4f7442,

@@ -1221,7 +1221,6 @@ const LIST = `
 3 wet:v your whistle:n
 3 clean:j as a whistle:n
 2 whistle:v while you work:v
-3 spick:j and span:j
 3 squeaky:r clean:j
 3 a clean:j slate:n
 2 a clean:j sweep:n

@@ -316,8 +316,8 @@ function checks(): Figure[] {
       value: `median ${ms(median(rest))}, worst ${ms(worst)} of the processor; the first ${ms(first!)}`,
       bar: what.includes('no bar')
         ? 'none'
-        : `median ≤ ${CHECK_MS} ms (60 shades, ${EARLIER} earlier names)`,
-      met: what.includes('no bar') || median(rest) <= CHECK_MS,
+        : `all ≤ ${CHECK_MS} ms (60 shades, ${EARLIER} earlier names)`,
+      met: what.includes('no bar') || Math.max(first!, worst) <= CHECK_MS,
     })
   }
   return figures

@@ -82,6 +82,10 @@ describe('suggests another colour', () => {
     expect(checkColor('Nearly There', MOSS)).toEqual([])
   })
 
+  test('a plain term that is near is not far for being outside its region', () => {
+    expect(checkColor('White Night', hexToLab('#e6e0cf'))).toEqual([])
+  })
+
   test('one colour word that suits is enough', () => {
     expect(checkColor('Moss and Cherry', MOSS)).toEqual([])
   })
@@ -133,7 +137,7 @@ describe('wording', () => {
     },
   )
 
-  test.each(['Black Sheep', 'White Noise', 'Plum Duff', 'Stem the Dyed'])(
+  test.each(['Black Sheep', 'Prickly Aunt', 'Crack of Dawn', 'Stem the Dyed'])(
     '“%s” is let be',
     (name) => expect(checkWording(name)).toEqual([]),
   )
