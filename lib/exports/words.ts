@@ -1,18 +1,17 @@
-import { labToOklch } from '@/lib/color/oklch'
+import { isNeutral } from '@/lib/color/families'
 import { termOf } from '@/lib/color/family-names'
+import { labToOklch } from '@/lib/color/oklch'
 import type { Lab } from '@/lib/color/types'
 
 import { percent } from './compose'
 import type { ExportCombination, ExportDescription, ExportPhotograph } from './description'
 
-/** Below this chroma (OKLCH) a colour has no hue to be named by. */
-const NEUTRAL = 0.022
-
 /** A colour in plain words, for those who do not see it: "deep blue", "pale grey". */
 export function colorInWords(lab: Lab): string {
   const color = labToOklch(lab)
-  if (color.c < NEUTRAL) {
+  if (isNeutral(color)) {
     if (color.l > 0.93) return 'white'
+    if (color.l > 0.85 && color.c > 0.012) return 'off-white'
     if (color.l < 0.25) return 'black'
     return color.l > 0.75 ? 'pale grey' : color.l < 0.45 ? 'dark grey' : 'grey'
   }

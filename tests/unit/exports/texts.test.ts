@@ -125,6 +125,7 @@ describe('words for pictures', () => {
 
   test.each([
     [[97, 0, 1], 'white'],
+    [[89, 1.1, 7], 'off-white'],
     [[50, 0, 0], 'grey'],
     [[8, 0, 0], 'black'],
     [[30, 15, -50], 'deep blue'],

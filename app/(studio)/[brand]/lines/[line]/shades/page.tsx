@@ -1,10 +1,11 @@
-import { Download, Plus, Upload } from 'lucide-react'
+import { Download } from 'lucide-react'
 import type { Metadata } from 'next'
 
 import { Note } from '@/components/layout/note'
 import { ScreenCaution } from '@/components/layout/screen-caution'
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader } from '@/components/layout/sheet-header'
+import { AddShades } from '@/components/shades/add-shades'
 import { BookOrderChoice, bookHref } from '@/components/shades/book-order'
 import { SampleBook } from '@/components/shades/sample-book'
 import { ShadeTable } from '@/components/shades/shade-table'
@@ -78,22 +79,7 @@ export default async function ShadesPage({ params, searchParams }: Props) {
         <SheetHeader title="Shades" />
         <EmptyState
           title="No shades yet"
-          action={
-            edits ? (
-              <>
-                <LinkButton
-                  variant="primary"
-                  href={shadesHref(place, '/import')}
-                  icon={<Upload aria-hidden="true" />}
-                >
-                  Import shades
-                </LinkButton>
-                <LinkButton href={shadesHref(place, '/new')} icon={<Plus aria-hidden="true" />}>
-                  Add shade
-                </LinkButton>
-              </>
-            ) : null
-          }
+          action={edits ? <AddShades place={place} first="import" /> : null}
         >
           {edits
             ? `The shades of ${line} will stand here as a sample book. Bring the whole line from a CSV file, or add the first one by hand.`
@@ -133,22 +119,7 @@ export default async function ShadesPage({ params, searchParams }: Props) {
             {book ? `${line}, sample book by ${order}` : line}
           </span>
         }
-        actions={
-          edits && (
-            <>
-              <LinkButton href={shadesHref(place, '/import')} icon={<Upload aria-hidden="true" />}>
-                Import shades
-              </LinkButton>
-              <LinkButton
-                variant="primary"
-                href={shadesHref(place, '/new')}
-                icon={<Plus aria-hidden="true" />}
-              >
-                Add shade
-              </LinkButton>
-            </>
-          )
-        }
+        actions={edits && <AddShades place={place} first="new" />}
       />
       <div className="mb-4 flex flex-wrap items-end justify-between gap-x-6 gap-y-2 print:hidden">
         <ShadesTabs place={place} current={view} />

@@ -1,4 +1,3 @@
-import { Plus, Upload } from 'lucide-react'
 import type { Metadata } from 'next'
 
 import { FamiliesEditor } from '@/components/families/families-editor'
@@ -6,9 +5,9 @@ import { Note } from '@/components/layout/note'
 import { ScreenCaution } from '@/components/layout/screen-caution'
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader } from '@/components/layout/sheet-header'
+import { AddShades } from '@/components/shades/add-shades'
 import { shadesHref } from '@/components/shades/shades-actions'
 import { ShadesTabs } from '@/components/shades/shades-tabs'
-import { LinkButton } from '@/components/ui/link-button'
 import { EmptyState } from '@/components/ui/states'
 import { GroundSwitch } from '@/components/yarn/ground-switch'
 import { canEditFamilies, canRenameFamily } from '@/lib/families/policy'
@@ -46,22 +45,7 @@ export default async function FamiliesPage({ params }: Props) {
         <SheetHeader title="Families" back={{ href: shadesHref(place), label: 'Shades' }} />
         <EmptyState
           title="No shades to sort yet"
-          action={
-            can.edit ? (
-              <>
-                <LinkButton
-                  variant="primary"
-                  href={shadesHref(place, '/import')}
-                  icon={<Upload aria-hidden="true" />}
-                >
-                  Import shades
-                </LinkButton>
-                <LinkButton href={shadesHref(place, '/new')} icon={<Plus aria-hidden="true" />}>
-                  Add shade
-                </LinkButton>
-              </>
-            ) : null
-          }
+          action={can.edit ? <AddShades place={place} first="import" /> : null}
         >
           {`The shades of ${line.name} will stand here by tonal family, neutrals first, each from light to dark. They sort themselves as they come.`}
         </EmptyState>

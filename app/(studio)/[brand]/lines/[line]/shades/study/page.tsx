@@ -1,14 +1,12 @@
-import { Plus, Upload } from 'lucide-react'
 import type { Metadata } from 'next'
 
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader } from '@/components/layout/sheet-header'
-import { shadesHref } from '@/components/shades/shades-actions'
+import { AddShades } from '@/components/shades/add-shades'
 import { ShadesTabs } from '@/components/shades/shades-tabs'
 import { RangeStudySections } from '@/components/study/range-study'
 import { StudyNotes } from '@/components/study/study-notes'
 import { showCount } from '@/components/study/study-words'
-import { LinkButton } from '@/components/ui/link-button'
 import { EmptyState } from '@/components/ui/states'
 import { GroundSwitch } from '@/components/yarn/ground-switch'
 import { readForPage } from '@/lib/server/page'
@@ -54,25 +52,7 @@ export default async function RangeStudyPage({
         {tabs}
         <EmptyState
           title={shadeCount === 0 ? 'No shades to study yet' : 'No range to study yet'}
-          action={
-            edits ? (
-              <>
-                <LinkButton
-                  href={shadesHref(place, '/import')}
-                  icon={<Upload aria-hidden="true" />}
-                >
-                  Import shades
-                </LinkButton>
-                <LinkButton
-                  variant="primary"
-                  href={shadesHref(place, '/new')}
-                  icon={<Plus aria-hidden="true" />}
-                >
-                  Add shade
-                </LinkButton>
-              </>
-            ) : null
-          }
+          action={edits ? <AddShades place={place} first="new" /> : null}
         >
           What lies near, what is missing and what falls together will stand here once {line.name}{' '}
           has two shades that are not retired.
