@@ -7,8 +7,21 @@ export { BOARD_SCRIPT_BAR, SCRIPT_BAR } from '../../../scripts/lib/script-bytes.
 
 const WCAG = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa']
 
-/** What the page in front breaks of WCAG 2.2 AA, as far as a program can tell. */
+/** Waits for what is fading or moving into place; what never ends, such as a spinner, is not waited for. */
+const comeToRest = (page: Page) =>
+  page.evaluate(async () => {
+    const passing = document
+      .getAnimations()
+      .filter(
+        ({ playState, effect }) =>
+          playState === 'running' && Number.isFinite(effect?.getComputedTiming().endTime),
+      )
+    await Promise.allSettled(passing.map(({ finished }) => finished))
+  })
+
+/** What the page in front breaks of WCAG 2.2 AA, as far as a program can tell, once it is at rest. */
 export async function violationsOf(page: Page): Promise<string[]> {
+  await comeToRest(page)
   const { violations } = await new AxeBuilder({ page }).withTags(WCAG).analyze()
   return violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ html }) => html).join(' | ')}`)
 }
