@@ -34,13 +34,25 @@ async function first(chapter: string, text: string): Promise<string> {
   return (await link.getAttribute('href'))!
 }
 
+/** The address of a kit of what is chosen; one is built where there is none. */
+async function aKit(): Promise<string> {
+  await page.goto(`${LINE}/kits`)
+  const made = page.getByRole('link', { name: /^Download/ })
+  if ((await made.count()) === 0) await page.getByRole('button', { name: 'Build kit' }).click()
+  await made.first().waitFor({ timeout: 60_000 })
+  const link = page.locator('main').locator(`a[href^="${LINE}/kits/"]`).first()
+  return (await link.getAttribute('href'))!
+}
+
 await take('sample-book', `${LINE}/shades`)
 await take('families', `${LINE}/shades/families`)
 await take('shade-table', `${LINE}/shades?view=table`)
 await take('range-study', `${LINE}/shades/study?twins=10`)
 const photograph = await first('photographs', 'The tarn in bracken time')
 await take('match', photograph)
+await take('board', `${LINE}/combinations`)
 await take('combination', await first('combinations', 'Low Sun, High Bracken'))
+await take('kit', await aKit())
 await take('team', '/teasel-and-tarn/team')
 await take('activity', '/teasel-and-tarn/activity')
 await page.setViewportSize({ width: 390, height: 844 })
