@@ -1,46 +1,16 @@
 'use client'
 
-import type { ReactNode } from 'react'
-import { LinkButton } from '@/components/ui/link-button'
-import { ForbiddenState, NotFoundState } from '@/components/ui/states'
-import { PlainPage } from './plain-page'
-import { Sheet } from './sheet'
-
-/** Where the page stands: by itself, or as a sheet in the studio's frame. */
-type Frame = 'plain' | 'sheet'
+import dynamic from 'next/dynamic'
 
 // Next.js sends these along with every page, to be shown without asking again: as components of
-// the browser they are a name there, and not all that they draw.
-function Framed({ frame, children }: { frame: Frame; children: ReactNode }) {
-  return frame === 'sheet' ? (
-    <Sheet>{children}</Sheet>
-  ) : (
-    <PlainPage homeHref="/">{children}</PlainPage>
-  )
-}
-
-const home = <LinkButton href="/">Go to your lines</LinkButton>
+// the browser they are a name there, and not all that they draw. Their script comes when they do.
 
 /** A whole page: nothing stands at its address, for this person. */
-export function NotFoundPage({ frame }: { frame: Frame }) {
-  return (
-    <Framed frame={frame}>
-      <NotFoundState heading="h1" title="Nothing stands at this address" action={home}>
-        <p>It may have been removed or renamed, or it belongs to a brand you are not part of.</p>
-      </NotFoundState>
-    </Framed>
-  )
-}
+export const NotFoundPage = dynamic(() =>
+  import('./page-state-sheets').then((it) => it.NotFoundPage),
+)
 
 /** A whole page: the person's role does not open it. */
-export function ForbiddenPage({ frame }: { frame: Frame }) {
-  return (
-    <Framed frame={frame}>
-      <ForbiddenState heading="h1" title="This is not part of your role" action={home}>
-        <p>
-          Your role in this brand does not open this page. An owner of the brand can change that.
-        </p>
-      </ForbiddenState>
-    </Framed>
-  )
-}
+export const ForbiddenPage = dynamic(() =>
+  import('./page-state-sheets').then((it) => it.ForbiddenPage),
+)

@@ -1,5 +1,6 @@
 'use client'
 
+import dynamic from 'next/dynamic'
 import { useRouter } from 'next/navigation'
 import { useRef, useState } from 'react'
 import { useForm, useWatch, type FieldPath } from 'react-hook-form'
@@ -23,9 +24,13 @@ import {
   type ShadeStatus,
 } from '@/lib/shades/constants'
 
-import { LiveSample } from './live-sample'
 import { STATUS_WORDS } from './shade-words'
 import { shadesHref, type LinePlace, type ShadesActions } from './shades-actions'
+
+// Typing can begin before there is a sample to show.
+const LiveSample = dynamic(() => import('./live-sample').then((it) => it.LiveSample), {
+  loading: () => <div className="h-33 w-37" />,
+})
 
 /** What the form holds while it is being filled in. */
 export interface ShadeFormValues {

@@ -1,14 +1,19 @@
 'use client'
 
+import dynamic from 'next/dynamic'
 import { useRouter } from 'next/navigation'
 import { useState, type ReactNode } from 'react'
 
 import { reach } from '@/components/reach'
-import { ConfirmDialog } from '@/components/ui/confirm-dialog'
 import { toastDone, toastProblem, toastUndo } from '@/components/ui/toast'
 import type { ShadeUses } from '@/lib/shades/present'
 
 import { type LinePlace, type ShadesActions } from './shades-actions'
+
+// Most deletions ask nothing.
+const ConfirmDialog = dynamic(() =>
+  import('@/components/ui/confirm-dialog').then((it) => it.ConfirmDialog),
+)
 
 interface Asked {
   shadeIds: string[]
@@ -34,6 +39,8 @@ export function useDeleteShades({
 }): { remove: (shadeIds: string[]) => Promise<void>; pending: boolean; dialog: ReactNode } {
   const router = useRouter()
   const [asked, setAsked] = useState<Asked>()
+  // Once asked, it stays to close by itself.
+  const [asks, setAsks] = useState(false)
   const [pending, setPending] = useState(false)
   const { brand, lineSlug } = place
 
@@ -53,6 +60,7 @@ export function useDeleteShades({
       return false
     }
     if (!answer.data.deleted) {
+      setAsks(true)
       setAsked({ shadeIds, uses: answer.data.uses })
       return false
     }
@@ -64,7 +72,7 @@ export function useDeleteShades({
   }
 
   const uses = asked?.uses
-  const dialog = (
+  const dialog = asks ? (
     <ConfirmDialog
       open={asked !== undefined}
       onOpenChange={(open) => {
@@ -100,7 +108,7 @@ export function useDeleteShades({
       }
       onConfirm={() => (asked ? send(asked.shadeIds, true) : false)}
     />
-  )
+  ) : null
   return {
     remove: async (shadeIds) => {
       await send(shadeIds, false)
