@@ -7,8 +7,7 @@ import type { Lane } from './constants'
 
 /**
  * A rank above everything in a lane of a line, deleted ones too: they keep theirs for when they come
- * back. The caller holds the board (touchBoard), so that no
- * two get the same.
+ * back. The caller holds the board (touchBoard), so that no two get the same.
  */
 export async function topRank(
   { brandId, lineId, lane }: { brandId: string; lineId: string; lane: Lane },
