@@ -1,4 +1,4 @@
-import { QueryTypes, type Options } from 'sequelize'
+import { QueryTypes, type BindOrReplacements } from 'sequelize'
 
 import type { Actor } from '@/lib/auth/actor'
 import { getBoard } from '@/lib/combinations/get-board'
@@ -94,19 +94,34 @@ async function costsOf(read: Read, actor: Actor): Promise<Cost[]> {
 const lowestTenth = (values: number[]) =>
   values.sort((one, other) => one - other)[Math.floor(values.length / 10)]!
 
+interface Asked {
+  sql: string
+  bind: BindOrReplacements | undefined
+}
+
+/** The statements that this work asks, as they are asked. */
+async function statementsOf(work: () => Promise<unknown>): Promise<Asked[]> {
+  const asked: Asked[] = []
+  const made = sequelize() as unknown as { query: (...given: unknown[]) => Promise<unknown> }
+  const { query } = made
+  made.query = (...given) => {
+    const [sql, options] = given as [string, { bind?: BindOrReplacements } | undefined]
+    asked.push({ sql, bind: options?.bind })
+    return query.apply(made, given)
+  }
+  await work()
+  made.query = query
+  return asked
+}
+
 /** How many pages of shared buffers the queries of this work touch. */
 async function buffersOf(work: () => Promise<unknown>): Promise<number> {
-  const { options } = sequelize() as unknown as { options: Options }
-  const { logging } = options
-  const queries: string[] = []
-  options.logging = (line) => queries.push(line.replace(/^Executing \(.*?\): /, ''))
-  await work()
-  options.logging = logging
   let buffers = 0
-  for (const query of queries.filter((sql) => sql.startsWith('SELECT'))) {
+  for (const { sql, bind } of await statementsOf(work)) {
+    if (!/^\s*SELECT/.test(sql)) continue
     const [row] = await sequelize().query<{ 'QUERY PLAN': [{ Plan: Record<string, number> }] }>(
-      `EXPLAIN (ANALYZE, BUFFERS, FORMAT JSON) ${query}`,
-      { type: QueryTypes.SELECT },
+      `EXPLAIN (ANALYZE, BUFFERS, FORMAT JSON) ${sql}`,
+      { type: QueryTypes.SELECT, bind },
     )
     const { Plan } = row!['QUERY PLAN'][0]
     buffers += Plan['Shared Hit Blocks']! + Plan['Shared Read Blocks']!
