@@ -14,7 +14,7 @@ import type { CreateShadeInput } from './schema'
  */
 export async function createShade(actor: Actor, input: CreateShadeInput): Promise<Shade> {
   const { lineSlug, requestKey, color, ...fields } = input
-  return changeShades(actor, lineSlug, async (line, transaction) => {
+  const shade = await changeShades(actor, lineSlug, async (line, transaction) => {
     const where = { brandId: actor.brandId, lineId: line.id }
     const held = await Shade.count({ where, transaction })
     const last = await Shade.max<number | null, Shade>('position', { where, transaction })
@@ -35,4 +35,6 @@ export async function createShade(actor: Actor, input: CreateShadeInput): Promis
     }
     return { answer: made.row, changed: made.created }
   })
+  // With the family it has fallen into, as whoever sends it again is told.
+  return shade.reload()
 }

@@ -144,7 +144,13 @@ export const WEB_FAULTS: readonly Fault[] = [
 
 async function typeShade(page: Page, world: World) {
   const shade = world.newShade()
-  await page.goto(`/${BRAND}/lines/${FAULT_LINE}/shades/new`)
+  // A tab that finds another build loads its page anew, and may do so just now.
+  await until('the form opens', () =>
+    page.goto(`/${BRAND}/lines/${FAULT_LINE}/shades/new`).then(
+      () => true,
+      () => false,
+    ),
+  )
   await page.getByLabel('Number', { exact: true }).fill(shade.number)
   await page.getByLabel(/^Name/).fill(shade.name)
   for (const [label, value] of [
