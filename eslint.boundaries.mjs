@@ -67,7 +67,7 @@ export const importTable = {
     from(
       'models',
       local('models', 'env', 'errors'),
-      types('color', 'schema'),
+      types('color', 'naming', 'schema'),
       packages('sequelize'),
       node(),
     ),

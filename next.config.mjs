@@ -31,6 +31,7 @@ export default {
     'pg-hstore',
     'pg-boss',
     'sharp',
+    'cmu-pronouncing-dictionary',
     '@node-rs/argon2',
     'pino',
   ],

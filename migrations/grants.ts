@@ -4,13 +4,15 @@ import { sequelize } from '@/models/sequelize'
 
 /**
  * What the web's role may do, said again after every migration. It owns nothing and is held by
- * row-level security; the activity record can only grow, and a letter once posted is not read.
+ * row-level security; the activity record and the history of names can only grow, and a letter once
+ * posted is not read.
  */
 const GRANTS = /* sql */ `
 REVOKE ALL ON ALL TABLES IN SCHEMA public FROM woadmap_web;
 GRANT USAGE ON SCHEMA public, pgboss TO woadmap_web;
 GRANT SELECT, INSERT, UPDATE, DELETE ON ALL TABLES IN SCHEMA public TO woadmap_web;
 REVOKE UPDATE, DELETE ON activities FROM woadmap_web;
+REVOKE UPDATE, DELETE ON name_moves FROM woadmap_web;
 REVOKE SELECT, UPDATE, DELETE ON letters FROM woadmap_web;
 REVOKE INSERT, UPDATE, DELETE ON migrations FROM woadmap_web;
 GRANT EXECUTE ON FUNCTION brand_of_invitation, forget_person, session_of TO woadmap_web;

@@ -9,6 +9,13 @@ import { Kit } from './Kit'
 import { Letter } from './Letter'
 import { Line } from './Line'
 import { Membership } from './Membership'
+import { NameIdea } from './NameIdea'
+import { NameMove } from './NameMove'
+import { NameRemark } from './NameRemark'
+import { NameReviewer } from './NameReviewer'
+import { NameSearch } from './NameSearch'
+import { NameVote } from './NameVote'
+import { NamingSettings } from './NamingSettings'
 import { Person } from './Person'
 import { Photograph } from './Photograph'
 import { Reading } from './Reading'
@@ -41,6 +48,10 @@ Combination.belongsTo(Photograph, { as: 'photograph', foreignKey: 'photographId'
 CombinationPlace.belongsTo(Shade, { as: 'shade', foreignKey: 'shadeId' })
 CombinationPlace.belongsTo(Combination, { as: 'combination', foreignKey: 'combinationId' })
 
+Line.hasMany(NameIdea, { as: 'nameIdeas', foreignKey: 'lineId' })
+Shade.hasMany(NameIdea, { as: 'nameIdeas', foreignKey: 'shadeId' })
+NameIdea.belongsTo(Shade, { as: 'shade', foreignKey: 'shadeId' })
+
 export {
   AccountToken,
   Activity,
@@ -53,6 +64,13 @@ export {
   Letter,
   Line,
   Membership,
+  NameIdea,
+  NameMove,
+  NameRemark,
+  NameReviewer,
+  NameSearch,
+  NameVote,
+  NamingSettings,
   Person,
   Photograph,
   Reading,

@@ -33,6 +33,14 @@ const familyShades = ({ after }: Told) =>
 const combinationsOf = ({ count }: Told['after']) =>
   count === 1 ? 'one combination' : `${String(count)} combinations`
 
+/** "the name Moss of Heronsway DK", or "3 names of Heronsway DK". */
+const names = ({ label, after }: Told) =>
+  after.count ? `${String(after.count)} names of ${label}` : `the name ${label}`
+
+/** "approved the name …", with the reason where one was given. */
+const because = (verb: string) => (told: Told) =>
+  `${verb} ${names(told)}${told.after.reason ? `: ${String(told.after.reason)}` : ''}`
+
 const role = (values: Told['after']) => ROLE_WORDS[values.role as Role] ?? 'no role'
 
 const laneWords = (values: Told['after']) => LANE_WORDS[values.lane as Lane] ?? 'no lane'
@@ -284,6 +292,62 @@ export const ACTIONS = {
     says: ({ label, before }) => `deleted a kit of ${combinationsOf(before)} of ${label}`,
     saysAll: true,
   },
+  'name.added': { label: 'Names written down', says: (told) => `wrote down ${names(told)}` },
+  'name.reworded': { label: 'Name changed', says: (told) => `changed ${names(told)}` },
+  'name.placed': { label: 'Names laid on shades', says: (told) => `laid elsewhere ${names(told)}` },
+  'name.sent': {
+    label: 'Names sent for review',
+    says: (told) => `sent ${names(told)} for review`,
+  },
+  'name.recalled': {
+    label: 'Names taken back from review',
+    says: (told) => `took ${names(told)} back from review`,
+  },
+  'name.approved': { label: 'Name approved', says: because('approved'), saysAll: true },
+  'name.returned': { label: 'Name returned', says: because('returned'), saysAll: true },
+  'name.put-by': { label: 'Names put by', says: (told) => `put by ${names(told)}` },
+  'name.taken-up': {
+    label: 'Names taken up again',
+    says: (told) => `took up ${names(told)} again`,
+  },
+  'name.reopened': { label: 'Name opened again', says: because('opened again'), saysAll: true },
+  'name.unlocked': { label: 'Name unlocked', says: because('unlocked'), saysAll: true },
+  'name.deleted': { label: 'Names deleted', says: (told) => `deleted ${names(told)}` },
+  'name.restored': { label: 'Names brought back', says: (told) => `brought back ${names(told)}` },
+  'name.voted': {
+    label: 'Name voted on',
+    says: ({ label, after }) =>
+      `said ${String(after.vote ?? 'nothing any more')} of the name ${label}`,
+    saysAll: true,
+  },
+  'name.remarked': { label: 'Remark on a name', says: (told) => `remarked on ${names(told)}` },
+  'name.search-recorded': {
+    label: 'Search of marks recorded',
+    says: ({ label, after }) =>
+      `recorded a search of ${String(after.register)} for the name ${label}`,
+  },
+  'name.search-removed': {
+    label: 'Search of marks removed',
+    says: ({ label, before }) =>
+      `removed the record of a search of ${String(before.register)} for the name ${label}`,
+  },
+  'name.settings-changed': {
+    label: 'Naming settings changed',
+    says: ({ label }) => `changed how names of ${label} are set, dated and reviewed`,
+  },
+  'name.frozen': {
+    label: 'Names locked',
+    says: ({ label }) => `locked the approved names of ${label} for the label printer`,
+  },
+  'name.freeze-lifted': {
+    label: 'Lock of names lifted',
+    says: ({ label, after }) => `lifted the lock on the names of ${label}: ${String(after.reason)}`,
+    saysAll: true,
+  },
+  'name.labels-exported': {
+    label: 'Labels exported',
+    says: ({ label, after }) => `took ${String(after.count)} labels of ${label} away as a CSV file`,
+  },
 } as const satisfies Record<`${string}.${string}`, ActionWords>
 /** One of ACTIONS: the noun and what happened to it. */
 export type ActivityAction = keyof typeof ACTIONS
@@ -302,6 +366,7 @@ export const ACTIVITY_KINDS = {
   photograph: 'Photographs',
   combination: 'Combinations',
   kit: 'Kits',
+  name: 'Names',
 } as const satisfies Record<KindOf<ActivityAction>, string>
 /** One of ACTIVITY_KINDS. */
 export type ActivityKind = keyof typeof ACTIVITY_KINDS

@@ -1,5 +1,5 @@
 import { shadeLabel } from '@/lib/shades/present'
-import type { Combination, Family, Line, Photograph, Shade } from '@/models'
+import type { Combination, Family, Line, NameIdea, Photograph, Shade } from '@/models'
 
 import { ACTIVITY_LIMITS } from './constants'
 import type { ActivityEntry, ActivityObject } from './record'
@@ -39,6 +39,12 @@ export const combinationObject = ({
   title,
 }: Pick<Combination, 'id' | 'title'>): ActivityObject => ({ kind: 'combination', id, label: title })
 
+/** An idea for a name as the record names it: "Thyme Will Tell of Heronsway DK". */
+export const ideaObject = (
+  { id, text }: Pick<NameIdea, 'id' | 'text'>,
+  line: Pick<Line, 'name'>,
+): ActivityObject => ({ kind: 'name', id, label: `${text} of ${line.name}` })
+
 /** What a change of several things is recorded with. */
 type Recorded = Pick<ActivityEntry, 'object' | 'after'>
 
@@ -63,4 +69,13 @@ export function recordedPhotographs(
 ): Recorded {
   if (photographs.length === 1) return { object: photographObject(photographs[0]!) }
   return { after: countAndName(photographs.map(({ title }) => title)) }
+}
+
+/** A change of ideas of one line: of the one, or of the line with how many they are. */
+export function recordedIdeas(
+  ideas: readonly Pick<NameIdea, 'id' | 'text'>[],
+  line: Pick<Line, 'id' | 'name'>,
+): Recorded {
+  if (ideas.length === 1) return { object: ideaObject(ideas[0]!, line) }
+  return { object: lineObject(line), after: countAndName(ideas.map(({ text }) => text)) }
 }

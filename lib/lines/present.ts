@@ -84,7 +84,13 @@ export function presentChapters(
   brandSlug: string,
   line: Pick<Line, 'slug' | 'name'>,
   lines: readonly Pick<Line, 'slug' | 'name'>[],
-  counts: { shades: number; photographs?: number; combinations?: number; kits?: number },
+  counts: {
+    shades: number
+    photographs?: number
+    combinations?: number
+    names?: number
+    kits?: number
+  },
 ): LineChapters {
   const hrefOf = (slug: string) => `/${brandSlug}/lines/${slug}`
   const home = hrefOf(line.slug)
@@ -92,6 +98,7 @@ export function presentChapters(
     { label: 'Shades', at: 'shades', count: counts.shades },
     { label: 'Photographs', at: 'photographs', count: counts.photographs },
     { label: 'Combinations', at: 'combinations', count: counts.combinations },
+    { label: 'Names', at: 'names', count: counts.names },
     { label: 'Kits', at: 'kits', count: counts.kits },
   ]
   return {

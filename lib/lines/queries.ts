@@ -4,6 +4,7 @@ import { authorize, type Actor } from '@/lib/auth/actor'
 import { canReadCombinations } from '@/lib/combinations/policy'
 import { NotFoundError } from '@/lib/errors'
 import { canReadKits } from '@/lib/kits/policy'
+import { canReadNames } from '@/lib/names/policy'
 import { canReadPhotographs } from '@/lib/photographs/policy'
 import { Line, sequelize, Shade } from '@/models'
 
@@ -58,6 +59,7 @@ const CHAPTERS = {
   shades: canReadLines,
   photographs: canReadPhotographs,
   combinations: canReadCombinations,
+  names: canReadNames,
   kits: canReadKits,
 }
 
@@ -66,6 +68,8 @@ export type ChapterCounts = {
   shades: number
   photographs?: number
   combinations?: number
+  /** Shades with an approved name. */
+  names?: number
   kits?: number
 }
 
@@ -85,6 +89,9 @@ SELECT l.*,
       AND c.state <> 'pending') END AS photographs,
   CASE WHEN 'combinations' = ANY ($chapters::text[]) THEN (SELECT count(*)::int FROM combinations c
     WHERE c.brand_id = l.brand_id AND c.line_id = l.id AND c.deleted_at IS NULL) END AS combinations,
+  CASE WHEN 'names' = ANY ($chapters::text[]) THEN (SELECT count(*)::int FROM shades c
+    WHERE c.brand_id = l.brand_id AND c.line_id = l.id AND c.deleted_at IS NULL
+      AND c.name IS NOT NULL) END AS names,
   CASE WHEN 'kits' = ANY ($chapters::text[]) THEN (SELECT count(*)::int FROM kits c
     WHERE c.brand_id = l.brand_id AND c.line_id = l.id) END AS kits
 FROM lines l WHERE l.brand_id = $brandId AND l.slug = $lineSlug`

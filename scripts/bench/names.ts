@@ -21,7 +21,7 @@ import { heardApart, pronounceWord } from '@/lib/naming/pronounce'
 import { NEAR } from '@/lib/naming/sound-distance'
 
 import type { Figure } from '../lib/figures.mjs'
-import { loadLabelFont } from '../lib/label-font'
+import { labelFont } from '@/lib/names/label-font'
 import { dyedLine, seededRandom } from './line'
 import { median, ms } from './measure'
 
@@ -282,7 +282,7 @@ function checks(): Figure[] {
     ...earlier,
     ...line.map(({ name, number }) => ({ name, where: `shade ${number}` })),
   ]
-  const font = loadLabelFont()
+  const font = labelFont()
   const loose = Array.from({ length: 40 }, (_, at) => ({ id: `${at}`, name: any(line).name }))
   const works: [string, (name: string, lab: Lab) => unknown][] = [
     ['same or near', (name) => checkSame(name, others)],

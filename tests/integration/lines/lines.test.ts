@@ -112,7 +112,7 @@ describe('who may do what with lines', () => {
     await makeShades(same, 1)
     const margin = await getLineWithMargin(theirs.owner, line.slug)
     expect(margin.line.id).toBe(same.id)
-    expect(margin.counts).toEqual({ shades: 1, photographs: 0, combinations: 0, kits: 0 })
+    expect(margin.counts).toEqual({ shades: 1, photographs: 0, combinations: 0, names: 0, kits: 0 })
     const names = margin.lines
     const own = await Line.findAll({ where: { brandId: theirs.owner.brandId } })
     expect(names.map(({ name }) => name)).toEqual(own.map(({ name }) => name).sort())

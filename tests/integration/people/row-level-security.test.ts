@@ -12,6 +12,11 @@ import {
   Invitation,
   Kit,
   Line,
+  NameRemark,
+  NameReviewer,
+  NameSearch,
+  NameVote,
+  NamingSettings,
   Photograph,
   Reading,
   sequelize,
@@ -20,6 +25,7 @@ import { withinScope } from '@/models/scope'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
 import { makeCombination } from '@/tests/factories/combination'
 import { makeLine } from '@/tests/factories/line'
+import { makeIdea } from '@/tests/factories/name'
 import { makeShades } from '@/tests/factories/shade'
 
 /** As the web's role, over one connection of its own. */
@@ -85,6 +91,20 @@ async function fillBrand(owner: Actor): Promise<void> {
   const { id: lineId } = line
   await Family.create({ brandId, lineId, name: 'Browns', position: 0 })
   await Kit.create({ brandId, lineId, selection: [], createdById: personId })
+  await NamingSettings.create({ brandId, lineId, labelWidth: 58, labelSize: 15, labelLines: 2 })
+  await NameReviewer.create({ brandId, lineId, personId })
+  const { id: ideaId } = await makeIdea(line, shades[0]!)
+  await NameVote.create({ brandId, ideaId, round: 1, personId, vote: 'yes' })
+  await NameRemark.create({ brandId, ideaId, personId, text: 'A remark' })
+  await NameSearch.create({
+    brandId,
+    ideaId,
+    register: 'A register',
+    searchedBy: 'Somebody',
+    searchedOn: '2026-11-30',
+    outcome: 'nothing found',
+    recordedById: personId,
+  })
   await Invitation.create({
     brandId,
     email: 'guest@people.example',

@@ -1,0 +1,184 @@
+import { ideaObject, recordedIdeas } from '@/lib/activity/objects'
+import type { ActivityAction } from '@/lib/activity/constants'
+import { recordActivity } from '@/lib/activity/record'
+import type { Actor } from '@/lib/auth/actor'
+import { ConflictError } from '@/lib/errors'
+import { NameIdea } from '@/models'
+
+import {
+  changeNames,
+  findIdeas,
+  findNameable,
+  movable,
+  nameShades,
+  recordMoves,
+  type Moved,
+  type NamesAtWork,
+} from './change-names'
+import { checkName, needsWordingReason, readCheckGround } from './check-name'
+import type { StateMove } from './constants'
+import { MOVES, reasonAgainst } from './moves'
+import { canReadNames } from './policy'
+import type { DecideIdeaInput, MoveIdeasInput } from './schema'
+import { tellReviewers } from './tell-reviewers'
+
+/** Moves that many ideas make at once. */
+export type BulkMove = 'send' | 'recall' | 'put-by' | 'take-up'
+/** Moves of one idea, made by somebody who has seen it as it is. */
+export type SingleMove = 'approve' | 'return' | 'reopen' | 'unlock'
+
+/** What became of ideas that were to move together. */
+export interface BulkMoved {
+  moved: string[]
+  /** Those that stayed as they were, and why. */
+  stayed: { ideaId: string; text: string; why: string }[]
+}
+
+const TOLD: Record<StateMove, ActivityAction> = {
+  send: 'name.sent',
+  recall: 'name.recalled',
+  approve: 'name.approved',
+  return: 'name.returned',
+  'put-by': 'name.put-by',
+  'take-up': 'name.taken-up',
+  reopen: 'name.reopened',
+  unlock: 'name.unlocked',
+}
+
+/**
+ * Moves ideas that can move and says of the others why not. What is sent for review is checked, and
+ * keeps what was found; all that one call sends is one letter to each reviewer.
+ * @throws NotFoundError when one is not there, ForbiddenError or ConflictError when none can move
+ */
+export async function moveIdeas(
+  actor: Actor,
+  move: BulkMove,
+  { lineSlug, ideaIds }: MoveIdeasInput,
+): Promise<BulkMoved> {
+  return changeNames(actor, canReadNames, lineSlug, async (at) => {
+    const ideas = await findIdeas(at, ideaIds)
+    const stayed: BulkMoved['stayed'] = []
+    const moves: Moved[] = []
+    const ground = move === 'send' ? await readCheckGround(at.line, at.transaction) : null
+    if (move === 'send') await requireShades(at, ideas)
+    let first: Error | null = null
+    for (const idea of ideas) {
+      const against = reasonAgainst(move, movable(idea, at.frozen), at.asker)
+      const checked = ground && checkName(ground, { ...idea.get(), ideaId: idea.id })
+      const wording =
+        !against && checked && needsWordingReason(checked.findings) && !idea.wordingReason
+          ? new ConflictError(
+              `The wording of “${idea.text}” is warned of. Say on the name why it should stand, or change it.`,
+            )
+          : null
+      const stop = against ?? wording
+      if (stop) {
+        first ??= stop
+        stayed.push({ ideaId: idea.id, text: idea.text, why: stop.message })
+        continue
+      }
+      const from = idea.state
+      await idea.update(
+        {
+          state: MOVES[move].to,
+          stateSince: new Date(),
+          version: idea.version + 1,
+          ...(checked && {
+            findings: checked.findings,
+            checkedAt: new Date(),
+            round: idea.round + 1,
+          }),
+        },
+        { transaction: at.transaction },
+      )
+      moves.push({ idea, move, from })
+    }
+    if (moves.length === 0) throw first!
+    const moved = moves.map(({ idea }) => idea)
+    await recordMoves(at, moves)
+    await recordActivity(
+      actor,
+      { action: TOLD[move], ...recordedIdeas(moved, at.line) },
+      at.transaction,
+    )
+    if (move === 'send') await tellReviewers(actor, at, moved)
+    return { moved: moved.map(({ id }) => id), stayed }
+  })
+}
+
+/** A shade that was deleted can be sent nowhere. @throws NotFoundError */
+async function requireShades(at: NamesAtWork, ideas: readonly NameIdea[]): Promise<void> {
+  await findNameable(
+    at,
+    ideas.flatMap(({ shadeId }) => shadeId ?? []),
+  )
+}
+
+/**
+ * Decides on one idea. To approve it gives the shade its name, and puts by what was approved there
+ * before; to open it again takes the name away.
+ * @throws NotFoundError; ForbiddenError for who may not; ConflictError when it has changed since, is
+ * in another state, or is locked; InvalidError without a reason where one is needed
+ */
+export async function decideIdea(
+  actor: Actor,
+  move: SingleMove,
+  { lineSlug, ideaId, version, reason }: DecideIdeaInput,
+): Promise<NameIdea> {
+  return changeNames(actor, canReadNames, lineSlug, async (at) => {
+    const { transaction } = at
+    const [idea] = (await findIdeas(at, [ideaId])) as [NameIdea]
+    const against = reasonAgainst(move, movable(idea, at.frozen), at.asker, reason)
+    if (against) throw against
+    if (idea.version !== version)
+      throw new ConflictError(
+        'This name has changed since you looked. Nothing was decided: look at it again.',
+      )
+    if (move !== 'unlock') await findNameable(at, [idea.shadeId!])
+    const from = idea.state
+    const moves: Moved[] = []
+    if (move === 'approve') moves.push(...(await displace(at, idea)))
+    await idea.update(
+      {
+        state: MOVES[move].to,
+        version: idea.version + 1,
+        unlockedAt: move === 'unlock' ? new Date() : null,
+        ...(move !== 'unlock' && { stateSince: new Date() }),
+        ...(move === 'reopen' && { round: idea.round + 1 }),
+      },
+      { transaction },
+    )
+    moves.push({ idea, move, from, reason })
+    if (move === 'approve') await nameShades(at, new Map([[idea.shadeId!, idea.text]]))
+    if (move === 'reopen') await nameShades(at, new Map([[idea.shadeId!, null]]))
+    await recordMoves(at, moves)
+    await recordActivity(
+      actor,
+      {
+        action: TOLD[move],
+        object: ideaObject(idea, at.line),
+        ...(reason && { after: { reason } }),
+      },
+      transaction,
+    )
+    return idea
+  })
+}
+
+/** Puts by the name that the idea's shade has now. @throws ConflictError when it is locked */
+async function displace(at: NamesAtWork, idea: NameIdea): Promise<Moved[]> {
+  const held = await NameIdea.findOne({
+    where: { brandId: at.line.brandId, shadeId: idea.shadeId, state: 'approved' },
+    transaction: at.transaction,
+  })
+  if (!held) return []
+  if (movable(held, at.frozen).locked)
+    throw new ConflictError(
+      `The shade is called “${held.text}”, and names are locked for the label printer. An owner must unlock that name first.`,
+    )
+  await held.update(
+    { state: 'put-by', stateSince: new Date(), version: held.version + 1, unlockedAt: null },
+    { transaction: at.transaction },
+  )
+  return [{ idea: held, move: 'displace', from: 'approved', reason: `“${idea.text}”` }]
+}

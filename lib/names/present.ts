@@ -1,0 +1,206 @@
+import type { Finding } from '@/lib/naming/finding'
+import type { NameIdea, NameMove, NameRemark, NameSearch, NameVote, NamingSettings } from '@/models'
+
+import { labelOf } from './check-name'
+import type { NameMoveKind, NameState, NameVoteKind, SearchOutcome, StateMove } from './constants'
+import { isDecider, isOwn, movesOpen, type Asker } from './moves'
+import { movable } from './change-names'
+
+/** Who did something; null once that account is gone. */
+export type Someone = { id: string; name: string } | null
+
+/** What reviewers said of an idea in its round. */
+export interface VoteView {
+  person: Someone
+  vote: NameVoteKind
+  comment: string
+  /** It is the reader's own. */
+  mine: boolean
+  /** ISO 8601. */
+  at: string
+}
+
+/** An idea as it leaves the server, to one reader. */
+export interface IdeaView {
+  id: string
+  shadeId: string | null
+  text: string
+  note: string
+  state: NameState
+  /** ISO 8601. */
+  stateSince: string
+  round: number
+  version: number
+  /** As found when it was sent for review; null before. */
+  findings: Finding[] | null
+  wordingReason: string
+  author: Someone
+  /** Whose words they are now; the author mostly. */
+  wordedBy: Someone
+  /** The reader brought it or worded it. */
+  isOwn: boolean
+  /** Approved, and locked for the label printer. */
+  locked: boolean
+  /** The moves that the reader may make now. */
+  moves: StateMove[]
+  canEdit: boolean
+  canDelete: boolean
+  canVote: boolean
+  votes: VoteView[]
+}
+
+/** For whom ideas are presented. */
+export interface Reader {
+  asker: Asker
+  frozen: boolean
+  /** Names by id of whoever may be named. */
+  people: ReadonlyMap<string, string>
+}
+
+const someone = (people: Reader['people'], id: string | null): Someone => {
+  const name = id === null ? undefined : people.get(id)
+  return id !== null && name !== undefined ? { id, name } : null
+}
+
+/** An idea with what was said of it in its round. */
+export function presentIdea(
+  idea: NameIdea,
+  votes: readonly NameVote[],
+  { asker, frozen, people }: Reader,
+): IdeaView {
+  const open = movable(idea, frozen)
+  const own = isOwn(idea, asker.personId)
+  const drafts = asker.role !== 'dyer'
+  const loose = idea.state === 'draft' || idea.state === 'returned'
+  return {
+    id: idea.id,
+    shadeId: idea.shadeId,
+    text: idea.text,
+    note: idea.note,
+    state: idea.state,
+    stateSince: idea.stateSince.toISOString(),
+    round: idea.round,
+    version: idea.version,
+    findings: idea.findings,
+    wordingReason: idea.wordingReason,
+    author: someone(people, idea.authorId),
+    wordedBy: someone(people, idea.wordedById),
+    isOwn: own,
+    locked: open.locked,
+    moves: movesOpen(open, asker),
+    canEdit: drafts && loose,
+    canDelete: drafts && (loose || idea.state === 'put-by') && (own || asker.role === 'owner'),
+    canVote: isDecider(asker) && idea.state === 'in-review' && !own,
+    votes: votes
+      .filter((vote) => vote.ideaId === idea.id && vote.round === idea.round)
+      .map((vote) => presentVote(vote, { asker, people })),
+  }
+}
+
+function presentVote(
+  vote: NameVote,
+  { asker, people }: Pick<Reader, 'asker' | 'people'>,
+): VoteView {
+  return {
+    person: someone(people, vote.personId),
+    vote: vote.vote,
+    comment: vote.comment,
+    mine: vote.personId === asker.personId,
+    at: vote.updatedAt.toISOString(),
+  }
+}
+
+/** A line of the history of names. */
+export interface MoveView {
+  id: string
+  ideaId: string
+  move: NameMoveKind
+  from: NameState | null
+  to: NameState
+  /** What the idea said then. */
+  text: string
+  shadeId: string | null
+  reason: string
+  person: Someone
+  /** ISO 8601. */
+  at: string
+}
+
+/** A move as its view. */
+export const presentMove = (move: NameMove, people: Reader['people']): MoveView => ({
+  id: move.id,
+  ideaId: move.ideaId,
+  move: move.move,
+  from: move.fromState,
+  to: move.toState,
+  text: move.text,
+  shadeId: move.shadeId,
+  reason: move.reason,
+  person: someone(people, move.personId),
+  at: move.createdAt.toISOString(),
+})
+
+/** A remark in the talk about an idea. */
+export interface RemarkView {
+  id: string
+  text: string
+  person: Someone
+  /** ISO 8601. */
+  at: string
+}
+
+/** A remark as its view. */
+export const presentRemark = (remark: NameRemark, people: Reader['people']): RemarkView => ({
+  id: remark.id,
+  text: remark.text,
+  person: someone(people, remark.personId),
+  at: remark.createdAt.toISOString(),
+})
+
+/** A search in a register of marks, as somebody recorded it. */
+export interface SearchView {
+  id: string
+  register: string
+  searchedBy: string
+  /** yyyy-mm-dd */
+  searchedOn: string
+  outcome: SearchOutcome
+  note: string
+}
+
+/** A search as its view. */
+export const presentSearch = (search: NameSearch): SearchView => ({
+  id: search.id,
+  register: search.register,
+  searchedBy: search.searchedBy,
+  searchedOn: search.searchedOn,
+  outcome: search.outcome,
+  note: search.note,
+})
+
+/** How the names of a line are set and dated. */
+export interface NamingSettingsView {
+  /** mm, pt, lines */
+  label: { width: number; size: number; lines: 1 | 2 }
+  care: string
+  themes: string[]
+  /** yyyy-mm-dd; null while undecided. */
+  printOn: string | null
+  /** Approved names are locked. */
+  frozen: boolean
+  /** 0 while nobody has set anything. */
+  version: number
+}
+
+/** The settings, or what holds while there are none. */
+export const presentSettings = (
+  settings: NamingSettings | null,
+  frozen: boolean,
+): NamingSettingsView => ({
+  label: labelOf(settings),
+  care: settings?.care ?? '',
+  themes: settings?.themes ?? [],
+  printOn: settings?.printOn ?? null,
+  frozen,
+  version: settings?.version ?? 0,
+})
