@@ -96,6 +96,17 @@ export function reasonAgainst(
   return null
 }
 
+/** Why this person may not say yes or no to this idea now; null when they may. */
+export function reasonAgainstVote(idea: Movable, asker: Asker): AppError | null {
+  if (!isDecider(asker))
+    return new ForbiddenError('Only an owner or an appointed reviewer says yes or no to names.')
+  if (idea.state !== 'in-review')
+    return new ConflictError(`It ${STANDS[idea.state]} now. What you said was not kept.`)
+  if (isOwn(idea, asker.personId))
+    return new ForbiddenError('It is your own idea: leave it to the others to say yes or no.')
+  return null
+}
+
 /** The moves that may be made with an idea now, by this person; a reason can still be given. */
 export const movesOpen = (idea: Movable, asker: Asker): StateMove[] =>
   (Object.keys(MOVES) as StateMove[]).filter(

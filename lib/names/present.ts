@@ -1,10 +1,10 @@
 import type { Finding } from '@/lib/naming/finding'
 import type { NameIdea, NameMove, NameRemark, NameSearch, NameVote, NamingSettings } from '@/models'
 
+import { movable } from './change-names'
 import { labelOf } from './check-name'
 import type { NameMoveKind, NameState, NameVoteKind, SearchOutcome, StateMove } from './constants'
-import { isDecider, isOwn, movesOpen, type Asker } from './moves'
-import { movable } from './change-names'
+import { isOwn, movesOpen, reasonAgainstVote, type Asker } from './moves'
 
 /** Who did something; null once that account is gone. */
 export type Someone = { id: string; name: string } | null
@@ -90,7 +90,7 @@ export function presentIdea(
     moves: movesOpen(open, asker),
     canEdit: drafts && loose,
     canDelete: drafts && (loose || idea.state === 'put-by') && (own || asker.role === 'owner'),
-    canVote: isDecider(asker) && idea.state === 'in-review' && !own,
+    canVote: reasonAgainstVote(open, asker) === null,
     votes: votes
       .filter((vote) => vote.ideaId === idea.id && vote.round === idea.round)
       .map((vote) => presentVote(vote, { asker, people })),
