@@ -1,5 +1,6 @@
 import {
   DataTypes,
+  literal,
   Model,
   type CreationOptional,
   type InferAttributes,
@@ -45,7 +46,8 @@ NameMove.init(
     round: { type: DataTypes.INTEGER, allowNull: false },
     personId: { type: DataTypes.UUID },
     toldAt: { type: DataTypes.DATE },
-    createdAt: DataTypes.DATE,
+    // Of moves written together each has its own moment: the history tells them in their order.
+    createdAt: { type: DataTypes.DATE, defaultValue: literal('clock_timestamp()') },
   },
-  { sequelize: sequelize(), modelName: 'NameMove', tableName: 'name_moves', updatedAt: false },
+  { sequelize: sequelize(), modelName: 'NameMove', tableName: 'name_moves', timestamps: false },
 )

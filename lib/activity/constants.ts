@@ -1,4 +1,5 @@
 import { LANE_WORDS, type Lane } from '@/lib/combinations/constants'
+import { VOTE_WORDS, type NameVoteKind } from '@/lib/names/constants'
 import { ROLE_WORDS, type Role } from '@/lib/people/constants'
 
 /** The bounds of what the activity record shows and keeps. */
@@ -294,7 +295,7 @@ export const ACTIONS = {
   },
   'name.added': { label: 'Names written down', says: (told) => `wrote down ${names(told)}` },
   'name.reworded': { label: 'Name changed', says: (told) => `changed ${names(told)}` },
-  'name.placed': { label: 'Names laid on shades', says: (told) => `laid elsewhere ${names(told)}` },
+  'name.placed': { label: 'Names laid on shades', says: (told) => `laid ${names(told)} elsewhere` },
   'name.sent': {
     label: 'Names sent for review',
     says: (told) => `sent ${names(told)} for review`,
@@ -316,8 +317,12 @@ export const ACTIONS = {
   'name.restored': { label: 'Names brought back', says: (told) => `brought back ${names(told)}` },
   'name.voted': {
     label: 'Name voted on',
-    says: ({ label, after }) =>
-      `said ${String(after.vote ?? 'nothing any more')} of the name ${label}`,
+    says: ({ label, after }) => {
+      const said = VOTE_WORDS[after.vote as NameVoteKind]
+      return said
+        ? `said “${said}” to the name ${label}`
+        : `took back their word on the name ${label}`
+    },
     saysAll: true,
   },
   'name.remarked': { label: 'Remark on a name', says: (told) => `remarked on ${names(told)}` },

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto'
 
-import type { Transaction } from 'sequelize'
+import { literal, type Transaction } from 'sequelize'
 
 import { authorize, type Actor, type Policy } from '@/lib/auth/actor'
 import { touchBoard } from '@/lib/combinations/touch-board'
@@ -164,10 +164,11 @@ export async function nameShades(
   if (names.size === 0) return
   await touchBoard(line, line.id, transaction)
   for (const [id, name] of names) {
-    const where = { brandId: line.brandId, lineId: line.id, id }
-    const shade = await Shade.findOne({ where, paranoid: false, transaction })
-    if (!shade) throw new NotFoundError()
-    await shade.update({ name, version: shade.version + 1 }, { transaction })
+    const [named] = await Shade.update(
+      { name, version: literal('version + 1') },
+      { where: { brandId: line.brandId, lineId: line.id, id }, paranoid: false, transaction },
+    )
+    if (named !== 1) throw new NotFoundError()
   }
   await line.increment('shadesRevision', { transaction })
 }

@@ -79,6 +79,8 @@ export const NAME_LIMITS = {
   searchedBy: 80,
   /** Ideas of a line, in whatever state. */
   perLine: 5_000,
+  /** Ideas that make one move together: each that is sent is checked. */
+  together: 200,
   /** Rows of one paste or file. */
   atOnce: 1_000,
   /** Characters of one paste or file. */

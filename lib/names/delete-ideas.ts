@@ -2,12 +2,25 @@ import { recordedIdeas } from '@/lib/activity/objects'
 import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { ConflictError, ForbiddenError } from '@/lib/errors'
+import { NameIdea } from '@/models'
 
-import { changeNames, findIdeas, recordMoves, requireRoomForIdeas } from './change-names'
+import {
+  changeNames,
+  findIdeas,
+  recordMoves,
+  requireRoomForIdeas,
+  type NamesAtWork,
+} from './change-names'
 import { STATE_WORDS } from './constants'
 import { isOwn } from './moves'
 import { canDraftNames } from './policy'
 import type { DeleteIdeasInput } from './schema'
+
+const whereOf = ({ line }: Pick<NamesAtWork, 'line'>, ideas: readonly NameIdea[]) => ({
+  brandId: line.brandId,
+  lineId: line.id,
+  id: ideas.map(({ id }) => id),
+})
 
 /**
  * Deletes ideas, all or none: one's own, or anybody's for an owner. What is in review or approved
@@ -32,7 +45,7 @@ export async function deleteIdeas(
         )
     }
     if (going.length === 0) return { ideaIds: [] }
-    for (const idea of going) await idea.destroy({ transaction: at.transaction })
+    await NameIdea.destroy({ where: whereOf(at, going), transaction: at.transaction })
     await recordMoves(
       at,
       going.map((idea) => ({ idea, move: 'delete', from: idea.state })),
@@ -59,7 +72,7 @@ export async function restoreIdeas(
     const coming = ideas.filter(({ deletedAt }) => deletedAt !== null)
     if (coming.length === 0) return { ideaIds: [] }
     await requireRoomForIdeas(at, coming.length)
-    for (const idea of coming) await idea.restore({ transaction: at.transaction })
+    await NameIdea.restore({ where: whereOf(at, coming), transaction: at.transaction })
     await recordMoves(
       at,
       coming.map((idea) => ({ idea, move: 'restore', from: idea.state })),

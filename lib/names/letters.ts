@@ -4,11 +4,13 @@ import type { LetterContent } from '@/lib/mail/letter'
 /** How many names a letter spells out; the others it counts. */
 const SPELT_OUT = 12
 
-/** "Stem the Dyed, Thyme Will Tell, and 38 more". */
+const inWords = new Intl.ListFormat('en-GB')
+
+/** "“Stem the Dyed”, “Thyme Will Tell” and 38 more". */
 export function spellOut(names: readonly string[]): string {
-  const spelt = names.slice(0, SPELT_OUT)
+  const spelt = names.slice(0, SPELT_OUT).map((name) => `“${name}”`)
   const more = names.length - spelt.length
-  return spelt.join(', ') + (more > 0 ? `, and ${more} more` : '')
+  return inWords.format(more > 0 ? [...spelt, `${more} more`] : spelt)
 }
 
 /** Tells a reviewer of all the names that were sent for review together. */

@@ -1,9 +1,14 @@
-import { ideaObject, recordedIdeas } from '@/lib/activity/objects'
+import { setImmediate } from 'node:timers/promises'
+
+import { literal, Op } from 'sequelize'
+
 import type { ActivityAction } from '@/lib/activity/constants'
+import { ideaObject, recordedIdeas } from '@/lib/activity/objects'
 import { recordActivity } from '@/lib/activity/record'
-import type { Actor } from '@/lib/auth/actor'
-import { ConflictError } from '@/lib/errors'
-import { NameIdea } from '@/models'
+import { authorize, type Actor } from '@/lib/auth/actor'
+import { ConflictError, type AppError } from '@/lib/errors'
+import { getLine } from '@/lib/lines/queries'
+import { NameIdea, Shade } from '@/models'
 
 import {
   changeNames,
@@ -15,7 +20,7 @@ import {
   type Moved,
   type NamesAtWork,
 } from './change-names'
-import { checkName, needsWordingReason, readCheckGround } from './check-name'
+import { checkName, needsWordingReason, readCheckGround, type CheckedName } from './check-name'
 import type { StateMove } from './constants'
 import { MOVES, reasonAgainst } from './moves'
 import { canReadNames } from './policy'
@@ -55,23 +60,18 @@ export async function moveIdeas(
   move: BulkMove,
   { lineSlug, ideaIds }: MoveIdeasInput,
 ): Promise<BulkMoved> {
+  authorize(actor, canReadNames)
+  const checked = move === 'send' ? await checkIdeas(actor, lineSlug, ideaIds) : null
   return changeNames(actor, canReadNames, lineSlug, async (at) => {
     const ideas = await findIdeas(at, ideaIds)
+    const shades = checked && (await findShadesOf(at, ideas))
     const stayed: BulkMoved['stayed'] = []
     const moves: Moved[] = []
-    const ground = move === 'send' ? await readCheckGround(at.line, at.transaction) : null
-    if (move === 'send') await requireShades(at, ideas)
     let first: Error | null = null
     for (const idea of ideas) {
-      const against = reasonAgainst(move, movable(idea, at.frozen), at.asker)
-      const checked = ground && checkName(ground, { ...idea.get(), ideaId: idea.id })
-      const wording =
-        !against && checked && needsWordingReason(checked.findings) && !idea.wordingReason
-          ? new ConflictError(
-              `The wording of “${idea.text}” is warned of. Say on the name why it should stand, or change it.`,
-            )
-          : null
-      const stop = against ?? wording
+      const stop =
+        reasonAgainst(move, movable(idea, at.frozen), at.asker) ??
+        (checked && reasonNotToSend(idea, shades!, checked.get(idea.id)))
       if (stop) {
         first ??= stop
         stayed.push({ ideaId: idea.id, text: idea.text, why: stop.message })
@@ -84,7 +84,7 @@ export async function moveIdeas(
           stateSince: new Date(),
           version: idea.version + 1,
           ...(checked && {
-            findings: checked.findings,
+            findings: checked.get(idea.id)!.findings,
             checkedAt: new Date(),
             round: idea.round + 1,
           }),
@@ -106,12 +106,59 @@ export async function moveIdeas(
   })
 }
 
-/** A shade that was deleted can be sent nowhere. @throws NotFoundError */
-async function requireShades(at: NamesAtWork, ideas: readonly NameIdea[]): Promise<void> {
-  await findNameable(
-    at,
-    ideas.flatMap(({ shadeId }) => shadeId ?? []),
-  )
+/** What the checks said of an idea, and of which version of it. */
+type Checked = Pick<CheckedName, 'findings'> & { version: number }
+
+/**
+ * Checks ideas before the line is held for them: that takes a good part of a second for forty, and
+ * nobody waits for it, neither for the line nor for the process. Those that are gone are left out.
+ */
+async function checkIdeas(
+  actor: Actor,
+  lineSlug: string,
+  ideaIds: readonly string[],
+): Promise<Map<string, Checked>> {
+  const line = await getLine(actor, lineSlug)
+  const ground = await readCheckGround(line)
+  const where = { brandId: actor.brandId, lineId: line.id, id: [...new Set(ideaIds)] }
+  const checked = new Map<string, Checked>()
+  for (const { id, text, shadeId, version } of await NameIdea.findAll({ where })) {
+    const { findings } = checkName(ground, { text, shadeId, ideaId: id })
+    checked.set(id, { findings, version })
+    await setImmediate()
+  }
+  return checked
+}
+
+/** The ids of the shades, not deleted, that ideas lie on. */
+async function findShadesOf(at: NamesAtWork, ideas: readonly NameIdea[]): Promise<Set<string>> {
+  const shades = await Shade.findAll({
+    attributes: ['id'],
+    where: {
+      brandId: at.line.brandId,
+      lineId: at.line.id,
+      id: ideas.flatMap(({ shadeId }) => shadeId ?? []),
+    },
+    transaction: at.transaction,
+  })
+  return new Set(shades.map(({ id }) => id))
+}
+
+/** Why an idea is not sent although the table of moves lets it. */
+function reasonNotToSend(
+  { text, shadeId, version, wordingReason }: NameIdea,
+  shades: ReadonlySet<string>,
+  checked: Checked | undefined,
+): AppError | null {
+  if (shadeId === null || !shades.has(shadeId))
+    return new ConflictError(`The shade of “${text}” has been deleted: give it to another first.`)
+  if (checked?.version !== version)
+    return new ConflictError(`“${text}” has changed just now. Look at it, then send it again.`)
+  if (needsWordingReason(checked.findings) && !wordingReason)
+    return new ConflictError(
+      `The wording of “${text}” is warned of. Say on the name why it should stand, or change it.`,
+    )
+  return null
 }
 
 /**
@@ -132,7 +179,7 @@ export async function decideIdea(
     if (against) throw against
     if (idea.version !== version)
       throw new ConflictError(
-        'This name has changed since you looked. Nothing was decided: look at it again.',
+        'This name, or what its shade is called, has changed since you looked. Nothing was decided: look at it again.',
       )
     if (move !== 'unlock') await findNameable(at, [idea.shadeId!])
     const from = idea.state
@@ -149,8 +196,8 @@ export async function decideIdea(
       { transaction },
     )
     moves.push({ idea, move, from, reason })
-    if (move === 'approve') await nameShades(at, new Map([[idea.shadeId!, idea.text]]))
-    if (move === 'reopen') await nameShades(at, new Map([[idea.shadeId!, null]]))
+    if (move === 'approve') await nameShade(at, idea, idea.text)
+    if (move === 'reopen') await nameShade(at, idea, null)
     await recordMoves(at, moves)
     await recordActivity(
       actor,
@@ -163,6 +210,26 @@ export async function decideIdea(
     )
     return idea
   })
+}
+
+/**
+ * Gives the idea's shade its name, or takes it away. Whoever looks at another idea for the shade has
+ * not seen that: what they decide next is refused once.
+ */
+async function nameShade(at: NamesAtWork, idea: NameIdea, name: string | null): Promise<void> {
+  await nameShades(at, new Map([[idea.shadeId!, name]]))
+  await NameIdea.update(
+    { version: literal('version + 1') },
+    {
+      where: {
+        brandId: at.line.brandId,
+        shadeId: idea.shadeId,
+        state: 'in-review',
+        id: { [Op.ne]: idea.id },
+      },
+      transaction: at.transaction,
+    },
+  )
 }
 
 /** Puts by the name that the idea's shade has now. @throws ConflictError when it is locked */

@@ -37,7 +37,13 @@ export async function placeIdeas(
           `“${idea.text}” is ${STATE_WORDS[idea.state].toLowerCase()} and stays where it is. Nothing was changed.`,
         )
       await idea.update(
-        { shadeId: wished.get(idea.id) ?? null, version: idea.version + 1 },
+        {
+          shadeId: wished.get(idea.id) ?? null,
+          // They were found for the shade it lay on.
+          findings: null,
+          checkedAt: null,
+          version: idea.version + 1,
+        },
         { transaction: at.transaction },
       )
     }

@@ -45,7 +45,10 @@ export async function presentIdeas(
   const voted = ideas.filter(({ round }) => round > 0).map(({ id }) => id)
   const votes =
     voted.length > 0
-      ? await NameVote.findAll({ where: { ideaId: voted }, order: [['updatedAt', 'ASC']] })
+      ? await NameVote.findAll({
+          where: { brandId: ideas[0]!.brandId, ideaId: voted },
+          order: [['updatedAt', 'ASC']],
+        })
       : []
   const people = await namesOf([
     ...ideas.flatMap(({ authorId, wordedById }) => [authorId, wordedById]),

@@ -107,7 +107,13 @@ export const placeIdeasSchema = z.strictObject({
 export type PlaceIdeasInput = z.output<typeof placeIdeasSchema>
 
 /** Ideas that all make one move that asks for no reason. */
-export const moveIdeasSchema = z.strictObject({ ...inLine, ideaIds })
+export const moveIdeasSchema = z.strictObject({
+  ...inLine,
+  ideaIds: ideaIds.max(
+    NAME_LIMITS.together,
+    `Choose at most ${NAME_LIMITS.together} names at once.`,
+  ),
+})
 /** Parsed ideas to move. */
 export type MoveIdeasInput = z.output<typeof moveIdeasSchema>
 

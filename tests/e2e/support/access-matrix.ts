@@ -444,6 +444,82 @@ export const ACTIONS: Record<string, ActionRule> = {
       [kit, spareKit],
     ],
   },
+
+  // The submit that wrote it down, sent again.
+  addIdeaAction: {
+    who: STUDIO,
+    input: ({ line, shade, ideaText, requestKey }) => ({
+      lineSlug: line,
+      shadeId: shade,
+      text: ideaText,
+      requestKey,
+    }),
+  },
+  addIdeasAction: {
+    who: STUDIO,
+    input: ({ line, shade, ideaText, requestKey }) => ({
+      lineSlug: line,
+      ideas: [{ text: ideaText, shadeId: shade }],
+      requestKey,
+    }),
+  },
+  editIdeaAction: {
+    who: STUDIO,
+    input: ({ line, idea }) => ({ lineSlug: line, ideaId: idea, version: -1, note: 'Mine now' }),
+    answer: 'conflict',
+  },
+  // It lies there already.
+  placeIdeasAction: {
+    who: STUDIO,
+    input: ({ line, idea, shade }) => ({
+      lineSlug: line,
+      placements: [{ ideaId: idea, shadeId: shade }],
+    }),
+  },
+  // What is in review is not deleted.
+  deleteIdeasAction: {
+    who: STUDIO,
+    input: ({ line, idea }) => ({ lineSlug: line, ideaIds: [idea] }),
+    answer: 'conflict',
+  },
+  restoreIdeasAction: {
+    who: STUDIO,
+    input: ({ line, idea }) => ({ lineSlug: line, ideaIds: [idea] }),
+  },
+  // A move that its state does not let it make, and a decision on what it was before.
+  ...Object.fromEntries(
+    Object.entries<(place: Place) => string>({
+      sendForReviewAction: ({ idea }) => idea,
+      recallIdeasAction: ({ spareIdea }) => spareIdea,
+      putByIdeasAction: ({ spareIdea }) => spareIdea,
+      takeUpIdeasAction: ({ idea }) => idea,
+    }).map(([action, ideaOf]): [string, ActionRule] => [
+      action,
+      {
+        who: STUDIO,
+        input: (place) => ({ lineSlug: place.line, ideaIds: [ideaOf(place)] }),
+        answer: 'conflict',
+      },
+    ]),
+  ),
+  // No marketer or designer is appointed to decide on the line's names.
+  ...Object.fromEntries(
+    ['approveNameAction', 'returnNameAction', 'reopenNameAction', 'unlockNameAction'].map(
+      (action): [string, ActionRule] => [
+        action,
+        {
+          who: OWNER,
+          input: ({ line, idea }) => ({
+            lineSlug: line,
+            ideaId: idea,
+            version: -1,
+            reason: 'It is another’s.',
+          }),
+          answer: 'conflict',
+        },
+      ],
+    ),
+  ),
 }
 
 const CSV = 'number,hex\nNobody has this,#808080\n'

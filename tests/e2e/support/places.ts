@@ -41,6 +41,14 @@ export interface Place {
   picture: string
   /** A kit to delete; its row is made when it is wanted. */
   spareKit: string
+  /** An idea for the shade's name, in review. */
+  idea: string
+  /** What it says, and no other. */
+  ideaText: string
+  /** An idea for the shade's name that was put by. */
+  spareIdea: string
+  /** A search in a register that was recorded for the idea. */
+  search: string
 }
 
 /** The fields of a place that name a row by its id. */
@@ -53,6 +61,9 @@ const IDS = [
   'combination',
   'kit',
   'spareKit',
+  'idea',
+  'spareIdea',
+  'search',
 ] as const
 
 /** A place of the brand whose rows are another place's. */
@@ -192,6 +203,21 @@ export async function makePlace(
      VALUES ($1, $2, $3, 'ready', $4, $5, now() - interval '1 day')`,
     [kit, brand_id, line_id, JSON.stringify([combination]), requestKey],
   )
+  const ideaText = `Said of ${line_name} ${requestKey.slice(0, 8)}`
+  const addIdea = async (state: string) => {
+    const made = await client.query(
+      `INSERT INTO name_ideas (brand_id, line_id, shade_id, text, state, round)
+       VALUES ($1, $2, $3, $4, $5, 1) RETURNING id`,
+      [brand_id, line_id, id, ideaText, state],
+    )
+    return made.rows[0].id as string
+  }
+  const idea = await addIdea('in-review')
+  const search = await client.query(
+    `INSERT INTO name_searches (brand_id, idea_id, register, searched_by, searched_on, outcome)
+     VALUES ($1, $2, 'A register', 'Somebody', '2026-11-01', 'nothing found') RETURNING id`,
+    [brand_id, idea],
+  )
   const owner = await client.query(
     `SELECT email FROM people JOIN memberships ON person_id = people.id
      WHERE brand_id = $1 AND role = 'owner' ORDER BY people.created_at, people.id LIMIT 1`,
@@ -220,15 +246,19 @@ export async function makePlace(
     kit,
     picture: `${combination}-1080x1080.png`,
     spareKit: randomUUID(),
+    idea,
+    ideaText,
+    spareIdea: await addIdea('put-by'),
+    search: search.rows[0].id,
   }
 }
 
 /** Removes the rows that makePlace added. */
-export async function clearPlace(
-  client: pg.Client,
-  models: Models,
-  { photograph, waiting, spare, pending, combination, spareCombination, kit, spareKit }: Place,
-): Promise<void> {
+export async function clearPlace(client: pg.Client, models: Models, place: Place): Promise<void> {
+  const { photograph, waiting, spare, pending, combination, spareCombination, kit, spareKit } =
+    place
+  // And what was written down for it.
+  await client.query('DELETE FROM name_ideas WHERE text = $1', [place.ideaText])
   await client.query('DELETE FROM kits WHERE id = ANY ($1)', [[kit, spareKit]])
   await client.query('DELETE FROM combinations WHERE id = ANY ($1)', [
     [combination, spareCombination],

@@ -17,7 +17,7 @@ export interface Secrets {
 interface BrandTexts {
   /** For all of the brand. */
   shared: readonly string[]
-  /** Not for a dyer: photographs and combinations. */
+  /** Not for a dyer: photographs, combinations, and names that are not approved. */
   studio: readonly string[]
 }
 
@@ -38,7 +38,10 @@ export async function findSecrets(client: pg.Client): Promise<Secrets> {
       JOIN people ON people.id = person_id JOIN brands ON brands.id = brand_id`)
   const studio = await read(`
     SELECT slug, unnest(ARRAY[title, alt_text]) FROM photographs JOIN brands ON brands.id = brand_id
-    UNION SELECT slug, title FROM combinations JOIN brands ON brands.id = brand_id`)
+    UNION SELECT slug, title FROM combinations JOIN brands ON brands.id = brand_id
+    UNION SELECT slug, unnest(ARRAY[text, note]) FROM name_ideas JOIN brands ON brands.id = brand_id
+      WHERE NOT EXISTS (SELECT FROM shades WHERE shades.name = text)
+    UNION SELECT slug, text FROM name_remarks JOIN brands ON brands.id = brand_id`)
   const slugs = [...new Set(shared.map(([slug]) => slug))]
   const of = (rows: [string, string][], brand: string) => {
     const elsewhere = new Set(rows.filter(([slug]) => slug !== brand).map(([, text]) => text))

@@ -16,6 +16,10 @@ const LENIENT = new Map([
   ['shadeTableSchema', 'the address of a page'],
   ['sampleBookSchema', 'the address of a page'],
   ['rangeStudySchema', 'the address of a page'],
+  ['nameListSchema', 'the address of a page'],
+  ['heapAddressSchema', 'the address of a page'],
+  ['reviewAddressSchema', 'the address of a page'],
+  ['nameHistorySchema', 'the address of a page'],
   ['signInSchema', 'next-auth sends its own fields beside; none of them is looked at'],
   ['shadeFormSchema', 'what a form holds, never what is sent'],
 ])
