@@ -5,11 +5,13 @@ import {
   type CreationOptional,
   type InferAttributes,
   type InferCreationAttributes,
+  type NonAttribute,
 } from 'sequelize'
 
 import type { NameMoveKind, NameState } from '@/lib/names/constants'
 
 import { idColumn } from './columns'
+import type { NameIdea } from './NameIdea'
 import { sequelize } from './sequelize'
 
 /** A move of an idea, kept for good: what it said then, who moved it, and why. */
@@ -29,6 +31,7 @@ export class NameMove extends Model<InferAttributes<NameMove>, InferCreationAttr
   /** When the author was written to about it. */
   declare toldAt: CreationOptional<Date | null>
   declare createdAt: CreationOptional<Date>
+  declare idea?: NonAttribute<NameIdea>
 }
 
 NameMove.init(

@@ -50,6 +50,7 @@ CombinationPlace.belongsTo(Combination, { as: 'combination', foreignKey: 'combin
 
 Line.hasMany(NameIdea, { as: 'nameIdeas', foreignKey: 'lineId' })
 Shade.hasMany(NameIdea, { as: 'nameIdeas', foreignKey: 'shadeId' })
+NameMove.belongsTo(NameIdea, { as: 'idea', foreignKey: 'ideaId' })
 NameIdea.belongsTo(Shade, { as: 'shade', foreignKey: 'shadeId' })
 
 export {

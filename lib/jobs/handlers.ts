@@ -1,5 +1,7 @@
 import { sweepKits } from '@/lib/kits/sweep'
 import { sendLetter, sendLetters } from '@/lib/mail/send-letters'
+import { freezeDueNames } from '@/lib/names/freeze-due-names'
+import { tellDecisions } from '@/lib/names/tell-decisions'
 import { sweepPeople } from '@/lib/people/sweep'
 import { copyPhotograph } from '@/lib/photographs/read-photograph'
 import { sweepUploads } from '@/lib/photographs/sweep'
@@ -24,6 +26,8 @@ export const HANDLERS: { [Name in JobName]: JobHandler<Name> } = {
   'sweep-people': () => sweepPeople(),
   'build-kit': buildKitJob,
   'sweep-kits': () => sweepKits(),
+  'tell-decisions': () => tellDecisions(),
+  'freeze-names': () => freezeDueNames(),
 }
 
 /** When the jobs that nobody asks for are done. @see crontab(5) */
@@ -32,4 +36,6 @@ export const SCHEDULES: Partial<Record<JobName, string>> = {
   'send-letters': '* * * * *',
   'sweep-people': '17 * * * *',
   'sweep-kits': '*/15 * * * *',
+  'tell-decisions': '* * * * *',
+  'freeze-names': '1 * * * *',
 }

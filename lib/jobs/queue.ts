@@ -16,6 +16,8 @@ export interface JobData {
   'sweep-people': Record<string, never>
   'build-kit': { kitId: string }
   'sweep-kits': Record<string, never>
+  'tell-decisions': Record<string, never>
+  'freeze-names': Record<string, never>
 }
 /** One of the queues. */
 export type JobName = keyof JobData
@@ -36,6 +38,8 @@ export const QUEUES: Record<
   'sweep-people': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
   'build-kit': { retryLimit: 3, retryDelay: 2, expireInSeconds: 120 },
   'sweep-kits': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
+  'tell-decisions': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
+  'freeze-names': { retryLimit: 0, retryDelay: 0, expireInSeconds: 120 },
 }
 
 // Never started and never connected: it only words the insert, which runs in our transaction.
