@@ -3,12 +3,12 @@
 import { createContext, use } from 'react'
 
 import { AppLink } from '@/components/ui/app-link'
+import { EditableCell } from '@/components/ui/editable-cell'
 import { WoundSample } from '@/components/yarn/wound-sample'
 import type { ActionResult } from '@/lib/errors'
 import type { ShadeView } from '@/lib/shades/present'
 import { SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/constants'
 
-import { EditableCell } from './editable-cell'
 import { BeyondScreen, ShadeStatusWord, showReading, showTerms, STATUS_WORDS } from './shade-words'
 import { shadesHref, type LinePlace } from './shades-actions'
 import type { SaveShade } from './use-save-shade'

@@ -1,15 +1,8 @@
 'use client'
 
-import {
-  columnFilteringFeature,
-  createColumnHelper,
-  rowPaginationFeature,
-  rowSelectionFeature,
-  rowSortingFeature,
-  tableFeatures,
-} from '@tanstack/react-table'
+import { createColumnHelper } from '@tanstack/react-table'
 
-import { Checkbox } from '@/components/ui/checkbox'
+import { chooseColumn, type features } from '@/components/ui/use-paged-table'
 import type { ShadeView } from '@/lib/shades/present'
 
 import {
@@ -22,38 +15,15 @@ import {
   TermsCell,
 } from './shade-cells'
 
-/** What the table does; sorting, filtering and paging are the server's, by the address. */
-export const features = tableFeatures({
-  rowSortingFeature,
-  columnFilteringFeature,
-  rowPaginationFeature,
-  rowSelectionFeature,
-})
-
 const helper = createColumnHelper<typeof features, ShadeView>()
 
 /** Columns whose cells stand at the right. */
 export const NUMBER_COLUMNS: readonly string[] = ['L', 'a', 'b', 'order']
 
 /** The choice of rows, for those who edit. */
-const selectColumn = helper.display({
-  id: 'select',
-  header: ({ table }) => (
-    <Checkbox
-      hideLabel
-      label="Choose all shades of this page"
-      checked={table.getIsAllRowsSelected()}
-      onChange={table.getToggleAllRowsSelectedHandler()}
-    />
-  ),
-  cell: ({ row }) => (
-    <Checkbox
-      hideLabel
-      label={`Choose ${row.original.label}`}
-      checked={row.getIsSelected()}
-      onChange={row.getToggleSelectedHandler()}
-    />
-  ),
+const selectColumn = chooseColumn<ShadeView>({
+  all: 'Choose all shades of this page',
+  one: ({ label }) => `Choose ${label}`,
 })
 
 /** The columns of the shades; their ids are what the address sorts by. */

@@ -2,9 +2,10 @@
 
 import { useEffect, useId, useRef, useState, type ReactNode } from 'react'
 
-import { cn } from '@/components/ui/cn'
-import { controlClass, FieldError } from '@/components/ui/field'
 import type { ActionResult } from '@/lib/errors'
+
+import { cn } from './cn'
+import { controlClass, FieldError } from './field'
 
 /** Props of {@link EditableCell}. */
 export interface EditableCellProps {

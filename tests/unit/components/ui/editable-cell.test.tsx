@@ -2,7 +2,7 @@ import { render, screen, waitFor } from '@testing-library/react'
 import userEvent from '@testing-library/user-event'
 import { describe, expect, it, vi } from 'vitest'
 
-import { EditableCell } from '@/components/shades/editable-cell'
+import { EditableCell } from '@/components/ui/editable-cell'
 import type { ActionResult } from '@/lib/errors'
 
 type Save = (typed: string) => Promise<ActionResult<unknown>>
@@ -31,7 +31,7 @@ const refused = () =>
     }),
   )
 
-describe('a cell of the shade table', () => {
+describe('a cell that is edited in place', () => {
   it('saves with Enter and gives the focus back', async () => {
     const onSave = saved()
     const user = cell(onSave)
