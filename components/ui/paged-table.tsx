@@ -2,7 +2,7 @@
 
 import type { ReactTable } from '@tanstack/react-table'
 import { ArrowDown, ArrowUp } from 'lucide-react'
-import type { ReactNode } from 'react'
+import { Fragment, type ReactNode } from 'react'
 
 import { cn } from './cn'
 import { Ledger } from './ledger'
@@ -15,6 +15,7 @@ export function PagedTable<Row extends object>({
   hint,
   loading,
   keyOf,
+  detailOf,
   numberColumns = [],
 }: {
   table: ReactTable<typeof features, Row>
@@ -24,6 +25,8 @@ export function PagedTable<Row extends object>({
   loading: boolean
   /** What a row is known by while its id may change; its id by default. */
   keyOf?: (row: Row) => string
+  /** What stands under a row; null for nothing. */
+  detailOf?: (row: Row) => ReactNode
   /** Columns whose cells stand at the right. */
   numberColumns?: readonly string[]
 }) {
@@ -69,18 +72,34 @@ export function PagedTable<Row extends object>({
           ))}
         </thead>
         <tbody>
-          {table.getRowModel().rows.map((row) => (
-            <tr
-              key={keyOf ? keyOf(row.original) : row.id}
-              className={row.getIsSelected() ? 'bg-wash' : undefined}
-            >
-              {row.getAllCells().map((cell) => (
-                <td key={cell.column.id} className={classOf(cell.column.id)}>
-                  <table.FlexRender cell={cell} />
-                </td>
-              ))}
-            </tr>
-          ))}
+          {table.getRowModel().rows.map((row) => {
+            const detail = detailOf?.(row.original)
+            const cells = row.getAllCells()
+            return (
+              <Fragment key={keyOf ? keyOf(row.original) : row.id}>
+                <tr
+                  className={cn(
+                    row.getIsSelected() && 'bg-wash',
+                    Boolean(detail) && '[&>td]:border-b-transparent',
+                  )}
+                >
+                  {cells.map((cell) => (
+                    <td key={cell.column.id} className={classOf(cell.column.id)}>
+                      <table.FlexRender cell={cell} />
+                    </td>
+                  ))}
+                </tr>
+                {detail ? (
+                  <tr>
+                    <td colSpan={cells.length}>
+                      {/* Where the table is wider than the window, it stays in sight. */}
+                      <div className="sticky left-0 w-fit max-w-[calc(100vw-2rem)]">{detail}</div>
+                    </td>
+                  </tr>
+                ) : null}
+              </Fragment>
+            )
+          })}
         </tbody>
       </Ledger>
     </div>

@@ -12,6 +12,11 @@ export const STATE_WORDS: Record<NameState, string> = {
   'put-by': 'Put by',
 }
 
+/** How far the naming of a shade has come: as its leading idea, or without any. */
+export const LISTED_STATES = ['none', 'draft', 'returned', 'in-review', 'approved'] as const
+/** One of LISTED_STATES. */
+export type ListedState = (typeof LISTED_STATES)[number]
+
 /** The moves that take an idea from one state to another; lib/names/moves.ts says who and when. */
 export const STATE_MOVES = [
   'send',
@@ -89,6 +94,8 @@ export const NAME_LIMITS = {
   perIdea: 200,
   page: 50,
   heapPage: 100,
+  /** Drafts checked at once to sort or narrow the list by what is found. */
+  sifted: 150,
   /** Ideas dealt at once: the assignment costs their number by that of the shades. */
   dealt: 400,
   themes: 12,

@@ -110,6 +110,55 @@ function presentVote(
   }
 }
 
+/** A shade in the list of names. */
+export interface NameRow {
+  /** The shade's. */
+  id: string
+  number: string
+  /** The approved name, or "No. 14". */
+  label: string
+  /** `#rrggbb` for a screen. */
+  hex: string
+  /** The shade is no longer made. */
+  retired: boolean
+  /** The tonal family's name; null while it is in none. */
+  family: string | null
+  /**
+   * The idea that stands for the shade: what is approved, else what is in review, else what was
+   * drafted or returned last. A draft's findings are those of now.
+   */
+  idea: IdeaView | null
+  /** Its other ideas, by state. */
+  others: Partial<Record<NameState, number>>
+}
+
+/** How far the names of a line have come. */
+export interface NamesInNumbers {
+  shades: number
+  /** Shades with an approved name. */
+  named: number
+  /** Ideas on shades, by state. */
+  onShades: Record<NameState, number>
+  /** Loose ideas that are not put by. */
+  heap: number
+}
+
+/** A name as it stands among all names of its line. */
+export interface TogetherRow {
+  /** The shade's. */
+  id: string
+  number: string
+  hex: string
+  family: string | null
+  ideaId: string
+  name: string
+  state: 'approved' | 'in-review'
+  /** A stock code that no other name of the line has. */
+  code: string
+  /** The saying it plays on; null when we know none. */
+  source: string | null
+}
+
 /** A line of the history of names. */
 export interface MoveView {
   id: string

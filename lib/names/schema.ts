@@ -4,9 +4,9 @@ import { oneLine, SHADE_LIMITS } from '@/lib/shades/constants'
 
 import {
   LABEL_RANGES,
+  LISTED_STATES,
   NAME_LIMITS,
   NAME_SORTS,
-  NAME_STATES,
   NAME_VOTES,
   SEARCH_OUTCOMES,
 } from './constants'
@@ -242,8 +242,8 @@ const several = <const T extends string>(known: readonly T[]) =>
 /** The address of the list of names. Nonsense in it gives the default of that part. */
 export const nameListSchema = z.object({
   q: z.string().trim().max(SHADE_LIMITS.search).catch(''),
-  state: several([...NAME_STATES, 'none']),
-  family: z.union([z.uuid(), z.literal('')]).catch(''),
+  state: several(LISTED_STATES),
+  family: z.union([z.uuid(), z.literal('none'), z.literal('')]).catch(''),
   warned: z
     .literal('1')
     .transform(() => true)

@@ -66,7 +66,7 @@ export async function listAllShades(
 }
 
 /** Numbers as people count: by what stands before the first digits, then by those as a number. */
-const BY_NUMBER = [
+export const BY_NUMBER = [
   literal(`lower(regexp_replace(number, '[0-9].*$', ''))`),
   literal(`substring(number from '[0-9]+')::numeric`),
   literal(`lower(number)`),
