@@ -1,5 +1,5 @@
 import { readFileSync } from 'node:fs'
-import { createRequire } from 'node:module'
+import { join } from 'node:path'
 
 import { create, type Font } from 'fontkit'
 
@@ -22,7 +22,8 @@ export interface FontFile {
   font: Font
 }
 
-const { resolve } = createRequire(import.meta.url)
+/** Where packages are, said so that a build does not try to take every font along. */
+const PACKAGES = join(process.cwd(), 'node_modules')
 const loaded = new Map<Face, FontFile[]>()
 
 /** A face's files, the one with most of the letters first. */
@@ -32,7 +33,8 @@ export function fontFiles(face: Face): FontFile[] {
   const { family, weight } = FACES[face]
   const files = ['latin', 'latin-ext'].map((subset) => {
     const name = `${family}-${subset}-${weight}`
-    const bytes = unpackWoff(readFileSync(resolve(`@fontsource/${family}/files/${name}.woff`)))
+    const path = join(PACKAGES, '@fontsource', family, 'files', `${name}.woff`)
+    const bytes = unpackWoff(readFileSync(path))
     // Only a collection of fonts gives anything but a font.
     return { name, bytes, font: create(bytes) as Font }
   })
