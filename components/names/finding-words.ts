@@ -31,3 +31,8 @@ export function inShort(findings: readonly Finding[] | null): string {
   ]
   return parts.join(', ') || 'Nothing found'
 }
+
+const folded = (text: string) => text.normalize('NFC').trim().replace(/\s+/g, ' ').toLowerCase()
+
+/** Whether two names are the same words, capitals aside. */
+export const sameWords = (one: string, other: string): boolean => folded(one) === folded(other)

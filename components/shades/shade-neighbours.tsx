@@ -9,10 +9,13 @@ export function ShadeNeighbours({
   place,
   shade,
   neighbours,
+  hrefOf = (id) => shadesHref(place, `/${id}`),
 }: {
   place: LinePlace
   shade: ShadeView
   neighbours: readonly { shade: ShadeView; difference: number }[]
+  /** Where a neighbour leads; its own page unless told. */
+  hrefOf?: (shadeId: string) => string
 }) {
   if (neighbours.length === 0) return <p>It is the only shade of the line.</p>
   const isMixed = neighbours.some((neighbour) => neighbour.shade.observer !== shade.observer)
@@ -21,10 +24,7 @@ export function ShadeNeighbours({
       <ul role="list" className="space-y-2 pt-1">
         {neighbours.map(({ shade: neighbour, difference }) => (
           <li key={neighbour.id}>
-            <AppLink
-              href={shadesHref(place, `/${neighbour.id}`)}
-              className="group flex items-center gap-3"
-            >
+            <AppLink href={hrefOf(neighbour.id)} className="group flex items-center gap-3">
               <WoundSample hex={neighbour.hex} className="h-8 w-auto" />
               <span className="min-w-0 grow">
                 <span className="block font-title leading-tight break-words text-ink group-hover:underline">

@@ -1,10 +1,20 @@
 import type { Finding } from '@/lib/naming/finding'
+import type { Play } from '@/lib/naming/play'
+import type { StoryName } from '@/lib/naming/story'
 import type { NameIdea, NameMove, NameRemark, NameSearch, NameVote, NamingSettings } from '@/models'
 
 import { movable } from './change-names'
 import { labelOf } from './check-name'
 import type { NameMoveKind, NameState, NameVoteKind, SearchOutcome, StateMove } from './constants'
 import { isOwn, movesOpen, reasonAgainstVote, type Asker } from './moves'
+
+export type { CheckedName } from './check-name'
+
+/** Names made up for a shade, best first; `fits` says whether the ball band has room for one. */
+export interface ProposedNames {
+  plays: (Play & { fits: boolean })[]
+  story: (StoryName & { fits: boolean })[]
+}
 
 /** Who did something; null once that account is gone. */
 export type Someone = { id: string; name: string } | null

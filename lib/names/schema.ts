@@ -212,7 +212,7 @@ export type LiftFreezeInput = z.output<typeof liftFreezeSchema>
 /** A name to check while it is being written. */
 export const checkNameSchema = z.strictObject({
   ...inLine,
-  text: z.string().max(NAME_LIMITS.text),
+  text: nameText,
   shadeId: z.uuid().nullable(),
   ideaId: z.uuid().nullable().default(null),
 })

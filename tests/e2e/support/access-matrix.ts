@@ -101,6 +101,7 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]/photographs/[photograph]': { who: STUDIO },
   '/[brand]/lines/[line]/combinations': { who: STUDIO },
   '/[brand]/lines/[line]/combinations/[combination]': { who: STUDIO },
+  '/[brand]/lines/[line]/names/shades/[shade]': { who: STUDIO },
   '/[brand]/lines/[line]/kits': { who: STUDIO },
   '/[brand]/lines/[line]/kits/[kit]': { who: STUDIO },
 }
@@ -329,6 +330,16 @@ export const ACTIONS: Record<string, ActionRule> = {
       },
     ]),
   ),
+  // Both only look.
+  checkNameAction: {
+    who: STUDIO,
+    input: ({ line, shade }) => ({ lineSlug: line, shadeId: shade, text: 'Thyme Will Tell' }),
+  },
+  proposeNamesAction: {
+    who: STUDIO,
+    input: ({ line, shade }) => ({ lineSlug: line, shadeId: shade }),
+  },
+
   previewSortAction: { who: EDITORS, input: ({ line }) => ({ lineSlug: line, count: 5 }) },
 
   deletePhotographsAction: {

@@ -54,6 +54,15 @@ export const PAGES: readonly StudioPage[] = [
     roles: STUDIO,
     find: firstLink('combinations', new RegExp(`/combinations/${ID}`)),
   },
+  {
+    name: 'the naming bench of a shade',
+    roles: STUDIO,
+    find: async (page) =>
+      (await firstLink('shades', new RegExp(`/shades/${ID}`))(page)).replace(
+        '/shades/',
+        '/names/shades/',
+      ),
+  },
   { name: 'kits', roles: STUDIO, find: () => `${LINE}/kits` },
 ]
 
