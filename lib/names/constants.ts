@@ -1,3 +1,5 @@
+import type { Role } from '@/lib/people/constants'
+
 /** The states of an idea: written down, looked at, decided, sent back, kept for another time. */
 export const NAME_STATES = ['draft', 'in-review', 'approved', 'returned', 'put-by'] as const
 /** One of NAME_STATES. */
@@ -116,3 +118,6 @@ export const LABEL_RANGES = {
 export const NAME_SORTS = ['order', 'number', 'name', 'state', 'family', 'checks'] as const
 /** One of NAME_SORTS. */
 export type NameSort = (typeof NAME_SORTS)[number]
+
+/** Who can be appointed to decide on names: owners decide anyway, and the dye house sees none. */
+export const APPOINTABLE: readonly Role[] = ['marketer', 'designer']

@@ -1,6 +1,8 @@
 import type { Finding } from '@/lib/naming/finding'
 import type { Play } from '@/lib/naming/play'
 import type { StoryName } from '@/lib/naming/story'
+import type { LabelSetting, SetName } from '@/lib/naming/label'
+import type { Role } from '@/lib/people/constants'
 import type { NameIdea, NameMove, NameRemark, NameSearch, NameVote, NamingSettings } from '@/models'
 
 import { movable } from './change-names'
@@ -240,7 +242,7 @@ export const presentSearch = (search: NameSearch): SearchView => ({
 /** How the names of a line are set and dated. */
 export interface NamingSettingsView {
   /** mm, pt, lines */
-  label: { width: number; size: number; lines: 1 | 2 }
+  label: LabelSetting
   care: string
   themes: string[]
   /** yyyy-mm-dd; null while undecided. */
@@ -263,3 +265,69 @@ export const presentSettings = (
   frozen,
   version: settings?.version ?? 0,
 })
+
+/** An approved name as it goes on its ball band. */
+export interface LabelView {
+  shadeId: string
+  number: string
+  ideaId: string
+  version: number
+  name: string
+  set: SetName
+  /** Locked for the label printer. */
+  locked: boolean
+  /** An owner unlocked it while the others are locked. */
+  unlocked: boolean
+  canUnlock: boolean
+}
+
+/** A shade that goes on no ball band by name, and how far its furthest idea has come. */
+export interface UnnamedView {
+  shadeId: string
+  number: string
+  state: NameState | null
+}
+
+/** The label as it would be set, and whether all names of the line fit on it. */
+export interface LabelsPreview {
+  setting: LabelSetting
+  /** The widest name; the line's own while it has none. */
+  sample: { number: string; name: string; set: SetName }
+  /** Names that are approved or in review. */
+  total: number
+  /** Those that do not fit, the widest first; a few of them. */
+  misfits: { number: string; name: string; set: SetName }[]
+  /** How many do not fit. */
+  misfitCount: number
+}
+
+/** Somebody who decides on names, or could be appointed to. */
+export interface ReviewerView {
+  personId: string
+  name: string
+  role: Role
+  isReviewer: boolean
+}
+
+/** An entry of the history of a line's names. */
+export interface NameHistoryEntry {
+  id: string
+  person: Someone
+  /** ISO 8601. */
+  at: string
+  /** "14:05", in UTC. */
+  time: string
+  told:
+    | { move: MoveView; shade: string | null }
+    /** What follows the person's name, or says it all where nobody did it. */
+    | { sentence: string; byItself: boolean }
+}
+
+/** The entries of one day. */
+export interface NameHistoryDay {
+  /** yyyy-mm-dd, in UTC. */
+  date: string
+  /** "Tuesday 1 December 2026". */
+  heading: string
+  entries: NameHistoryEntry[]
+}

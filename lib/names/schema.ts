@@ -180,17 +180,32 @@ const measure = (what: string, [least, most]: readonly [number, number]) =>
     .min(least, `At least ${least}.`)
     .max(most, `At most ${most}.`)
 
-/** How names are set, dated and decided on. */
-export const namingSettingsSchema = z.strictObject({
-  ...inLine,
-  version: z.number().int(),
+const labelSetting = {
   labelWidth: measure('the width in millimetres', LABEL_RANGES.width),
   labelSize: measure('the size in points', LABEL_RANGES.size),
   labelLines: z.union([z.literal(1), z.literal(2)]),
+}
+
+/** Theme words as a list, or as a form has them: with commas between. */
+const themes = z
+  .union([
+    z.string().transform((text) => text.split(/[,;\n]/).filter((word) => word.trim() !== '')),
+    z.array(z.string()),
+  ])
+  .pipe(
+    z
+      .array(line('a theme word', NAME_LIMITS.theme, { empty: 'Write a word.' }))
+      .max(NAME_LIMITS.themes, `At most ${NAME_LIMITS.themes} theme words.`),
+  )
+  .transform((words) => [...new Set(words)])
+
+/** How names are set, dated and decided on; version 0 while nobody has set anything. */
+export const namingSettingsSchema = z.strictObject({
+  ...inLine,
+  ...labelSetting,
+  version: z.number().int(),
   care: line('the care', NAME_LIMITS.care),
-  themes: z
-    .array(line('a theme word', NAME_LIMITS.theme, { empty: 'Write a word.' }))
-    .max(NAME_LIMITS.themes, `At most ${NAME_LIMITS.themes} theme words.`),
+  themes,
   printOn: z.union([z.iso.date('Give a date.'), z.literal('').transform(() => null), z.null()]),
   reviewerIds: z.array(z.uuid()).max(NAME_LIMITS.reviewers),
 })
@@ -199,13 +214,22 @@ export type NamingSettingsValues = z.input<typeof namingSettingsSchema>
 /** Parsed settings. */
 export type NamingSettingsInput = z.output<typeof namingSettingsSchema>
 
-/** Names to lock from now on. */
-export const freezeNamesSchema = z.strictObject(inLine)
+/** Labels to look at as they would be set. */
+export const previewLabelsSchema = z.strictObject({ ...inLine, ...labelSetting })
+/** A parsed setting to look at. */
+export type PreviewLabelsInput = z.output<typeof previewLabelsSchema>
+
+/** Names to lock from now on, by somebody who has seen the settings as they are. */
+export const freezeNamesSchema = z.strictObject({ ...inLine, version: z.number().int() })
 /** A parsed freeze. */
 export type FreezeNamesInput = z.output<typeof freezeNamesSchema>
 
 /** A freeze to lift, and why. */
-export const liftFreezeSchema = z.strictObject({ ...inLine, reason: given })
+export const liftFreezeSchema = z.strictObject({
+  ...inLine,
+  version: z.number().int(),
+  reason: given,
+})
 /** A parsed lifting. */
 export type LiftFreezeInput = z.output<typeof liftFreezeSchema>
 
@@ -270,9 +294,4 @@ export type HeapFilter = z.output<typeof heapAddressSchema>
 /** The review's address: which idea is looked at; any other begins with the first. */
 export const reviewAddressSchema = z.object({
   idea: z.uuid().nullable().catch(null),
-})
-
-/** The history's address. */
-export const nameHistorySchema = z.object({
-  page: z.coerce.number().int().min(1).max(10_000).catch(1),
 })

@@ -67,6 +67,8 @@ const EDITORS: readonly Role[] = ['owner', 'designer']
 const STUDIO: readonly Role[] = ['owner', 'designer', 'marketer']
 const EVERYBODY: readonly Role[] = ['owner', 'designer', 'marketer', 'dyer']
 
+const LABEL = { labelWidth: 58, labelSize: 15, labelLines: 2 }
+
 /** Every page. */
 export const PAGES: Record<string, PageRule> = {
   '/': {
@@ -102,6 +104,9 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]/combinations': { who: STUDIO },
   '/[brand]/lines/[line]/combinations/[combination]': { who: STUDIO },
   '/[brand]/lines/[line]/names/shades/[shade]': { who: STUDIO },
+  '/[brand]/lines/[line]/names/labels': { who: STUDIO },
+  '/[brand]/lines/[line]/names/labels/proof': { who: STUDIO },
+  '/[brand]/lines/[line]/names/history': { who: STUDIO },
   '/[brand]/lines/[line]/kits': { who: STUDIO },
   '/[brand]/lines/[line]/kits/[kit]': { who: STUDIO },
 }
@@ -121,6 +126,7 @@ export const ROUTES: Record<string, RouteRule> = {
   },
   'GET /api/brands/[brand]/activity.csv': { who: OWNER },
   'GET /api/brands/[brand]/lines/[line]/shades.csv': { who: EVERYBODY },
+  'GET /api/brands/[brand]/lines/[line]/labels.csv': { who: STUDIO },
   'GET /api/brands/[brand]/lines/[line]/board': { who: STUDIO },
   'GET /api/brands/[brand]/photographs/states': {
     who: STUDIO,
@@ -434,6 +440,34 @@ export const ACTIONS: Record<string, ActionRule> = {
   restoreCombinationAction: {
     who: EDITORS,
     input: ({ combination }) => ({ combinationId: combination }),
+  },
+
+  // How names are set, dated and locked is saved only as it was seen, and nobody has seen that.
+  ...Object.fromEntries(
+    Object.entries<object>({
+      saveNamingSettingsAction: {
+        ...LABEL,
+        care: '',
+        themes: [],
+        printOn: null,
+        reviewerIds: [],
+      },
+      freezeNamesAction: {},
+      liftFreezeAction: { reason: 'Mine now.' },
+    }).map(([action, input]): [string, ActionRule] => [
+      action,
+      {
+        who: OWNER,
+        input: ({ line }) => ({ lineSlug: line, version: -1, ...input }),
+        answer: 'conflict',
+        unknown: 'conflict',
+      },
+    ]),
+  ),
+  previewLabelsAction: {
+    who: STUDIO,
+    input: ({ line }) => ({ lineSlug: line, ...LABEL }),
+    unknown: 'ok',
   },
 
   // The submit that asked for it, sent again.

@@ -63,6 +63,9 @@ export const PAGES: readonly StudioPage[] = [
         '/names/shades/',
       ),
   },
+  { name: 'labels', roles: STUDIO, find: () => `${LINE}/names/labels` },
+  { name: 'the proof sheet', roles: STUDIO, find: () => `${LINE}/names/labels/proof` },
+  { name: 'the history of names', roles: STUDIO, find: () => `${LINE}/names/history` },
   { name: 'kits', roles: STUDIO, find: () => `${LINE}/kits` },
 ]
 
