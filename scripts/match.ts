@@ -18,8 +18,8 @@ import {
 import { readPhotographColors } from '@/lib/color/photograph-colors'
 import { decodePhotograph } from '@/lib/photographs/decode'
 import { warmUpReading } from '@/lib/photographs/warm-up'
-import { describeError, guessMapping, mappingProblems, readRows } from '@/lib/shades/csv'
-import { parseSheet } from '@/lib/shades/csv-text'
+import { guessMapping, mappingProblems, readRows } from '@/lib/shades/csv'
+import { describeError, parseSheet } from '@/lib/shades/csv-text'
 
 const USAGE =
   'npm run match -- --line shades.csv [--lock 14]… [--exclude 22]… [--apart 10] photo.jpg…'

@@ -100,6 +100,8 @@ export const NAME_LIMITS = {
   sifted: 150,
   /** Ideas dealt at once: the assignment costs their number by that of the shades. */
   dealt: 400,
+  /** Shades that ideas are dealt to at once. */
+  dealtShades: 100,
   themes: 12,
   theme: 24,
   care: 200,

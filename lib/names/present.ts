@@ -1,9 +1,20 @@
+import { screenColor } from '@/lib/color/gamut'
 import type { Finding } from '@/lib/naming/finding'
 import type { Play } from '@/lib/naming/play'
 import type { StoryName } from '@/lib/naming/story'
 import type { LabelSetting, SetName } from '@/lib/naming/label'
 import type { Role } from '@/lib/people/constants'
 import type { NameIdea, NameMove, NameRemark, NameSearch, NameVote, NamingSettings } from '@/models'
+import { shadeLabel } from '@/lib/shades/present'
+import type {
+  NameIdea,
+  NameMove,
+  NameRemark,
+  NameSearch,
+  NameVote,
+  NamingSettings,
+  Shade,
+} from '@/models'
 
 import { movable } from './change-names'
 import { labelOf } from './check-name'
@@ -238,6 +249,86 @@ export const presentSearch = (search: NameSearch): SearchView => ({
   outcome: search.outcome,
   note: search.note,
 })
+
+/** A shade as something that names are laid on. */
+export interface NameableShade {
+  id: string
+  number: string
+  /** The name, or "No. 14" while it has none. */
+  label: string
+  hex: string
+}
+
+/** The columns that {@link presentNameable} needs. */
+export const NAMEABLE_COLUMNS = ['id', 'number', 'name', 'labL', 'labA', 'labB'] as const
+
+/** A shade row as something that names are laid on. */
+export const presentNameable = (
+  shade: Pick<Shade, (typeof NAMEABLE_COLUMNS)[number]>,
+): NameableShade => ({
+  id: shade.id,
+  number: shade.number,
+  label: shadeLabel(shade),
+  hex: screenColor([shade.labL, shade.labA, shade.labB]).hex,
+})
+
+/** An idea of the heap, or one that was put by. */
+export interface HeapIdeaView extends IdeaView {
+  /** What in it calls a colour to mind: "thyme"; ideas without stay in the heap when it is dealt. */
+  hints: string[]
+  /** What it lay on when it was put by. */
+  shade: NameableShade | null
+}
+
+/** What would become of a row that somebody brings. */
+export interface IdeaRowView {
+  /** As a spreadsheet counts, the header being row 1; of names one a line, the line. */
+  row: number
+  /** `there`: the line, or a row before it, has that name already. */
+  outcome: 'new' | 'there' | 'bad'
+  text: string
+  note: string
+  /** Null goes to the heap. */
+  shade: NameableShade | null
+  /** Where the name is already: "No. 14, approved", "row 3". */
+  where: string | null
+  errors: string[]
+}
+
+/** What adding a pile of names would do. */
+export interface IdeasPreview {
+  /** How the columns of a file were read: "name from “Idea”"; none of names one a line. */
+  columns: string[]
+  /** Headers of columns that were passed over. */
+  unread: string[]
+  counts: Record<IdeaRowView['outcome'], number>
+  rows: IdeaRowView[]
+  /** The bad rows with their reasons, to take away. */
+  badCsv: string | null
+}
+
+/** A shade of the page that shows how the heap was dealt. */
+export interface DealtShadeView extends NameableShade {
+  /** It waits for a name, so that one could be dealt to it. */
+  waits: boolean
+  dealt: { ideaId: string; text: string; note: string; fit: number; why: string } | null
+}
+
+/** How the heap would be dealt out; nothing has moved. */
+export interface DealView {
+  /** The families that got a name, in their order, each light to dark. */
+  families: { id: string; name: string; shades: DealtShadeView[] }[]
+  /** Ideas that stay in the heap, and why. */
+  left: {
+    ideaId: string
+    text: string
+    why: 'no colour' | 'no shade near' | 'another suits better'
+  }[]
+  /** Shades waiting for a name that got none. */
+  bare: number
+  /** Ideas and shades beyond what is dealt at once. */
+  beyond: { ideas: number; shades: number }
+}
 
 /** How the names of a line are set and dated. */
 export interface NamingSettingsView {

@@ -253,9 +253,17 @@ export const proposeNamesSchema = z.strictObject({
 export type ProposeNamesInput = z.output<typeof proposeNamesSchema>
 
 /** A line whose heap is to be dealt; `without` are ideas that stay where they are. */
-export const dealIdeasSchema = z.strictObject(inLine)
+export const dealIdeasSchema = z.strictObject({
+  ...inLine,
+  without: z.array(z.uuid()).max(NAME_LIMITS.perLine).default([]),
+})
 /** A parsed request to deal. */
 export type DealIdeasInput = z.output<typeof dealIdeasSchema>
+
+/** A line whose shades are wanted, to lay a name on one. */
+export const listNameableSchema = z.strictObject(inLine)
+/** A parsed request for them. */
+export type ListNameableInput = z.output<typeof listNameableSchema>
 
 const several = <const T extends string>(known: readonly T[]) =>
   z

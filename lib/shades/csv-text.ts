@@ -29,27 +29,39 @@ export function sniffDelimiter(text: string): Delimiter {
   return DELIMITERS.reduce((best, one) => (counts.get(one)! > counts.get(best)! ? one : best))
 }
 
+/** What the rows of a file are, for the words of what is wrong with it. */
+export interface SheetOf {
+  noun: string
+  /** Columns that a header may name. */
+  columns: string
+  mostRows: number
+}
+
+const OF_SHADES: SheetOf = {
+  noun: 'shade',
+  columns: 'number, L, a, b',
+  mostRows: SHADE_LIMITS.importRows,
+}
+
 /**
  * Reads CSV text (RFC 4180; also semicolons, tabs, a byte-order mark, any line ends).
  * @throws InvalidError in words: empty, a quote that does not close, too many rows
  */
-export function parseSheet(text: string): Sheet {
+export function parseSheet(text: string, { noun, columns, mostRows }: SheetOf = OF_SHADES): Sheet {
   const content = text.replace(/^\uFEFF/, '')
   const delimiter = sniffDelimiter(content)
   const records = parseRecords(content, delimiter).map((cells) => cells.map(restoreCell))
   const [header, ...others] = records
   if (!header || isBlank(header)) {
-    throw new InvalidError(
-      'The first row is empty. It must name the columns, such as number, L, a, b.',
-    )
+    throw new InvalidError(`The first row is empty. It must name the columns, such as ${columns}.`)
   }
   const rows = others
     .map((cells, index) => ({ row: index + 2, cells }))
     .filter(({ cells }) => !isBlank(cells))
-  if (rows.length === 0) throw new InvalidError('There is no shade in it, only the header row.')
-  if (rows.length > SHADE_LIMITS.importRows) {
+  if (rows.length === 0) throw new InvalidError(`There is no ${noun} in it, only the header row.`)
+  if (rows.length > mostRows) {
     throw new InvalidError(
-      `The file has more than ${SHADE_LIMITS.importRows.toLocaleString('en-GB')} rows, which is the most a line holds. Import it in smaller parts.`,
+      `The file has more than ${mostRows.toLocaleString('en-GB')} rows, which is the most that is read at once. Import it in smaller parts.`,
     )
   }
   return { delimiter, header: header.map((cell) => cell.trim()), rows }
@@ -70,6 +82,68 @@ function parseRecords(content: string, delimiter: Delimiter): string[][] {
     )
   }
 }
+
+/**
+ * Which columns, from 0, seem to hold which fields, by the words of the header without blanks and
+ * marks; the first word and then the first column that fits is taken.
+ */
+export function guessColumns<Field extends string>(
+  header: readonly string[],
+  synonyms: Readonly<Record<Field, readonly string[]>>,
+): Record<Field, number | null> {
+  const words = header.map((cell) => cell.toLowerCase().replace(/[^\p{L}\p{N}]/gu, ''))
+  const taken = new Set<number>()
+  const mapping = {} as Record<Field, number | null>
+  for (const field of Object.keys(synonyms) as Field[]) {
+    const found = synonyms[field]
+      .map((word) => words.findIndex((one, at) => one === word && !taken.has(at)))
+      .find((at) => at >= 0)
+    mapping[field] = found ?? null
+    if (found !== undefined) taken.add(found)
+  }
+  return mapping
+}
+
+/** What is wrong with a row that has something beyond the columns of its header; null when nothing. */
+export const beyondHeader = (cells: readonly string[], columns: number): string | null =>
+  cells.slice(columns).some((extra) => extra.trim() !== '')
+    ? `the row has ${cells.length} cells and the header ${columns}: is there a comma in a cell without quotation marks?`
+    : null
+
+/** A message of a form as the end of "Row 14, L: …". */
+export const asClause = (message: string): string =>
+  message.charAt(0).toLowerCase() + message.slice(1).replace(/\.$/, '')
+
+/** How what is wrong with a cell is said: "Row 14, L: “abc” is not a number: give L". */
+export const describeError = (
+  row: number,
+  { field, message }: { field: string; message: string },
+): string => `Row ${row}, ${field}: ${message}`
+
+/** The bad rows as they stood in the file, with a column that says what is wrong. */
+export function badRowsCsv(
+  header: readonly string[],
+  rows: readonly {
+    row: number
+    cells: readonly string[]
+    errors: readonly { field: string; message: string }[]
+  }[],
+): string {
+  const width = Math.max(header.length, ...rows.map(({ cells }) => cells.length))
+  const pad = (cells: readonly string[]) =>
+    Array.from({ length: width }, (_, at) => neutraliseText(cells[at] ?? ''))
+  return writeCsv([
+    [...pad(header), 'reason'],
+    ...rows.map(({ row, cells, errors }) => [
+      ...pad(cells),
+      errors.map((error) => describeError(row, error)).join('; '),
+    ]),
+  ])
+}
+
+/** A cell of an unknown column: what reads as a number is one, everything else is text. */
+const neutraliseText = (cell: string) =>
+  /^[+-]?[\d.,]+(e[+-]?\d+)?$/i.test(cell) ? cell : neutraliseCell(cell)
 
 const isBlank = (cells: readonly string[]) => cells.every((cell) => cell.trim() === '')
 

@@ -1,7 +1,14 @@
 import { z } from 'zod'
 
 import { colorColumns, type ColorColumns } from './color'
-import { neutraliseCell, writeCsv, type Sheet } from './csv-text'
+import {
+  asClause,
+  beyondHeader,
+  guessColumns,
+  neutraliseCell,
+  writeCsv,
+  type Sheet,
+} from './csv-text'
 import type { ShadeRow } from './present'
 import {
   CSV_FIELDS,
@@ -59,19 +66,7 @@ const HEADERS: Record<CsvField, readonly string[]> = {
 }
 
 /** Which columns seem to hold which fields, by the words of the header. */
-export function guessMapping(header: readonly string[]): CsvMapping {
-  const words = header.map((cell) => cell.toLowerCase().replace(/[^\p{L}\p{N}]/gu, ''))
-  const taken = new Set<number>()
-  const mapping = {} as CsvMapping
-  for (const field of CSV_FIELDS) {
-    const found = HEADERS[field]
-      .map((word) => words.findIndex((one, at) => one === word && !taken.has(at)))
-      .find((at) => at >= 0)
-    mapping[field] = found ?? null
-    if (found !== undefined) taken.add(found)
-  }
-  return mapping
-}
+export const guessMapping = (header: readonly string[]): CsvMapping => guessColumns(header, HEADERS)
 
 /** What must be settled about the columns before any row can be read, in words; empty when nothing. */
 export function mappingProblems(mapping: CsvMapping, terms: ReadingTerms | null): string[] {
@@ -145,16 +140,12 @@ function readRow(
     if (text === undefined) return undefined
     const parsed = schema.safeParse(text)
     if (parsed.success) return parsed.data
-    errors.push({ field, message: lower(parsed.error.issues[0]!.message) })
+    errors.push({ field, message: asClause(parsed.error.issues[0]!.message) })
     return undefined
   }
 
-  if (cells.slice(columns).some((extra) => extra.trim() !== '')) {
-    errors.push({
-      field: 'number',
-      message: `the row has ${cells.length} cells and the header ${columns}: is there a comma in a cell without quotation marks?`,
-    })
-  }
+  const beyond = beyondHeader(cells, columns)
+  if (beyond) errors.push({ field: 'number', message: beyond })
   const number = take('number', shadeNumber)
   const name = take('name', shadeName as z.ZodType<string | null, string>)
   const status = cell('status') === '' ? undefined : take('status', statusCell)
@@ -203,10 +194,6 @@ function readRow(
     ...(good && hasLab && hasHex && { note: 'The hex is left out: L, a and b are the record.' }),
   }
 }
-
-/** A message of a form as the end of "Row 14, L: …". */
-const lower = (message: string) =>
-  message.charAt(0).toLowerCase() + message.slice(1).replace(/\.$/, '')
 
 const labCell = labFields as Record<'L' | 'a' | 'b', z.ZodType<number, string>>
 
@@ -261,28 +248,6 @@ function readTerms(
   }
   return READING_TERMS.find((one) => one === `${light}/${angle}`) ?? null
 }
-
-/** How an error is said: "Row 14, L: “abc” is not a number: give L". */
-export const describeError = (row: number, { field, message }: CellError): string =>
-  `Row ${row}, ${field}: ${message}`
-
-/** The bad rows as they stood in the file, with a column that says what is wrong. */
-export function badRowsCsv(sheet: Sheet, rows: readonly CsvRow[]): string {
-  const width = Math.max(sheet.header.length, ...rows.map(({ cells }) => cells.length))
-  const pad = (cells: readonly string[]) =>
-    Array.from({ length: width }, (_, at) => neutraliseText(cells[at] ?? ''))
-  return writeCsv([
-    [...pad(sheet.header), 'reason'],
-    ...rows.map((row) => [
-      ...pad(row.cells),
-      row.errors.map((error) => describeError(row.row, error)).join('; '),
-    ]),
-  ])
-}
-
-/** A cell of an unknown column: what reads as a number is one, everything else is text. */
-const neutraliseText = (cell: string) =>
-  /^[+-]?[\d.,]+(e[+-]?\d+)?$/i.test(cell) ? cell : neutraliseCell(cell)
 
 /** Shades as the CSV that imports again unchanged; the header is CSV_FIELDS. */
 export function shadesToCsv(shades: readonly ShadeRow[]): string {

@@ -5,7 +5,7 @@ import type { Vision } from '@/lib/color/vision'
 import type { Shade } from '@/models'
 
 import { describeColor } from './color'
-import { describeError } from './csv'
+import { describeError } from './csv-text'
 import type { ImportCounts, PlannedField, PlannedRow, PlannedShade } from './plan-import'
 import type { CsvMapping, ReadingTerms, ShadeStatus } from './constants'
 

@@ -1,7 +1,7 @@
 import { authorize, type Actor } from '@/lib/auth/actor'
 
-import { badRowsCsv, guessMapping, mappingProblems, readRows } from './csv'
-import { parseSheet } from './csv-text'
+import { guessMapping, mappingProblems, readRows } from './csv'
+import { badRowsCsv, parseSheet } from './csv-text'
 import { countPlan, planImport } from './plan-import'
 import { canEditShades } from './policy'
 import { presentPlannedRow, type ImportPreview } from './present'
@@ -43,7 +43,7 @@ export async function previewImport(
     problems,
     counts,
     rows: plan.map(presentPlannedRow),
-    badCsv: bad.length > 0 ? badRowsCsv(sheet, bad) : null,
+    badCsv: bad.length > 0 ? badRowsCsv(sheet.header, bad) : null,
     shadesRevision: line.shadesRevision,
   }
 }

@@ -3,15 +3,8 @@ import { describe, expect, it, test } from 'vitest'
 
 import { hexToLab } from '@/lib/color/srgb'
 import { colorColumns } from '@/lib/shades/color'
-import {
-  badRowsCsv,
-  describeError,
-  guessMapping,
-  mappingProblems,
-  readRows,
-  shadesToCsv,
-} from '@/lib/shades/csv'
-import { parseSheet } from '@/lib/shades/csv-text'
+import { guessMapping, mappingProblems, readRows, shadesToCsv } from '@/lib/shades/csv'
+import { badRowsCsv, describeError, parseSheet } from '@/lib/shades/csv-text'
 import { planImport } from '@/lib/shades/plan-import'
 import type { ShadeRow } from '@/lib/shades/present'
 import { SHADE_STATUSES, type ReadingTerms } from '@/lib/shades/constants'
@@ -165,7 +158,7 @@ describe('bad rows', () => {
     const rows = readRows(sheet, guessMapping(sheet.header), 'D65/10')
     const back = parseSheet(
       badRowsCsv(
-        sheet,
+        sheet.header,
         rows.filter(({ shade }) => !shade),
       ),
     )
