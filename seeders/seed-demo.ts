@@ -8,10 +8,11 @@ import { Brand, inTransaction, Line, Membership, Person, Shade } from '@/models'
 import { demoAccounts } from './demo/accounts'
 import { demoBrands } from './demo/brands'
 import type { DemoBrand, DemoLine, DemoShade } from './demo/types'
+import { seedNames } from './seed-names'
 import { seedPhotographs } from './seed-photographs'
 
 /**
- * Puts the demo's brands, people, lines, photographs and combinations in place, once: a database
+ * Puts the demo's brands, people, lines, names, photographs and combinations in place, once: a database
  * that has a brand of the demo is left as it is.
  * @returns what was done, in words
  */
@@ -48,6 +49,7 @@ async function seedLines(brand: Brand, demo: DemoBrand, transaction: Transaction
       { transaction },
     )
     await placeNewShades(made, transaction)
+    await seedNames(made, transaction)
   }
 }
 

@@ -27,7 +27,7 @@ export interface DemoReading {
 /** One shade of a demo line; exactly one of `lab` and `hex` is set. */
 export interface DemoShade {
   number: string
-  /** null while the shade has no name yet */
+  /** The approved one; null while the shade has none. */
   name: string | null
   status: DemoShadeStatus
   lab: DemoReading | null
@@ -88,4 +88,29 @@ export interface DemoCombination {
   lane: 'sketched' | 'short-listed' | 'chosen'
   /** Who kept it, by role. */
   by: 'owner' | 'designer'
+}
+
+/** An idea for a name, with what was said of it; an approved one stands in the shades' own file. */
+export interface DemoIdea {
+  /** Number of the shade; null lies in the heap. */
+  shade: string | null
+  text: string
+  note?: string
+  /** Who brought it, by role. */
+  by: 'owner' | 'marketer' | 'designer'
+  state: 'draft' | 'in-review' | 'approved' | 'returned' | 'put-by'
+  /** Why it was returned. */
+  reason?: string
+  wordingReason?: string
+  votes?: { by: 'owner' | 'designer'; vote: 'yes' | 'unsure' | 'no'; comment?: string }[]
+  talk?: { by: DemoIdea['by']; text: string }[]
+}
+
+/** How the names of a line are set, and the ideas that are no names yet. */
+export interface DemoNaming {
+  care: string
+  themes: string[]
+  /** Who decides besides the owner, by role. */
+  reviewer: 'designer'
+  ideas: DemoIdea[]
 }

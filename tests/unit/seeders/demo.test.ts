@@ -12,6 +12,7 @@ import { ROLES } from '@/lib/people/constants'
 import { demoAccounts } from '@/seeders/demo/accounts'
 import { demoBrands } from '@/seeders/demo/brands'
 import { demoCombinations } from '@/seeders/demo/combinations'
+import { demoNaming } from '@/seeders/demo/names'
 import { demoPhotographs } from '@/seeders/demo/photographs'
 
 const [first, second] = demoBrands
@@ -50,9 +51,9 @@ describe('the demo', () => {
     }
   })
 
-  it('has shades a dyer could reach on wool, a few of them still unnamed', () => {
+  it('has shades a dyer could reach on wool, a third of them still unnamed', () => {
     const { shades } = first!.lines[0]!
-    expect(shades.filter(({ name }) => name === null)).toHaveLength(4)
+    expect(shades.filter(({ name }) => name === null)).toHaveLength(14)
     for (const { lab } of shades) {
       expect(lab!.L).toBeGreaterThan(13)
       expect(lab!.L).toBeLessThan(93)
@@ -72,6 +73,30 @@ describe('the demo', () => {
     )
     expect(outside.length).toBeGreaterThanOrEqual(1)
     expect(outside.length).toBeLessThanOrEqual(3)
+  })
+
+  it('has ideas for names in every state, each for a shade that is there, and a heap', () => {
+    const { slug, shades } = first!.lines[0]!
+    const { ideas } = demoNaming[slug]!
+    const names = shades.flatMap(({ name }) => name ?? [])
+    const texts = [...names, ...ideas.map(({ text }) => text)].map((text) => text.toLowerCase())
+    expect(new Set(texts).size).toBe(texts.length)
+    const states = new Set(ideas.map(({ state }) => state))
+    expect([...states].sort()).toEqual(['draft', 'in-review', 'put-by', 'returned'])
+    const numbers = shades.map(({ number }) => number)
+    for (const { shade, state, reason, votes, talk } of ideas) {
+      if (shade === null) expect(['draft', 'put-by']).toContain(state)
+      else expect(numbers).toContain(shade)
+      expect(Boolean(reason)).toBe(state === 'returned')
+      if (votes || talk) expect(['in-review', 'returned']).toContain(state)
+    }
+    const heap = ideas.filter(({ shade, state }) => shade === null && state === 'draft')
+    expect(heap.length).toBeGreaterThanOrEqual(25)
+  })
+
+  it('has nobody say yes or no to what they brought', () => {
+    for (const { by, votes = [] } of Object.values(demoNaming).flatMap(({ ideas }) => ideas))
+      for (const vote of votes) expect(vote.by).not.toBe(by)
   })
 
   it('keeps combinations of photographs that are there, each in one of the readings', () => {
