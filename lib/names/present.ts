@@ -4,7 +4,6 @@ import type { Play } from '@/lib/naming/play'
 import type { StoryName } from '@/lib/naming/story'
 import type { LabelSetting, SetName } from '@/lib/naming/label'
 import type { Role } from '@/lib/people/constants'
-import type { NameIdea, NameMove, NameRemark, NameSearch, NameVote, NamingSettings } from '@/models'
 import { shadeLabel } from '@/lib/shades/present'
 import type {
   NameIdea,
