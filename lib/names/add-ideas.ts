@@ -31,12 +31,9 @@ export async function addIdeas(
       at,
       ideas.flatMap(({ shadeId }) => shadeId ?? []),
     )
-    const now = Date.now()
     const rows = ideas.map((idea, row) => ({
       ...idea,
       id: randomUUID(),
-      // What was brought together is listed in its own order, newest first as ever.
-      createdAt: new Date(now - row),
       brandId,
       lineId: line.id,
       state: 'draft' as const,
