@@ -9,13 +9,23 @@ import type { ActionResult } from '@/lib/errors'
 import type { ShadeView } from '@/lib/shades/present'
 import { SHADE_STATUSES, type ShadeStatus } from '@/lib/shades/constants'
 
-import { BeyondScreen, ShadeStatusWord, showReading, showTerms, STATUS_WORDS } from './shade-words'
+import { ShadeNameLink } from './shade-name-link'
+import {
+  BeyondScreen,
+  ShadeName,
+  ShadeStatusWord,
+  showReading,
+  showTerms,
+  STATUS_WORDS,
+} from './shade-words'
 import { shadesHref, type LinePlace } from './shades-actions'
 import type { SaveShade } from './use-save-shade'
 
 /** What the cells of the table stand in and, where they are edited, save with. */
 export interface ShadeTableTerms {
   place: LinePlace
+  /** Whether this person sees the ideas for names. */
+  seesIdeas: boolean
   save: SaveShade
   move: (shade: ShadeView, place: string) => Promise<ActionResult<unknown>>
 }
@@ -63,25 +73,10 @@ export function NumberCell({ shade, edits }: CellProps) {
   )
 }
 
-/** The shade's name. */
-export function NameCell({ shade, edits }: CellProps) {
-  const { save } = useTerms()
-  const shown = shade.name ? (
-    <span className="font-title">{shade.name}</span>
-  ) : (
-    <span className="text-ink-faint">Not named</span>
-  )
-  if (!edits) return shown
-  return (
-    <EditableCell
-      label={`Name of ${shade.label}`}
-      value={shade.name ?? ''}
-      onSave={(name) => save(shade, () => ({ name }))}
-      className="min-w-36"
-    >
-      {shown}
-    </EditableCell>
-  )
+/** The shade's name, which for those who see ideas leads to where it comes from. */
+export function NameCell({ shade }: { shade: ShadeView }) {
+  const { place, seesIdeas } = useTerms()
+  return seesIdeas ? <ShadeNameLink place={place} shade={shade} /> : <ShadeName shade={shade} />
 }
 
 const STATUS_OPTIONS = SHADE_STATUSES.map((value) => ({ value, label: STATUS_WORDS[value] }))

@@ -50,7 +50,7 @@ function shadeColumns(edits: boolean) {
     helper.accessor('name', {
       ...sorted,
       header: 'Name',
-      cell: ({ row }) => <NameCell shade={row.original} edits={edits} />,
+      cell: ({ row }) => <NameCell shade={row.original} />,
     }),
     helper.accessor('status', {
       ...sorted,

@@ -15,6 +15,7 @@ import { Select } from '@/components/ui/select'
 import { schemaResolver } from '@/components/ui/schema-resolver'
 import { SubmitButton } from '@/components/ui/submit-button'
 import { toastDone } from '@/components/ui/toast'
+import { NAME_LIMITS } from '@/lib/names/constants'
 import type { ShadeView } from '@/lib/shades/present'
 import {
   READING_TERMS,
@@ -24,6 +25,7 @@ import {
   type ShadeStatus,
 } from '@/lib/shades/constants'
 
+import { ShadeNameLink } from './shade-name-link'
 import { STATUS_WORDS } from './shade-words'
 import { shadesHref, type LinePlace, type ShadesActions } from './shades-actions'
 
@@ -35,6 +37,7 @@ const LiveSample = dynamic(() => import('./live-sample').then((it) => it.LiveSam
 /** What the form holds while it is being filled in. */
 export interface ShadeFormValues {
   number: string
+  /** Of a new shade only. */
   name: string
   status: ShadeStatus
   color: { kind: 'lab' | 'hex'; L: string; a: string; b: string; terms: string; hex: string }
@@ -48,7 +51,7 @@ const EMPTY: ShadeFormValues = {
 }
 
 function valuesOf(shade: ShadeView): ShadeFormValues {
-  const { number, name, status, enteredHex, lab, observer } = shade
+  const { number, status, enteredHex, lab, observer } = shade
   const color = enteredHex
     ? { ...EMPTY.color, kind: 'hex' as const, hex: enteredHex }
     : {
@@ -58,7 +61,7 @@ function valuesOf(shade: ShadeView): ShadeFormValues {
         b: String(lab[2]),
         terms: `D65/${observer}`,
       }
-  return { number, name: name ?? '', status, color }
+  return { number, name: '', status, color }
 }
 
 /** Props of {@link ShadeForm}: with a shade it changes that one, without it adds a new one. */
@@ -96,14 +99,13 @@ export function ShadeForm(props: ShadeFormProps) {
       const own = { lineSlug: place.lineSlug, requestKey: requestKey.current }
       return reach(props.save(place.brand, { ...typed, ...own }))
     }
-    const { number, name, status } = typed
+    const { number, status } = typed
     return reach(
       props.save(place.brand, {
         lineSlug: place.lineSlug,
         shadeId: props.shade.id,
         version: props.shade.version,
         ...(dirtyFields.number && { number }),
-        ...(dirtyFields.name && { name }),
         ...(dirtyFields.status && { status }),
         ...(dirtyFields.color && { color: typed.color }),
       }),
@@ -116,7 +118,7 @@ export function ShadeForm(props: ShadeFormProps) {
     const answer = await send(values)
     if (answer.ok) {
       requestKey.current = undefined
-      toastDone(shade ? `${answer.data.label} saved.` : `${answer.data.label} added.`)
+      toastDone(shade ? `${answer.data.label} saved.` : doneOf(answer.data, values))
       if (shade) reset(valuesOf(answer.data), { keepDirtyValues: false, keepErrors: false })
       else if (another.current) {
         reset({ ...EMPTY, status: values.status, color: { ...EMPTY.color, ...keptOf(values) } })
@@ -146,9 +148,23 @@ export function ShadeForm(props: ShadeFormProps) {
         <Field label="Number" required error={errors.number?.message}>
           <Input {...register('number')} maxLength={SHADE_LIMITS.number} autoComplete="off" />
         </Field>
-        <Field label="Name" optional error={errors.name?.message}>
-          <Input {...register('name')} maxLength={SHADE_LIMITS.name} autoComplete="off" />
-        </Field>
+        {shade ? (
+          <div>
+            <p className="mb-1 font-medium">Name</p>
+            <p className="py-2">
+              <ShadeNameLink place={place} shade={shade} />
+            </p>
+          </div>
+        ) : (
+          <Field
+            label="Name"
+            optional
+            error={errors.name?.message}
+            hint="It begins as a draft. Once it is approved it stands wherever the shade does."
+          >
+            <Input {...register('name')} maxLength={NAME_LIMITS.text} autoComplete="off" />
+          </Field>
+        )}
       </div>
 
       <fieldset className="space-y-4">
@@ -249,6 +265,9 @@ export function ShadeForm(props: ShadeFormProps) {
     </form>
   )
 }
+
+const doneOf = ({ label }: ShadeView, { name }: ShadeFormValues) =>
+  name.trim() ? `${label} added, with “${name.trim()}” as a draft of its name.` : `${label} added.`
 
 /** The colour as it is entered, without the fields of the other kind. */
 const chosenOf = ({ color: { kind, hex, ...lab } }: ShadeFormValues) =>

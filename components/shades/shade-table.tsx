@@ -24,6 +24,8 @@ export interface ShadeTableProps {
   filter: ShadeTableFilter
   /** Whether this person edits; otherwise the table only reads. */
   edits: boolean
+  /** Whether this person sees the ideas for names. */
+  seesIdeas: boolean
   actions: Pick<ShadesActions, 'update' | 'setStatus' | 'reorder' | 'remove' | 'restore'>
 }
 
@@ -34,6 +36,7 @@ export function ShadeTable({
   total,
   filter: loaded,
   edits,
+  seesIdeas,
   actions,
 }: ShadeTableProps) {
   const { table, filter, loading, go, chosen, chooseOnly } = usePagedTable({
@@ -48,6 +51,7 @@ export function ShadeTable({
   const save = useSaveShade(place, shades, actions.update)
   const terms = {
     place,
+    seesIdeas,
     save,
     move: (shade: ShadeView, typed: string) => {
       const { brand, lineSlug } = place

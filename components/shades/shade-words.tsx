@@ -25,6 +25,15 @@ export function ShadeStatusWord({ status }: { status: ShadeStatus }) {
   return <Status kind={STATUS_KINDS[status]}>{STATUS_WORDS[status]}</Status>
 }
 
+/** A shade's approved name, or that it has none. */
+export function ShadeName({ shade }: { shade: Pick<ShadeView, 'name'> }) {
+  return shade.name ? (
+    <span className="font-title">{shade.name}</span>
+  ) : (
+    <span className="text-ink-faint">Not named</span>
+  )
+}
+
 /** Says that a screen cannot show the shade and shows a less vivid stand-in. */
 export function BeyondScreen({ className }: { className?: string }) {
   return (

@@ -36,7 +36,9 @@ export function captionOf(
   { title, shades, photograph }: ExportCombination,
 ): string {
   const labels = shades.map(({ label }) => label)
-  const five = `${labels.slice(0, -1).join(', ')} and ${labels.at(-1)}`
+  // A comma within a name would make two of it.
+  const between = labels.some((label) => label.includes(',')) ? '; ' : ', '
+  const five = `${labels.slice(0, -1).join(between)} and ${labels.at(-1)}`
   const credit = photograph?.bytes ? ` Photograph: ${creditOf(photograph)}.` : ''
   return `${spaced(title)}: ${five}, from ${spaced(line)} by ${spaced(brand)}.${credit}`
 }

@@ -6,7 +6,7 @@ import type {
 } from '@/lib/exports/description'
 import type { Licence } from '@/lib/photographs/constants'
 import { derivativeKey } from '@/lib/photographs/keys'
-import { printedLabel } from '@/lib/shades/printed-label'
+import { shadeLabel } from '@/lib/shades/present'
 import { getObject } from '@/lib/storage/objects'
 import type { Combination, Line, Photograph } from '@/models'
 
@@ -43,7 +43,7 @@ async function describe(combination: Combination): Promise<ExportCombination> {
       if (!shade) return []
       const lab = [shade.labL, shade.labA, shade.labB] as const
       return {
-        label: printedLabel(shade),
+        label: shadeLabel(shade),
         number: shade.number,
         lab,
         illuminant: shade.illuminant,

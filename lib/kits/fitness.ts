@@ -1,4 +1,5 @@
 import type { Licence } from '@/lib/photographs/constants'
+import { shadeLabel } from '@/lib/shades/present'
 import type { Combination, Photograph } from '@/models'
 
 /**
@@ -21,7 +22,7 @@ export function reasonsAgainst({ places = [], photograph }: Combination): string
   if (empty === places.length) reasons.push('No shade is wound on it yet.')
   else if (empty > 0)
     reasons.push(empty === 1 ? 'One place is still empty.' : `${empty} places are still empty.`)
-  const gone = places.flatMap(({ shade }) => (shade?.deletedAt ? [`No. ${shade.number}`] : []))
+  const gone = places.flatMap(({ shade }) => (shade?.deletedAt ? [shadeLabel(shade)] : []))
   if (gone.length > 0)
     reasons.push(
       gone.length === 1

@@ -1,6 +1,7 @@
 import type { Actor } from '@/lib/auth/actor'
 import { screenColor } from '@/lib/color/gamut'
 import type { Lane } from '@/lib/combinations/constants'
+import { shadeLabel } from '@/lib/shades/present'
 import type { Combination } from '@/models'
 import type { KitLeftOut } from '@/models/Kit'
 
@@ -36,7 +37,7 @@ export function presentCandidate(combination: Combination): KitCandidate {
         ? {
             hex: screenColor([shade.labL, shade.labA, shade.labB]).hex,
             share,
-            name: `No. ${shade.number}`,
+            name: shadeLabel(shade),
           }
         : [],
     ),

@@ -1,13 +1,12 @@
-import { createHash, randomUUID } from 'node:crypto'
+import { createHash } from 'node:crypto'
 
-import { recordedIdeas } from '@/lib/activity/objects'
-import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { NameIdea } from '@/models'
 
-import { changeNames, findNameable, recordMoves, requireRoomForIdeas } from './change-names'
+import { changeNames, findNameable } from './change-names'
 import { canDraftNames } from './policy'
 import type { AddIdeaInput, AddIdeasInput } from './schema'
+import { writeDrafts } from './write-drafts'
 
 /** A uuid of its own for each row of one submit, the same whenever it is sent again. */
 function keyOfRow(requestKey: string, row: number): string {
@@ -25,38 +24,19 @@ export async function addIdeas(
   { lineSlug, ideas, requestKey }: AddIdeasInput,
 ): Promise<NameIdea[]> {
   return changeNames(actor, canDraftNames, lineSlug, async (at) => {
-    const { line, transaction } = at
-    const { brandId, personId } = actor
     await findNameable(
       at,
       ideas.flatMap(({ shadeId }) => shadeId ?? []),
     )
-    const rows = ideas.map((idea, row) => ({
-      ...idea,
-      id: randomUUID(),
-      brandId,
-      lineId: line.id,
-      state: 'draft' as const,
-      authorId: personId,
-      wordedById: personId,
-      requestKey: keyOfRow(requestKey, row),
-    }))
-    const asked = { brandId, requestKey: rows.map((row) => row.requestKey) }
+    const drafts = ideas.map((idea, row) => ({ ...idea, requestKey: keyOfRow(requestKey, row) }))
+    const keys = drafts.map((draft) => draft.requestKey)
     // The line is held: of two same submits the second finds what the first has made.
-    const made = await NameIdea.findAll({ where: asked, paranoid: false, transaction })
-    if (made.length > 0) return inOrder(made, asked.requestKey)
-    await requireRoomForIdeas(at, rows.length)
-    const created = await NameIdea.bulkCreate(rows, { transaction })
-    await recordMoves(
-      at,
-      created.map((idea) => ({ idea, move: 'add', from: null })),
-    )
-    await recordActivity(
-      actor,
-      { action: 'name.added', ...recordedIdeas(created, line) },
-      transaction,
-    )
-    return created
+    const made = await NameIdea.findAll({
+      where: { brandId: actor.brandId, requestKey: keys },
+      paranoid: false,
+      transaction: at.transaction,
+    })
+    return made.length > 0 ? inOrder(made, keys) : writeDrafts(actor, at, drafts)
   })
 }
 

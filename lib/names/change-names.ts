@@ -131,7 +131,11 @@ export interface Moved {
 
 /** Writes moves into the history of a line, in the order given. */
 export async function recordMoves(
-  { line, asker, transaction }: NamesAtWork,
+  {
+    line,
+    asker,
+    transaction,
+  }: Pick<NamesAtWork, 'line' | 'transaction'> & { asker: Pick<Asker, 'personId'> },
   moves: readonly Moved[],
 ): Promise<void> {
   await NameMove.bulkCreate(
@@ -175,7 +179,7 @@ export async function nameShades(
 
 /** @throws ConflictError when the line cannot take so many more ideas */
 export async function requireRoomForIdeas(
-  { line, transaction }: NamesAtWork,
+  { line, transaction }: Pick<NamesAtWork, 'line' | 'transaction'>,
   more: number,
 ): Promise<void> {
   const where = { brandId: line.brandId, lineId: line.id }

@@ -20,7 +20,6 @@ export const TERMS_WORDS: Record<ReadingTerms, string> = {
 /** The bounds of what a shade may hold. */
 export const SHADE_LIMITS = {
   number: 16,
-  name: 60,
   /** CIELAB; a and b beyond ±150 are no surface colour. */
   ab: 150,
   perLine: 5_000,

@@ -1,6 +1,7 @@
 import { shadeObject } from '@/lib/activity/objects'
 import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
+import { writeDrafts } from '@/lib/names/write-drafts'
 import { createOnce, Shade } from '@/models'
 
 import { changeShades, findNumberHolder, numberTaken, requireRoom } from './change-shades'
@@ -8,12 +9,12 @@ import { colorColumns } from './color'
 import type { CreateShadeInput } from './schema'
 
 /**
- * Adds a shade at the end of the line's order. The same `requestKey` again gives the shade it made
- * the first time.
+ * Adds a shade at the end of the line's order; a name that was typed becomes a draft of it. The same
+ * `requestKey` again gives the shade it made the first time.
  * @throws NotFoundError, ConflictError when the number is taken or the line is full
  */
 export async function createShade(actor: Actor, input: CreateShadeInput): Promise<Shade> {
-  const { lineSlug, requestKey, color, ...fields } = input
+  const { lineSlug, requestKey, color, name: text, ...fields } = input
   const shade = await changeShades(actor, lineSlug, async (line, transaction) => {
     const where = { brandId: actor.brandId, lineId: line.id }
     const held = await Shade.count({ where, transaction })
@@ -23,7 +24,7 @@ export async function createShade(actor: Actor, input: CreateShadeInput): Promis
     const made = await createOnce(Shade, { ...where, ...values, requestKey }, transaction)
     if (!made) {
       const holder = await findNumberHolder(line, [fields.number], transaction)
-      throw numberTaken(holder ?? fields)
+      throw numberTaken(holder ?? { ...fields, name: null })
     }
     if (made.created) {
       requireRoom(held, 1)
@@ -32,6 +33,8 @@ export async function createShade(actor: Actor, input: CreateShadeInput): Promis
         { action: 'shade.created', object: shadeObject(made.row, line), after: values },
         transaction,
       )
+      const drafts = text === null ? [] : [{ text, shadeId: made.row.id }]
+      await writeDrafts(actor, { line, transaction }, drafts)
     }
     return { answer: made.row, changed: made.created }
   })

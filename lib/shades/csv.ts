@@ -31,7 +31,8 @@ export interface CellError {
 /** What a row says of a shade; a field whose column is missing is left out. */
 export interface CsvShade {
   number: string
-  name?: string | null
+  /** Left out for an empty cell as well: a file takes no name away. */
+  name?: string
   /** Left out for an empty cell as well. */
   status?: ShadeStatus
   color?: ColorColumns
@@ -147,7 +148,7 @@ function readRow(
   const beyond = beyondHeader(cells, columns)
   if (beyond) errors.push({ field: 'number', message: beyond })
   const number = take('number', shadeNumber)
-  const name = take('name', shadeName as z.ZodType<string | null, string>)
+  const name = take('name', shadeName as z.ZodType<string | null, string>) ?? undefined
   const status = cell('status') === '' ? undefined : take('status', statusCell)
   const position = cell('order') === '' ? undefined : take('order', orderCell)
   const hasLab = (['L', 'a', 'b'] as const).some((field) => cell(field))

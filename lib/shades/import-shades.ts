@@ -1,7 +1,10 @@
+import { randomUUID } from 'node:crypto'
+
 import { countAndName, lineObject } from '@/lib/activity/objects'
 import { recordActivity } from '@/lib/activity/record'
 import type { Actor } from '@/lib/auth/actor'
 import { ConflictError, InvalidError } from '@/lib/errors'
+import { readTextsOnShades, writeDrafts, type NewDraft } from '@/lib/names/write-drafts'
 import { Shade } from '@/models'
 
 import { changeShades, requireRoom } from './change-shades'
@@ -16,8 +19,8 @@ import type { ImportShadesInput } from './schema'
 const BATCH = 1_000
 
 /**
- * Saves the good rows of a CSV file, all or none, in a few queries whatever their number. The same
- * file again changes nothing and is no error.
+ * Saves the good rows of a CSV file, all or none, in a few queries whatever their number; names in
+ * it become drafts. The same file again changes nothing and is no error.
  * @throws NotFoundError, ForbiddenError
  * @throws InvalidError when the text is no CSV file of shades
  * @throws ConflictError when the line's shades changed since the preview, or the line is full
@@ -40,7 +43,7 @@ export async function importShades(
       raw: true,
       transaction,
     })
-    const plan = planImport(rows, existing)
+    const plan = planImport(rows, existing, await readTextsOnShades(line, transaction))
     const counts = countPlan(plan)
     const changed = counts.new + counts.changed > 0
     if (changed && line.shadesRevision !== shadesRevision) {
@@ -49,12 +52,20 @@ export async function importShades(
       )
     }
     requireRoom(existing.length, counts.new)
-    const saves = plan.flatMap((planned): SavedShade[] => {
-      if (planned.outcome === 'new') return [{ ...planned.shade, ...where, version: 1 }]
-      if (planned.outcome !== 'changed') return []
-      const { id, version } = planned.before
-      return [{ ...planned.shade, ...where, id, version: version + 1 }]
-    })
+    const saves: SavedShade[] = []
+    const drafts: NewDraft[] = []
+    const labels: string[] = []
+    for (const planned of plan) {
+      if (planned.outcome !== 'new' && planned.outcome !== 'changed') continue
+      const { id, version, name } =
+        planned.outcome === 'changed'
+          ? planned.before
+          : { id: randomUUID(), version: 0, name: null }
+      if (planned.outcome === 'new' || planned.fields.length > 0)
+        saves.push({ ...planned.shade, ...where, id, version: version + 1 })
+      if (planned.draft !== null) drafts.push({ text: planned.draft, shadeId: id })
+      labels.push(shadeLabel({ number: planned.shade.number, name }))
+    }
     for (let at = 0; at < saves.length; at += BATCH) {
       await Shade.bulkCreate(saves.slice(at, at + BATCH), {
         updateOnDuplicate: [...UPDATED],
@@ -62,7 +73,8 @@ export async function importShades(
       })
     }
     if (changed) {
-      const { named } = countAndName(saves.map(shadeLabel))
+      await writeDrafts(actor, { line, transaction }, drafts)
+      const { named } = countAndName(labels)
       await recordActivity(
         actor,
         { action: 'shade.imported', object: lineObject(line), after: { ...counts, named } },
@@ -73,9 +85,9 @@ export async function importShades(
   })
 }
 
-/** A new shade, or with an id the next version of one whose line is locked. */
+/** A new shade, or the next version of one whose line is locked. */
 type SavedShade = PlannedShade & {
-  id?: string
+  id: string
   brandId: string
   lineId: string
   version: number
@@ -83,7 +95,6 @@ type SavedShade = PlannedShade & {
 
 const UPDATED = [
   'number',
-  'name',
   'status',
   'position',
   'labL',

@@ -13,7 +13,7 @@ import type { CsvMapping, ReadingTerms, ShadeStatus } from './constants'
 export interface ShadeView {
   id: string
   number: string
-  /** Null while it has none. */
+  /** The approved one; null while it has none. */
   name: string | null
   /** The name, or "No. 14" while it has none. */
   label: string
@@ -61,7 +61,7 @@ export const SHADE_VIEW_COLUMNS = [
 /** A row with at least {@link SHADE_VIEW_COLUMNS}. */
 export type ShadeRow = Pick<Shade, (typeof SHADE_VIEW_COLUMNS)[number]>
 
-/** How a shade is called: its name, or "No. 14". */
+/** How a shade is called, here and in all that goes out: its approved name, or "No. 14". */
 export function shadeLabel({ number, name }: { number: string; name: string | null }): string {
   return name ?? `No. ${number}`
 }
@@ -114,12 +114,13 @@ export interface ImportPreviewRow {
   row: number
   outcome: PlannedRow['outcome']
   number: string
+  /** What the shade is called; of a bad row, what stands in it. */
   name: string | null
   /** Null for a bad row. */
   status: ShadeStatus | null
   /** Null for a bad row. */
   color: { hex: string; inGamut: boolean; words: string } | null
-  /** What would be different: "name: “Moss” → “Deep Moss”". */
+  /** What would be different: "status: target → dipped". */
   changes: string[]
   /** What is wrong, by row and column. */
   errors: string[]
@@ -161,16 +162,20 @@ export function presentPlannedRow(planned: PlannedRow): ImportPreviewRow {
   return {
     ...base,
     number: shade.number,
-    name: shade.name,
+    name: planned.outcome === 'new' ? null : planned.before.name,
     status: shade.status,
     color: {
       ...screenColor([shade.labL, shade.labA, shade.labB]),
       words: describeColor(shade),
     },
-    changes:
-      planned.outcome === 'changed'
+    changes: [
+      ...(planned.outcome === 'changed'
         ? planned.fields.map((field) => describeChange(field, planned.before, planned.shade))
-        : [],
+        : []),
+      ...(planned.outcome !== 'unchanged' && planned.draft !== null
+        ? [`“${planned.draft}” as a draft of its name`]
+        : []),
+    ],
   }
 }
 
@@ -178,7 +183,6 @@ function describeChange(field: PlannedField, before: ShadeRow, after: PlannedSha
   const say = (shade: ShadeRow | PlannedShade) =>
     ({
       number: shade.number,
-      name: shade.name ? `“${shade.name}”` : 'none',
       status: shade.status,
       color: describeColor(shade),
       order: String(shade.position + 1),

@@ -1,4 +1,5 @@
 import { authorize, type Actor } from '@/lib/auth/actor'
+import { readTextsOnShades } from '@/lib/names/write-drafts'
 
 import { guessMapping, mappingProblems, readRows } from './csv'
 import { badRowsCsv, parseSheet } from './csv-text'
@@ -13,7 +14,7 @@ import type { PreviewImportInput } from './schema'
 const EXAMPLES = 3
 
 /**
- * Says what importing a CSV file would do, and saves nothing. Two queries; some tenths of a second
+ * Says what importing a CSV file would do, and saves nothing. Three queries; some tenths of a second
  * for 5,000 rows.
  * @throws NotFoundError, ForbiddenError
  * @throws InvalidError when the text is no CSV file of shades
@@ -27,7 +28,10 @@ export async function previewImport(
   const sheet = parseSheet(text)
   const mapping = chosen ?? guessMapping(sheet.header)
   const problems = mappingProblems(mapping, terms)
-  const plan = problems.length > 0 ? [] : planImport(readRows(sheet, mapping, terms), shades)
+  const plan =
+    problems.length > 0
+      ? []
+      : planImport(readRows(sheet, mapping, terms), shades, await readTextsOnShades(line))
   const counts = countPlan(plan)
   if (shades.length + counts.new > SHADE_LIMITS.perLine) {
     problems.push(

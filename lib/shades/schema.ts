@@ -1,6 +1,7 @@
 import { z } from 'zod'
 
 import { NEAR_TWIN_LIMIT } from '@/lib/color/range-study'
+import { nameText } from '@/lib/names/schema'
 
 import {
   SHADE_STATUSES,
@@ -30,16 +31,11 @@ export const shadeNumber = kept.pipe(
     .max(SHADE_LIMITS.number, `Keep the number to ${SHADE_LIMITS.number} characters.`),
 )
 
-/** A shade's name; null while it has none. */
+/** What is typed where a shade's name stands: an idea for it; null when nothing is. */
 export const shadeName = z
-  .union([z.null(), kept])
-  .pipe(
-    z
-      .string()
-      .max(SHADE_LIMITS.name, `Keep the name to ${SHADE_LIMITS.name} characters.`)
-      .nullable(),
-  )
-  .transform((name) => name || null)
+  .union([z.null(), z.string()])
+  .transform((text) => oneLine(text ?? '') || null)
+  .pipe(nameText.nullable())
 
 const reading = (what: string, [least, most]: readonly [number, number]) =>
   z
@@ -89,13 +85,13 @@ export type ShadeColor = z.output<typeof shadeColor>
 
 const shadeFields = {
   number: shadeNumber,
-  name: shadeName,
   status: z.enum(SHADE_STATUSES),
   color: shadeColor,
 }
 /** What people fill in of a shade, new or not; the form keeps both kinds of colour, and one counts. */
 export const shadeFormSchema = z.strictObject({
   ...shadeFields,
+  name: shadeName,
   color: z.discriminatedUnion('kind', [z.object(labColor), z.object(hexColor)]),
 })
 
@@ -103,10 +99,11 @@ const inLine = { lineSlug: z.string() }
 
 const shadeIds = z.array(z.uuid()).min(1, 'Choose at least one shade.').max(SHADE_LIMITS.perLine)
 
-/** The form that adds a shade. */
+/** The form that adds a shade; a name in it begins as a draft. */
 export const createShadeSchema = z.strictObject({
   ...inLine,
   ...shadeFields,
+  name: shadeName,
   requestKey: z.uuid(),
 })
 /** What the form holds before parsing. */

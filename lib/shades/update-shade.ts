@@ -9,7 +9,7 @@ import { colorColumns, describeColor, isSameColor } from './color'
 import type { UpdateShadeInput } from './schema'
 
 /**
- * Changes the given fields of a shade.
+ * Changes the given fields of a shade; its name is none of them (lib/names).
  * @throws NotFoundError
  * @throws ConflictError when the number is taken, or when somebody saved in between: its
  * fieldErrors then say what stands there now
@@ -41,12 +41,9 @@ export async function updateShade(actor: Actor, input: UpdateShadeInput): Promis
 }
 
 /** The conflict that names what the other person saved, field by field. */
-function savedFirst(shade: Shade, { number, name, status, color }: UpdateShadeInput) {
+function savedFirst(shade: Shade, { number, status, color }: UpdateShadeInput) {
   const theirs: FieldErrors = {}
   if (number !== undefined && number !== shade.number) theirs.number = [`Now ${shade.number}.`]
-  if (name !== undefined && name !== shade.name) {
-    theirs.name = [shade.name ? `Now “${shade.name}”.` : 'Now without a name.']
-  }
   if (status !== undefined && status !== shade.status) theirs.status = [`Now ${shade.status}.`]
   if (color && !isSameColor(colorColumns(color), shade)) {
     theirs.color = [`Now ${describeColor(shade)}.`]

@@ -235,7 +235,7 @@ export const DATABASE_FAULTS: readonly Fault[] = [
         lineSlug: FAULT_LINE,
         shadeId: id,
         version: 0,
-        name: 'After the lock',
+        status: 'dipped',
       }
       const [{ version }] = (await world.query<{ version: number }>(
         'SELECT version FROM shades WHERE id = $1',
@@ -250,7 +250,7 @@ export const DATABASE_FAULTS: readonly Fault[] = [
       await letGo()
       const again = await save()
       must(again.ok, `after the lock the save was answered ${JSON.stringify(again)}`)
-      world.acknowledge('shades', id, { name: change.name, version: version + 1 })
+      world.acknowledge('shades', id, { status: change.status, version: version + 1 })
       return 'told in words, nothing changed; the same form saved once the lock was gone'
     },
   },

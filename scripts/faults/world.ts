@@ -244,7 +244,7 @@ export class World {
       signal && { signal },
     )
     if (answer.ok) {
-      this.acknowledge('shades', answer.data.id, { number: shade.number, name: shade.name })
+      this.acknowledge('shades', answer.data.id, { number: shade.number })
     }
     return answer
   }

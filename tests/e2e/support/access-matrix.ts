@@ -269,7 +269,7 @@ export const ACTIONS: Record<string, ActionRule> = {
   },
   updateShadeAction: {
     who: EDITORS,
-    input: ({ line, shade }) => ({ lineSlug: line, shadeId: shade, version: -1, name: 'Mine now' }),
+    input: ({ line, shade }) => ({ lineSlug: line, shadeId: shade, version: -1, status: 'target' }),
     answer: 'conflict',
   },
   setShadeStatusAction: {

@@ -119,7 +119,7 @@ const DOINGS: Doing[] = [
             lineSlug: line.slug,
             requestKey: randomUUID(),
             number: '77',
-            name: 'Moss',
+            name: null,
             status: 'target',
             color: { kind: 'hex', hex: '#123456' },
           }),
@@ -127,8 +127,8 @@ const DOINGS: Doing[] = [
       ),
     row: ({ line }) => ({
       objectKind: 'shade',
-      objectLabel: `Moss of ${line.name}`,
-      after: { number: '77', name: 'Moss', status: 'target', hex: '#123456' },
+      objectLabel: `No. 77 of ${line.name}`,
+      after: { number: '77', status: 'target', hex: '#123456' },
     }),
   },
   {
@@ -140,14 +140,14 @@ const DOINGS: Doing[] = [
           shadeId: shade!.id,
           version: shade!.version,
           number: shade!.number,
-          name: 'Fern',
+          status: 'dipped',
           color: { kind: 'lab', L: shade!.labL, a: -13, b: shade!.labB, terms: 'D65/10' },
         }),
       ),
     row: ({ shades: [shade] }) => ({
       objectId: shade!.id,
-      before: { name: null, labA: -12 },
-      after: { name: 'Fern', labA: -13 },
+      before: { status: 'target', labA: -12 },
+      after: { status: 'dipped', labA: -13 },
     }),
   },
   {
@@ -198,15 +198,15 @@ const DOINGS: Doing[] = [
       Promise.resolve(() =>
         importShades(owner, {
           lineSlug: line.slug,
-          text: 'number,hex,name\nN1,#123456,Rill\nS1,#aabbcc,\nN2,nonsense,\n',
+          text: 'number,hex\nN1,#123456\nS1,#aabbcc\nN2,nonsense\n',
           terms: null,
-          mapping: guessMapping(['number', 'hex', 'name']),
+          mapping: guessMapping(['number', 'hex']),
           shadesRevision: line.shadesRevision,
         }),
       ),
     row: ({ line }) => ({
       objectId: line.id,
-      after: { new: 1, changed: 1, unchanged: 0, bad: 1, named: ['Rill', 'No. S1'] },
+      after: { new: 1, changed: 1, unchanged: 0, bad: 1, named: ['No. N1', 'No. S1'] },
     }),
   },
   {
@@ -408,7 +408,7 @@ describe('the record', () => {
         lineSlug: line.slug,
         shadeId: shades[0]!.id,
         version: 99,
-        name: 'Late',
+        status: 'dipped',
       }),
     )
     await expect(clash).rejects.toThrow(ConflictError)

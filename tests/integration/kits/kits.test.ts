@@ -40,6 +40,7 @@ import {
 import { makeActor, makeActors, makeBrand } from '@/tests/factories/brand'
 import { makeCombination } from '@/tests/factories/combination'
 import { makeLine } from '@/tests/factories/line'
+import { makeIdea } from '@/tests/factories/name'
 import { makePhotograph } from '@/tests/factories/photograph'
 import { makeShades } from '@/tests/factories/shade'
 
@@ -218,6 +219,8 @@ describe('what keeps a combination out', () => {
 describe('building a kit', () => {
   it('draws what can go in, in the order asked for, and lists the rest with why', async () => {
     const photograph = await shownPhotograph()
+    await makeIdea(line, shades[0]!, { text: 'Thyme Will Tell', state: 'approved' })
+    await makeIdea(line, shades[1]!, { text: 'Thyme and Again', state: 'in-review' })
     const first = await makeCombination(line, shades, { title: 'First' })
     const second = await makeCombination(line, shades, {
       title: 'Second',
@@ -236,11 +239,13 @@ describe('building a kit', () => {
     expect(Object.keys(files)).toContain('second/second-1200x630.png')
     const post = Buffer.from(files['post.html']!).toString()
     expect(post.indexOf('Second')).toBeLessThan(post.indexOf('First'))
-    // Names are not reviewed yet: what goes out has numbers.
-    const texts = Object.entries(files).filter(([path]) => !/png|pdf/.test(path))
+    const texts = Object.entries(files).filter(([path]) => /csv|css|json|html|alt|caption/.test(path))
+    expect(texts.length).toBeGreaterThanOrEqual(8)
     for (const [path, bytes] of texts) {
-      for (const { name } of shades.filter((shade) => shade.name))
-        expect(Buffer.from(bytes).toString(), path).not.toContain(name)
+      const text = Buffer.from(bytes).toString()
+      expect(text, path).toContain('Thyme Will Tell')
+      expect(text, path).toContain('No. S2')
+      expect(text, path).not.toContain('Thyme and Again')
     }
     const { width } = await sharp(
       await getKitPicture(actor, kit.id, `${second.id}-1080x1080.png`),

@@ -86,7 +86,7 @@ const DOINGS: Doing[] = [
     name: 'change',
     roles: EDITORS,
     do: (actor, line, { id, version }) =>
-      updateShade(actor, { lineSlug: line.slug, shadeId: id, version, name: 'Fern' }),
+      updateShade(actor, { lineSlug: line.slug, shadeId: id, version, status: 'dipped' }),
     ofShade: true,
   },
   {

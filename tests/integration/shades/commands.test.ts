@@ -13,7 +13,7 @@ import { restoreShades } from '@/lib/shades/restore-shades'
 import { createShadeSchema } from '@/lib/shades/schema'
 import { setShadeStatus } from '@/lib/shades/set-shade-status'
 import { updateShade } from '@/lib/shades/update-shade'
-import { CombinationPlace, Shade, type Line } from '@/models'
+import { CombinationPlace, NameIdea, NameMove, Shade, type Line } from '@/models'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
 import { makeCombination } from '@/tests/factories/combination'
 import { makeLine } from '@/tests/factories/line'
@@ -74,7 +74,24 @@ describe('adding a shade', () => {
     const made = await Promise.all(Array.from({ length: 10 }, () => createShade(owner, same)))
     expect(new Set(made.map(({ id }) => id)).size).toBe(1)
     expect(await Shade.count({ where: { lineId: line.id } })).toBe(1)
+    expect(await NameIdea.count({ where: { lineId: line.id } })).toBe(1)
     expect(await revision()).toBe(before + 1)
+  })
+
+  it('makes a draft of a name that was typed, with its history; the shade has no name yet', async () => {
+    const shade = await createShade(owner, input({ name: 'Moss Likely' }))
+    expect(shade.name).toBeNull()
+    const idea = await NameIdea.findOne({ where: { shadeId: shade.id }, rejectOnEmpty: true })
+    expect(idea).toMatchObject({
+      text: 'Moss Likely',
+      state: 'draft',
+      authorId: owner.personId,
+      wordedById: owner.personId,
+    })
+    const moves = await NameMove.findAll({ where: { ideaId: idea.id } })
+    expect(moves).toMatchObject([{ move: 'add', toState: 'draft', personId: owner.personId }])
+    await createShade(owner, input({ number: '15', name: '' }))
+    expect(await NameIdea.count({ where: { lineId: line.id } })).toBe(1)
   })
 
   it('makes one of ten different shades of one number, and the others say who has it', async () => {
@@ -85,7 +102,7 @@ describe('adding a shade', () => {
       if (result.status === 'fulfilled') continue
       expect(result.reason).toBeInstanceOf(ConflictError)
       expect(result.reason).toMatchObject({
-        fieldErrors: { number: ['No. 14 is taken by Moss. Choose another number.'] },
+        fieldErrors: { number: ['No. 14 is taken. Choose another number.'] },
       })
     }
   })
@@ -138,22 +155,20 @@ describe('changing a shade', () => {
   it('loses to whoever saved first, and says what stands there now', async () => {
     const shade = await makeShade(line, { name: 'Moss' })
     const edit = { lineSlug: line.slug, shadeId: shade.id, version: 1 }
-    await updateShade(owner, { ...edit, name: 'Fern', status: 'approved' })
+    await updateShade(owner, { ...edit, number: '15', status: 'approved' })
     const before = await revision()
-    const error = await conflict(
-      updateShade(owner, { ...edit, name: 'Bracken', status: 'approved' }),
-    )
-    expect(error.fieldErrors).toEqual({ name: ['Now “Fern”.'] })
-    expect(error.message).toContain('Now “Fern”.')
-    await expect(shade.reload()).resolves.toMatchObject({ name: 'Fern', version: 2 })
+    const error = await conflict(updateShade(owner, { ...edit, number: '16', status: 'approved' }))
+    expect(error.fieldErrors).toEqual({ number: ['Now 15.'] })
+    expect(error.message).toContain('Now 15.')
+    await expect(shade.reload()).resolves.toMatchObject({ number: '15', version: 2 })
     expect(await revision()).toBe(before)
   })
 
   it('lets one of two simultaneous saves win', async () => {
     const shade = await makeShade(line)
-    const save = (name: string) =>
-      updateShade(owner, { lineSlug: line.slug, shadeId: shade.id, version: 1, name })
-    const results = await Promise.allSettled([save('Fern'), save('Bracken')])
+    const save = (number: string) =>
+      updateShade(owner, { lineSlug: line.slug, shadeId: shade.id, version: 1, number })
+    const results = await Promise.allSettled([save('15'), save('16')])
     expect(results.map(({ status }) => status).sort()).toEqual(['fulfilled', 'rejected'])
   })
 
@@ -253,9 +268,9 @@ describe('deleting shades', () => {
     const shades = await makeShades(line, 2)
     const request = { lineSlug: line.slug, shadeIds: shades.map(({ id }) => id) }
     await deleteShades(owner, { ...request, confirmed: false })
-    await createShade(owner, input({ number: 's2', name: 'Fern' }))
+    await createShade(owner, input({ number: 's2' }))
     expect((await conflict(restoreShades(owner, request))).message).toBe(
-      'No. s2 was given to another shade meanwhile, Fern. Give that one another number, then take the deletion back.',
+      'No. s2 was given to another shade meanwhile. Give that one another number, then take the deletion back.',
     )
     expect(await Shade.count({ where: { lineId: line.id } })).toBe(1)
   })

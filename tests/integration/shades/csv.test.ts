@@ -8,9 +8,11 @@ import { exportShades } from '@/lib/shades/export-shades'
 import { importShades } from '@/lib/shades/import-shades'
 import { previewImport } from '@/lib/shades/preview-import'
 import type { ReadingTerms } from '@/lib/shades/constants'
-import { sequelize, Shade, type Line } from '@/models'
+import { NAME_LIMITS } from '@/lib/names/constants'
+import { NameIdea, sequelize, Shade, type Line } from '@/models'
 import { makeActor, makeBrand } from '@/tests/factories/brand'
 import { makeLine } from '@/tests/factories/line'
+import { makeIdea } from '@/tests/factories/name'
 import { makeShade } from '@/tests/factories/shade'
 import { countQueries } from '@/tests/integration/setup/count-queries'
 
@@ -41,6 +43,16 @@ const rowsOf = async (of: Line) => {
   return Shade.findAll({ attributes, where: { lineId: of.id }, order, raw: true })
 }
 
+/** The drafts of a line with the numbers of their shades, in their order. */
+const draftsOf = async (of: Line) => {
+  const [ideas, shades] = await Promise.all([
+    NameIdea.findAll({ where: { lineId: of.id, state: 'draft' } }),
+    Shade.findAll({ where: { lineId: of.id } }),
+  ])
+  const numbers = new Map(shades.map(({ id, number }) => [id, number]))
+  return ideas.map(({ shadeId, text }) => [numbers.get(shadeId!), text]).sort()
+}
+
 const HEAD = 'number,name,status,L,a,b,illuminant,observer,hex,order\r\n'
 
 describe('a preview', () => {
@@ -56,9 +68,10 @@ describe('a preview', () => {
       'new',
       'bad',
     ])
+    expect(preview.rows[1]?.name).toBe('Fern')
     expect(preview.rows[1]?.changes).toEqual([
-      'name: “Fern” → “Bracken”',
       'colour: L 54.20, a −12.00, b 8.10 (D65, 10°) → L 60.00, a −12.00, b 8.10 (D65, 10°)',
+      '“Bracken” as a draft of its name',
     ])
     expect(preview.rows[3]?.errors).toEqual(['Row 5, L: “x” is not a number: give L'])
     expect(parseSheet(preview.badCsv!).rows).toHaveLength(1)
@@ -83,8 +96,9 @@ describe('an import', () => {
     const text = `${HEAD}1,"Dry Stone,\r\nWet Day",,54.2,-12,8.1,D65,10,,\r\n2,,,x,0,0,D65,10,,\r\n`
     await expect(save(text)).resolves.toEqual({ new: 1, changed: 0, unchanged: 0, bad: 1 })
     expect(await rowsOf(line)).toMatchObject([
-      { number: '1', name: 'Dry Stone, Wet Day', status: 'target', position: 0, version: 1 },
+      { number: '1', name: null, status: 'target', position: 0, version: 1 },
     ])
+    expect(await draftsOf(line)).toEqual([['1', 'Dry Stone, Wet Day']])
   })
 
   it('confirmed twice is the same as once', async () => {
@@ -106,8 +120,51 @@ describe('an import', () => {
 
   it('raises the version of what it changes', async () => {
     const shade = await makeShade(line, { number: 'q1', name: 'Moss' })
-    await save('number,name\nQ1,Fern\n')
-    await expect(shade.reload()).resolves.toMatchObject({ number: 'Q1', name: 'Fern', version: 2 })
+    await save('number,status\nQ1,dipped\n')
+    await expect(shade.reload()).resolves.toMatchObject({
+      number: 'Q1',
+      name: 'Moss',
+      status: 'dipped',
+      version: 2,
+    })
+  })
+
+  it('makes drafts of names and leaves the shades to be called what they are', async () => {
+    const named = await makeShade(line, { number: '1' })
+    await makeIdea(line, named, { text: 'Moss', state: 'approved' })
+    const bare = await makeShade(line, { number: '2', position: 1 })
+    await makeIdea(line, bare, { text: 'Heather', state: 'put-by' })
+    const before = [await named.reload(), await bare.reload()].map(({ version }) => version)
+    const text = 'number,name\n1,Fern\n2,Bracken\n'
+    await expect(save(text)).resolves.toMatchObject({ changed: 2 })
+    expect(await draftsOf(line)).toEqual([
+      ['1', 'Fern'],
+      ['2', 'Bracken'],
+    ])
+    expect((await named.reload()).name).toBe('Moss')
+    expect((await bare.reload()).name).toBeNull()
+    // Who has the form of one of them open is not disturbed.
+    expect([named, bare].map(({ version }) => version)).toEqual(before)
+    await expect(save(text)).resolves.toMatchObject({ changed: 0, unchanged: 2 })
+    await expect(save('number,name\n1,\n2,Heather\n')).resolves.toMatchObject({ unchanged: 2 })
+    expect(await draftsOf(line)).toHaveLength(2)
+    expect((await named.reload()).name).toBe('Moss')
+  })
+
+  it('brings no draft once the line holds as many ideas as it may, and then nothing at all', async () => {
+    const shade = await makeShade(line, { number: '1' })
+    await NameIdea.bulkCreate(
+      Array.from({ length: NAME_LIMITS.perLine }, (_, at) => ({
+        brandId: line.brandId,
+        lineId: line.id,
+        text: `Idea ${at}`,
+        state: 'draft' as const,
+        authorId: null,
+        wordedById: null,
+      })),
+    )
+    await expect(save('number,name,status\n1,Fern,dipped\n')).rejects.toThrow(ConflictError)
+    expect((await shade.reload()).status).toBe('target')
   })
 
   it('is refused whole when the line changed since the preview', async () => {
@@ -146,9 +203,9 @@ describe('an import', () => {
       `5,000 rows: preview ${Math.round(seen - started)} ms, import ${Math.round(stored - seen)} ms, again ${Math.round(performance.now() - stored)} ms`,
     )
     expect(previewed.answer.counts).toEqual({ new: 5_000, changed: 0, unchanged: 0, bad: 0 })
-    expect(previewed.queries).toBe(2)
+    expect(previewed.queries).toBe(3)
     expect(saved.answer.new).toBe(5_000)
-    expect(saved.queries).toBeLessThanOrEqual(18)
+    expect(saved.queries).toBeLessThanOrEqual(32)
     expect(again.answer.unchanged).toBe(5_000)
     await expect(save('number,hex\nX,#111111\n')).rejects.toThrow(/at most 5,000/)
   })
@@ -183,7 +240,7 @@ describe('an export', () => {
     await expect(save(text)).resolves.toEqual({ new: 0, changed: 0, unchanged: 6, bad: 0 })
   })
 
-  it('makes the same shades in another line, and exports the same again', async () => {
+  it('makes the same shades in another line, with drafts of their names', async () => {
     const { text } = await exportShades(owner, line.slug)
     const first = line
     // A shade entered by hex is its hex: the factory's Lab beside it is not what a hex gives.
@@ -192,8 +249,16 @@ describe('an export', () => {
     line = await makeLine({ id: owner.brandId })
     await save(text)
     const copied = await rowsOf(line)
-    expect(copied.filter(({ number }) => number !== 'é6')).toEqual(kept)
+    expect(copied.filter(({ number }) => number !== 'é6')).toEqual(
+      kept.map((row) => ({ ...row, name: null })),
+    )
     expect(copied.find(({ number }) => number === 'é6')).toMatchObject({ hex: '#7a8b4f' })
+    expect(await draftsOf(line)).toEqual(
+      SHADES.flatMap(({ number, name }) => (name ? [[number, name]] : [])).sort(),
+    )
+    // Once they are approved, it exports the same again.
+    for (const { number, name } of SHADES)
+      await Shade.update({ name }, { where: { lineId: line.id, number } })
     await expect(exportShades(owner, line.slug)).resolves.toMatchObject({ text })
   })
 

@@ -116,6 +116,14 @@ describe('words for pictures', () => {
     )
   })
 
+  test('keep names with a comma apart from each other', () => {
+    const [first, ...rest] = exportShades()
+    const shades = [{ ...first!, label: 'Gorse, Naturally' }, ...rest]
+    expect(captionOf(exportDescription(), exportCombination({ shades }))).toContain(
+      ': Gorse, Naturally; No. 2; No. 3; No. 4 and No. 5, from',
+    )
+  })
+
   test('do not speak of a photograph that is not shown', async () => {
     const combination = exportCombination({ photograph: await exportPhotograph({ bytes: null }) })
     expect(altText(combination)).not.toContain('photograph')

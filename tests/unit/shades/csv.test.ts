@@ -223,30 +223,34 @@ describe('what went out', () => {
   it('comes in again unchanged', () => {
     fc.assert(
       fc.property(shades, (line) => {
-        const plan = planImport(read(shadesToCsv(line)), line)
+        const plan = planImport(read(shadesToCsv(line)), line, new Map())
         expect(plan.map(({ outcome }) => outcome)).toEqual(line.map(() => 'unchanged'))
       }),
       { numRuns: 300 },
     )
   })
 
-  it('makes the same shades in an empty line', () => {
+  it('makes the same shades in an empty line, with drafts of their names', () => {
     fc.assert(
       fc.property(shades, (line) => {
-        const plan = planImport(read(shadesToCsv(line)), [])
-        expect(plan.map((row) => (row.outcome === 'new' ? row.shade : row.outcome))).toEqual(
-          line.map(({ number, name, status, position, hex, ...shade }) => ({
-            number,
+        const plan = planImport(read(shadesToCsv(line)), [], new Map())
+        expect(
+          plan.map((row) => (row.outcome === 'new' ? [row.shade, row.draft] : row.outcome)),
+        ).toEqual(
+          line.map(({ number, name, status, position, hex, ...shade }) => [
+            {
+              number,
+              status,
+              position,
+              hex,
+              labL: shade.labL,
+              labA: shade.labA,
+              labB: shade.labB,
+              illuminant: shade.illuminant,
+              observer: shade.observer,
+            },
             name,
-            status,
-            position,
-            hex,
-            labL: shade.labL,
-            labA: shade.labA,
-            labB: shade.labB,
-            illuminant: shade.illuminant,
-            observer: shade.observer,
-          })),
+          ]),
         )
       }),
     )

@@ -24,24 +24,43 @@ const shade = (values: Partial<ShadeRow>): ShadeRow => ({
   ...values,
 })
 
-function plan(text: string, existing: ShadeRow[]) {
+function plan(text: string, existing: ShadeRow[], texts: Record<string, string[]> = {}) {
   const sheet = parseSheet(text)
-  return planImport(readRows(sheet, guessMapping(sheet.header), 'D65/10'), existing)
+  const ideas = new Map(Object.entries(texts).map(([id, each]) => [id, new Set(each)]))
+  return planImport(readRows(sheet, guessMapping(sheet.header), 'D65/10'), existing, ideas)
 }
 
 describe('an import', () => {
   it('leaves as it is what the file does not say', () => {
-    const [row] = plan('number,name\nQ1,Fern\n', [shade({})])
+    const [row] = plan('number,status\nQ1,dipped\n', [shade({})])
     expect(row).toMatchObject({
       outcome: 'changed',
-      fields: ['name'],
-      shade: { name: 'Fern', status: 'approved', labL: 54.2, observer: 10, position: 4 },
+      fields: ['status'],
+      draft: null,
+      shade: { status: 'dipped', labL: 54.2, observer: 10, position: 4 },
     })
   })
 
-  it('takes an empty name for no name, and an empty status for no word about it', () => {
-    const [row] = plan('number,name,status\nQ1,,\n', [shade({})])
-    expect(row).toMatchObject({ outcome: 'changed', fields: ['name'], shade: { name: null } })
+  it('takes an empty name and an empty status for no word about them', () => {
+    expect(plan('number,name,status\nQ1,,\n', [shade({})])).toMatchObject([
+      { outcome: 'unchanged' },
+    ])
+  })
+
+  it('makes a draft of a name, for a new shade and for one that is there', () => {
+    const rows = plan('number,name,hex\nQ2,Bracken,#123456\n', [shade({})])
+    expect(rows).toMatchObject([{ outcome: 'new', shade: { number: 'Q2' }, draft: 'Bracken' }])
+    expect(plan('number,name\nQ1,Fern\n', [shade({})])).toMatchObject([
+      { outcome: 'changed', fields: [], draft: 'Fern' },
+    ])
+  })
+
+  it('makes none of the name that the shade has, nor of an idea that lies on it already', () => {
+    const two = [shade({}), shade({ id: 'two', number: 'Q2', name: null })]
+    const rows = plan('number,name\nQ1,Moss\nQ2,Fern\n', two, { two: ['Bracken', 'Fern'] })
+    expect(countPlan(rows)).toEqual({ new: 0, changed: 0, unchanged: 2, bad: 0 })
+    const other = plan('number,name\nQ1,Fern\n', two, { two: ['Fern'] })
+    expect(other).toMatchObject([{ outcome: 'changed', draft: 'Fern' }])
   })
 
   it('finds a shade by its number in any case, and takes the new writing', () => {

@@ -9,6 +9,7 @@ import {
   shadeName,
   shadeNumber,
   shadeTableSchema,
+  updateShadeSchema,
 } from '@/lib/shades/schema'
 
 const messagesOf = (result: { success: boolean; error?: { issues: { message: string }[] } }) =>
@@ -107,6 +108,21 @@ describe('number and name', () => {
     ['1\u0000', 'There is a character in it that cannot be printed.'],
   ])('say what is wrong with the number %j', (number, message) => {
     expect(messagesOf(shadeNumber.safeParse(number))).toEqual([message])
+  })
+
+  it('say what is wrong with a name, as wherever names are written down', () => {
+    expect(messagesOf(shadeName.safeParse('x'.repeat(61)))).toEqual([
+      'Keep the name to 60 characters.',
+    ])
+    expect(messagesOf(shadeName.safeParse('Moss\u0000'))).toEqual([
+      'There is a character in it that cannot be printed.',
+    ])
+  })
+
+  it('cannot be changed together: a name goes through its review', () => {
+    const change = { lineSlug: 'dk', shadeId: crypto.randomUUID(), version: 1 }
+    expect(updateShadeSchema.safeParse({ ...change, number: '2' }).success).toBe(true)
+    expect(updateShadeSchema.safeParse({ ...change, name: 'Moss' }).success).toBe(false)
   })
 
   it('refuse fields that no form has', () => {

@@ -110,7 +110,7 @@ function KitNotes() {
       <Note title="What stays out">
         <p>
           A combination with an empty place or a deleted shade, and one whose photograph has no
-          licence, credit or alt text. Shades go by their numbers until their names are reviewed.
+          licence, credit or alt text. A shade without an approved name goes by its number.
         </p>
       </Note>
       <Note title="How long it is kept">

@@ -17,6 +17,7 @@ import { LinkButton } from '@/components/ui/link-button'
 import { Pagination } from '@/components/ui/pagination'
 import { EmptyState, NotFoundState } from '@/components/ui/states'
 import { GroundSwitch } from '@/components/yarn/ground-switch'
+import { canReadNames } from '@/lib/names/policy'
 import { readForPage } from '@/lib/server/page'
 import { pagesOf } from '@/lib/server/paging'
 import { canEditShades } from '@/lib/shades/policy'
@@ -45,14 +46,14 @@ export default async function ShadesPage({ params, searchParams }: Props) {
   const { order, page } = sampleBookSchema.parse(address)
   const isNarrowed = filter.q !== '' || filter.status.length > 0 || filter.outside
 
-  const { edits, line, book, table } = await readForPage(brand, async (actor) => {
-    const edits = canEditShades(actor)
+  const { edits, seesIdeas, line, book, table } = await readForPage(brand, async (actor) => {
+    const sees = { edits: canEditShades(actor), seesIdeas: canReadNames(actor) }
     if (view === 'table') {
       const table = await listShadeTable(actor, lineSlug, filter)
-      return { edits, line: table.line.name, table, book: null }
+      return { ...sees, line: table.line.name, table, book: null }
     }
     const book = await readSampleBook(actor, lineSlug, { order, page })
-    return { edits, line: book.line.name, book, table: null }
+    return { ...sees, line: book.line.name, book, table: null }
   })
   const total = (book ?? table)!.total
   const isEmpty = total === 0 && (book !== null || !isNarrowed)
@@ -138,6 +139,7 @@ export default async function ShadesPage({ params, searchParams }: Props) {
           total={total}
           filter={filter}
           edits={edits}
+          seesIdeas={seesIdeas}
           actions={actions}
         />
       ) : null}

@@ -7,9 +7,11 @@ import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader, SheetSection } from '@/components/layout/sheet-header'
 import { DeleteShadeButton } from '@/components/shades/delete-shade-button'
 import { ShadeForm } from '@/components/shades/shade-form'
+import { ShadeNameLink } from '@/components/shades/shade-name-link'
 import { ShadeNeighbours } from '@/components/shades/shade-neighbours'
 import {
   BeyondScreen,
+  ShadeName,
   ShadeStatusWord,
   showReading,
   showTerms,
@@ -20,6 +22,7 @@ import { TextLink } from '@/components/ui/text-link'
 import { Ground } from '@/components/yarn/ground'
 import { GroundSwitch } from '@/components/yarn/ground-switch'
 import { WoundSample } from '@/components/yarn/wound-sample'
+import { canReadNames } from '@/lib/names/policy'
 import { readForPage } from '@/lib/server/page'
 import { canEditShades } from '@/lib/shades/policy'
 import { getShade } from '@/lib/shades/queries'
@@ -32,6 +35,7 @@ const read = cache((brand: string, lineSlug: string, shadeId: string) =>
   readForPage(brand, async (actor) => ({
     ...(await getShade(actor, lineSlug, shadeId)),
     edits: canEditShades(actor),
+    seesIdeas: canReadNames(actor),
   })),
 )
 
@@ -44,7 +48,7 @@ export async function generateMetadata({ params }: Props): Promise<Metadata> {
 export default async function ShadePage({ params }: Props) {
   const { brand, line: lineSlug, shade: shadeId } = await params
   const place = { brand, lineSlug }
-  const { edits, shade, neighbours, uses } = await read(brand, lineSlug, shadeId)
+  const { edits, seesIdeas, shade, neighbours, uses } = await read(brand, lineSlug, shadeId)
   const [L, a, b] = shade.lab
   const more = uses ? uses.total - uses.combinations.length : 0
 
@@ -97,6 +101,14 @@ export default async function ShadePage({ params }: Props) {
           className="max-w-80 min-w-56 grow"
           items={[
             { term: 'Number', reading: shade.number },
+            {
+              term: 'Name',
+              reading: seesIdeas ? (
+                <ShadeNameLink place={place} shade={shade} />
+              ) : (
+                <ShadeName shade={shade} />
+              ),
+            },
             { term: 'L*', reading: showReading(L) },
             { term: 'a*', reading: showReading(a) },
             { term: 'b*', reading: showReading(b) },

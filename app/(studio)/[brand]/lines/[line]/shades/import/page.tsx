@@ -38,11 +38,12 @@ export default async function ImportShadesPage({
               Name, status ({SHADE_STATUSES.join(', ')}) and order may be left out. Decimal points
               and commas are both understood.
             </p>
+            <p>A name begins as a draft: the shade is called so once it is approved.</p>
           </Note>
           <Note title="Shades that are there already">
             <p>
               A row with a number of this line changes that shade; what the file does not say stays.
-              No shade is deleted.
+              No shade is deleted, and no name is taken away.
             </p>
           </Note>
         </>
