@@ -46,6 +46,11 @@ export async function fillLine(brandId: string, slug: string, size: LineSize): P
     { brandId, lineId, count: size.shades },
   )
   await run(
+    `INSERT INTO name_ideas (brand_id, line_id, shade_id, text, state, round)
+     SELECT brand_id, line_id, id, name, 'approved', 1 FROM shades WHERE line_id = $lineId::uuid`,
+    { lineId },
+  )
+  await run(
     `INSERT INTO families (brand_id, line_id, name, position)
      SELECT $brandId::uuid, $lineId::uuid, 'Family ' || n, n FROM generate_series(0, 7) n`,
     { brandId, lineId },
@@ -98,7 +103,15 @@ export async function fillLine(brandId: string, slug: string, size: LineSize): P
   )
 }
 
-const TABLES = ['lines', 'shades', 'photographs', 'readings', 'combinations', 'combination_places']
+const TABLES = [
+  'lines',
+  'shades',
+  'name_ideas',
+  'photographs',
+  'readings',
+  'combinations',
+  'combination_places',
+]
 /** An autovacuum that began while rows came lasts seconds, on a busy machine more. */
 const SETTLED_WITHIN = 120_000
 
@@ -113,7 +126,7 @@ export async function settle(): Promise<void> {
   const deadline = performance.now() + SETTLED_WITHIN
   do {
     await sequelize().query(
-      'VACUUM (ANALYZE) lines, shades, photographs, readings, combinations, combination_places',
+      'VACUUM (ANALYZE) lines, shades, name_ideas, photographs, readings, combinations, combination_places',
     )
     const [row] = await sequelize().query<{ pages: number }>(
       `SELECT sum(relpages - relallvisible)::int AS pages FROM pg_class
