@@ -45,12 +45,15 @@ export function ShadeCell({ row }: { row: NameRow }) {
       aria-label={`Find names for ${row.label}`}
       className="inline-block rounded"
     >
-      <WoundSample hex={row.hex} />
+      <WoundSample hex={row.hex} className="max-sm:h-8 max-sm:w-auto" />
     </AppLink>
   )
 }
 
-/** The name that stands for the shade, typed in place while it is nobody's to decide. */
+/**
+ * The name that stands for the shade, typed in place while it is nobody's to decide. On a phone,
+ * state and checks stand under it.
+ */
 export function NameCell({ row }: { row: NameRow }) {
   const { place, save } = useTerms()
   const { idea } = row
@@ -82,6 +85,10 @@ export function NameCell({ row }: { row: NameRow }) {
           {others}
         </TextLink>
       ) : null}
+      <div className="mt-1 sm:hidden">
+        <StateCell row={row} />
+        <ChecksCell row={row} />
+      </div>
     </div>
   )
 }
@@ -109,7 +116,11 @@ export function ChecksCell({ row }: { row: NameRow }) {
   const { findings, text } = row.idea
   const short = inShort(findings)
   if (!findings || findings.length === 0)
-    return <Status kind={findings ? 'done' : 'none'}>{short}</Status>
+    return (
+      <span className="flex">
+        <Status kind={findings ? 'done' : 'none'}>{short}</Status>
+      </span>
+    )
   const isWarned = findings.some(({ grade }) => grade === 'warning')
   return (
     <button
@@ -118,9 +129,11 @@ export function ChecksCell({ row }: { row: NameRow }) {
       aria-expanded={opened.has(row.id)}
       aria-controls={opened.has(row.id) ? findingsId(row) : undefined}
       onClick={() => toggle(row.id)}
-      className="min-h-8 text-left whitespace-nowrap underline decoration-rule underline-offset-[3px] hover:decoration-ink pointer-coarse:min-h-11"
+      className="flex min-h-8 items-center whitespace-nowrap pointer-coarse:min-h-11 hover:[&_.short]:decoration-ink"
     >
-      <Status kind={isWarned ? 'attention' : 'none'}>{short}</Status>
+      <Status kind={isWarned ? 'attention' : 'none'}>
+        <span className="short underline decoration-rule underline-offset-[3px]">{short}</span>
+      </Status>
     </button>
   )
 }

@@ -5,11 +5,11 @@ import { Field } from '@/components/ui/field'
 import { SearchField } from '@/components/ui/search-field'
 import { Select } from '@/components/ui/select'
 import type { FamilyView } from '@/lib/families/present'
-import { LISTED_STATES, type ListedState } from '@/lib/names/constants'
+import { LISTED_STATES, NAME_SORTS, type ListedState, type NameSort } from '@/lib/names/constants'
 import type { NameListFilter } from '@/lib/names/schema'
 import { SHADE_LIMITS } from '@/lib/shades/constants'
 
-import { LISTED_WORDS } from './list-words'
+import { LISTED_WORDS, SORT_WORDS } from './list-words'
 
 /** What the list is narrowed to. */
 export function ListFilter({
@@ -50,6 +50,22 @@ export function ListFilter({
           </Select>
         </Field>
       ) : null}
+      {/* A phone shows not all of the heads that sort. */}
+      <Field hideLabel label="Sort by" className="w-full sm:hidden">
+        <Select
+          value={filter.sort}
+          onChange={(event) => {
+            const sort = event.target.value as NameSort
+            onChange({ sort, dir: sort === 'checks' ? 'desc' : 'asc' })
+          }}
+        >
+          {NAME_SORTS.map((sort) => (
+            <option key={sort} value={sort}>
+              Sort by: {SORT_WORDS[sort].toLowerCase()}
+            </option>
+          ))}
+        </Select>
+      </Field>
       <fieldset className="flex flex-wrap gap-x-4">
         <legend className="sr-only">State</legend>
         {LISTED_STATES.map((state) => (

@@ -5,8 +5,8 @@ const LEFT = 8
 const RIGHT = 8
 const FOOT = 22
 const ROW = 9
-/** A name is a thread so long and so thick. */
-const THREAD = { width: 9, height: 4 }
+/** A name is a thread so thick, and at most so long. */
+const THREAD = { width: 22, height: 5 }
 
 /** Names by their number of characters, each a short thread over a ruled scale. */
 export function LengthRule({ rows }: { rows: readonly TogetherRow[] }) {
@@ -18,6 +18,7 @@ export function LengthRule({ rows }: { rows: readonly TogetherRow[] }) {
   const most = Math.max(...byLength.keys())
   const scale = (WIDTH - LEFT - RIGHT) / (most + 1)
   const xOf = (length: number) => LEFT + length * scale
+  const thread = Math.min(THREAD.width, 0.75 * scale)
   const highest = Math.max(...[...byLength.values()].map(({ length }) => length))
   const foot = highest * ROW + 6
   const ticks = Array.from({ length: Math.floor(most / 5) + 1 }, (_, at) => 5 * at)
@@ -53,9 +54,9 @@ export function LengthRule({ rows }: { rows: readonly TogetherRow[] }) {
           those.map(({ id, hex }, at) => (
             <rect
               key={id}
-              x={xOf(length) - THREAD.width / 2}
+              x={xOf(length) - thread / 2}
               y={foot - (at + 1) * ROW}
-              width={THREAD.width}
+              width={thread}
               height={THREAD.height}
               rx={THREAD.height / 2}
               fill={hex}
@@ -66,8 +67,7 @@ export function LengthRule({ rows }: { rows: readonly TogetherRow[] }) {
         )}
       </svg>
       <figcaption className="mt-2 max-w-measure text-sm text-ink-soft">
-        Characters of each name, blanks among them. Shortest: {shortest.name} (
-        {shortest.name.length}); longest: {longest.name} ({longest.name.length}).
+        Names by their characters. Shortest: {shortest.name}; longest: {longest.name}.
       </figcaption>
     </figure>
   )

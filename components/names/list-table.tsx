@@ -22,6 +22,8 @@ import { LIST_COLUMNS } from './list-columns'
 import { ListFilter } from './list-filter'
 import type { NamesPlace } from './names-place'
 
+/** Columns that a phone has no room for; it shows them under the name, or to narrow by. */
+const UNDER_NAME: readonly string[] = ['state', 'checks', 'family']
 const BULK_MOVES = ['send', 'recall', 'put-by'] as const
 
 /** The shades of a line with their names as a ledger: narrowed, sorted and paged by the address. */
@@ -72,6 +74,7 @@ export function NamesTable({
             hint="Press a name to write it. Enter saves, Escape puts it back."
             loading={loading}
             keyOf={({ id }) => id}
+            classOf={(column) => (UNDER_NAME.includes(column) ? 'max-sm:hidden' : undefined)}
             detailOf={(row) => (opened.has(row.id) ? <Detail row={row} /> : null)}
           />
         </ListContext>

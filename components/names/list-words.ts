@@ -1,14 +1,25 @@
 import {
   NAME_STATES,
+  NAME_VOTES,
   STATE_WORDS,
   VOTE_WORDS,
-  NAME_VOTES,
   type ListedState,
+  type NameSort,
 } from '@/lib/names/constants'
 import type { NameRow, VoteView } from '@/lib/names/present'
 
 /** LISTED_STATES as people read them. */
 export const LISTED_WORDS: Record<ListedState, string> = { ...STATE_WORDS, none: 'No name yet' }
+
+/** NAME_SORTS as people read them. */
+export const SORT_WORDS: Record<NameSort, string> = {
+  order: 'Order of the line',
+  number: 'Number',
+  name: 'Name',
+  state: 'State',
+  checks: 'Checks',
+  family: 'Family',
+}
 
 /** "1 name", "4 names". */
 export const countNames = (count: number): string => (count === 1 ? '1 name' : `${count} names`)
@@ -17,12 +28,13 @@ export const countNames = (count: number): string => (count === 1 ? '1 name' : `
 export function othersInWords({ idea, others }: Pick<NameRow, 'idea' | 'others'>): string | null {
   const parts = NAME_STATES.flatMap((state) => {
     const count = others[state] ?? 0
-    return count > 0 ? [{ count, words: `${count} ${STATE_WORDS[state].toLowerCase()}` }] : []
+    return count > 0 ? [{ count, state: STATE_WORDS[state].toLowerCase() }] : []
   })
   const total = parts.reduce((sum, { count }) => sum + count, 0)
   if (total === 0) return null
   const ideas = `${total}${idea ? ' more' : ''} ${total === 1 ? 'idea' : 'ideas'}`
-  return `${ideas}: ${parts.map(({ words }) => words).join(', ')}`
+  if (parts.length === 1) return `${ideas}, ${parts[0]!.state}`
+  return `${ideas}: ${parts.map(({ count, state }) => `${count} ${state}`).join(', ')}`
 }
 
 /** "2 yes, 1 no"; empty while nobody has said anything. */

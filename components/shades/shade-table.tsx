@@ -71,7 +71,7 @@ export function ShadeTable({
             caption="Shades"
             hint={edits ? 'Press what you want to change. Enter saves, Escape puts it back.' : null}
             loading={loading}
-            numberColumns={NUMBER_COLUMNS}
+            classOf={(column) => (NUMBER_COLUMNS.includes(column) ? 'number' : undefined)}
           />
         </ShadeTableContext>
       ) : null}

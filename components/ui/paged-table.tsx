@@ -16,7 +16,7 @@ export function PagedTable<Row extends object>({
   loading,
   keyOf,
   detailOf,
-  numberColumns = [],
+  classOf: classOfColumn,
 }: {
   table: ReactTable<typeof features, Row>
   caption: string
@@ -27,13 +27,11 @@ export function PagedTable<Row extends object>({
   keyOf?: (row: Row) => string
   /** What stands under a row; null for nothing. */
   detailOf?: (row: Row) => ReactNode
-  /** Columns whose cells stand at the right. */
-  numberColumns?: readonly string[]
+  /** How the cells of a column stand: "number" for the right, by the column's id. */
+  classOf?: (column: string) => string | undefined
 }) {
-  const classOf = (column: string) => {
-    if (column === 'select') return 'print:hidden'
-    return numberColumns.includes(column) ? 'number' : undefined
-  }
+  const classOf = (column: string) =>
+    column === 'select' ? 'print:hidden' : classOfColumn?.(column)
   return (
     <div className={cn('mt-3 transition-opacity', loading && 'opacity-60')} aria-busy={loading}>
       {hint ? <p className="mb-1 text-sm text-ink-faint print:hidden">{hint}</p> : null}

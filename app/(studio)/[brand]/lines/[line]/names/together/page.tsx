@@ -3,9 +3,9 @@ import type { Metadata } from 'next'
 import { Note } from '@/components/layout/note'
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader, SheetSection } from '@/components/layout/sheet-header'
-import { Findings } from '@/components/names/findings'
-import { LengthRule } from '@/components/names/list-lengths'
 import { StockCodes } from '@/components/names/list-codes'
+import { LengthRule } from '@/components/names/list-lengths'
+import { LineFindings } from '@/components/names/list-findings'
 import { countNames } from '@/components/names/list-words'
 import { namesHref } from '@/components/names/names-place'
 import { NamesTabs } from '@/components/names/names-tabs'
@@ -64,22 +64,17 @@ export default async function TogetherPage({ params }: Props) {
         title="What stands out"
         aside={findings.length === 1 ? '1 thing' : `${findings.length} things`}
       >
-        <Findings findings={findings} />
+        <LineFindings findings={findings} />
       </SheetSection>
-      <SheetSection
-        title="Wordplay"
-        aside={`${plays} of ${countNames(rows.length)}, ${Math.round(100 * wordplay.share)} %`}
-      >
-        <p className="max-w-measure text-ink-soft">
+      <SheetSection title="Manner">
+        <p className="mb-5 max-w-measure text-ink-soft">
           {plays === 0
             ? 'No name plays on a saying that we know.'
-            : 'What each plays on stands beside its code below.'}
+            : `${plays} of ${countNames(rows.length)} (${Math.round(100 * wordplay.share)} %) ${plays === 1 ? 'plays' : 'play'} on a saying; which one stands beside the code below.`}{' '}
+          {lengths.least === lengths.most
+            ? `All are ${lengths.most} characters long, blanks among them.`
+            : `They are ${lengths.least} to ${lengths.most} characters long, blanks among them; the middle one has ${lengths.middle}.`}
         </p>
-      </SheetSection>
-      <SheetSection
-        title="Lengths"
-        aside={`${lengths.least} to ${lengths.most} characters, the middle one ${lengths.middle}`}
-      >
         <LengthRule rows={rows} />
       </SheetSection>
       <SheetSection title="Stock codes">
