@@ -103,6 +103,8 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]/photographs/[photograph]': { who: STUDIO },
   '/[brand]/lines/[line]/combinations': { who: STUDIO },
   '/[brand]/lines/[line]/combinations/[combination]': { who: STUDIO },
+  '/[brand]/lines/[line]/names': { who: STUDIO },
+  '/[brand]/lines/[line]/names/together': { who: STUDIO },
   '/[brand]/lines/[line]/names/shades/[shade]': { who: STUDIO },
   '/[brand]/lines/[line]/names/labels': { who: STUDIO },
   '/[brand]/lines/[line]/names/labels/proof': { who: STUDIO },

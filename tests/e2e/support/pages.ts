@@ -54,6 +54,13 @@ export const PAGES: readonly StudioPage[] = [
     roles: STUDIO,
     find: firstLink('combinations', new RegExp(`/combinations/${ID}`)),
   },
+  { name: 'names', roles: STUDIO, find: () => `${LINE}/names` },
+  {
+    name: 'names by what is found',
+    roles: STUDIO,
+    find: () => `${LINE}/names?sort=checks&dir=desc`,
+  },
+  { name: 'names all together', roles: STUDIO, find: () => `${LINE}/names/together` },
   {
     name: 'the naming bench of a shade',
     roles: STUDIO,
