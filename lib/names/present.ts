@@ -5,6 +5,7 @@ import type { StoryName } from '@/lib/naming/story'
 import type { LabelSetting, SetName } from '@/lib/naming/label'
 import type { Role } from '@/lib/people/constants'
 import { shadeLabel } from '@/lib/shades/present'
+import { shadeLabel, type ShadeView } from '@/lib/shades/present'
 import type {
   NameIdea,
   NameMove,
@@ -327,6 +328,85 @@ export interface DealView {
   bare: number
   /** Ideas and shades beyond what is dealt at once. */
   beyond: { ideas: number; shades: number }
+}
+
+/** The name that a shade has now. */
+export interface HeldByShade {
+  text: string
+  /** Names are locked, and this one is not unlocked: no other can take its place. */
+  locked: boolean
+}
+
+/** A name in review with all that a reviewer looks at. */
+export interface ReviewItem {
+  idea: IdeaView
+  shade: ShadeView
+  /** The name of its tonal family; null while it is in none. */
+  family: string | null
+  /** Its family around it in the order of the book, itself among them. */
+  beside: ShadeView[]
+  /** Null while the shade has no name. */
+  held: HeldByShade | null
+  /** The other names in review for the same shade. */
+  rivals: string[]
+  /** The newest, oldest first. */
+  remarks: RemarkView[]
+  /** How many there are in all. */
+  remarkCount: number
+}
+
+/** What has come of a line's names so far. */
+export interface NamesStanding {
+  /** Shades, without retired ones. */
+  shades: number
+  /** Shades with an approved name, without retired ones. */
+  named: number
+  drafts: number
+  returned: number
+}
+
+/** A stretch of the names in review, in the order of the line's shades. */
+export interface ReviewPage {
+  items: ReviewItem[]
+  /** Names in review on all stretches. */
+  total: number
+  /** How many stand before this stretch. */
+  start: number
+  /** The last of the stretch before, and the first of the one after. */
+  before: string | null
+  after: string | null
+  standing: NamesStanding
+  /** The reader decides on names. */
+  decides: boolean
+  frozen: boolean
+}
+
+/** A search, and whether the reader may take it off the record. */
+export type RecordedSearch = SearchView & { canRemove: boolean }
+
+/** A move with the shade it was laid on then; null for the heap. */
+export type ToldMove = MoveView & { shadeLabel: string | null }
+
+/** An idea with all that was said and done about it. */
+export interface IdeaDetail {
+  idea: IdeaView
+  /** Null in the heap, and when its shade was deleted. */
+  shade: ShadeView | null
+  /** The other name that the shade has now. */
+  held: HeldByShade | null
+  /** What the checks say: as sent for review, or now while its words may still change. */
+  findings: Finding[]
+  /** They were kept when it was sent. */
+  findingsKept: boolean
+  /** Its wording is warned of: it needs a reason to be sent. */
+  needsReason: boolean
+  remarks: RemarkView[]
+  searches: RecordedSearch[]
+  /** Oldest first. */
+  moves: ToldMove[]
+  /** The reader decides on names. */
+  decides: boolean
+  frozen: boolean
 }
 
 /** How the names of a line are set and dated. */
