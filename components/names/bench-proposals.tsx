@@ -6,6 +6,7 @@ import { useEffect, useRef, useState, type FormEvent, type ReactNode } from 'rea
 import { SheetSection } from '@/components/layout/sheet-header'
 import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
+import { cn } from '@/components/ui/cn'
 import { Field } from '@/components/ui/field'
 import { Input } from '@/components/ui/input'
 import { LedgerList } from '@/components/ui/ledger'
@@ -142,6 +143,7 @@ export function BenchProposals({
             {failed}
             <Proposed
               label="Colour story"
+              className="border-b-0 lg:grid lg:grid-cols-2 lg:gap-x-12 [&>li]:border-b"
               of={made.story}
               none={none}
               row={(told) => <StoryRow key={told.name} told={told} {...taking} />}
@@ -160,8 +162,10 @@ function Proposed<T>({
   of,
   none,
   row,
+  className,
 }: {
   label: string
+  className?: string
   of: readonly T[]
   none: string
   row: (one: T) => ReactNode
@@ -171,7 +175,7 @@ function Proposed<T>({
   if (of.length === 0) return <p className="text-ink-soft">{none}</p>
   return (
     <>
-      <LedgerList ref={list} aria-label={label} className="border-t-0">
+      <LedgerList ref={list} aria-label={label} className={cn('border-t-0', className)}>
         {(all ? of : of.slice(0, FIRST)).map(row)}
       </LedgerList>
       {of.length > FIRST && !all ? (
@@ -204,7 +208,7 @@ function PlayRow({ play, ...taking }: Taking & { play: Play }) {
       {...taking}
     >
       <p className="text-ink-soft">
-        From “{source}”: {swapped.to} for {swapped.from}. Heard as {heardAs}.
+        From “{source}”, heard as {heardAs}.
       </p>
       <p className="text-sm text-ink-faint">{why}</p>
     </ProposedRow>
