@@ -99,6 +99,12 @@ function Idea({
   const router = useRouter()
   const [pending, setPending] = useState<string | null>(null)
   const editButton = useRef<HTMLButtonElement>(null)
+  const edited = useRef(false)
+  useEffect(() => {
+    const left = edited.current && !edits
+    edited.current = edits
+    if (left && document.activeElement === document.body) editButton.current?.focus()
+  }, [edits])
   const ideaIds = [idea.id]
 
   async function move(what: string, act: MoveIdeas, said: string) {
@@ -219,11 +225,7 @@ function Idea({
           idea={idea}
           label={label}
           actions={actions}
-          onDone={() => {
-            onEdit(false)
-            // The button comes back with the next render.
-            setTimeout(() => editButton.current?.focus())
-          }}
+          onDone={() => onEdit(false)}
         />
       ) : null}
     </li>
@@ -258,6 +260,8 @@ function EditIdea({
   })
   const [problem, setProblem] = useState<{ message: string; fields?: Record<string, string[]> }>()
   const [pending, setPending] = useState(false)
+  const input = useRef<HTMLInputElement>(null)
+  useEffect(() => input.current?.focus(), [])
 
   async function save(event: FormEvent) {
     event.preventDefault()
@@ -287,7 +291,7 @@ function EditIdea({
         check={actions.check}
         label={label}
         reasons
-        inputRef={(input) => input?.focus()}
+        inputRef={input}
       />
       {problem ? (
         <Notice kind="error" className="mt-4">
