@@ -4,7 +4,6 @@ import type { Play } from '@/lib/naming/play'
 import type { StoryName } from '@/lib/naming/story'
 import type { LabelSetting, SetName } from '@/lib/naming/label'
 import type { Role } from '@/lib/people/constants'
-import { shadeLabel } from '@/lib/shades/present'
 import { shadeLabel, type ShadeView } from '@/lib/shades/present'
 import type {
   NameIdea,

@@ -28,7 +28,7 @@ const askerOf = ({ role, isReviewer = undefined, isOnlyOwner = undefined }: Who)
   isReviewer: isReviewer ?? false,
   isOnlyOwner: isOnlyOwner ?? false,
 })
-const ideaOf = ({ state, inHeap, locked }: Standing, { isOwn: own }: Who): Movable => ({
+const ideaOf = ({ state, inHeap, locked }: Standing, { isOwn: own }: Pick<Who, 'isOwn'>): Movable => ({
   state,
   shadeId: inHeap ? null : 'a shade',
   authorId: own ? 'me' : 'another',
@@ -49,10 +49,10 @@ describe('the table of moves', () => {
     const owner = askerOf(WHO['an owner'])
     for (const move of STATE_MOVES) {
       const standing = STANDINGS.find(
-        (one) => reasonAgainst(move, ideaOf(one, {} as Who), owner, 'why') === null,
+        (one) => reasonAgainst(move, ideaOf(one, {}), owner, 'why') === null,
       )!
       for (const reason of ['', '  \n'])
-        expect(reasonAgainst(move, ideaOf(standing, {} as Who), owner, reason)?.code, move).toBe(
+        expect(reasonAgainst(move, ideaOf(standing, {}), owner, reason)?.code, move).toBe(
           REASONED.includes(move) ? 'invalid' : undefined,
         )
     }
@@ -90,7 +90,7 @@ describe('a vote', () => {
 
   it('is refused to a dyer who was appointed before', () => {
     const dyer = askerOf({ role: 'dyer', isReviewer: true })
-    expect(reasonAgainstVote(ideaOf({ state: 'in-review' }, {} as Who), dyer)?.code).toBe(
+    expect(reasonAgainstVote(ideaOf({ state: 'in-review' }, {}), dyer)?.code).toBe(
       'forbidden',
     )
   })
