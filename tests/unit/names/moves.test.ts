@@ -28,7 +28,7 @@ const askerOf = ({ role, isReviewer = undefined, isOnlyOwner = undefined }: Who)
   isReviewer: isReviewer ?? false,
   isOnlyOwner: isOnlyOwner ?? false,
 })
-const ideaOf = ({ state, inHeap, locked }: Standing, { isOwn: own }: Pick<Who, 'isOwn'>): Movable => ({
+const ideaOf = ({ state, inHeap, locked }: Standing, { isOwn: own }: Partial<Who>): Movable => ({
   state,
   shadeId: inHeap ? null : 'a shade',
   authorId: own ? 'me' : 'another',
