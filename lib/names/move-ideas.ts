@@ -22,7 +22,7 @@ import {
 } from './change-names'
 import { checkName, needsWordingReason, readCheckGround, type CheckedName } from './check-name'
 import type { StateMove } from './constants'
-import { MOVES, reasonAgainst } from './moves'
+import { MOVES, reasonAgainst, reasonUnseen } from './moves'
 import { canReadNames } from './policy'
 import type { DecideIdeaInput, MoveIdeasInput } from './schema'
 import { tellReviewers } from './tell-reviewers'
@@ -58,7 +58,7 @@ const TOLD: Record<StateMove, ActivityAction> = {
 export async function moveIdeas(
   actor: Actor,
   move: BulkMove,
-  { lineSlug, ideaIds }: MoveIdeasInput,
+  { lineSlug, from: seen, ideaIds }: MoveIdeasInput,
 ): Promise<BulkMoved> {
   authorize(actor, canReadNames)
   const checked = move === 'send' ? await checkIdeas(actor, lineSlug, ideaIds) : null
@@ -71,6 +71,7 @@ export async function moveIdeas(
     for (const idea of ideas) {
       const stop =
         reasonAgainst(move, movable(idea, at.frozen), at.asker) ??
+        (seen ? reasonUnseen(idea, seen) : null) ??
         (checked && reasonNotToSend(idea, shades!, checked.get(idea.id)))
       if (stop) {
         first ??= stop

@@ -96,6 +96,12 @@ export function reasonAgainst(
   return null
 }
 
+/** Why an idea that was seen in a state is left alone; null while it stands so. */
+export const reasonUnseen = (idea: Pick<Movable, 'state'>, seen: NameState): AppError | null =>
+  idea.state === seen
+    ? null
+    : new ConflictError(`It ${STANDS[idea.state]} now. Nothing was changed.`)
+
 /** Why this person may not say yes or no to this idea now; null when they may. */
 export function reasonAgainstVote(idea: Movable, asker: Asker): AppError | null {
   if (!isDecider(asker))

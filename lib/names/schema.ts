@@ -109,6 +109,8 @@ export type PlaceIdeasInput = z.output<typeof placeIdeasSchema>
 /** Ideas that all make one move that asks for no reason. */
 export const moveIdeasSchema = z.strictObject({
   ...inLine,
+  /** As they were seen: one that stands otherwise by now stays as it is. */
+  from: z.enum(NAME_STATES).optional(),
   ideaIds: ideaIds.max(
     NAME_LIMITS.together,
     `Choose at most ${NAME_LIMITS.together} names at once.`,

@@ -1,13 +1,12 @@
 import { randomUUID } from 'node:crypto'
-import type { AddressInfo } from 'node:net'
 
-import { SMTPServer } from 'smtp-server'
 import { afterEach, describe, expect, it } from 'vitest'
 
 import { unseal } from '@/lib/auth/seal'
 import { postLetter } from '@/lib/mail/post-letter'
 import { mailServer, sendLetter, sendLetters } from '@/lib/mail/send-letters'
 import { inTransaction, Letter, sequelize } from '@/models'
+import { makeMailServer, type TestMailServer } from '@/tests/integration/setup/mail-server'
 
 const CONTENT = {
   kind: 'test',
@@ -16,40 +15,11 @@ const CONTENT = {
   action: { label: 'Open', path: '/invitations/a-token-of-a-test' },
 }
 
-let server: SMTPServer | undefined
-afterEach(() => new Promise<void>((done) => (server ? server.close(done) : done())))
+let server: TestMailServer | undefined
+afterEach(() => server?.close())
 
-/** A mail server that answers as it is told. @returns its address and the Message-IDs it took */
-async function makeMailServer(answer: (count: number) => Error | 'drop' | null) {
-  const taken: string[] = []
-  let count = 0
-  const made = new SMTPServer({
-    authOptional: true,
-    disabledCommands: ['STARTTLS'],
-    onData(stream, _session, done) {
-      let message = ''
-      stream.on('data', (chunk) => (message += chunk))
-      stream.on('end', () => {
-        const said = answer(++count)
-        if (said === 'drop') return dropAll(made)
-        if (!said) taken.push(/^Message-ID: (.*)$/im.exec(message)![1]!)
-        done(said)
-      })
-    },
-  })
-  server = made
-  made.on('error', () => {})
-  await new Promise<void>((ready) => made.listen(0, '127.0.0.1', ready))
-  const { port } = made.server.address() as AddressInfo
-  return { url: `smtp://127.0.0.1:${port}`, taken }
-}
-
-function dropAll(smtp: SMTPServer) {
-  for (const connection of (
-    smtp as unknown as { connections: Set<{ _socket: { destroy(): void } }> }
-  ).connections)
-    connection._socket.destroy()
-}
+const makeServer = async (answer: Parameters<typeof makeMailServer>[0]) =>
+  (server = await makeMailServer(answer))
 
 async function post(): Promise<Letter> {
   const recipient = `${randomUUID()}@people.example`
@@ -80,7 +50,7 @@ describe('a letter in the outbox', () => {
   })
 
   it('is sent once, under its own Message-ID, and then emptied', async () => {
-    const { url, taken } = await makeMailServer(() => null)
+    const { url, taken } = await makeServer(() => null)
     const letter = await post()
     const outcomes = await Promise.all([
       sendLetter(letter.id, mailServer(url)),
@@ -100,7 +70,7 @@ describe('a letter in the outbox', () => {
     const away = mailServer('smtp://127.0.0.1:1')
     for (let time = 0; time < 3; time++)
       await expect(sendLetter(letter.id, away)).rejects.toThrow(/ECONNREFUSED/)
-    const { url, taken } = await makeMailServer(() => null)
+    const { url, taken } = await makeServer(() => null)
     expect(await sendLetters(mailServer(url))).toEqual({ sent: 1, left: 0 })
     expect(taken).toEqual([`<${letter.id}@localhost>`])
   })
@@ -108,7 +78,7 @@ describe('a letter in the outbox', () => {
   it('is sent again when the server drops the line before it has taken it, or asks to wait', async () => {
     const letter = await post()
     const busy = Object.assign(new Error('Come back later'), { responseCode: 451 })
-    const { url, taken } = await makeMailServer((count) => [, 'drop' as const, busy, null][count]!)
+    const { url, taken } = await makeServer((count) => [, 'drop' as const, busy, null][count]!)
     const way = mailServer(url)
     await expect(sendLetter(letter.id, way)).rejects.toThrow()
     await expect(sendLetter(letter.id, way)).rejects.toThrow(/Come back later/)
@@ -119,7 +89,7 @@ describe('a letter in the outbox', () => {
   it('that is refused for good says so and is not sent again', async () => {
     const letter = await post()
     const unknown = Object.assign(new Error('No such mailbox'), { responseCode: 550 })
-    const { url } = await makeMailServer(() => unknown)
+    const { url } = await makeServer(() => unknown)
     expect(await sendLetter(letter.id, mailServer(url))).toBe('refused')
     await letter.reload()
     expect(letter).toMatchObject({ sealedBody: '', sentAt: null })

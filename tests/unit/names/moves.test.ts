@@ -8,6 +8,7 @@ import {
   movesOpen,
   reasonAgainst,
   reasonAgainstVote,
+  reasonUnseen,
   type Asker,
   type Movable,
 } from '@/lib/names/moves'
@@ -22,13 +23,15 @@ import {
   type Who,
 } from '@/tests/fixtures/name-moves'
 
+const ANOTHER: Who = { role: 'owner' }
+
 const askerOf = ({ role, isReviewer = undefined, isOnlyOwner = undefined }: Who): Asker => ({
   personId: 'me',
   role,
   isReviewer: isReviewer ?? false,
   isOnlyOwner: isOnlyOwner ?? false,
 })
-const ideaOf = ({ state, inHeap, locked }: Standing, { isOwn: own }: Partial<Who>): Movable => ({
+const ideaOf = ({ state, inHeap, locked }: Standing, { isOwn: own }: Who): Movable => ({
   state,
   shadeId: inHeap ? null : 'a shade',
   authorId: own ? 'me' : 'another',
@@ -49,13 +52,18 @@ describe('the table of moves', () => {
     const owner = askerOf(WHO['an owner'])
     for (const move of STATE_MOVES) {
       const standing = STANDINGS.find(
-        (one) => reasonAgainst(move, ideaOf(one, {}), owner, 'why') === null,
+        (one) => reasonAgainst(move, ideaOf(one, ANOTHER), owner, 'why') === null,
       )!
       for (const reason of ['', '  \n'])
-        expect(reasonAgainst(move, ideaOf(standing, {}), owner, reason)?.code, move).toBe(
+        expect(reasonAgainst(move, ideaOf(standing, ANOTHER), owner, reason)?.code, move).toBe(
           REASONED.includes(move) ? 'invalid' : undefined,
         )
     }
+  })
+
+  it('leaves alone what stands otherwise than it was seen', () => {
+    expect(reasonUnseen({ state: 'in-review' }, 'in-review')).toBeNull()
+    expect(reasonUnseen({ state: 'returned' }, 'in-review')?.code).toBe('conflict')
   })
 
   it('leads where it says', () => {
@@ -64,7 +72,7 @@ describe('the table of moves', () => {
 
   it('lets nobody approve words that are theirs, whoever brought the idea', () => {
     const reviewer = askerOf(WHO['a reviewer'])
-    const idea = ideaOf({ state: 'in-review' }, {})
+    const idea = ideaOf({ state: 'in-review' }, ANOTHER)
     expect(reasonAgainst('approve', { ...idea, wordedById: 'me' }, reviewer)?.code).toBe(
       'forbidden',
     )
@@ -90,8 +98,6 @@ describe('a vote', () => {
 
   it('is refused to a dyer who was appointed before', () => {
     const dyer = askerOf({ role: 'dyer', isReviewer: true })
-    expect(reasonAgainstVote(ideaOf({ state: 'in-review' }, {}), dyer)?.code).toBe(
-      'forbidden',
-    )
+    expect(reasonAgainstVote(ideaOf({ state: 'in-review' }, ANOTHER), dyer)?.code).toBe('forbidden')
   })
 })
