@@ -42,7 +42,7 @@ export function IdeaMoves({
     const { id: ideaId, version, text } = idea
     const answer = await reach<unknown>(
       isBulk(move)
-        ? actions[move](brand, { lineSlug, ideaIds: [ideaId] })
+        ? actions[move](brand, { lineSlug, from: idea.state, ideaIds: [ideaId] })
         : actions[move](brand, { lineSlug, ideaId, version, reason }),
     )
     setPending(null)

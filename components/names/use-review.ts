@@ -115,7 +115,7 @@ export function useReview(
     setProblem(null)
     const answer = await reach<{ version?: number }>(
       move === 'put-by' || move === 'recall'
-        ? actions[move](brand, { lineSlug, ideaIds: [ideaId] }).then((all) =>
+        ? actions[move](brand, { lineSlug, from: idea.state, ideaIds: [ideaId] }).then((all) =>
             all.ok ? { ...all, data: {} } : all,
           )
         : actions[move](brand, { lineSlug, ideaId, version, reason }),

@@ -7,6 +7,7 @@ import {
   LISTED_STATES,
   NAME_LIMITS,
   NAME_SORTS,
+  NAME_STATES,
   NAME_VOTES,
   SEARCH_OUTCOMES,
 } from './constants'
