@@ -10,7 +10,7 @@ import type { RemoveSearchInput } from './schema'
 
 /**
  * Removes a search from the record: whoever recorded it, or an owner. That it stood there stays in
- * the activity.
+ * the activity, but for who had searched, since that names nobody.
  * @throws NotFoundError, ForbiddenError for somebody else's
  */
 export async function removeSearch(
@@ -32,13 +32,13 @@ export async function removeSearch(
         'Somebody else recorded this search. They or an owner can remove it.',
       )
     await search.destroy({ transaction })
-    const { register, searchedBy, searchedOn, outcome } = search
+    const { register, searchedOn, outcome } = search
     await recordActivity(
       actor,
       {
         action: 'name.search-removed',
         object: ideaObject(idea, line),
-        before: { register, searchedBy, searchedOn, outcome },
+        before: { register, searchedOn, outcome },
       },
       transaction,
     )
