@@ -81,7 +81,10 @@ export function NameCell({ row }: { row: NameRow }) {
         </AppLink>
       )}
       {others ? (
-        <TextLink href={benchHref(place, row)} className="block w-fit text-sm print:hidden">
+        <TextLink
+          href={benchHref(place, row)}
+          className="flex min-h-6 w-fit items-center text-sm print:hidden pointer-coarse:min-h-11"
+        >
           {others}
         </TextLink>
       ) : null}

@@ -12,6 +12,7 @@ const field = (page: Page, label: string) => page.getByRole('textbox', { name: l
 test('names are written in the list, sent for review together, taken back and put by', async ({
   page,
 }) => {
+  test.setTimeout(120_000)
   await signIn(page, 'marketer')
   await page.goto(`${LIST}?state=none`)
   const free = page.getByRole('button', { name: /^Name for No\. .+: edit$/ })
