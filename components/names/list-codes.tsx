@@ -43,7 +43,9 @@ export function StockCodes({ place, rows }: { place: NamesPlace; rows: readonly 
               </th>
               <td className="font-semibold tabular-nums">{code}</td>
               <td className="whitespace-nowrap">
-                <IdeaState state={state} />
+                <span className="flex">
+                  <IdeaState state={state} />
+                </span>
               </td>
               <td className="text-ink-soft">{family}</td>
               <td className="min-w-40 text-ink-soft">{source ? `“${source}”` : null}</td>

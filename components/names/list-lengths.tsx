@@ -1,6 +1,6 @@
 import type { TogetherRow } from '@/lib/names/present'
 
-const WIDTH = 640
+const WIDTH = 440
 const LEFT = 8
 const RIGHT = 8
 const FOOT = 22
@@ -43,7 +43,7 @@ export function LengthRule({ rows }: { rows: readonly TogetherRow[] }) {
               x={xOf(tick)}
               y={foot + 17}
               textAnchor="middle"
-              fontSize="11"
+              fontSize="12"
               fill="var(--ink-faint)"
             >
               {tick}
