@@ -15,7 +15,7 @@ import { MOVE_BUTTONS, MOVE_DONE, MOVE_PENDING, REASON_WORDS } from './move-word
 import type { NamesPlace } from './names-place'
 import { ReasonForm } from './reason-form'
 
-/** The moves that are open with an idea; which of them is the main one depends on its state. */
+/** What mostly comes next with an idea, by its state; it stands first. */
 const MAIN: readonly StateMove[] = ['send', 'approve', 'take-up']
 
 /** The moves that the reader may make with an idea now. */
@@ -78,7 +78,7 @@ export function IdeaMoves({
         />
       ) : (
         <div className="flex flex-wrap gap-3 empty:hidden">
-          {idea.moves.map((move) => (
+          {[...idea.moves].sort(mainFirst).map((move) => (
             <Button
               key={move}
               variant={MAIN.includes(move) ? 'primary' : 'secondary'}
@@ -94,6 +94,9 @@ export function IdeaMoves({
     </div>
   )
 }
+
+const mainFirst = (one: StateMove, other: StateMove) =>
+  Number(MAIN.includes(other)) - Number(MAIN.includes(one))
 
 const isBulk = (move: StateMove): move is 'send' | 'recall' | 'put-by' | 'take-up' =>
   move === 'send' || move === 'recall' || move === 'put-by' || move === 'take-up'

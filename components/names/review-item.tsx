@@ -41,7 +41,7 @@ export function ReviewItem({
 }) {
   const { idea, shade } = item
   return (
-    <div className="grid gap-x-10 gap-y-6 lg:grid-cols-[minmax(0,22rem)_minmax(0,1fr)]">
+    <div className="grid gap-x-10 gap-y-6 lg:grid-cols-[minmax(0,20rem)_minmax(0,1fr)]">
       <ReviewStage item={item} />
       <div className="min-w-0">
         <h2 ref={heading} tabIndex={-1} className="text-3xl break-words outline-none">
@@ -129,7 +129,7 @@ function Decisions({
   return (
     <div className="mt-5 space-y-2">
       {open.length > 0 || takesBack ? (
-        <div role="group" aria-label="Decide" className="flex flex-wrap gap-3">
+        <div role="group" aria-label="Decide" className="flex flex-wrap gap-2">
           {open.map(({ move, key }) => (
             <Button
               key={move}

@@ -21,7 +21,7 @@ export function ReviewStage({ item }: { item: ReviewItem }) {
           <ul
             role="list"
             aria-label={`Beside it in ${family ?? 'its family'}`}
-            className="mt-3 grid grid-cols-[repeat(auto-fit,minmax(3.5rem,1fr))] gap-x-3 border-t border-hairline pt-3"
+            className="mt-3 space-y-1.5 border-t border-hairline pt-3"
           >
             {beside.map((one) => {
               const isThis = one.id === shade.id
@@ -29,20 +29,18 @@ export function ReviewStage({ item }: { item: ReviewItem }) {
                 <li
                   key={one.id}
                   aria-current={isThis ? 'true' : undefined}
-                  className="min-w-0 text-center"
+                  className="flex min-w-0 items-center gap-3"
                 >
-                  <WoundSample hex={one.hex} className="h-auto w-full max-w-21" />
+                  <WoundSample hex={one.hex} className="h-7 w-auto" />
                   <span
                     className={cn(
-                      'mt-1 block font-title text-sm leading-tight break-words',
-                      isThis && 'underline decoration-2 underline-offset-[3px]',
+                      'min-w-0 grow font-title leading-tight break-words',
+                      isThis && 'underline decoration-2 underline-offset-4',
                     )}
                   >
-                    {isThis ? idea.text : one.label}
+                    {isThis ? idea.text : (one.name ?? 'No name yet')}
                   </span>
-                  {isThis || one.name ? (
-                    <span className="block text-sm text-ink-soft">No. {one.number}</span>
-                  ) : null}
+                  <span className="text-sm whitespace-nowrap text-ink-soft">No. {one.number}</span>
                 </li>
               )
             })}

@@ -54,6 +54,7 @@ export function useReview(
     const first = items.find(({ idea }) => idea.id === firstId) ?? items[0]
     return { id: first?.idea.id ?? null, index: first ? items.indexOf(first) : 0 }
   })
+  const [asked, setAsked] = useState<string | null>(null)
   const [asking, setAsking] = useState(false)
   const [pending, setPending] = useState<ReviewMove | NameVoteKind | 'undo' | null>(null)
   const [done, setDone] = useState<Done | null>(null)
@@ -67,17 +68,27 @@ export function useReview(
   const isEnd = items.length === 0 || at.id === null
   const index = isEnd ? items.length : found >= 0 ? found : Math.min(at.index, items.length - 1)
   const item: ReviewItem | undefined = items[index]
-  // Somebody else has decided on it, and another stands in its place.
-  const isGone = !isEnd && found < 0 && !isTurning
-  const shownId = item?.idea.id ?? null
+  // Of one that somebody else has decided on, what followed it stands in its place.
+  const isMissing = !isEnd && found < 0
+  const isGone = isMissing && asked === at.id && !isTurning && pending === null
 
+  // It may stand on another stretch; asked for once, it does or it is in review no more.
   useEffect(() => {
-    if (!focusWanted.current) return
+    if (!isMissing || asked === at.id || pending !== null) return
+    turn(() => {
+      setAsked(at.id)
+      router.replace(namesHref(place, `/review?idea=${at.id}`) as never)
+    })
+  })
+
+  // After whichever render shows it: the page may have been read anew before the answer came.
+  useEffect(() => {
+    if (!focusWanted.current || isTurning || (isMissing && !isGone)) return
     focusWanted.current = false
     heading.current?.focus({ preventScroll: true })
     const top = region.current?.getBoundingClientRect().top ?? 0
     if (top < 0) region.current?.scrollIntoView({ block: 'start' })
-  }, [shownId, heading, region])
+  })
 
   /** Shows another name, or the end. The focus goes along unless it stands on a button that stays. */
   function show(id: string | null, { keepFocus = false } = {}) {
@@ -86,8 +97,6 @@ export function useReview(
     focusWanted.current = !keepFocus
     const next = items.findIndex(({ idea }) => idea.id === id)
     setAt({ id, index: next < 0 ? index : next })
-    const isElsewhere = id !== null && next < 0
-    if (isElsewhere) turn(() => router.replace(namesHref(place, `/review?idea=${id}`) as never))
   }
 
   function go(step: 1 | -1, terms?: { keepFocus?: boolean }) {

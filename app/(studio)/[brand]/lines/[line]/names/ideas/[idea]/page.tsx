@@ -122,7 +122,7 @@ export default async function IdeaPage({ params }: Props) {
               {idea.wordedBy && idea.wordedBy.id !== idea.author?.id
                 ? `, worded by ${nameOf(idea.wordedBy)}`
                 : ''}
-              , so since {dayInWords(idea.stateSince)}
+              {' · '}since {dayInWords(idea.stateSince)}
             </span>
           </div>
         }
