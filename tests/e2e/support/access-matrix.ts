@@ -106,6 +106,8 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]/names': { who: STUDIO },
   '/[brand]/lines/[line]/names/together': { who: STUDIO },
   '/[brand]/lines/[line]/names/shades/[shade]': { who: STUDIO },
+  '/[brand]/lines/[line]/names/review': { who: STUDIO },
+  '/[brand]/lines/[line]/names/ideas/[idea]': { who: STUDIO },
   '/[brand]/lines/[line]/names/labels': { who: STUDIO },
   '/[brand]/lines/[line]/names/labels/proof': { who: STUDIO },
   '/[brand]/lines/[line]/names/history': { who: STUDIO },
@@ -567,6 +569,45 @@ export const ACTIONS: Record<string, ActionRule> = {
       ],
     ),
   ),
+  // Of a round that has passed.
+  voteAction: {
+    who: OWNER,
+    input: ({ line, idea }) => ({ lineSlug: line, ideaId: idea, round: -1, vote: 'yes' }),
+    answer: 'conflict',
+  },
+  // The submit that made it, sent again by each of them.
+  addRemarkAction: {
+    who: STUDIO,
+    input: ({ line, idea, requestKey }) => ({
+      lineSlug: line,
+      ideaId: idea,
+      text: 'Said once.',
+      requestKey,
+    }),
+  },
+  recordSearchAction: {
+    who: STUDIO,
+    input: ({ line, idea, requestKey }) => ({
+      lineSlug: line,
+      ideaId: idea,
+      register: 'A register',
+      searchedBy: 'Somebody',
+      searchedOn: '2026-11-01',
+      outcome: 'nothing found',
+      requestKey,
+    }),
+  },
+  // Nobody of them recorded it.
+  removeSearchAction: {
+    who: OWNER,
+    input: ({ line, search }) => ({ lineSlug: line, searchId: search }),
+    before: ({ idea, search }) => [
+      `INSERT INTO name_searches (id, brand_id, idea_id, register, searched_by, searched_on, outcome)
+       SELECT $2, brand_id, id, 'A register', 'Somebody', '2026-11-01', 'nothing found'
+       FROM name_ideas WHERE id = $1 ON CONFLICT DO NOTHING`,
+      [idea, search],
+    ],
+  },
 }
 
 const CSV = 'number,hex\nNobody has this,#808080\n'

@@ -70,6 +70,12 @@ export const PAGES: readonly StudioPage[] = [
         '/names/shades/',
       ),
   },
+  { name: 'names in review', roles: STUDIO, find: () => `${LINE}/names/review` },
+  {
+    name: 'an idea for a name',
+    roles: STUDIO,
+    find: firstLink('names/review', new RegExp(`/names/ideas/${ID}`)),
+  },
   { name: 'labels', roles: STUDIO, find: () => `${LINE}/names/labels` },
   { name: 'the proof sheet', roles: STUDIO, find: () => `${LINE}/names/labels/proof` },
   { name: 'the history of names', roles: STUDIO, find: () => `${LINE}/names/history` },
