@@ -7,6 +7,7 @@ const ROW = /\/shades\/[0-9a-f-]{36}$/
 test('a name is checked as it is typed, written down, and sent for review from the bench', async ({
   page,
 }) => {
+  test.setTimeout(120_000)
   await signIn(page, 'marketer')
   await page.goto(`${LINE}/shades`)
   const shades = await page
