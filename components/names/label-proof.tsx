@@ -68,6 +68,7 @@ export function LabelProof({
               fibre={fibre}
               care={care}
               measured={false}
+              className="overflow-visible"
             />
             {set.fits ? null : (
               <p>

@@ -20,7 +20,7 @@ export function LabelUnnamed({
     <>
       <ul
         role="list"
-        className="grid grid-cols-[repeat(auto-fill,minmax(11rem,1fr))] gap-x-6 gap-y-1.5"
+        className="grid grid-cols-[repeat(auto-fill,minmax(9.5rem,1fr))] gap-x-6 gap-y-1.5"
       >
         {unnamed.slice(0, SHOWN).map(({ shadeId, number, state }) => (
           <li key={shadeId} className="flex flex-wrap items-center gap-x-3">
