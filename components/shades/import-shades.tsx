@@ -94,7 +94,13 @@ export function ImportShades({
   const good = counts ? counts.new + counts.changed : 0
   return (
     <div>
-      <ImportSource source={source} onChoose={choose} onProblem={setProblem} />
+      <ImportSource
+        source={source}
+        holds="shades"
+        most={SHADE_LIMITS.importText}
+        onChoose={choose}
+        onProblem={setProblem}
+      />
       <LiveRegion>
         {reading
           ? 'Reading the file…'

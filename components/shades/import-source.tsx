@@ -8,7 +8,6 @@ import { buttonClass } from '@/components/ui/button-class'
 import { cn } from '@/components/ui/cn'
 import { Field } from '@/components/ui/field'
 import { Textarea } from '@/components/ui/textarea'
-import { SHADE_LIMITS } from '@/lib/shades/constants'
 
 import { decodeText } from './decode-text'
 
@@ -22,10 +21,19 @@ export interface CsvSource {
 /** Where the text comes from: a file chosen or dropped, or pasted cells. */
 export function ImportSource({
   source,
+  holds,
+  most,
+  loud = true,
   onChoose,
   onProblem,
 }: {
   source: CsvSource | undefined
+  /** "shades" */
+  holds: string
+  /** Characters of one file. */
+  most: number
+  /** Choosing a file is the one action of the page. */
+  loud?: boolean
   onChoose: (source: CsvSource) => void
   onProblem: (problem: string | undefined) => void
 }) {
@@ -37,8 +45,8 @@ export function ImportSource({
     if (!file) return
     onProblem(undefined)
     // Four bytes a character is the most that UTF-8 takes.
-    if (file.size > 4 * SHADE_LIMITS.importText) {
-      onProblem(`${file.name} is too large for a list of shades. Nothing was read.`)
+    if (file.size > 4 * most) {
+      onProblem(`${file.name} is too large for a list of ${holds}. Nothing was read.`)
       return
     }
     try {
@@ -83,7 +91,7 @@ export function ImportSource({
         />
         <label
           htmlFor={id}
-          className={`${buttonClass(source ? 'secondary' : 'primary')} cursor-pointer peer-focus-visible:outline-2 peer-focus-visible:outline-offset-2`}
+          className={`${buttonClass(source || !loud ? 'secondary' : 'primary')} cursor-pointer peer-focus-visible:outline-2 peer-focus-visible:outline-offset-2`}
         >
           <Upload aria-hidden="true" />
           {source ? 'Choose another file' : 'Choose a CSV file'}

@@ -98,7 +98,8 @@ export async function dealIdeas(
       ...left.map(({ ideaId, why }) => ({ ideaId, text: ideaById.get(ideaId)!.text, why })),
       ...unhinted.map(({ id, text }) => ({ ideaId: id, text, why: 'no colour' as const })),
     ],
-    bare: waiting.length - dealt.length,
+    ideas: ideas.length,
+    waiting: waiting.length,
     beyond: { ideas: Math.max(0, hinted.length - NAME_LIMITS.dealt), shades: shadesBeyond },
   }
 }

@@ -323,8 +323,9 @@ export interface DealView {
     text: string
     why: 'no colour' | 'no shade near' | 'another suits better'
   }[]
-  /** Shades waiting for a name that got none. */
-  bare: number
+  /** What there was to deal: ideas in the heap, and shades that wait for a name. */
+  ideas: number
+  waiting: number
   /** Ideas and shades beyond what is dealt at once. */
   beyond: { ideas: number; shades: number }
 }

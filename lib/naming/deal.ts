@@ -2,7 +2,7 @@ import { munkres } from 'munkres'
 
 import type { Lab } from '../color/types'
 import { isCalled, suggestedApart, SUGGESTS_ANOTHER } from './check-color'
-import { colorWordsIn } from './color-words'
+import { colorWordsIn, type ColorWord } from './color-words'
 import { heardApart } from './pronounce'
 import { NEAR } from './sound-distance'
 import { headWords, stemOf, wordsOf } from './words'
@@ -57,11 +57,16 @@ function areAlike(one: string, other: string): boolean {
 }
 
 /** How well a name suits a shade: by its colour words, less when a neighbour is called alike; 0–1. */
-export function fitToShade(
+export const fitToShade = (
   name: string,
+  shade: Pick<NamelessShade, 'lab' | 'neighbours'>,
+): number => fitOf(name, colorWordsIn(wordsOf(name)), shade)
+
+function fitOf(
+  name: string,
+  suggested: readonly ColorWord[],
   { lab, neighbours }: Pick<NamelessShade, 'lab' | 'neighbours'>,
 ): number {
-  const suggested = colorWordsIn(wordsOf(name))
   if (suggested.length === 0) return 0
   const best = Math.max(
     ...suggested.map(({ words, labs, weak }) => {
@@ -86,12 +91,13 @@ export const fitMatrix = (
   ideas: readonly LooseIdea[],
   shades: readonly NamelessShade[],
 ): number[][] =>
-  ideas.map(({ name }) =>
-    shades.map((shade) => {
-      const fit = fitToShade(name, shade)
+  ideas.map(({ name }) => {
+    const suggested = colorWordsIn(wordsOf(name))
+    return shades.map((shade) => {
+      const fit = fitOf(name, suggested, shade)
       return fit >= LEAST_FIT ? fit * (1 - NEED + NEED * (shade.need ?? 0)) : 0
-    }),
-  )
+    })
+  })
 
 /**
  * Which row goes to which column so that the sum of fits (0–1) is the largest; pairs of no fit are
@@ -108,21 +114,25 @@ export function assign(fits: readonly (readonly number[])[]): [row: number, colu
 
 type Pair = [row: number, column: number]
 
-function weakerOfTwoAlike(
+/** Of each two alike that stand side by side the one that fits less, as long as the other stays. */
+function weakerOfAlike(
   pairs: readonly Pair[],
   fits: readonly (readonly number[])[],
   ideas: readonly LooseIdea[],
   shades: readonly NamelessShade[],
-): Pair | null {
-  const fitOf = ([row, column]: Pair) => fits[row]![column]!
-  for (const one of pairs)
-    for (const other of pairs) {
-      const beside = shades[one[1]]!.beside?.includes(shades[other[1]]!.id)
-      if (!beside || one === other) continue
-      if (areAlike(ideas[one[0]]!.name, ideas[other[0]]!.name))
-        return fitOf(one) < fitOf(other) ? one : other
-    }
-  return null
+): Pair[] {
+  const fitsBest = [...pairs].sort(([r, c], [row, column]) => fits[row]![column]! - fits[r]![c]!)
+  const staying = new Map<string, string>()
+  return fitsBest.filter(([row, column]) => {
+    const { id, beside = [] } = shades[column]!
+    const { name } = ideas[row]!
+    const alike = beside.some((other) => {
+      const standing = staying.get(other)
+      return standing !== undefined && areAlike(name, standing)
+    })
+    if (!alike) staying.set(id, name)
+    return alike
+  })
 }
 
 /**
@@ -133,9 +143,13 @@ export function dealHeap(ideas: readonly LooseIdea[], shades: readonly NamelessS
   const fits = fitMatrix(ideas, shades)
   let pairs = assign(fits)
   // Two alike that would come to stand side by side: the one that fits less may not, and all is
-  // dealt anew. Each turn takes one pair out, so that it ends.
-  for (let worse; (worse = weakerOfTwoAlike(pairs, fits, ideas, shades)); pairs = assign(fits))
-    fits[worse[0]]![worse[1]] = 0
+  // dealt anew. Each turn takes pairs out for good, so that it ends.
+  for (
+    let worse;
+    (worse = weakerOfAlike(pairs, fits, ideas, shades)).length > 0;
+    pairs = assign(fits)
+  )
+    for (const [row, column] of worse) fits[row]![column] = 0
   const placed = new Map(pairs)
   const dealt = pairs.map(([row, column]): Dealt => {
     const { id: ideaId, name } = ideas[row]!
