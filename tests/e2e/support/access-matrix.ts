@@ -105,6 +105,9 @@ export const PAGES: Record<string, PageRule> = {
   '/[brand]/lines/[line]/combinations/[combination]': { who: STUDIO },
   '/[brand]/lines/[line]/names': { who: STUDIO },
   '/[brand]/lines/[line]/names/together': { who: STUDIO },
+  '/[brand]/lines/[line]/names/heap': { who: STUDIO },
+  '/[brand]/lines/[line]/names/heap/add': { who: STUDIO },
+  '/[brand]/lines/[line]/names/heap/deal': { who: STUDIO },
   '/[brand]/lines/[line]/names/shades/[shade]': { who: STUDIO },
   '/[brand]/lines/[line]/names/review': { who: STUDIO },
   '/[brand]/lines/[line]/names/ideas/[idea]': { who: STUDIO },
@@ -495,6 +498,12 @@ export const ACTIONS: Record<string, ActionRule> = {
   },
 
   // The submit that wrote it down, sent again.
+  previewIdeasAction: {
+    who: STUDIO,
+    input: ({ line }) => ({ lineSlug: line, text: 'Plum Job', kind: 'lines' }),
+  },
+  listNameableAction: { who: STUDIO, input: ({ line }) => ({ lineSlug: line }) },
+  dealIdeasAction: { who: STUDIO, input: ({ line }) => ({ lineSlug: line, without: [] }) },
   addIdeaAction: {
     who: STUDIO,
     input: ({ line, shade, ideaText, requestKey }) => ({

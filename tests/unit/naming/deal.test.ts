@@ -79,6 +79,22 @@ describe('dealing the heap', () => {
     expect(left).toHaveLength(1)
   })
 
+  test('of many alike no two stand side by side in a row', () => {
+    const row = Array.from({ length: 6 }, (_, at) => ({
+      ...PLUM,
+      id: String(at),
+      beside: [String(at - 1), String(at + 1)],
+    }))
+    const plums = ['Plum Job', 'Plum Tart', 'Plum Line', 'Plum Tree', 'Plum Duff', 'Plum Crazy']
+    const ideas = plums.map((name) => ({ id: name, name }))
+    const { dealt, left } = dealHeap(ideas, row)
+    const places = dealt.map(({ shadeId }) => Number(shadeId)).sort()
+    expect(places.length).toBeGreaterThanOrEqual(2)
+    for (const [at, place] of places.entries())
+      if (at > 0) expect(place - places[at - 1]!).toBeGreaterThan(1)
+    expect(dealt.length + left.length).toBe(ideas.length)
+  })
+
   test('nothing dealt from nothing', () => {
     expect(dealHeap([], [MOSS])).toEqual({ dealt: [], left: [], total: 0 })
     expect(dealHeap([{ id: '1', name: 'Plum' }], []).dealt).toEqual([])
