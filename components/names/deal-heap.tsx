@@ -180,7 +180,7 @@ export function DealHeap({ place, actions }: DealHeapProps) {
             </div>
             <ul
               role="list"
-              className="grid grid-cols-[repeat(auto-fill,minmax(8rem,1fr))] gap-x-4 gap-y-6 sm:grid-cols-[repeat(auto-fill,minmax(10rem,1fr))]"
+              className="grid grid-cols-[repeat(auto-fill,minmax(8rem,1fr))] gap-x-4 gap-y-6 sm:grid-cols-[repeat(auto-fill,minmax(8.25rem,1fr))]"
             >
               {shades.map((shade) => (
                 <DealtShade

@@ -55,8 +55,8 @@ export function HeapAdd({
 
   return (
     <form aria-label="Add a name" noValidate onSubmit={(event) => void send(event)}>
-      <div className="flex flex-wrap items-start gap-x-3 gap-y-3">
-        <Field label="Name" error={errors.text} className="min-w-0 grow basis-52">
+      <div className="grid items-start gap-3 sm:grid-cols-[minmax(0,1fr)_minmax(0,1fr)_auto]">
+        <Field label="Name" error={errors.text}>
           <Input
             ref={field}
             value={text}
@@ -65,12 +65,7 @@ export function HeapAdd({
             onChange={({ target }) => setText(target.value)}
           />
         </Field>
-        <Field
-          label="The thought behind it"
-          optional
-          error={errors.note}
-          className="min-w-0 grow basis-60"
-        >
+        <Field label="The thought behind it" optional error={errors.note}>
           <Input
             value={note}
             maxLength={NAME_LIMITS.note}

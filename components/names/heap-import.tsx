@@ -105,7 +105,7 @@ export function HeapImport({
         >
           <Textarea
             rows={6}
-            className="max-h-96"
+            className="max-h-96 min-h-40"
             value={pasted}
             onChange={({ target }) => setPasted(target.value)}
           />
@@ -119,7 +119,7 @@ export function HeapImport({
             void look('Pasted names', pasted, 'lines')
           }}
         >
-          Look names over
+          Preview names
         </Button>
       </section>
       <SheetSection title="Or a file, with notes and shades">

@@ -194,6 +194,7 @@ export function HeapList({ place, ideas, putBy, actions }: HeapListProps) {
                 idea.moves.includes('take-up') && (
                   <Button
                     size="small"
+                    className="max-sm:ml-7"
                     aria-label={`Take up ${idea.text} again`}
                     onClick={() => void move([idea], { to: 'takeUp', back: 'putBy' })}
                   >
@@ -203,6 +204,7 @@ export function HeapList({ place, ideas, putBy, actions }: HeapListProps) {
               ) : (
                 <Button
                   size="small"
+                  className="max-sm:ml-7"
                   aria-label={`Lay ${idea.text} on a shade`}
                   onClick={() => setLaying([idea])}
                 >

@@ -43,11 +43,11 @@ function PreviewRow({
   return (
     <tr>
       <td className="number text-ink-faint">{row}</td>
-      <td className="min-w-40">
-        <span className="font-title break-words">{text}</span>
-        {note ? <span className="block text-sm break-words text-ink-soft">{note}</span> : null}
+      <td className="max-w-80 min-w-40 wrap-anywhere">
+        <span className="font-title">{text}</span>
+        {note ? <span className="block text-sm text-ink-soft">{note}</span> : null}
       </td>
-      <td>
+      <td className="whitespace-nowrap">
         {outcome === 'bad' ? null : shade ? (
           <span className="flex items-center gap-2">
             <WoundSample hex={shade.hex} className="h-9 w-auto" />

@@ -78,7 +78,7 @@ export async function listHeap(
     counts: { loose: counts[0]!, putBy: counts[1]! },
     ideas: views.map((idea) => ({
       ...idea,
-      hints: colorWordsIn(wordsOf(idea.text)).map(({ words }) => words),
+      hints: [...new Set(colorWordsIn(wordsOf(idea.text)).map(({ words }) => words))],
       shade: idea.shadeId === null ? null : (byId.get(idea.shadeId) ?? null),
     })),
   }
