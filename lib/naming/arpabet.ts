@@ -126,6 +126,7 @@ const MERGED: Record<string, number> = {
   'T TH': 0.3, // tin and thin
   'D DH': 0.3, // den and then
   'F TH': 0.25, // fin and thin
+  'N NG': 0.25, // lichen and liking
   'IY Y': 0.3,
   'UW W': 0.3,
 }

@@ -54,7 +54,11 @@ const THINGS: Record<ThingKind, string> = {
     thrift d98aa8, campion+ d8658f, peony+ c8476f, wisteria a58fce, hop+ a3b457, nettle+ 4f7442,
     vine+ 5f7a3a, turf 5a6b36, heath 8a6b7d, 
     samphire 5f8a55, kelp 4f5128, laurel+ 3f6146, bay+ 5d6b45, catkin+ c8bb73, pollen e8b83a,
-    acorn+ a5783f, conker+ 6b2f1c `,
+    acorn+ a5783f, conker+ 6b2f1c,
+    cress 7fa85a, chard 4f6f3a, rocket 6f8f4a, fennel c9d49a, cumin b58a4a, bloom+ e39aa8, flower+ d98aa8,
+    flower+ b58fd0, flower+ efcf4a, posy+ d97f98, sprig+ 7a9a5a, thicket+ 55653f, copse+ 4f6f45, frond+ 5f8f45,
+    stem+ 7f9a50, root+ 7a5638, twig+ 7d6a54, seed+ b59a68, pod+ 86a84f, sprout+ 8fae5a, husk+ c8ab74, cork c79a68,
+    maple+ b5512a, teak a0703f, nut+ 8a5f3a, petal+ f0cdd2, rose+ e8a5ad, rose+ a83a4f`,
   fruit: `
     plum+ 5f2f57, sloe+ 2e3050, damson+ 3f2346, fig+ 56344d, date+ 6a3f26, prune+ 3d2230,
     raisin+ 4a2a33, currant+ 6a1f2f, berry+ 7a2348, cherry+ a01b32, grape+ 5d3a6e, peach+ f4b58f,
@@ -63,7 +67,8 @@ const THINGS: Record<ThingKind, string> = {
     elder 3a2738, bilberry+ 33345a, raspberry+ b32a55, strawberry+ d43c48, gooseberry+ b1bd62,
     cranberry+ a1213f, blackberry+ 33213c, blueberry+ 4a5684, hip+ c23b25, haw+ a32a2c,
     greengage+ b5ba58, pomegranate+ a82e3f, tangerine+ f28528, satsuma+ f08a24, damask+ b5475f,
-    walnut+ 6a4c35, almond+ dcb78a, pecan+ 8a5533, chestnut+ 7a4029`,
+    walnut+ 6a4c35, almond+ dcb78a, pecan+ 8a5533, chestnut+ 7a4029,
+    zest f0d84a, zest ee9a3a, rind+ d8c95a, berry+ 3f4a86, berry+ a5243f, peel ee9a3a`,
   food: `
     beet+ 7d1f42, kale 4f6b4a, leek+ b4c88a, pea+ 8fb04a, bean+ 6b8a43, turnip+ d9c3d3, carrot+ e8792b,
     chilli+ bf2a1f, pepper+ 3f3a36, nutmeg 9a6a44, clove+ 5a3a2c, ginger c88a4a,
@@ -74,7 +79,9 @@ const THINGS: Record<ThingKind, string> = {
     porridge d3c2a2, salt f2f1ec, sugar f5f1e6, jam 9a1f38, marmalade dd7a1f, 
     pie+ cf9a55, egg+ eadcc3, yolk+ f0ac26, parkin 6d4226, plaice a68a62, 
     trout a59a7c, sole+ a99478, mussel+ 2f3650, shrimp eaa78c, salmon f09a80, oyster+ cfc8ba,
-    prawn+ ea8f70, spice+ a4552b, sesame dcc394, lentil+ c8743a`,
+    prawn+ ea8f70, spice+ a4552b, sesame dcc394, lentil+ c8743a,
+    swede+ d9a878, squash+ e0a04a, gourd+ d98f3a, marrow+ 6f8a4f, clam+ cfc2ad, kipper+ a8743a, carp c98a4a,
+    cod c9bfa8, syrup a8642a, gravy 7a4f2f`,
   drink: `
     tea a5612a, ale+ b9772c, stout 2e201b, cider c98f34, mead d8a43c, rum 7a4424, wine 6b1f35,
     claret 741f35, port 4f1a2b, sherry b5743a, cordial 9c2a4a, mocha 6b4a39, chai b98a5f,
@@ -86,7 +93,9 @@ const THINGS: Record<ThingKind, string> = {
     pearl+ ece6da, coral+ ee7f66, amber dd922a, garnet+ 7a1f2d, topaz dca34a, emerald+ 1f8a5a,
     agate a9796a, onyx 26262b, beryl 7fc0a6, quartz e6dcd8, shale 5f6266, marl 9c947c, ochre+ c68a35,
     umber+ 69502f, sienna b0602f, sepia 6a4a33, brick+ a44a38, salt f2f1ec, 
-    shell+ ecd9c6, bone+ e8dfcb, cobble+ 8b8880, marble+ e3e0dc, slate+ 5a6f85, ink+ 1f3560`,
+    shell+ ecd9c6, bone+ e8dfcb, cobble+ 8b8880, marble+ e3e0dc, slate+ 5a6f85, ink+ 1f3560,
+    granite 8b8886, grit 8a8780, gravel 9a9488, boulder+ 86837c, silt a89a80, lava c8442a, tile+ b5623f,
+    pumice b5b0a8`,
   metal: `
     copper b5683c, brass bf9a45, bronze 9a6a35, gold d6a92f, silver c2c5c8, steel 7f8a94, tin a9adb0,
     iron 5a5c60, zinc 9aa1a6, pewter 8b8f92, verdigris 5aa092, nickel a8a79c, penny 9a5a35, steel 5f7f9a`,
@@ -104,17 +113,21 @@ const THINGS: Record<ThingKind, string> = {
   land: `
     moor+ 7f6078, fell+ 6f7a56, field+ 8a9f4f, meadow+ 7fa548, hill+ 7a9060, dale+ 86a35f, glen+ 5f7f4f,
     wood+ 6a5a3f, marsh 7d8455, fen+ 7a8258, bog+ 4f4433, hedge+ 55703f, orchard+ 7f9a4a,
-    beach dcc79c, cliff+ b3a893 `,
+    beach dcc79c, cliff+ b3a893,
+    vale+ 7f9f5f, grove+ 4f7a4a, ridge+ 7f7a6a, peak+ a5adb8, tor+ 7f7d78, loch+ 4f6f85, wold+ a8a76a,
+    isle+ 5f8f7a, reef+ 3f9f98, mire+ 5a5238, crag+ 77767a`,
   animal: `
     tern+ d9dcdd, gull+ d4d6d5, swan+ f5f3ec, heron+ 8f9aa5, wren+ 8f6a48, robin+ c8582f, finch c9a44a,
     rook+ 2b2c38, raven+ 1f2230, crow+ 25262c, owl+ a58a66, lark+ ae946b, thrush b09872, plover+ b79a5e,
     jay+ 5f86b8, kingfisher+ 1f7f9f, duck+ 5f7d6a, teal 1f7a80, drake+ 2f6a52, goose b5ada2,
     peacock+ 0f6f86, deer a5754a, hart+ 8f5f3a, doe+ b08256, roe a9764a, fawn+ c9a57b, bee+ d69a24, 
     newt+ 6f7a3f, toad+ 6b6a42, frog+ 6f9a3f, eel+ 4a4f45, whelk+ c9b79a, cockle+ d9c8ae, crab+ c8643f,
-    pike 7a7f52, roan 9a6458, dun b09a76 `,
+    pike 7a7f52, roan 9a6458, dun b09a76,
+    moth+ a89a88, kite+ a5562f, hen+ b5763f, hawk+ 8a6a4a, snail+ 9a8468`,
   fire: `
     ember+ c8452a, flame+ ec6a24, fire+ e2552a, smoke 8f9193, spark+ f2a53a, candle+ f3e3b5, glow f3b06a,
-    blaze+ e8602a`,
+    blaze+ e8602a,
+    hearth+ a8502f, kiln+ b0583a`,
   dye: `
     woad 43648f, madder b5382f, weld e0c83a, indigo 2f3a78, cochineal b02048, henna 9a4a2a, logwood 4a3560,
     annatto e5772a, walnut+ 6a4c35`,
@@ -130,7 +143,7 @@ const THINGS: Record<ThingKind, string> = {
     ultramarine* 2a3fa0, burgundy* 6a1a30, hazel* 8b6740, roan* 9a6458, rosy~ e3909a, bronze* 9a6a35,
     rusty~ a8502a, sandy~ d9c59a, golden~ dca83a, silvery~ c5c9cc, minty~ a8dcbb, peachy~ f3b893, smoky~ 8f9193,
     stormy~ 5a6672, sunny~ f2c94a, ruddy~ b5563f, ashen~ b3b3ac, mossy~ 6f7f36, milky~ f3efe4, inky~ 24304f,
-    heathery~ 9a6f97, misty~ c5cccb,
+    heathery~ 9a6f97, misty~ c5cccb, pearly~ ece6da, earthy~ 6a4f38, gilt* d0a640,
     blue* 6f9fd0, blue* 24407a, green* 7fae6a, green* 2a5a3a, grey* b5b8ba, grey* 5f6264, brown* 9a7350,
     brown* 4a3020, pink* d96a94, red* 9a1f2a, purple* 9a74b5, purple* 45245a, yellow* f3e08a, teal* 4a9aa0`,
   house: `

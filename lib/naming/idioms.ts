@@ -113,7 +113,6 @@ const LIST = `
 3 fair:j weather:n friend:n
 3 friends:ns in high:j places:ns
 1 the best:j of friends:ns
-1 a man's best:j friend:n
 3 wait:v and see:v
 3 see:v you later:r
 3 see:v eye:n to eye:n
@@ -139,10 +138,8 @@ const LIST = `
 2 hold:v your peace:n
 1 peace:n on earth:n
 2 make:v peace:n
-1 piece:n of the action:n
 3 a piece:n of cake:n
 1 piece:n by piece:n
-2 all:x in one:x piece:n
 3 a new:j lease:n of life:n
 3 practise:v what:x you preach:v
 1 preach:v to the choir:n
@@ -176,7 +173,7 @@ const LIST = `
 2 sure:j enough:r
 1 safe:j and sure:j
 3 better:j safe:j than sorry:j
-3 for better:j or worse:j
+3 for better:n or worse:n
 3 the sooner:r the better:r
 3 the more:x the merrier:r
 3 less:x is more:x
@@ -203,7 +200,6 @@ const LIST = `
 2 go:v a long:j way:n
 1 the parting:n of the ways:ns
 2 the only:j way:n is up:x
-2 way:n to go:v
 3 all:x the way:n
 3 no:x way:n
 2 out of the way:n
@@ -216,7 +212,7 @@ const LIST = `
 1 change:v your ways:ns
 3 divide:v and conquer:v
 3 love:n conquers:vz all:x
-3 through thick:j and thin:j
+3 through thick:n and thin:n
 2 thin:j on the ground:n
 3 skating:vg on thin:j ice:n
 3 into thin:j air:n
@@ -317,7 +313,6 @@ const LIST = `
 3 small:j talk:n
 3 walk:v the walk:n
 2 talk:v the talk:n
-3 the talk:n of the town:n
 1 talk:v of the devil:n
 2 walk:v before you can run:v
 3 a walk:n in the park:n
@@ -403,7 +398,6 @@ const LIST = `
 3 take:v it or leave:v it
 3 leave:v well:r alone:r
 3 love:v it or leave:v it
-2 make:v like a tree:n and leave:v
 2 leave:v it at that:x
 3 left:j right:j and centre:n
 2 right:j and left:j
@@ -492,7 +486,6 @@ const LIST = `
 3 draw:v a blank:n
 2 point:n blank:j
 2 to be frank:j
-1 rank:n and file:n
 1 pull:v rank:n
 2 on the dot:n
 2 not:x a lot:n
@@ -550,7 +543,6 @@ const LIST = `
 1 play:v second:j fiddle:n
 3 a play:n on words:ns
 2 power:n play:n
-1 play:v to the gallery:n
 3 make:v or break:v
 3 shall we dance:v
 3 song:n and dance:n
@@ -562,7 +554,6 @@ const LIST = `
 1 a very:r important:j person:n
 3 bury:v the hatchet:n
 1 bury:v your head:n in the sand:n
-2 thank:v you:x very:r much:x indeed:r
 1 be that:x as it may
 3 so be:v it
 3 be:v my guest:n
@@ -584,7 +575,6 @@ const LIST = `
 3 let:v your hair:n down:r
 3 bad:j hair:n day:n
 3 split:v hairs:ns
-1 keep your hair:n on
 2 rest:v in peace:n
 2 rest:v assured:vn
 3 no:x rest:n for the wicked:n
@@ -617,12 +607,10 @@ const LIST = `
 1 move:v the goalposts:ns
 3 labour:n of love:n
 2 love:n makes:vz the world:n go:v round:r
-2 all's fair:j in love:n
 3 fit:v like a glove:n
 3 hand:n in glove:n
 3 hand:n in hand:n
 3 lend:v a hand:n
-2 give:v a helping:j hand:n
 3 a helping:j hand:n
 2 out of hand:n
 3 second:j hand:n
@@ -653,8 +641,6 @@ const LIST = `
 3 living:vg the dream:n
 2 beyond your wildest:j dreams:ns
 1 a pipe:n dream:n
-1 dream:v on
-2 work:v like a dream:n
 3 let:v off steam:n
 3 full:j steam:n ahead:r
 1 run:v out of steam:n
@@ -740,7 +726,6 @@ const LIST = `
 3 hit the nail:n on the head:n
 3 bed:n of roses:ns
 2 you've made:vn your bed:n
-2 early:r to bed:n early:r to rise:v
 3 get:v out of bed:n on the wrong:j side:n
 2 time:n for bed:n
 3 bed:n and breakfast:n
@@ -803,7 +788,6 @@ const LIST = `
 2 call:n of duty:n
 3 a close:j call:n
 2 on call:n
-2 a wake:v up call:n
 3 a tall:j story:n
 1 a tall:j order:n
 2 stand:v tall:r
@@ -829,7 +813,6 @@ const LIST = `
 2 between a rock:n and a hard:j place:n
 2 out of place:n
 2 in the right:j place:n at the right:j time:n
-3 a home:n from home:n
 3 nothing:n to write:v home:x about
 3 make:v yourself at home:n
 2 home:n truths:ns
@@ -851,7 +834,6 @@ const LIST = `
 2 hold:v all:x the aces:ns
 2 in case:n of emergency:n
 3 worst:j case:n scenario:n
-2 a worst:j case:n scenario:n
 2 the worst:n of it
 2 if the worst:n comes:vz to the worst:n
 1 case:n closed:vn
@@ -892,7 +874,6 @@ const LIST = `
 2 sit:v by the fire:n
 2 get on like a house:n on fire:n
 3 no:x smoke:n without fire:n
-3 go:v up in smoke:n
 2 holy:j smoke:n
 3 old:j flame:n
 2 fan:v the flames:ns
@@ -979,7 +960,6 @@ const LIST = `
 3 stroke:n of luck:n
 2 thank:v your lucky:j star:n
 2 star:n struck:vn
-3 written:vn in the stars:ns
 3 shooting:j star:n
 2 born:vn under:x a lucky:j star:n
 2 a rising:j star:n
@@ -989,7 +969,6 @@ const LIST = `
 2 far:r from it
 2 go:v too far:r
 2 wide:r of the mark:n
-2 on your marks:ns
 2 leave:v your mark:n
 2 hit the mark:n
 2 a question:n mark:n
@@ -1034,7 +1013,6 @@ const LIST = `
 2 right:r under:x your nose:n
 2 might:n is right:n
 2 high:j and mighty:j
-2 as right:j as rain:n
 3 out like a light:n
 3 light:n at the end:n of the tunnel:n
 2 bring:v to light:n
@@ -1051,7 +1029,6 @@ const LIST = `
 3 a knight:n in shining:j armour:n
 2 a white:j knight:n
 1 a bite:n to eat:v
-3 sight:n for sore:j eyes:ns
 2 set:v your sights:ns
 2 a sight:n to behold:v
 2 catch:v sight:n
@@ -1077,7 +1054,6 @@ const LIST = `
 2 quick:j as a wink:n
 2 a nod:n and a wink:n
 3 forty winks:ns
-2 sleep:v a wink:n
 2 on the brink:n
 3 in the blink:n of an eye:n
 2 on the blink:n
@@ -1098,7 +1074,6 @@ const LIST = `
 2 and then some
 3 from dawn:n to dusk:n
 2 from here:r to eternity:n
-3 from rags:ns to riches:ns
 2 from scratch:n
 2 up to scratch:n
 3 start:v from scratch:n
@@ -1113,7 +1088,6 @@ const LIST = `
 3 watch:v this:x space:n
 3 watch:v your step:n
 2 watch:v the time:n
-2 on my watch:n
 2 night:n watch:n
 2 watch:v it
 2 keep watch:n
@@ -1149,7 +1123,6 @@ const LIST = `
 2 it would seem:v so
 2 not:x what:x it seems:vz
 2 pick:v and choose:v
-3 pick:n of the bunch:n
 2 pick:v of the crop:n
 2 take:v your pick:n
 3 cream:n of the crop:n
@@ -1170,7 +1143,6 @@ const LIST = `
 3 by the book:n
 2 one:x for the books:ns
 3 look:v before you leap:v
-2 look:v on the bright:j side:n of life:n
 2 look:v sharp:r
 2 look:v and learn:v
 3 don't judge:v a book:n by its cover:n
@@ -1202,7 +1174,6 @@ const LIST = `
 2 role:n model:n
 3 help:v yourself
 2 a cry:n for help:n
-2 a little help:n from your friends:ns
 2 cry:v wolf:n
 2 well:r I never:r
 2 wishing:j well:n
@@ -1284,7 +1255,6 @@ const LIST = `
 3 now:r and again:r
 2 again:r and again:r
 2 never:r again:r
-2 try:v try:v and try:v again:r
 2 try:v before you buy:v
 2 don't try:v this:x at home:n
 3 by and by
@@ -1345,7 +1315,6 @@ const LIST = `
 3 on the lam:n
 3 jam:n packed:vn
 2 jam:n tomorrow:r
-2 money:n for jam:n
 2 in a jam:n
 2 traffic:n jam:n
 2 a shadow:n of its former:j self:n
@@ -1358,7 +1327,6 @@ const LIST = `
 2 goodwill:n to all:x
 3 over:x the hill:n
 2 head:v for the hills:ns
-2 as old:j as the hills:ns
 2 just:r for the thrill:n
 2 take:v a chill:j pill:n
 2 still:r going:vg strong:r
@@ -1405,7 +1373,6 @@ const LIST = `
 3 off the cuff:n
 2 in the buff:n
 2 rough:j and ready:j
-2 all:x the rest:n is gravy:n
 2 the gravy:n train:n
 2 hot:j to the touch:n
 2 lose:v touch:n
@@ -1437,7 +1404,6 @@ const LIST = `
 2 carbon:j copy:n
 2 hard:j copy:n
 3 sooner:r or later:r
-2 see:v you:x after:x a while:n
 3 happily ever:r after:r
 2 after:x dark:n
 2 morning:n after:x the night:n before:r
@@ -1477,7 +1443,6 @@ const LIST = `
 2 clean:v the slate:n
 2 early:j doors:ns
 3 hit the road:n
-2 all:x roads:ns lead:v to home:n
 3 middle:n of the road:n
 3 one:x for the road:n
 2 the end:n of the road:n
@@ -1581,7 +1546,6 @@ const LIST = `
 3 different:j strokes:ns for different:j folks:ns
 2 inside:j joke:n
 2 crack:v a joke:n
-3 that's all:x folks:ns
 3 nothing:n ventured:vn nothing:n gained:vn
 2 better:j the devil you:x know:v
 3 take:v a liking:n to
@@ -1630,7 +1594,6 @@ const LIST = `
 3 walking:vg on air:n
 3 castles:ns in the air:n
 3 king:n of the castle:n
-2 a hassle:n free:j life:n
 2 up in the air:n
 2 devil may care
 2 bear:v with me
@@ -1664,7 +1627,6 @@ const LIST = `
 2 sworn:vn to secrecy:n
 2 torn:vn between two:x
 2 turn:v up trumps:ns
-2 turn:v up for the books:ns
 3 like two:x peas:ns in a pod:n
 3 pleased:j as punch:n
 2 pass:v the time:n
@@ -1680,7 +1642,6 @@ const LIST = `
 2 perfect:j pitch:n
 3 strike:v it rich:j
 2 the idle:j rich:n
-2 a stitch:n in time:n
 3 in stitches:ns
 2 waste:n of time:n
 2 a taste:n of your own:j medicine:n
@@ -1756,7 +1717,6 @@ const LIST = `
 2 coast:v along
 3 the coast:n is clear:j
 2 from coast:n to coast:n
-2 coast:n to coast:n
 2 perfect:j host:n
 2 the ghost:n of a chance:n
 3 happy:j as a lark:n
@@ -1782,7 +1742,6 @@ const LIST = `
 2 fly:v by night:n
 2 fly:v the nest:n
 2 fly:v high:r
-2 time:n to fly:v
 2 fly:v on the wall:n
 2 off the wall:n
 2 the writing:n on the wall:n
@@ -1821,7 +1780,6 @@ const LIST = `
 2 in the shade:n
 2 made:vn in heaven:n
 2 throw:v some shade:n
-2 put in the shade:n
 2 lady:n in waiting:vg
 2 sitting:vg on the fence:n
 2 common:j or garden:n
@@ -1830,7 +1788,6 @@ const LIST = `
 2 next:j to nothing:n
 2 sweet:j nothing:n
 2 something for nothing:n
-2 something is better:j than nothing:n
 2 thanks:ns for nothing:n
 2 early:j retirement:n
 2 a new:j broom:n sweeps:vz clean:r
@@ -1858,7 +1815,6 @@ const LIST = `
 1 there's more:x where that:x came:vd from
 1 mustn't grumble:v
 1 not:x all:x it's cracked:vn up to be
-1 in at the ground:n floor:n
 1 neck:n and neck:n
 1 the bare:j necessities:ns
 1 keep your chin:n up
@@ -1866,6 +1822,1389 @@ const LIST = `
 1 a whale:n of a time:n
 1 as pure:j as the driven:j snow:n
 3 on cloud:n nine:x
+3 flavour:n of the month:n
+3 a month:n of sundays
+3 a figment:n of your imagination:n
+3 at your beck and:x call:v
+2 wake:v up and:x smell:v the coffee:n
+2 coffee:n break:v
+2 coffee:n morning:n
+3 stiff:j upper:j lip:n
+3 my lips:ns are:x sealed:vn
+3 loose:j lips:ns sink:v ships:ns
+3 a slip:n of the tongue:n
+2 tongue:n in cheek:n
+3 turn:v the other:x cheek:n
+2 cheek:n to cheek:n
+2 cheek:n by:x jowl
+3 hide:v and:x seek:v
+2 sneak:j peek:n
+2 spring:n a leak:n
+3 leap:n of faith:n
+2 by:x leaps:ns and:x bounds:ns
+3 in leaps:ns and:x bounds:ns
+2 so:x to speak:v
+2 speak:v for:x yourself
+2 speak:v your mind:n
+3 speak:v of the devil
+3 actions:ns speak:v louder:r than:x words:ns
+3 think:v before you:x speak:v
+2 think:v on your feet:ns
+2 think:v big:j
+3 pretty:j please:v
+2 please:v yourself
+2 as:x you:x please:v
+3 pleased:j to meet:v you:x
+3 please:v and:x thank:v you:x
+3 sick:j as:x a parrot:n
+3 eager:j beaver:n
+3 busy:j as:x a beaver:n
+3 nit picking:n
+2 nit wit:n
+2 hit and:x run:v
+2 hit the big:j time:n
+2 tooth:n and:x nail:n
+2 hard:j as:x nails:ns
+2 nail:n biting:vg
+2 fair:j shares:ns
+3 share:v and:x share:v alike:r
+2 lion's:x share:v
+2 the lion's:x share:v
+2 into the lion's:x den:n
+3 what:x you:x see:v is what:x you:x get:v
+3 puppy:n love:n
+3 easy:r street:n
+3 white:j as:x a sheet:n
+3 on the right:j side:n
+2 on the safe:j side:n
+2 side:n by:x side:n
+2 get:v up on the wrong:j side:n of bed:n
+2 let:v the side:n down:r
+3 pride:n comes:vz before a fall:n
+2 down:r at heel:n
+2 free:j fall:n
+2 watch:v out
+2 watch:v the birdie
+3 mind:v your step:n
+3 waste:v of space:n
+2 up to speed:n
+3 full:j of hot:j air:n
+3 come:v to a head:n
+2 go:v full:j tilt:n
+2 at full:j tilt:n
+3 up to the hilt:n
+3 guilt:n trip:n
+2 guilty:j as:x charged:vn
+2 guilty:j pleasure:n
+3 curiosity:n killed:vd the cat:n
+3 kill:v two:x birds:ns with one:x stone:n
+2 written:vn in stone:n
+3 it's written:vn in the stars:ns
+3 poker:n face:n
+2 straight:j faced:vn
+2 face:v the facts:ns
+2 face:v value:n
+2 a pretty:j face:n
+3 a sight:n for:x sore:j eyes:ns
+2 raise:v your glass:n
+2 raise:v an eyebrow:n
+2 raise:v the alarm:n
+2 hair:n raising:vg
+2 fund raiser:n
+3 everything's coming:vg up roses:ns
+3 stop:v and:x smell:v the flowers:ns
+2 happy:j hour:n
+2 the darkest:j hour:n
+3 at the eleventh hour:n
+2 our finest:j hour:n
+2 after:x hours:ns
+2 zero hour:n
+2 small:j hours:ns
+3 man:n of the hour:n
+2 half:n an hour:n
+2 flower:n power:n
+2 power:n behind the throne:n
+2 knowledge:n is power:n
+3 power:n to the people:ns
+2 people:ns pleaser:n
+2 all:x things:ns to all:x people:ns
+3 on purpose:n
+2 fit:j for:x purpose:n
+2 cross:v purposes:ns
+2 at cross:v purposes:ns
+3 get:v your act:v together:r
+2 get:v it together:r
+3 put two:x and:x two:x together:r
+2 put our heads:ns together:r
+2 stronger:j together:r
+2 better:j together:r
+3 get:v well:r soon:r
+3 not:x out of the woods:ns yet:r
+3 the best:j is yet:r to come:v
+3 all:x bets:ns are:x off
+3 safe:j bet:n
+2 you:x bet:v
+3 you:x bet:v your life:n
+2 a losing:vg streak:n
+2 a winning:vg streak:n
+3 talk:v a blue:j streak:n
+3 it's all:x greek:n to me
+2 the naked:j truth:n
+2 the home:n stretch:n
+3 charity:n begins:vz at home:n
+2 bring:v it home:n
+3 in sickness:n and:x in health:n
+3 a clean:j bill:n of health:n
+2 in good:j health:n
+2 health:n and:x safety:n
+2 health:n is wealth:n
+2 rude:j health:n
+2 can't:x help:v it
+2 help:v is at hand:n
+3 be:v quick:j about it
+3 beyond the call:n of duty:n
+2 duty:n calls:vz
+2 wake:v up call:n
+2 call:v the tune:n
+2 call:v the shots:ns
+2 call:v a spade:n a spade:n
+2 call:v time:n
+2 curtain:n call:n
+2 roll:v call:n
+3 too close:r to call:v
+2 nature:n calls:vz
+3 cold:j shoulder:n
+3 give:v the cold:n shoulder:n
+3 a shoulder:n to cry:v on
+2 shoulder:n to shoulder:n
+3 a chip:n on your shoulder:n
+3 stone:n cold:j sober:j
+2 in cold:j blood:n
+2 cold:j blooded
+2 cold:j hard:j cash:n
+2 cash:n cow:n
+2 strapped:vn for:x cash:n
+2 cash:n flow:n
+3 flesh:n and:x blood:n
+3 blood:n is thicker:j than:x water:n
+3 bad:j blood:n
+2 blood:n sweat:n and:x tears:ns
+3 from:x bad:j to worse:j
+2 clear:j as:x mud:n
+3 not:x as:x bad:j as:x it looks
+2 mad:j as:x a hatter:n
+3 hopping:r mad:j
+2 stark:r raving:r mad:j
+3 raving:r mad:j
+3 rave:v reviews:ns
+2 safe:j haven:n
+2 break:v even:r
+2 even:r stevens
+2 get:v even:r
+2 even:r keel:n
+3 on an even:r keel:n
+3 odds:ns and:x ends:ns
+3 against all:x odds:ns
+2 at odds:ns
+2 a nod:n is as:x good:j as:x a wink:n
+3 take:v it for:x granted:vn
+2 a promise:n is a promise:n
+2 promises:ns promises:ns
+2 a broken:j promise:n
+2 travel:v light:n
+3 travel:v broadens the mind:n
+2 time:n travel:n
+3 nothing:n but:x the truth:n
+2 truth:n will:n out
+2 half:n truths:ns
+2 truth:n or:x dare:v
+2 one:x way:n ticket:n
+2 golden:j ticket:n
+2 that's the ticket:n
+2 meal:n ticket:n
+2 sticky:j wicket:n
+3 hope:n for:x the best:j
+2 hope:n and:x pray:v
+2 live:v in hope:n
+2 hope:n against hope:n
+2 no:x spring:n chicken:n
+2 spring:n to mind:v
+2 mood:n swings:ns
+2 in the mood:n
+3 in a good:j mood:n
+2 love:n is blind:j
+3 love:n me love:v my dog:n
+2 no:x love:n lost:vn
+2 tough:j love:n
+3 tough:j luck:n
+3 when:x the going:vg gets:vz tough:j
+2 hang:v tough:j
+3 too big:j for:x your boots:ns
+2 to boot:n
+3 a tough:j nut:n to crack:v
+2 in a nutshell:n
+2 nuts:ns and:x bolts:ns
+2 wait:v your turn:n
+2 wait:v for:x it
+2 wait:v a minute:n
+2 the waiting:vg game:n
+2 ladies:ns first:j
+2 lucky:j lady:n
+2 first:j lady:n
+2 first:j impressions:ns
+2 first:j class:n
+2 first:j aid:n
+2 first:j and:x last:j
+2 first:j base:n
+3 first:j past:j the post:n
+2 first:j hand:n
+2 feet:ns first:j
+2 touch:n base:n
+2 off base:n
+2 home:n base:n
+2 famous:j last:j words:ns
+2 last:j resort:n
+2 the last:j resort:n
+2 at long:j last:j
+2 the last:j laugh:n
+2 last:j minute:n
+2 last:j ditch:n
+2 last:j orders:ns
+2 built:vn to last:j
+2 on your last:j legs
+3 blast:n from:x the past:j
+2 past:j your bedtime:n
+2 past:j its best:n
+2 fast:r and:x loose:j
+2 in the fast:r lane:n
+2 fast:r forward:r
+3 down:r memory:n lane:n
+2 cast:vn pearls:ns before swine:n
+2 pearls:ns before swine:n
+2 mother:n of pearl:n
+3 pick:v up the pieces:ns
+2 bits:ns and:x pieces:ns
+2 rest:v in pieces:ns
+2 say:v your piece:n
+3 two's company:n three's a crowd:n
+2 part:v company:n
+3 part:v and:x parcel:n
+2 play:v your part:n
+3 for:x the most:x part:n
+2 look:v the part:n
+2 drift:n apart:r
+2 let:v it rip:v
+3 best:j bib:n and:x tucker:n
+2 get:v a grip:n
+2 get:v to grips:ns
+2 ego:n trip:n
+2 day:n trip:n
+3 it takes:vz two:x to tango
+3 it takes:vz all:x sorts:ns
+3 out of sorts:ns
+2 warts:ns and:x all:x
+2 keep the ball:n rolling:vg
+3 a barrel:n of laughs:vz
+2 scrape:v the barrel:n
+2 over:x a barrel:n
+3 scrape:v the bottom:j of the barrel:n
+2 at your peril:n
+3 the moral:n high:j ground:n
+3 moral:n compass:n
+2 moral:n support:n
+2 moral:n fibre:n
+2 moral:n victory:n
+2 drown your sorrows:ns
+3 more:x in sorrow:n than:x in anger:n
+2 oceans apart:r
+2 with open:j arms:ns
+2 an open:j book:n
+3 in my good:j books:ns
+3 in the good:j books:ns
+3 throw:v the book:n at
+3 a turn:n up for:x the books:ns
+2 oldest:j trick:n in the book:n
+2 read:v the room:n
+3 read:v all:x about it
+3 read:v the small:j print:n
+2 small:j print:n
+2 fine:j print:n
+3 read:v it and:x weep:v
+2 well:r versed
+2 well:r met:vn
+3 hail:v fellow:n well:r met:vn
+2 jolly:j good:j fellow:n
+3 jolly:j good:j
+3 by:x golly:n
+2 off your trolley:n
+2 say:v hello:n
+3 wave:v goodbye:n
+2 long:j goodbye:n
+2 a fond:j farewell:n
+2 fond:j memories:ns
+2 a fresh:j start:n
+3 false:j start:n
+3 head:n start:n
+3 start:v as:x you:x mean:v to go:v on
+2 for:x starters:ns
+2 a flying:vg start:n
+3 a friend:n in need:n is a friend:n indeed:r
+3 a shoulder:n to lean:j on
+2 a good:j deed:n
+3 no:x good:n deed:n goes:vz unpunished
+3 lend:v me your ears:ns
+3 the end:n justifies:vz the means:n
+2 by:x no:x means:n
+2 means:ns business:n
+3 say:v what:x you:x mean:v
+3 mean:v what:x you:x say:v
+2 a happy:j ending:n
+2 in the end:n
+3 the end:n of the world:n
+3 no:x end:n in sight:n
+2 round:r the bend:n
+3 the thin:j end:n of the wedge:n
+2 dead:j end:n
+3 week:n in week:n out
+2 sweet:j talk:n
+2 sweet:j spot:n
+2 home:n from:x home:n
+2 know:v your place:n
+3 a place:n in history:n
+3 rock:n around the clock:n
+2 clockwork
+2 beat:v the odds:ns
+2 off beat:v
+2 heart:n beat:v
+3 never:r miss:n a beat:n
+2 skip:v a beat:n
+3 if:x you:x can't:x beat:v them join:v them
+3 quick:j march:v
+2 at large:r
+2 living:vg large:r
+3 left:j in the lurch:n
+3 knocked:vn off your perch:n
+3 much:x to my liking:n
+3 out of the ordinary
+2 fancy:v dress:n
+2 a close:j shave:n
+3 great:j escape:n
+3 chilled:vn to the marrow:n
+3 chilled:vn to the bone:n
+3 close:r to the bone:n
+3 work:v your fingers:ns to the bone:n
+3 make:v no:x bones:ns about it
+2 bare:v bones:ns
+2 the bare:j essentials:ns
+3 a safe:j pair:n of hands:ns
+2 the upper:j hand:n
+2 hand:n over:x fist:n
+3 get:v out of hand:n
+2 change:v hands:ns
+3 hands:ns down:r
+3 wash:v your hands:ns of it
+2 dab:j hand:n
+2 hand:n me downs:ns
+3 calm:j down:r
+3 slow:j down:r
+2 breakdown:n
+2 up for:x grabs:ns
+2 grab:v a bite:n
+3 pull:v up a chair:n
+3 hang:v in there
+3 ten:x out of ten:x
+2 count:v to ten:x
+2 in the frame:n
+3 hall:n of fame:n
+2 fame:n and:x fortune:n
+3 fortune:n favours the brave:j
+3 put on a brave:j face:n
+2 hall:n mark:n
+2 mark:n my words:ns
+2 off the mark:n
+3 quick:j off the mark:n
+3 on your marks:ns get:v set:v go:v
+2 make:v your mark:n
+2 question:n mark:n
+3 sharp:r as:x a tack
+3 sharp:r as:x a razor:n
+3 give:v it a rest:n
+3 give:v it a try:v
+3 give:v it your best:n shot:n
+3 give:v it a go:n
+3 give:v it your all:x
+3 put to the test:n
+2 the acid:j test:v
+2 at your best:n
+2 second:j best:j
+2 sunday best:j
+3 the best:j things:ns in life:n are:x free:j
+3 the best:j laid:vn plans:ns
+2 best:j of luck:n
+3 best:j of the bunch:n
+2 best:j before
+2 feather:n your nest:n
+2 the empty:j nest:n
+2 make:v waves:ns
+2 brain:n wave:n
+2 brain:n storm:n
+2 brain:n power:n
+2 brain:n teaser:n
+2 pick:v your brains:ns
+2 rack:v your brains:ns
+2 brains:ns and:x brawn:n
+3 willy:x nilly
+3 pillow:n talk:n
+2 silly:j season:n
+2 silly:j billy:n
+2 a chilly:j reception:n
+2 upsy daisy:n
+3 fresh:j as:x a daisy:n
+2 pushing up daisies:ns
+2 crazy:j paving
+2 partly:r cloudy
+2 back:r to reality:n
+2 back:r to school:n
+3 back:r and:x forth:r
+3 welcome:n back:r
+2 bounce:v back:r
+2 no:x looking back:r
+2 bring:v back:r memories:ns
+2 back:r seat:n driver:n
+3 take:v a back:n seat:n
+3 in the driving:vg seat:n
+2 set:v the scene:n
+3 get:v a handle:n on it
+2 handle:v with care
+2 fly:v the flag:n
+2 the burning:vg question:n
+2 time:n and:x motion:n
+3 time:n and:x time:n again:r
+3 time:n flies:vz when:x you're having:vg fun:n
+3 time:n waits:vz for:x no man:n
+2 time:n to spare:v
+3 no:x time:n to lose:v
+3 no:x time:n like the present:n
+2 about time:n
+2 half:n time:n
+2 extra:j time:n
+2 time:n out
+2 bide your time:n
+2 crunch:n time:n
+2 bed:n time:n
+2 story:n time:n
+2 lunch:n time:n
+2 time:n off
+2 time:n to go:v
+2 time:n to kill:v
+3 time:n is of the essence:n
+2 crime:n of passion:n
+2 crime:n doesn't pay:v
+3 partners:ns in crime:n
+2 in your prime:n
+2 prime:n of life:n
+2 prime:n time:n
+2 nursery rhyme:n
+2 ten:x to one:x
+2 serves:vz you:x right:j
+2 all:x right:j
+2 right:j now:r
+3 sit:v tight:j
+2 hold:v tight:j
+2 good:j night:n
+2 sleepless:j night:n
+3 a bolt:n from:x the blue:n
+2 boys:ns in blue:n
+2 the blue:n yonder
+2 black:j and:x blue:j
+2 feeling:vg blue:j
+2 point:n of view:n
+2 a skeleton:n crew:n
+2 a motley:j crew:n
+2 motley:j crew:n
+2 a new:j leaf:n
+2 a new:j dawn:n
+3 new:j kid:n on the block:n
+2 new:j year's resolution:n
+2 what's new:j
+3 you:x are:x what:x you:x eat:v
+2 cut:v it fine:j
+3 with a fine:j tooth:n comb:n
+3 fine:j tune:n
+2 change:v your tune:n
+3 to the tune:n of
+2 fine:j dining:n
+2 in fine:j form:n
+2 a fine:j line:n
+3 walk:v a fine:j line:n
+3 a fine:j kettle:n of fish:n
+3 the pot:n calling:vg the kettle:n black:j
+2 on your mettle:n
+2 show:v your mettle:n
+2 test:v your mettle:n
+2 heavy:j metal:n
+3 a tower:n of strength:n
+2 as:x you:x were:x
+2 easily swayed:vn
+2 not:x rocket:n science:n
+3 look:v like a million:x dollars:ns
+3 feel:v like a million:x dollars:ns
+3 not:x in a million:x years:ns
+3 the grand:j scheme:n of things:ns
+2 the grand:j total:n
+3 take:v one:x for:x the team:n
+2 team:n spirit:n
+2 team:n player:n
+2 team:n work:n
+2 dream:n team:n
+3 teamwork:n makes:vz the dream:n work:n
+2 pipe:n dream:n
+2 like a dream:n
+2 extreme:j measures:ns
+2 a scream:n
+3 service:n with a smile:n
+2 crack:n a smile:n
+2 all:x smiles:ns
+2 worth your while:n
+2 in style:n
+2 out of style:n
+3 if:x it ain't:x broke:vd don't fix:v it
+2 go:v for:x broke:vd
+2 practical:j joke:n
+2 it's no:x joke:n
+3 no:x joke:n
+2 beyond a joke:n
+3 smoke:n and:x mirrors:ns
+2 up in smoke:n
+2 smoke:n signals:ns
+2 spoke:vd too soon:r
+2 many:x a slip:n
+2 many:x hands:ns
+2 many:x a time:n
+3 more:x than:x meets the eye:n
+2 say:v no:x more:x
+2 whatever:x next:j
+2 what:x a relief:n
+2 sigh:n of relief:n
+2 beyond belief:n
+3 good:j grief:n
+3 to each:x his own:n
+3 to each:x their own:n
+3 each:x to their own:n
+2 figure:n of speech:n
+2 freedom:n of speech:n
+2 free:j speech:n
+2 peer:n pressure:n
+3 fight:v fire:n with fire:n
+2 fire:n away:r
+2 hang:v fire:n
+2 line:n of fire:n
+2 fire:n drill:n
+3 dire:j straits:ns
+2 dire:j consequences:ns
+2 in dire:j need:n
+2 buyer:n beware:v
+3 ready:j willing:j and:x able:j
+3 cards:ns on the table:n
+2 under:x the table:n
+2 table:n manners:ns
+2 on the cards:ns
+3 a house:n of cards:ns
+2 hard:j work:n
+2 hard:j luck:n
+2 die:v hard:r
+2 hard:j of hearing:n
+2 on guard:n
+2 above board:n
+2 across:x the board:n
+2 bored:vn to tears:ns
+2 bored:vn stiff:j
+2 scared:vn stiff:j
+2 what:x if:x
+3 no:x ifs:ns or:x buts:ns
+2 a big:j if:x
+2 ifs:ns and:x buts:ns
+2 sad:j but:x true:j
+2 a bad:j apple:n
+2 bad:j luck:n
+2 stroke:n of genius:n
+3 the luck:n of the draw:n
+2 lucky:j break:v
+3 give:v me a break:n
+3 break:v a leg:n
+3 shake:v a leg:n
+2 pull:v my leg:n
+2 beg:v your pardon:n
+2 marks:ns the spot:n
+2 on the spot:n
+2 a soft:j spot:n
+2 soft:j as:x butter:n
+2 all:x the better:r
+2 know:v better:j
+2 no:x better:j place:n
+3 against my better:j judgement:n
+2 the bitter:j truth:n
+3 a bitter:j pill:n to swallow:v
+2 judge:v and:x jury:n
+2 hold:v a grudge:n
+2 won't budge:v
+3 gone:vn but:x not:x forgotten:vn
+3 jump:v the gun:n
+3 smoking:vg gun:n
+2 even:r though
+3 from:x pillar:n to post:n
+3 in the same:j boat:n
+3 all:x in the same:j boat:n
+2 compare:v notes:ns
+3 make:v a note:n of it
+2 get:v your goat:n
+3 generous:j to a fault:n
+3 grind:v to a halt:n
+3 through no:x fault:n of your own:j
+2 work:v and:x play:v
+2 in a pickle:n
+2 knuckle:v down:r
+3 rap:n on the knuckles:ns
+2 take:v the rap:n
+2 rapt:j attention:n
+2 that's a wrap:n
+2 under:x wraps:ns
+3 keep it under:x wraps:ns
+2 your heart's desire:n
+3 blind:j as:x a bat:n
+3 right:j off the bat:n
+3 not:x bat:n an eyelid:n
+2 so:x what:x
+2 so:x long:j
+3 so:x much:x for:x that:x
+2 every:x so:x often
+3 you:x reap:v what:x you:x sow
+3 a man:n of the world:n
+3 birthday:n suit:n
+3 in hot:j pursuit:n
+3 put your foot:n in it
+2 in front:n of
+2 in the groove:n
+3 what's good:j for:x the goose:n is good:j for:x the gander:n
+3 every:x man:n for:x himself
+2 every:x which way:n
+2 every:x last:j one:x
+2 power:n nap:n
+3 the whole:j nine:x yards:ns
+3 dressed:vn to the nines
+2 dressed:vn to kill:v
+2 dressed:vn to impress:v
+2 second:j guess:n
+2 second:j helping:j
+3 your guess:n is as:x good:j as:x mine:n
+2 lucky:j guess:n
+2 no:x stress:n
+3 a recipe:n for:x disaster:n
+2 wear:v thin:j
+3 vanish:v into thin:j air:n
+3 you:x win:v some:x you:x lose:v some:x
+2 win:v hands:ns down:r
+2 in sync:n
+2 the missing:j link:n
+3 pen:n and:x ink:n
+3 not:x sleep:v a wink:n
+3 drink:v like a fish:n
+3 you:x know:v what:x i mean:v
+3 for:x all:x i know:v
+2 on the ropes:ns
+3 at the end:n of your rope:n
+2 jump:v rope:n
+2 learn:v the ropes:ns
+2 who knows:vz
+2 goodness:n knows:vz
+3 as:x the saying:n goes:vz
+2 go:v for:x gold:n
+2 let:v go:v
+2 let:v it go:v
+3 the show:n must:x go:v on
+2 blow:v the whistle:n
+2 whistle:n stop:v tour:n
+2 a guided:j tour:n
+3 tour:n de force:n
+2 join:v forces:ns
+3 would:x you:x believe:v it
+2 horse:n play:v
+2 dark:n horse:n
+2 crash:n course:n
+3 gift:n of the gab:n
+2 short:j shrift:n
+2 get:v my drift:n
+2 night:n shift:n
+2 save:v your breath:n
+3 neither:x here:r nor:x there
+3 been:vn there done:vn that:x
+2 a has been:vn
+3 has been:vn
+3 how:x have you:x been:vn
+3 for:x the time:n being:vg
+3 human:j being:vg
+2 human:j nature:n
+2 human:j error:n
+2 follow:v the leader:n
+3 leader:n of the pack:n
+2 mind:v reader:n
+2 nosey parker
+2 good:j sport:n
+2 spoil:v sport:n
+2 a good:j sport:n
+2 safe:j and:x sound:j
+2 safe:j as:x houses:ns
+2 paper:n trail:n
+3 put pen:n to paper:n
+2 on paper:n
+2 paper:n tiger:n
+2 speed:n demon:n
+3 damsel:n in distress:n
+3 tall:j dark:n and:x handsome:j
+2 plumb:v the depths:ns
+3 all:x fingers:ns and:x thumbs:ns
+2 kingdom:n come:v
+3 due:j diligence:n
+2 due:j process:n
+3 do:v the right:j thing:n
+2 do:v it yourself
+2 can't:x do:v
+3 do:v as:x the romans do:v
+2 when:x in rome
+3 when:x the cat's away:r
+2 muscle:n memory:n
+2 muscle:n in
+3 soul:n mate:n
+3 soul:n searching:vg
+2 save:v the date:n
+3 salt:n and:x pepper:n
+2 below the salt:n
+2 early:j to bed:n
+2 early:j bird:n
+2 can of worms:ns
+2 stepping:j stones:ns
+3 all:x eyes:ns on you:x
+3 feast:n your eyes:ns on
+3 eyes:ns on the prize:n
+3 eyes:ns in the back:n of your head:n
+3 stars:ns in your eyes:ns
+3 a far:r cry:n from:x
+2 near:j and:x far:r
+2 fish:n and:x chips:ns
+3 the chips:ns are:x down:r
+2 stumbling:vg block:n
+2 a mixed:j bag:n
+2 humble:j brag:n
+2 in the bag:n
+2 bag:n of tricks:ns
+2 hat:n trick:n
+2 does:vz the trick:n
+3 raining:vg cats:ns and:x dogs:ns
+3 it's a dog's:x life:n
+3 dog:n eat:v dog:n
+3 hot:j dog:n
+3 top:j dog:n
+3 a frog:n in your throat:n
+2 all:x at sea:n
+3 the key:n to success:n
+3 the key:n to my heart:n
+2 low:j key:n
+2 off key:n
+2 laughing:j stock:n
+3 take:v stock:n
+2 culture:n shock:n
+3 high:j as:x a kite:n
+3 go:v fly:v a kite:n
+2 alive:j and:x kicking:vg
+2 nine:x to five:x
+2 bee:n line:n
+2 make:v a beeline
+3 the birds:ns and:x the bees:ns
+2 back:r number:n
+2 under:x control:n
+2 under:x cover:n
+3 cross:v that:x bridge:n when:x we come:v to it
+2 build:v bridges:ns
+2 bridge:n the gap:n
+2 one:x hit wonder:n
+2 duck:n and:x cover:n
+2 duck:n dive:n
+2 cut:v and:x dried:vn
+3 dry:j as:x dust:n
+2 leave:v for:x dust:n
+2 steer:v clear:j
+2 crystal:n clear:j
+2 ins:ns and:x outs
+2 without a doubt:n
+3 beyond a shadow:n of a doubt:n
+3 benefit:n of the doubt:n
+2 chase:n your tail:n
+3 sale:n of the century:n
+2 lift:v the veil:n
+3 draw:v a veil:n over:x it
+3 never:r a dull:j moment:n
+3 dull:j as:x ditch:n water:n
+3 rolling:vg in the aisles:ns
+3 walk:v down:r the aisle:n
+3 you:x scratch:n my back:n
+3 you:x must:x be:v joking:vg
+3 whose turn:v is it
+3 throw:v in the towel:n
+2 last:j straw:n
+2 clutching:vg at straws:ns
+2 a straw:n poll:n
+2 favourite:j son:n
+3 the devil you:x know:v
+2 figure:n of fun:n
+3 poke:v fun:n
+2 run:v rings:ns round:r
+2 easy:r money:n
+3 funny:j bone:n
+2 funny:j business:n
+2 milk:n and:x honey:n
+2 hot:j and:x bothered:vn
+2 warm:j welcome:n
+2 warm:j hearted:j
+2 get:v cold:j feet:ns
+3 swept:vn off your feet:ns
+2 two:x left:j feet:ns
+3 land:n on your feet:ns
+2 drag:v your heels:ns
+2 take:v a bow:n
+3 the man:n in the moon:n
+2 break:v new:j ground:n
+2 common:j ground:n
+2 gain:n ground:n
+2 high:j ground:n
+3 from:x the ground:n up
+2 safe:j passage:n
+3 take:v the bull:n by:x the horns:ns
+3 to the manor:n born:vn
+3 battle:n lines:ns are:x drawn:vn
+2 best:j case:n scenario:n
+2 place:n your bets:ns
+2 room:n service:n
+3 no:x room:n at the inn:n
+2 standing:vg room:n only:j
+2 changing:vg room:n
+3 if:x the cap:n fits:vz
+3 if:x the shoe:n fits:vz
+2 full:j house:n
+2 at full:j stretch:n
+3 good:j will:n to all:x
+3 a thrill:n a minute:n
+2 cheap:j thrills:ns
+3 the thrill:n of the chase:n
+2 fit:j the bill:n
+3 fill:v in the blanks:ns
+3 fake:v it till you:x make:v it
+3 till death:n us:x do:v part:n
+2 meet:v me halfway:r
+3 till we meet:v again:r
+3 nice:j try:v
+2 nice:j and:x easy:j
+2 nice:j one:x
+3 sugar:n and:x spice:n and:x all:x things:ns nice:j
+2 don't think:v twice
+3 lightning:n never:r strikes twice
+2 at any:x price:n
+2 pay:v the price:n
+3 a piece:n of advice:n
+2 no:x dice:n
+2 roll:v the dice:n
+2 pushing your luck:n
+2 make:v yourself useful:j
+2 a poor:j excuse:n
+2 call:v a truce:n
+2 on the loose:j
+3 let:v loose:j
+2 needless:j to say:v
+2 good:j for:x nothing:n
+2 glutton:n for:x punishment:n
+3 the patter:n of tiny:j feet:ns
+3 cute:j as:x a button:n
+3 bright:j as:x a button:n
+2 button:v up
+3 left:j to your own:j devices:ns
+2 centre:n of attention:n
+2 below the belt:n
+3 belt:n and:x braces:ns
+2 tighten:v your belt:n
+2 tread:v lightly:r
+2 tread:v softly
+2 use:n your head:n
+2 keep your head:n
+2 common:j thread:n
+3 pick:v up the threads:ns
+2 close:r knit:vn
+2 tight:j knit:vn
+3 stick:v to your knitting:n
+3 strong:j as:x an ox:n
+2 page:n turner:n
+2 golden:j age:n
+2 coming:vg of age:n
+2 gilded:j cage:n
+2 no:x quarter:n given:vn
+2 at close:r quarters:ns
+3 give:v someone a wide:r berth:n
+3 let:v it all:x hang:v out
+3 throw:v caution:n to the wind
+2 wind of change:n
+3 get:v wind of it
+2 in the wind
+3 sail:n close:r to the wind
+2 full:j sail:n
+3 take:v the wind out of your sails:ns
+3 run:v a tight:j ship:n
+3 steady:j as:x she goes:vz
+2 perfect:j storm:n
+3 come:v in from:x the cold:n
+3 leave:v out in the cold:n
+2 halfway:r house:n
+3 do:v things:ns by:x halves:ns
+2 half:n measures:ns
+2 half:n baked:vn
+2 not:x half:n bad:j
+3 the courage:n of your convictions
+3 pluck:v up the courage:n
+3 summon:v up the courage:n
+3 in the same:j vein:n
+2 in vain:n
+2 take:v the strain
+2 rain:n check:n
+2 rein:n it in
+2 plain:j as:x day:n
+2 plain:j and:x simple:j
+2 plain:j speaking:vg
+2 plain:j sight:n
+3 hidden:j in plain:j sight:n
+2 a level:j head:n
+2 heavy:j hearted:j
+2 bit:n by:x bit:n
+3 a little bit:n of luck:n
+2 eat:v your greens:ns
+2 beans:ns on toast:n
+2 spill:v the beans:ns
+3 two:x peas:ns in a pod:n
+3 carrot:n and:x stick:v
+2 pecking:vg order:n
+2 law:n and:x order:n
+2 tall:j order:n
+2 a pretty:j picture:n
+2 the bigger:j picture:n
+2 silver:j spoon:n
+2 silver:j tongued
+3 fool's:x gold:n
+3 fool's:x paradise:n
+2 nobody's fool:n
+2 play:v the fool:n
+2 old:j school:n
+2 square:j one:x
+3 now:r or:x never:r
+3 never:r say:v never:r
+2 dying:vg to know:v
+2 dying:vg breed:n
+2 a dying:vg breed:n
+2 natural:r born:vn leader:n
+3 the tide:n is turning:vg
+2 high:j tide:n
+2 hold:v the phone:n
+3 in a league:n of your own:j
+3 into your own:j hands:ns
+3 finders:ns keepers:ns
+3 finders:ns keepers:ns losers weepers:ns
+3 a stick:n in the mud:n
+3 in the thick:j of it
+2 thick:j skinned:vn
+3 get:v under:x your skin:n
+3 no:x skin:n off my nose:n
+2 hide:v nor:x hair:n
+2 no:x strings:ns attached:vn
+2 purse:n strings:ns
+2 strings:ns attached:vn
+2 pins:ns and:x needles:ns
+3 on pins:ns and:x needles:ns
+3 at a rate:n of knots:ns
+3 thanks:ns but:x no:x thanks:ns
+2 many:x thanks:ns
+2 thank:v heavens:ns
+2 woe:n is me
+3 mind:v how:x you:x go:v
+2 let:v fly:v
+2 sweet:j as:x pie:n
+2 worm:n has turned:vn
+2 the worm:n turns:ns
+2 cotton:v on
+2 spinning:vg plates:ns
+2 silver:j lining:n
+3 black:j sheep:n of the family:n
+3 black:j sheep:n
+3 two:x shakes:ns of a lamb's tail:n
+3 gentle:j as:x a lamb:n
+2 gentle:j giant:n
+2 a gentle:j reminder:n
+3 meek:j as:x a lamb:n
+3 warp:n speed:n
+3 warped:j sense:n of humour:n
+3 the seven:x year:n itch:n
+2 fit:j to burst:v
+3 bursting:vg at the seams:ns
+3 come:v apart:r at the seams:ns
+3 nothing:n is as:x it seems:vz
+3 or:x so:x it seems:vz
+3 hot:j under:x the collar:n
+2 a sea:n change:n
+2 keep the change:n
+2 chop:v and:x change:v
+2 bumper:n crop:n
+2 bumper:n to bumper:n
+2 queue:n jumper
+3 glad:j rags:ns
+3 an embarrassment of riches:ns
+2 filthy:j rich:j
+3 hot:j on the heels:ns
+3 heart:n in your mouth:n
+3 melt:v in the mouth:n
+2 spoken:vn word:n
+3 a word:n in your ear:n
+3 a man:n of his word:n
+3 my word:n is my bond:n
+2 mark:n of respect:n
+3 road:n rage:n
+3 a load:n of rubbish:n
+2 on the line:n
+2 hold:v the line:n
+2 line:n your pockets:ns
+2 out of pocket:n
+3 dig:v deep:r in your pocket:n
+3 burn:v a hole:n in your pocket:n
+3 ahead:r of the curve:n
+2 ahead:r of time:n
+2 under:x the hammer:n
+2 hammer:n and:x tongs:ns
+2 hold:v your tongue:n
+3 the cat's got your tongue:n
+2 mother:n tongue:n
+2 spick and:x span:n
+3 frying:vg pan:n
+3 stick:v to the plan:n
+2 best:j man:n
+2 right:j hand:n man:n
+2 handy:j man:n
+2 come:v in handy:j
+3 like taking:vg candy:n from:x a baby
+2 eye:n candy:n
+2 jolly:j hockey:n sticks:ns
+3 plenty:x more:x where that:x came:vd from:x
+2 plenty:x of fish:n
+2 twenty twenty vision:n
+2 awkward:j silence:n
+2 silence:n is golden:j
+2 golden:j opportunity:n
+2 missed:vd opportunity:n
+2 opportunity:n knocks:ns
+2 missed:vd call:n
+2 miss:v the point:n
+2 beside:x the point:n
+2 moot:j point:n
+3 give:v up the ghost:n
+2 pale:n and:x interesting
+2 pale:n by:x comparison
+2 heart:n of oak:n
+3 touch:n wood:n
+2 dead:j wood:n
+3 can't:x see:v the wood:n for:x the trees:ns
+3 out on a limb:n
+3 grow:v like a weed:n
+2 rose:n tinted:j spectacles
+3 every:x rose:n has its thorn:n
+2 fresh:j as:x paint:v
+3 like watching:vg paint:v dry:j
+3 damn:v with faint:j praise:n
+3 patience:n of a saint:n
+3 patience:n is a virtue
+2 sing:v your praises:ns
+2 a passing:vg phase:n
+2 just:r a phase:n
+3 go:v through a phase:n
+3 it never ceases:vz to amaze:v
+2 happy:j days:ns
+3 salad:n days:ns
+2 dog:n days:ns
+2 pants:ns on fire:n
+3 set:v the world:n on fire:n
+2 soft:j soap:n
+2 off the peg:n
+2 loosely:r speaking:vg
+2 generally:r speaking:vg
+2 strictly speaking:vg
+3 a piece:n of the action:n
+3 a slice:n of the action:n
+2 out of fashion:n
+2 in fashion:n
+2 a fashion:n statement
+2 class:n act:v
+2 class:n dismissed
+2 working class:n
+2 world:n class:n
+2 glass:n ceiling:n
+2 lady:n luck:n
+2 at ease:n
+3 at ease:n with yourself
+2 shoot:v the breeze:n
+3 bright:j as:x a new:j pin:n
+3 neat:j as:x a new:j pin:n
+3 bees' knees:ns
+2 a weak:j link:n
+2 bean:n counter:n
+3 barely:r scratch:n the surface:n
+2 barely:r there
+2 scratch:n the surface:n
+3 tell:v it like it is
+3 tell:v me about it
+3 like it or:x not:x
+3 like it or:x lump:v it
+2 like clockwork
+2 drop:v like flies:vz
+3 selling:vg like hot:j cakes:ns
+2 hot:j cross:v buns:ns
+3 let:v them eat:v cake:n
+2 cakes:ns and:x ale:n
+2 for:x pete's sake:n
+2 take:v a break:n
+2 take:v the lead:v
+2 take:v the cake:n
+2 take:v a hint:n
+2 take:v the plunge:n
+2 take:v a peek:n
+2 in the limelight:n
+2 hold:v the fort:n
+2 court:n of appeal:n
+2 hold:v court:n
+2 a feather:n bed:n
+3 sell:v down:r the river:n
+2 tide:n over:x
+2 spinning:vg top:n
+2 pop:v the question:n
+3 cut:v to the quick:j
+2 kick:v the bucket:n
+3 bucket:n list:n
+2 shopping:n spree:n
+3 scot free:j
+2 duty:n free:j
+3 red:j herring:n
+3 red:j carpet:n
+2 in the red:j
+2 red:j letter:n day:n
+2 well:r bred:vn
+2 ripe:j old:j age:n
+3 ripe:j for:x the picking:n
+3 the pick:n of the bunch:n
+3 cherry:n picking:n
+3 the whole:j kit:n and:x caboodle
+3 end:n of story:n
+2 a likely:j story:n
+2 sob story:n
+2 same:j old:j story:n
+2 tall:j story:n
+2 bedtime:n story:n
+2 history:n repeats itself
+2 ancient:j history:n
+2 unsolved:j mystery:n
+2 mystery:n tour:n
+2 land:n of nod:n
+2 land:n of plenty:x
+3 lie:v of the land:n
+3 in the land:n of the living:vg
+2 odd:j one:x out
+3 old:j as:x the hills:ns
+3 all:x downhill from:x here:r
+2 uphill:j struggle:n
+3 up hill:n and:x down:r dale:n
+3 back:r in the saddle:n
+3 a cross:v to bear:v
+2 cross:v your fingers:ns
+3 cut:v your losses:ns
+2 at a loss:n
+3 at a loss:n for:x words:ns
+3 show:v them who's boss:n
+2 like a boss:n
+2 at all:x costs:ns
+3 lost:vn cause:n
+2 lost:vn in thought:n
+2 perish:v the thought:n
+2 second:j thoughts:ns
+3 penny:n wise:j pound:n foolish:j
+3 the penny:n has dropped:vn
+2 spend:v a penny:n
+2 three:x square:j meals:ns
+2 peal:n of bells:ns
+3 a peal:n of laughter:n
+2 in real:j life:n
+2 in real:j time:n
+2 for:x real:j
+2 a raw deal:n
+2 no:x big:j deal:n
+3 how:x do:v you:x feel:v
+2 no:x hard:j feelings:ns
+2 gut:n feeling:n
+2 bow:n and:x arrow:n
+2 tomorrow never:r comes:vz
+3 a dog:n in the manger:n
+3 mind:v like a trap:n
+3 poor:j as:x church:n mice:ns
+2 better:j than:x nothing:n
+3 quicker than:x the eye:n
+3 greater:j than:x the sum:n of its parts:ns
+3 a few:x home:n truths:ns
+2 count:v your chickens:ns
+3 sour:j grapes:ns
+3 you:x heard:vd it here:r first:j
+2 scrimp:v and:x save:v
+2 ways:ns and:x means:ns
+2 tried:vn and:x tested:vn
+2 trials:ns and:x tribulations:ns
+3 try:v and:x try:v again:r
+3 the bigger:j they are:x the harder:r they fall:n
+3 tip:v of the tongue:n
+3 on the tip:n of my tongue:n
+3 weight:n off your mind:n
+2 pull:v your weight:n
+2 worth the wait:v
+2 state:n of mind:n
+2 fine:j art:n
+2 queen:n of hearts:ns
+3 a matter:n of taste:n
+2 matter:n of opinion:n
+2 see:v you:x around
+2 all:x year:n round:r
+2 round:r and:x round:r
+3 hop:n skip:v and:x jump:v
+2 strike:v a chord:n
+2 pump iron:n
+3 rule:n with a rod:n of iron:n
+3 iron:n out the creases:ns
+3 pitch:r perfect:j
+2 make:v a pitch:n
+2 last:j ditch:n effort:n
+2 sleeping:j beauty:n
+3 once more:x with feeling:n
+3 a picture:n is worth a thousand:x words:ns
+3 for:x what:x it's worth
+2 hold:v on tight:j
+2 on hold:v
+3 burn:v the candle:n at both:x ends:ns
+3 keep the home:n fires:ns burning:vg
+3 can't:x hold:v a candle:n to it
+3 not:x worth the candle:n
+3 rub:v salt:n in the wound:n
+3 time:n and:x a half:n
+3 hey:x presto
+3 that's the way:n the cookie:n crumbles:vz
+3 one:x way:n or:x another
+2 milky way:n
+2 give:v way:n
+2 break:v away:r
+2 home:n and:x away:r
+2 hide:v away:r
+2 eyes:ns wide:r open:j
+2 wild:j oats:ns
+3 do:v me a favour:n
+3 king:n of the hill:n
+2 beauty:n queen:n
+2 drama:n queen:n
+2 clean:j break:v
+2 keep it clean:j
+2 lean:j and:x hungry:j
+2 in between
+3 talk:v of the town:n
+2 wear:v many:x hats:ns
+3 you:x can say:v that:x again:r
+2 that's life:n
+2 such:x is life:n
+3 not:x for:x all:x the tea:n in china
+2 tea:n and:x sympathy
+2 to a tee:n
+3 suits:vz you:x to a tee:n
+2 tee:n off
+2 what:x ails:vz you:x
+2 guardian:n angel:n
+3 get:v the hang:v of it
+3 take:v your hat:n off
+2 spitting image:n
+2 clip:v your wings:ns
+2 the black:j hole:n
+3 a hole:n in one:x
+3 hole:n in the wall:n
+2 wall:n to wall:n
+3 back:r to the wall:n
+2 walls:ns have ears:ns
+2 bend:n over:x backwards
+2 best:j friends:ns forever:r
+2 man's best:j friend:n
+3 no:x man:n is an island:n
+2 off the record:n
+2 for:x the record:n
+3 set:v the record:n straight:j
+2 break:v the record:n
+2 hard:j and:x fast:r
+3 long:j shot:n
+2 big:r shot:n
+2 parting:n shot:n
+3 prick up your ears:ns
+3 early:j in the morning:n
+2 good:j morning:n
+2 morning:n glory:n
+2 good:j evening:n
+2 good:j afternoon:n
+2 goodness:n gracious:j
+2 fingers:ns crossed:vn
+2 star:n crossed:vn lovers
+3 a lover:n not:x a fighter:n
+2 a staple:j diet:n
+3 word:n on the street:n
+2 streets:ns ahead:r
+3 right:j up your street:n
+2 two:x way:n street:n
+2 tunnel:n vision:n
+2 leading:vg light:n
+2 out of sight:n
+2 at first:j sight:n
+2 bright:j lights:ns
+2 red:j light:n
+3 give:v the green:j light:n
+2 guiding:j light:n
+2 night:n light:n
+2 in the spotlight:n
+3 knight:n in shining:j armour:n
+3 the dead:j of night:n
+3 things:ns that:x go:n bump:v in the night:n
+2 opening:vg night:n
+2 late:j night:n
+2 in sight:n
+3 a force:n to be reckoned with
+3 fork:n in the road:n
+2 knife:n and:x fork:n
+2 walk:v the talk:n
+2 walks:ns of life:n
+2 walk:v on water:n
+2 three:x cheers:ns
+2 cheer:v up
+2 sheer:j genius:n
+2 blissful ignorance:n
+2 what's the rush:n
+2 fresh:j start:n
+3 fly:v in the ointment:n
+2 rare:j breed:n
+2 sick:j and:x tired:j
+2 scout's honour:n
+2 on my honour:n
+3 shout:v it from:x the rooftops
+2 hit the roof:n
+2 bar:n none:x
+2 behind bars:ns
+2 how:x are:x you:x
+2 bah:x humbug:n
 `
 
 function readIdiom(line: string): Idiom {

@@ -1,24 +1,34 @@
 import type { Role } from './idioms'
 
 /**
- * The trade's own words, which suit yarn of any colour. `word:roles`; a fibre after `@` means that
- * the word is offered only where the yarn holds it.
+ * The trade's own words, which suit yarn of any colour: those of yarn, dye and stitch, which a knitter
+ * knows at once for the pun. `word:roles`; a fibre after `@` means that the word is offered only where
+ * the yarn holds it.
  */
-const TRADE = `
-  yarn:n yarns:ns skein:n skeins:ns hank:n hanks:ns ply:n,v plies:vz plied:vd,vn
-  wool:n@wool wools:ns@wool woolly:j@wool woollen:j@wool worsted:n,j@wool fleece:n@wool   silk:n@silk silky:j@silk silks:ns@silk linen:n@linen flax:n@linen cotton:n@cotton
-  ewe:n ewes:ns lamb:n lambs:ns ram:n rams:ns flock:n flocks:ns baa:n,v sheep:n,ns sheepless:j sheepish:j
-  shear:n,v,j shears:ns,vz shorn:vn   dye:n,v dyes:ns,vz dyed:vd,vn,j,n dyeing:vg dyer:n dyers:ns vat:n vats:ns hue:n hues:ns tint:n,v tints:ns,vz
-  tinted:vd,vn,j tone:n,v tones:ns shade:n,v shades:ns,vz tinge:n,v batch:n   mordant:n
-  knit:n,v,vn knits:vz,ns knitted:vd,vn,j knitting:vg purl:n,v purls:ns,vz purled:vd,vn stitch:n,v
-  stitches:ns,vz stitched:vd,vn seam:n,v seams:ns,vz hem:n,v hems:ns,vz sew:v sews:vz sewn:vn darn:n,v
-  darned:vn,j thread:n,v threads:ns strand:n,v strands:ns twine:n,v twines:vz,ns spin:n,v spins:vz spun:vd,vn
-  spool:n weave:n,v weaves:vz woven:vn,j wove:vd weaver:n loom:n,v looms:ns,vz warp:n,v weft:n felt:n tweed:n
-  tweeds:ns swatch:n,v swatches:ns gauge:n gauges:ns cable:n cables:ns rib:n,v ribs:ns garter:n lace:n laces:ns
-  cowl:n cowls:ns shawl:n shawls:ns sock:n socks:ns mitten:n mittens:ns scarf:n sleeve:n sleeves:ns button:n
-  buttons:ns buttoned:vn pattern:n patterns:ns knot:n,v knots:ns needle:n,v needles:ns tassel:n fringe:n bobbin:n
-  bobbins:ns spindle:n reel:n,v bobble:n bobbles:ns pleat:n,v pleats:ns   cuff:n cast:n,v,vn warm:j snug:j cosy:j
-  patch:n,v mend:v cardigan:n `
+const OF_YARN = `
+  yarn:n yarns:ns skein:n skeins:ns hank:n hanks:ns ply:n,v plies:vz,ns plied:vd,vn plying:vg
+  wool:n@wool wools:ns@wool woolly:j@wool woollen:j@wool worsted:n,j@wool silk:n@silk silky:j@silk
+  silks:ns@silk linen:n@linen flax:n@linen cotton:n@cotton
+  fleece:n fleeces:ns ewe:n ewes:ns lamb:n lambs:ns ram:n rams:ns flock:n,v flocks:ns baa:n,v sheep:n,ns
+  sheepish:j tuft:n,j tufts:ns bleat:n,v bleating:vg bale:n bales:ns
+  shear:n,v,j shears:ns,vz shorn:vn dye:n,v dyes:ns,vz dyed:vd,vn,j dyeing:vg,n dyer:n dyers:ns vat:n vats:ns
+  hue:n hues:ns tint:n,v tints:ns,vz tinted:vd,vn,j tone:n,v tones:ns shade:n,v shades:ns,vz shady:j
+  pigment:n pigments:ns palette:n paint:n,v paints:ns,vz
+  knit:n,v,vd,vn knits:vz,ns knitted:vd,vn,j knitting:vg,n knitter:n knitters:ns purl:n,v purls:ns,vz
+  purled:vd,vn stitch:n,v stitches:ns,vz stitched:vd,vn knot:n,v knots:ns,vz thread:n,v threads:ns,vz
+  twine:n,v twines:vz,ns spin:n,v spins:vz spun:vd,vn spinning:vg spinner:n spinners:ns weave:n,v weaves:vz
+  woven:vn,j wove:vd weaving:vg weaver:n weavers:ns loom:n,v looms:ns,vz weft:n needle:n,v needles:ns
+  seam:n,v seams:ns,vz sew:v sews:vz sewn:vn`
+
+/** The words of what is made of it, and of how: they suit as well, and are thought of less soon. */
+const OF_MAKING = `
+  hem:n,v hems:ns,vz darn:n,v darned:vn,j darning:vg strand:n,v strands:ns spool:n spools:ns warp:n,v
+  felt:n,vd,vn tweed:n twill:n plaid:n quilt:n,v quilts:ns swatch:n,v swatches:ns gauge:n gauges:ns
+  cable:n cables:ns rib:n,v ribs:ns garter:n lace:n laces:ns laced:vn cowl:n cowls:ns shawl:n shawls:ns
+  sock:n socks:ns mitten:n mittens:ns mitt:n sleeve:n sleeves:ns button:n,v buttons:ns pattern:n patterns:ns
+  glove:n gloves:ns vest:n vests:ns snood:n sweater:n sweaters:ns wrap:n,v wraps:ns,vz wrapped:vn tassel:n
+  tassels:ns fringe:n bobbin:n bobbins:ns spindle:n reel:n,v reels:ns bobble:n,v pleat:n,v pleats:ns cuff:n
+  cuffs:ns cast:v,vn patch:n,v patches:ns mend:v mends:vz crimp:n,v`
 
 /** A trade word that may be set into an idiom. */
 export interface TradeWord {
@@ -26,16 +36,40 @@ export interface TradeWord {
   roles: readonly Role[]
   /** offered only where the yarn holds this fibre; null in any yarn */
   fiber: string | null
+  /** 0–1: how soon one thinks of yarn, dye or knitting */
+  near: number
 }
 
+const readTrade = (text: string, near: number): TradeWord[] =>
+  text
+    .trim()
+    .split(/\s+/)
+    .map((entry) => {
+      const [spelled, fiber] = entry.split('@')
+      const [word, roles] = spelled!.split(':')
+      return { word: word!, roles: roles!.split(',') as Role[], fiber: fiber ?? null, near }
+    })
+
 /** The trade's words for wordplay. */
-export const TRADE_PLAY: readonly TradeWord[] = TRADE.trim()
-  .split(/\s+/)
-  .map((entry) => {
-    const [spelled, fiber] = entry.split('@')
-    const [word, roles] = spelled!.split(':')
-    return { word: word!, roles: roles!.split(',') as Role[], fiber: fiber ?? null }
-  })
+export const TRADE_PLAY: readonly TradeWord[] = [
+  ...readTrade(OF_YARN, 1),
+  ...readTrade(OF_MAKING, 0.75),
+]
+
+/** Things with a colour that are also done: a brook, and to brook. */
+export const ALSO_VERBS: ReadonlySet<string> = new Set(
+  (
+    'glow brook sand mist cloud rain dawn bark leaf wave lark crow hawk duck ink jet hail ice storm ' +
+    'thunder snow bloom flower root steel tan blush rust stem peel crust toast pepper salt butter cream ' +
+    'jam spice sugar cork blaze smoke spark flame fire peak field rush bronze brown grey hedge seed ' +
+    'sprout surf moor'
+  ).split(' '),
+)
+
+/** Things with a colour whose name means something else at once, or nothing that one would wear. */
+export const NOT_PLAYED: ReadonlySet<string> = new Set(
+  'haw hip bog thrush date stout drab goose rum peel rocket'.split(' '),
+)
 
 /**
  * Words that are said in two ways and mean two things: a reader cannot hear a pun that hangs on one

@@ -46,7 +46,7 @@ function dropCost(sounds: Sound, at: number): number {
   const after = sounds[at + 1]
   if (isVowel(phoneme)) return stressOf(phoneme) === 0 ? 0.55 : 1
   if (before === phoneme) return 0.1
-  if (symbol === 'R' && before && isVowel(before) && !(after && isVowel(after))) return 0.25
+  if (symbol === 'R' && before && isVowel(before) && !(after && isVowel(after))) return 0.15
   if (symbol === 'HH') return 0.4
   if (symbol === 'Y') return 0.35
   if ((symbol === 'T' || symbol === 'D') && before && !isVowel(before)) return 0.4

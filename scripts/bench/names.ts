@@ -17,8 +17,10 @@ import { assign, dealHeap } from '@/lib/naming/deal'
 import { IDIOMS } from '@/lib/naming/idioms'
 import { DEFAULT_LABEL } from '@/lib/naming/label'
 import { playOnWords } from '@/lib/naming/play'
+import { playLists } from '@/lib/naming/play-lists'
 import { heardApart, pronounceWord } from '@/lib/naming/pronounce'
 import { NEAR } from '@/lib/naming/sound-distance'
+import { wordsOf } from '@/lib/naming/words'
 
 import type { Figure } from '../lib/figures.mjs'
 import { labelFont } from '@/lib/names/label-font'
@@ -97,8 +99,8 @@ interface Wanted {
   lab: Lab
 }
 
-const rankOf = ({ phrase }: Wanted, lab: Lab): number =>
-  playOnWords(lab, { limit: TOP }).findIndex((play) => play.name.toLowerCase() === phrase) + 1
+const rankOf = ({ phrase }: Wanted, lab: Lab, limit = TOP): number =>
+  playOnWords(lab, { limit }).findIndex((play) => play.name.toLowerCase() === phrase) + 1
 
 /** Whether another shade, of the colour of some thing near the one written down, brings it up. */
 const suitsAnother = (wanted: Wanted): boolean =>
@@ -106,18 +108,42 @@ const suitsAnother = (wanted: Wanted): boolean =>
     ({ lab }) => deltaE00(lab, wanted.lab) <= AS_SUITABLE && rankOf(wanted, lab) > 0,
   )
 
-function mustFind(name: string, what: string): Figure {
+/** What is asked for when it only matters whether a play is heard at all. */
+const ALL_OF_THEM = 1000
+
+/** Why a play is not found, told by what its saying and its words are; no name is given away. */
+function whyMissed(wanted: Wanted): string {
+  const { phrase, source, lab } = wanted
+  if (!IDIOMS.some((idiom) => idiom.phrase.toLowerCase() === source.toLowerCase()))
+    return 'saying unknown'
+  const old = new Set(wordsOf(source))
+  const known = new Set(playLists().words.map(({ text }) => text))
+  if (!wordsOf(phrase).every((word) => old.has(word) || known.has(word))) return 'word unknown'
+  const rank = rankOf(wanted, lab, ALL_OF_THEM)
+  return rank === 0
+    ? 'not heard'
+    : rank <= 2 * TOP
+      ? `ranked below ${TOP}`
+      : `ranked below ${2 * TOP}`
+}
+
+/** `secret` prints only how many are missed, and why: what tunes the generator must not read them. */
+function mustFind(name: string, what: string, secret = false): Figure {
   const { plays } = fixture<{ plays: Wanted[] }>(name)
   const here = plays.filter((wanted) => rankOf(wanted, wanted.lab) > 0)
   const near = plays.filter((wanted) => !here.includes(wanted) && suitsAnother(wanted))
   const missed = plays.filter((wanted) => !here.includes(wanted) && !near.includes(wanted))
-  const names = missed.map(({ phrase }) => phrase).join(', ')
+  const whys = new Map<string, number>()
+  for (const one of missed) whys.set(whyMissed(one), (whys.get(whyMissed(one)) ?? 0) + 1)
+  const told = secret
+    ? [...whys].map(([why, times]) => `${why}: ${times}`)
+    : missed.map(({ phrase }) => phrase)
   return {
     what,
     value:
       `${here.length} of ${plays.length} at the shade written down` +
       (near.length ? `, ${near.length} more within ΔE00 ${AS_SUITABLE} of it` : '') +
-      (names ? `; missed: ${names}` : ''),
+      (missed.length ? `; missed: ${told.join(', ')}` : ''),
     bar: `every one in the top ${TOP} of a suitable shade`,
     met: missed.length === 0,
   }
@@ -154,7 +180,7 @@ function wordplay(): Figure[] {
   return [
     { what: 'sayings', value: `${IDIOMS.length}`, bar: '≥ 500', met: IDIOMS.length >= 500 },
     mustFind('must-find', 'wordplay that must be found'),
-    mustFind('held-out', 'wordplay that the tuning never saw'),
+    mustFind('held-out', 'wordplay that the tuning never saw', true),
     thoughtOf(),
     {
       what: 'results of one saying, 60 shades',

@@ -95,7 +95,7 @@ describe('wordplay', () => {
     () => {
       const silver = hexToLab('#c2c5c8')
       const words = (fibers: string[]) =>
-        playOnWords(silver, { fibers, limit: 300 }).map(({ swapped }) => swapped.to)
+        playOnWords(silver, { fibers, limit: 2000 }).map(({ swapped }) => swapped.to)
       expect(words(['cotton'])).not.toContain('wool')
       expect(words(['wool'])).not.toContain('silk')
       expect(words(['wool'])).toContain('fleece')

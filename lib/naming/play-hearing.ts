@@ -1,0 +1,183 @@
+import { isVowel } from './arpabet'
+import type { Idiom } from './idioms'
+import { playLists, type PlayWord, type Said, type Slot } from './play-lists'
+import { SAME, soundCost } from './sound-distance'
+
+/** How the word set in sounds beside the one it replaces. */
+export type PlaySound = 'same' | 'near' | 'within' | 'rhyme'
+
+/** Whether a saying is whole with a word at these of its places. */
+export type Whole = (idiom: Idiom, places: readonly number[]) => boolean
+
+/** A word in the place of another, as it is heard. */
+export interface Heard {
+  slot: Slot
+  sound: PlaySound
+  /** 0–1: how surely the old word is heard in the new one by itself */
+  value: number
+  /** 0–1: what is left of the sentence's grammar */
+  grammar: number
+  /** where else the sentence is whole though the word plays another part; null when nowhere */
+  otherwise: Whole | null
+}
+
+/** What the difference may cost in whole sounds ({@link soundCost}) for a word to be heard at all. */
+const MOST = 1
+/** And for one that carries no sense by itself, or is two. */
+const MOST_OF_SMALL = 0.45
+/** A difference of this much is a slip of one sound: tide and dyed; in more syllables, of two. */
+const SLIP = 0.42
+const SLIP_OF_MORE = 0.55
+/** Words of this many sounds hide a slip no better and no worse than others. */
+const USUAL = 3.5
+
+/** What is left of a difference in a word of so many sounds: long words hide more. */
+const inWordOf = (cost: number, sounds: number): number => cost / (0.6 + (0.4 * sounds) / USUAL)
+
+/** The old word whole at the end of the new one, with little before it: olive for live. */
+function standsWithin(one: Said, other: Said): boolean {
+  const extra = one.symbols.length - other.symbols.length
+  if (extra < 1 || extra > 2 || other.symbols.length < 2) return false
+  if (extra === 2 && one.symbols.slice(0, extra).some(isVowel) && other.syllables < 2) return false
+  return other.symbols.every((symbol, at) => symbol === one.symbols[at + extra])
+}
+
+/** The old word whole at the beginning of the new one: newt for new, raisin for raise. */
+const beginsWith = (one: Said, other: Said): boolean =>
+  one.symbols.length > other.symbols.length &&
+  other.symbols.every((symbol, at) => symbol === one.symbols[at])
+
+/** The new word has lost no more than one consonant of the old one, at the beginning. */
+const dropsFirst = (one: Said, other: Said): boolean =>
+  one.symbols.length + 1 === other.symbols.length &&
+  !isVowel(other.symbols[0]!) &&
+  one.symbols.every((symbol, at) => symbol === other.symbols[at + 1])
+
+/** How alike two words look, 0–1: whoever reads coral for moral has seen most of it before. */
+function looksAlike(one: string, other: string): number {
+  let row = Array.from({ length: other.length + 1 }, (_, at) => at)
+  for (let i = 1; i <= one.length; i++) {
+    const next = [i]
+    for (let j = 1; j <= other.length; j++)
+      next.push(
+        Math.min(
+          row[j - 1]! + (one[i - 1] === other[j - 1] ? 0 : 1),
+          row[j]! + 1,
+          next[j - 1]! + 1,
+        ),
+      )
+    row = next
+  }
+  return 1 - row[other.length]! / Math.max(one.length, other.length)
+}
+
+interface Fit {
+  sound: PlaySound
+  value: number
+}
+
+/** How one way to say a word is heard for one way to say the other; null when nobody would hear it. */
+function hearOne(word: PlayWord, one: Said, slot: Slot, other: Said): Fit | null {
+  const sounds = Math.max(one.symbols.length, other.symbols.length)
+  const longer = Math.abs(one.symbols.length - other.symbols.length)
+  const small = slot.role === null || slot.role === 'x'
+  if (longer > (slot.span === 2 ? 1 : 2)) return null
+  const cost = soundCost(one.ready, other.ready, small ? MOST_OF_SMALL : MOST)
+  if (cost <= SAME * sounds) return { sound: 'same', value: 1 }
+  if (standsWithin(one, other) && slot.span === 1) {
+    if (word.text.endsWith(slot.text) && slot.text.length >= 3)
+      return { sound: 'within', value: 0.9 }
+    if (!small && cost <= 1) return { sound: 'within', value: 0.74 }
+  }
+  const rhymes = one.syllables === other.syllables && one.rime === other.rime && !small
+  if (cost === Infinity && !rhymes) return null
+  const alike = looksAlike(word.text, slot.text)
+  if (!small && slot.span === 1 && alike >= 0.5 && beginsWith(one, other))
+    return { sound: 'within', value: 0.76 }
+  if (one.syllables === other.syllables) {
+    const apart = inWordOf(cost, sounds)
+    if (apart <= (one.syllables > 1 ? SLIP_OF_MORE : SLIP)) {
+      // What carries no sense by itself is heard only where hardly anything is changed.
+      if (small && apart > (slot.span === 2 ? 0.34 : 0.26)) return null
+      return { sound: 'near', value: 0.97 - 0.6 * apart + 0.08 * (alike - 0.5) }
+    }
+    if (small) return null
+    if (rhymes) {
+      // Whatever it begins with, whoever hears the end of a word knows how it began.
+      const more = 0.06 * (one.syllables - 1) + 0.12 * (alike - 0.5)
+      if (dropsFirst(one, other)) return { sound: 'rhyme', value: 0.73 + more }
+      return { sound: 'rhyme', value: 0.73 - 0.14 * Math.min(1, apart) + more }
+    }
+    if (apart <= 0.62 && alike >= 0.4)
+      return { sound: 'near', value: 0.9 - 0.6 * apart + 0.12 * (alike - 0.5) }
+  }
+  return null
+}
+
+/** The way in which it is heard best. */
+function hear(word: PlayWord, slot: Slot): Fit | null {
+  let best: Fit | null = null
+  for (const one of word.said)
+    for (const other of slot.said) {
+      const fit = hearOne(word, one, slot, other)
+      if (fit && fit.value > (best?.value ?? 0)) best = fit
+    }
+  return best
+}
+
+/**
+ * What is left of the grammar when a word does not play the part of the one it replaces: where the
+ * ear hears the old word anyway, much; where it only hears a rhyme, little.
+ */
+function grammarOf(word: PlayWord, slot: Slot, { sound, value }: Fit): number {
+  if (slot.role && word.roles.has(slot.role)) return 1
+  // Done and dun, new and tinted: each can be said of a thing.
+  if ((slot.role === 'vn' && word.roles.has('j')) || (slot.role === 'j' && word.roles.has('vn')))
+    return 0.97
+  if (sound === 'same') return slot.role && slot.role !== 'x' ? 0.92 : 0.86
+  if (sound === 'rhyme') return 0.7
+  if (sound === 'within') return slot.role && slot.role !== 'x' ? 0.9 : 0.8
+  return 0.42 + 0.45 * value
+}
+
+/** A thing before a noun, where an adjective stood: the sun days. */
+const beforeNoun: Whole = ({ words }, places) =>
+  places.every((place) => /^ns?$/.test(words[place + 1]?.role ?? ''))
+/** An adjective after the article, where a thing stood: the dyed. */
+const afterThe: Whole = ({ words }, places) =>
+  places.every((place) => words[place - 1]?.text === 'the' && !words[place + 1])
+
+function otherwiseWhole({ roles }: PlayWord, { role }: Slot): Whole | null {
+  if (role === 'j' && roles.has('n')) return beforeNoun
+  if (role === 'n' && (roles.has('vn') || roles.has('j'))) return afterThe
+  return null
+}
+
+/** A word that is only the other with an ending is no play on it. */
+const ENDED = /^(?:s|es|d|ed|ing|y|er|en|n|ly|’s)$/
+function sameWord(word: PlayWord, slot: Slot): boolean {
+  if (word.stem === slot.stem) return true
+  const [long, short] =
+    word.text.length > slot.text.length ? [word.text, slot.text] : [slot.text, word.text]
+  return short.length >= 3 && long.startsWith(short) && ENDED.test(long.slice(short.length))
+}
+
+const remembered = new Map<PlayWord, readonly Heard[]>()
+
+/** Everywhere in our sayings that a word is heard; listened for once. */
+export function heardOf(word: PlayWord): readonly Heard[] {
+  const known = remembered.get(word)
+  if (known) return known
+  const found: Heard[] = []
+  const long = word.said[0]!.syllables > 1
+  for (const slot of playLists().slots) {
+    if ((slot.span === 2 && !long) || sameWord(word, slot)) continue
+    const fit = hear(word, slot)
+    if (!fit) continue
+    const grammar = grammarOf(word, slot, fit)
+    const otherwise = grammar < 1 ? otherwiseWhole(word, slot) : null
+    found.push({ slot, ...fit, grammar, otherwise })
+  }
+  remembered.set(word, found)
+  return found
+}
