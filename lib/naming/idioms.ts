@@ -1312,7 +1312,7 @@ const LIST = `
 2 cat:n nap:n
 2 fat:j chance:n
 2 chew:v the fat:n
-3 on the lam:n
+1 on the lam:n
 3 jam:n packed:vn
 2 jam:n tomorrow:r
 2 in a jam:n

@@ -137,7 +137,7 @@ function grammarOf(word: PlayWord, slot: Slot, { sound, value }: Fit): number {
   if (sound === 'same') return slot.role && slot.role !== 'x' ? 0.92 : 0.86
   if (sound === 'rhyme') return 0.7
   if (sound === 'within') return slot.role && slot.role !== 'x' ? 0.9 : 0.8
-  return 0.42 + 0.45 * value
+  return 0.35 + 0.47 * value
 }
 
 /** A thing before a noun, where an adjective stood: the sun days. */

@@ -59,16 +59,15 @@ export const TRADE_PLAY: readonly TradeWord[] = [
 /** Things with a colour that are also done: a brook, and to brook. */
 export const ALSO_VERBS: ReadonlySet<string> = new Set(
   (
-    'glow brook sand mist cloud rain dawn bark leaf wave lark crow hawk duck ink jet hail ice storm ' +
-    'thunder snow bloom flower root steel tan blush rust stem peel crust toast pepper salt butter cream ' +
-    'jam spice sugar cork blaze smoke spark flame fire peak field rush bronze brown grey hedge seed ' +
-    'sprout surf moor'
+    'glow brook sand mist cloud rain dawn bark wave crow hawk duck ink hail ice storm snow bloom flower ' +
+    'root steel tan blush rust stem crust toast pepper salt butter cream jam spice sugar blaze smoke spark ' +
+    'flame fire peak seed sprout surf moor'
   ).split(' '),
 )
 
 /** Things with a colour whose name means something else at once, or nothing that one would wear. */
 export const NOT_PLAYED: ReadonlySet<string> = new Set(
-  'haw hip bog thrush date stout drab goose rum peel rocket'.split(' '),
+  'haw hip bog thrush date stout drab goose rum peel rocket lamp'.split(' '),
 )
 
 /**

@@ -57,7 +57,7 @@ const NO_COLOR = 0.3
 const MOST_CALLED = 0.9
 /** What a shade's own turn among names that suit any shade may be worth. */
 const TURN = 0.07
-const WEIGHTS = { heard: 0.44, known: 0.17, fit: 0.35, short: 0.04 }
+const WEIGHTS = { heard: 0.38, known: 0.18, fit: 0.4, short: 0.04 }
 /** Names up to the first length (letters and spaces) stand well on a ball band; beyond the second, hardly. */
 const SHORT = 20
 const LONG = 40

@@ -164,6 +164,8 @@ function thoughtOf(): Figure {
   }
 }
 
+const PLAY_MS = 100
+
 function wordplay(): Figure[] {
   const line = dyedLine(60, 5)
   let most = 0
@@ -177,6 +179,8 @@ function wordplay(): Figure[] {
     times.push(processorMs(count))
     most = Math.max(most, ...perIdiom.values())
   }
+  const [first, ...later] = times
+  const worst = Math.max(...later)
   return [
     { what: 'sayings', value: `${IDIOMS.length}`, bar: '≥ 500', met: IDIOMS.length >= 500 },
     mustFind('must-find', 'wordplay that must be found'),
@@ -184,9 +188,15 @@ function wordplay(): Figure[] {
     thoughtOf(),
     {
       what: 'results of one saying, 60 shades',
-      value: `at most ${most}; ${ms(median(times))} a shade`,
+      value: `at most ${most}`,
       bar: '≤ 2',
       met: most <= 2,
+    },
+    {
+      what: 'wordplay for one of 60 shades, after the first',
+      value: `median ${ms(median(later))}, worst ${ms(worst)} of the processor; the first of a process ${ms(first!)}`,
+      bar: `≤ ${PLAY_MS} ms`,
+      met: worst <= PLAY_MS,
     },
   ]
 }
