@@ -35,8 +35,12 @@ test('from a new line to a kept combination that a colleague finds and a neighbo
 
   await page.getByRole('link', { name: 'Import shades' }).first().click()
   await page.locator('input[type=file]').setInputFiles(SHADES)
+  await expect(page.getByText('“Plain Ewe” as a draft of its name')).toBeVisible()
   await page.getByRole('button', { name: 'Save 40 shades' }).click()
   await expect(page).toHaveURL(/\/saltmarsh-sport\/shades/)
+  // Nobody has approved a name yet.
+  await expect(page.getByRole('link', { name: 'No. 11', exact: true })).toBeVisible()
+  await expect(page.getByText('Plain Ewe')).toHaveCount(0)
   const chapters = page.getByRole('navigation', { name: 'Chapters of Saltmarsh Sport' })
   await expect(chapters.getByRole('link', { name: /Shades.*40/ })).toBeVisible()
 
