@@ -2,10 +2,11 @@ import { beforeAll, describe, expect, it } from 'vitest'
 
 import type { Actor } from '@/lib/auth/actor'
 import { ForbiddenError, NotFoundError } from '@/lib/errors'
+import { NAME_LIMITS } from '@/lib/names/constants'
 import { listNames } from '@/lib/names/list-names'
 import { readTogether } from '@/lib/names/read-together'
 import { nameListSchema } from '@/lib/names/schema'
-import { Family, NameVote, Shade, type Line, type NameIdea } from '@/models'
+import { Family, NameIdea, NameVote, Shade, type Line } from '@/models'
 import { makeActor, makeActors, makeBrand } from '@/tests/factories/brand'
 import { makeLine } from '@/tests/factories/line'
 import { makeIdea } from '@/tests/factories/name'
@@ -207,6 +208,27 @@ describe('the list', () => {
       )
       expect(pages[2]!.total).toBe(60)
     }
+  })
+
+  it('checks only so many drafts to narrow by, and says how many it left', async () => {
+    const full = await makeLine(brand)
+    const shades = await makeShades(full, NAME_LIMITS.sifted + 2)
+    await NameIdea.bulkCreate(
+      shades.map(({ id: shadeId }) => ({
+        brandId: brand.id,
+        lineId: full.id,
+        shadeId,
+        text: 'Cashmere Lane',
+        state: 'draft' as const,
+        authorId: null,
+        wordedById: null,
+      })),
+    )
+    expect(await read(owner, full, { warned: '1' })).toMatchObject({
+      total: NAME_LIMITS.sifted,
+      unsifted: 2,
+    })
+    expect((await read(owner, full)).unsifted).toBe(0)
   })
 
   it.each([{}, { sort: 'checks' }, { state: 'draft,in-review' }] as Record<string, string>[])(
