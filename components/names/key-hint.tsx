@@ -1,5 +1,8 @@
 import { Kbd } from '@/components/ui/kbd'
 
+/** Keys that do not say their own name. */
+export const KEY_FACES: Record<string, string> = { ArrowRight: '→', ArrowLeft: '←' }
+
 /** The key of a button, for the eye: the button says it by aria-keyshortcuts. */
 export function KeyHint({ of }: { of: string }) {
   return (
@@ -8,5 +11,3 @@ export function KeyHint({ of }: { of: string }) {
     </span>
   )
 }
-
-const KEY_FACES: Record<string, string> = { ArrowRight: '→', ArrowLeft: '←' }

@@ -62,8 +62,8 @@ export function ReviewEnd({
       </h2>
       {made.length > 0 ? (
         <p>
-          In this sitting: {made.map(([many, word]) => `${many} ${word}`).join(', ')}. Whoever wrote
-          them is told by letter.
+          In this sitting: {made.map(([many, word]) => `${many} ${word}`).join(', ')}. Others who
+          wrote them are told by letter.
         </p>
       ) : null}
       <Named shades={shades} named={named} />

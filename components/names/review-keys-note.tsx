@@ -2,8 +2,9 @@
 
 import { Note } from '@/components/layout/note'
 import { Switch } from '@/components/ui/checkbox'
+import { Kbd } from '@/components/ui/kbd'
 
-import { KeyHint } from './key-hint'
+import { KEY_FACES } from './key-hint'
 import { REVIEW_KEYS, useKeysOn, type ReviewDeed } from './review-keys'
 
 const DECIDERS: readonly ReviewDeed[] = [
@@ -34,8 +35,7 @@ export function ReviewKeysNote({ decides }: { decides: boolean }) {
           {keys.map(({ key, words }) => (
             <div key={key} className="flex items-baseline gap-3 py-0.5">
               <dt className="w-7 shrink-0 text-center">
-                <KeyHint of={key} />
-                <span className="sr-only">{key}</span>
+                <Kbd>{KEY_FACES[key] ?? key.toUpperCase()}</Kbd>
               </dt>
               <dd>{words}</dd>
             </div>
