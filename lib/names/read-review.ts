@@ -25,7 +25,7 @@ type Queued = Pick<NameIdea, 'id' | 'shadeId' | 'stateSince'>
 
 /**
  * The stretch of the names in review that holds this idea: of one that is in review no more, what
- * followed it; of none, the first. Eleven queries, however many names there are.
+ * followed it; of none, the first. Thirteen queries at most, however many names there are.
  * @throws NotFoundError
  */
 export async function readReview(
