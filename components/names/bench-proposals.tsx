@@ -257,6 +257,7 @@ function ProposedRow({
           <Button
             size="small"
             variant="quiet"
+            className="-ml-2.5"
             aria-label={`Try name: ${name}`}
             onClick={() => tryOut(name, note)}
           >

@@ -95,10 +95,11 @@ export default async function NamingBenchPage({ params }: Props) {
     >
       <SheetHeader
         title={shade.label}
+        // Whether its lab dip is approved would be taken for its name here.
         meta={
           <span className="flex flex-wrap items-center gap-x-3">
-            {shade.name === null ? 'No approved name yet' : `No. ${shade.number}`}
-            <ShadeStatusWord status={shade.status} />
+            {shade.name === null ? 'No approved name yet' : `No. ${shade.number}, name approved`}
+            {shade.status === 'retired' ? <ShadeStatusWord status="retired" /> : null}
           </span>
         }
         back={{ href: namesHref(place), label: 'Names' }}
