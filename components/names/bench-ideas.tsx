@@ -164,7 +164,7 @@ function Idea({
             <IdeaState state={idea.state} locked={idea.locked} />
             {told.length > 0 ? <span>{told.join(' · ')}</span> : null}
           </div>
-          {idea.note ? (
+          {idea.note && !edits ? (
             <p className="mt-1 max-w-measure whitespace-pre-line text-ink-soft">{idea.note}</p>
           ) : null}
         </div>
