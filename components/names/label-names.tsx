@@ -7,6 +7,7 @@ import { Button } from '@/components/ui/button'
 import { Ledger } from '@/components/ui/ledger'
 import { Status } from '@/components/ui/status'
 import type { ActionResult } from '@/lib/errors'
+import type { SetName } from '@/lib/naming/label'
 import type { LabelView } from '@/lib/names/present'
 
 import { LabelReasonDialog } from './label-reason-dialog'
@@ -32,20 +33,16 @@ export function LabelNames({
   unlock: UnlockAction
 }) {
   const { brand, lineSlug } = place
-  const canUnlock = labels.some((label) => label.canUnlock)
   return (
     <Ledger caption="Names on the labels">
       <thead>
         <tr>
           <th scope="col">Shade</th>
           <th scope="col">Name as it is set</th>
-          <th scope="col">On the label</th>
+          <th scope="col" className="max-sm:hidden">
+            On the label
+          </th>
           {frozen ? <th scope="col">Lock</th> : null}
-          {canUnlock ? (
-            <th scope="col">
-              <span className="sr-only">Unlock</span>
-            </th>
-          ) : null}
         </tr>
       </thead>
       <tbody>
@@ -59,49 +56,57 @@ export function LabelNames({
                 No. {number}
               </AppLink>
             </th>
-            <td className="font-title">
+            <td>
               {set.lines.map(({ text }, at) => (
-                <span key={at} className="block">
+                <span key={at} className="block font-title">
                   {text}
                 </span>
               ))}
+              <Fit set={set} className="sm:hidden" />
             </td>
-            <td>
-              <Status kind={set.fits ? 'done' : 'attention'}>{fitInWords(set)}</Status>
+            <td className="max-sm:hidden">
+              <Fit set={set} className="flex" />
             </td>
             {frozen ? (
               <td>
-                <Status kind={label.locked ? 'locked' : 'none'}>
-                  {label.locked ? 'Locked' : 'Unlocked'}
-                </Status>
-              </td>
-            ) : null}
-            {canUnlock ? (
-              <td className="text-right">
-                {label.canUnlock ? (
-                  <LabelReasonDialog
-                    title={`Unlock “${name}”?`}
-                    description="This name alone can then be opened again or replaced. The label printer may have it already: tell them."
-                    confirmLabel="Unlock name"
-                    pendingLabel="Unlocking name…"
-                    done={`“${name}” is unlocked.`}
-                    confirm={(reason) => unlock(brand, { lineSlug, ideaId, version, reason })}
-                    trigger={
-                      <Button
-                        size="small"
-                        icon={<LockOpen aria-hidden="true" />}
-                        aria-label={`Unlock ${name}…`}
-                      >
-                        Unlock…
-                      </Button>
-                    }
-                  />
-                ) : null}
+                <div className="flex flex-wrap items-center justify-between gap-x-4 gap-y-1">
+                  <Status kind={label.locked ? 'locked' : 'none'}>
+                    {label.locked ? 'Locked' : 'Unlocked'}
+                  </Status>
+                  {label.canUnlock ? (
+                    <LabelReasonDialog
+                      title={`Unlock “${name}”?`}
+                      description="This name alone can then be opened again or replaced. The label printer may have it already: tell them."
+                      confirmLabel="Unlock name"
+                      pendingLabel="Unlocking name…"
+                      done={`“${name}” is unlocked.`}
+                      confirm={(reason) => unlock(brand, { lineSlug, ideaId, version, reason })}
+                      trigger={
+                        <Button
+                          size="small"
+                          className="print:hidden"
+                          icon={<LockOpen aria-hidden="true" />}
+                          aria-label={`Unlock ${name}…`}
+                        >
+                          Unlock…
+                        </Button>
+                      }
+                    />
+                  ) : null}
+                </div>
               </td>
             ) : null}
           </tr>
         ))}
       </tbody>
     </Ledger>
+  )
+}
+
+function Fit({ set, className }: { set: SetName; className: string }) {
+  return (
+    <Status kind={set.fits ? 'done' : 'attention'} className={className}>
+      {fitInWords(set)}
+    </Status>
   )
 }

@@ -65,7 +65,7 @@ test('an owner sets the label, locks names, opens one and then all, and takes th
   await expect(form.getByText('All 2 names fit')).toBeVisible()
   await form.getByText('One', { exact: true }).click()
   await form.getByLabel('Room for the name, mm').fill('34')
-  await expect(form.getByText('2 of 2 names do not fit')).toBeVisible()
+  await expect(form.getByText('2 of 2 names do not fit', { exact: true })).toBeVisible()
   await expect(form.getByRole('img', { name: /mm too wide/ })).toBeVisible()
   await form.getByText('Up to two', { exact: true }).click()
   await expect(form.getByText('All 2 names fit')).toBeVisible()
