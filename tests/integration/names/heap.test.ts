@@ -99,7 +99,7 @@ describe('a pile of names', () => {
     })
   })
 
-  it('is added as it was looked over, once', async () => {
+  it('is added as it was looked over, in its order, once', async () => {
     const { rows } = await look('Plum Job\n- Moss Likely\n', 'lines')
     const input = {
       lineSlug,
@@ -108,7 +108,7 @@ describe('a pile of names', () => {
     }
     await addIdeas(actors.marketer, input)
     await addIdeas(actors.marketer, input)
-    expect(await textsOf()).toEqual(['Moss Likely', 'Plum Job'])
+    expect(await textsOf()).toEqual(['Plum Job', 'Moss Likely'])
   })
 
   it('of the most rows is looked over while one waits', async () => {
