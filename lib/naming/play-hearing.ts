@@ -76,6 +76,18 @@ interface Fit {
   value: number
 }
 
+const isTwoAtMost = (bits: number): boolean => {
+  const one = bits & (bits - 1)
+  return (one & (one - 1)) === 0
+}
+/** Whoever hears a word in another has most of its sounds: all but two, or the whole of its end. */
+const mayBeHeard = (one: Said, other: Said): boolean =>
+  (isTwoAtMost(one.has[0] & ~other.has[0]) &&
+    isTwoAtMost(one.has[1] & ~other.has[1]) &&
+    isTwoAtMost(other.has[0] & ~one.has[0]) &&
+    isTwoAtMost(other.has[1] & ~one.has[1])) ||
+  one.rime === other.rime
+
 /** How one way to say a word is heard for one way to say the other; null when nobody would hear it. */
 function hearOne(word: PlayWord, one: Said, slot: Slot, other: Said): Fit | null {
   const sounds = Math.max(one.symbols.length, other.symbols.length)
@@ -119,6 +131,7 @@ function hear(word: PlayWord, slot: Slot): Fit | null {
   let best: Fit | null = null
   for (const one of word.said)
     for (const other of slot.said) {
+      if (!mayBeHeard(one, other)) continue
       const fit = hearOne(word, one, slot, other)
       if (fit && fit.value > (best?.value ?? 0)) best = fit
     }
@@ -137,7 +150,8 @@ function grammarOf(word: PlayWord, slot: Slot, { sound, value }: Fit): number {
   if (sound === 'same') return slot.role && slot.role !== 'x' ? 0.92 : 0.86
   if (sound === 'rhyme') return 0.7
   if (sound === 'within') return slot.role && slot.role !== 'x' ? 0.9 : 0.8
-  return 0.35 + 0.47 * value
+  // A sentence without its verb is heard for longer than one without its adjective.
+  return (slot.role === 'v' ? 0.15 : 0.25) + 0.52 * value
 }
 
 /** A thing before a noun, where an adjective stood: the sun days. */
@@ -162,22 +176,24 @@ function sameWord(word: PlayWord, slot: Slot): boolean {
   return short.length >= 3 && long.startsWith(short) && ENDED.test(long.slice(short.length))
 }
 
-const remembered = new Map<PlayWord, readonly Heard[]>()
-
-/** Everywhere in our sayings that a word is heard; listened for once. */
-export function heardOf(word: PlayWord): readonly Heard[] {
-  const known = remembered.get(word)
-  if (known) return known
+function listen(word: PlayWord): Heard[] {
   const found: Heard[] = []
   const long = word.said[0]!.syllables > 1
   for (const slot of playLists().slots) {
-    if ((slot.span === 2 && !long) || sameWord(word, slot)) continue
+    if (slot.span === 2 && !long) continue
     const fit = hear(word, slot)
-    if (!fit) continue
+    if (!fit || sameWord(word, slot)) continue
     const grammar = grammarOf(word, slot, fit)
     const otherwise = grammar < 1 ? otherwiseWhole(word, slot) : null
     found.push({ slot, ...fit, grammar, otherwise })
   }
-  remembered.set(word, found)
   return found
+}
+
+let heard: ReadonlyMap<PlayWord, readonly Heard[]> | null = null
+
+/** Everywhere in our sayings that each word is heard; all are listened for once, when first asked. */
+export function allHeard(): ReadonlyMap<PlayWord, readonly Heard[]> {
+  heard ??= new Map(playLists().words.map((word) => [word, listen(word)]))
+  return heard
 }

@@ -15,6 +15,8 @@ export interface Said {
   syllables: number
   rime: string
   ready: ReadySound
+  /** which sounds it has, a bit each */
+  has: readonly [number, number]
 }
 
 /** A word in the form in which it is set in. */
@@ -51,8 +53,8 @@ export interface ReadyIdiom {
   /** how much each word tells of which saying it is: little for `the`, much for `glitters` */
   telling: readonly number[]
   evoked: readonly (readonly [word: string, lab: Lab])[]
-  /** colours it names outright */
-  colors: readonly Lab[]
+  /** colours it names outright, each with all the ways it is thought of */
+  colors: readonly (readonly Lab[])[]
 }
 
 /** How readily each kind of thing is thought of as a colour of yarn. */
@@ -73,6 +75,19 @@ const AS_COLOR: Record<ThingKind, number> = {
   house: 0.8,
 }
 
+const BITS = 31
+const numbers = new Map<string, number>()
+function hasOf(symbols: readonly string[]): [number, number] {
+  const has: [number, number] = [0, 0]
+  for (const symbol of symbols) {
+    const number = numbers.get(symbol) ?? numbers.size
+    numbers.set(symbol, number)
+    if (number < BITS) has[0] |= 1 << number
+    else has[1] |= 1 << (number - BITS)
+  }
+  return has
+}
+
 const saidOf = (sounds: readonly Sound[]): Said[] =>
   sounds.map((sound) => ({
     sound,
@@ -80,6 +95,7 @@ const saidOf = (sounds: readonly Sound[]): Said[] =>
     syllables: sound.filter(isVowel).length,
     rime: rimeOf(sound),
     ready: readySound(sound),
+    has: hasOf(sound.map(symbolOf)),
   }))
 
 const ONE_F = /^(?:leaf|loaf|sheaf)$/
@@ -173,10 +189,10 @@ const MOST_OF_TWO = 7
 function gatherIdioms(): { idioms: ReadyIdiom[]; slots: Slot[] } {
   const slots = new Map<string, Slot>()
   const labs = new Map<string, Lab[]>()
-  const colors = new Map<string, Lab>()
+  const colors = new Map<string, Lab[]>()
   for (const { word, kind, lab } of COLOR_THINGS) {
     labs.set(word, [...(labs.get(word) ?? []), lab])
-    if (kind === 'color') colors.set(word, lab)
+    if (kind === 'color') colors.set(word, [...(colors.get(word) ?? []), lab])
   }
   const telling = tellingOf()
   const soundsOf = ({ text, role }: Idiom['words'][number]): readonly Sound[] => {
@@ -219,7 +235,7 @@ function gatherIdioms(): { idioms: ReadyIdiom[]; slots: Slot[] } {
         (lab) => [text, lab] as const,
       ),
     ),
-    colors: idiom.words.map(({ text }) => colors.get(text)).filter((lab) => lab !== undefined),
+    colors: idiom.words.map(({ text }) => colors.get(text)).filter((known) => known !== undefined),
   }))
   return { idioms, slots: [...slots.values()] }
 }

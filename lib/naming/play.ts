@@ -3,7 +3,7 @@ import type { Lab } from '../color/types'
 import { isVowel, respell } from './arpabet'
 import { impliedFibers } from './fiber-words'
 import type { Idiom } from './idioms'
-import { heardOf, type Heard, type PlaySound } from './play-hearing'
+import { allHeard, type Heard, type PlaySound } from './play-hearing'
 import { playLists, tailOf, type PlayWord, type ReadyIdiom, type Slot } from './play-lists'
 import { wordsOf } from './words'
 
@@ -52,12 +52,16 @@ const TAKEN = 0.015
 const MOST_TAKEN = 0.09
 /** From here on, in ΔE00, a word's colour is another than the shade's. */
 const COLOR_FAR = 20
+/** The very colour is worth more than one beside it by more than in proportion. */
+const NEARER = 1.4
+/** From here on a colour that the saying names is not the shade's. */
+const CONTRADICTS = 14
 /** What a trade word is worth that suits any shade, beside a colour word that fits. */
 const NO_COLOR = 0.3
 const MOST_CALLED = 0.9
 /** What a shade's own turn among names that suit any shade may be worth. */
 const TURN = 0.07
-const WEIGHTS = { heard: 0.38, known: 0.18, fit: 0.4, short: 0.04 }
+const WEIGHTS = { heard: 0.34, known: 0.18, fit: 0.44, short: 0.04 }
 /** Names up to the first length (letters and spaces) stand well on a ball band; beyond the second, hardly. */
 const SHORT = 20
 const LONG = 40
@@ -69,7 +73,7 @@ const SAID_TWICE = 4
 const HEARD_ENOUGH = 0.5
 
 const clamp = (value: number): number => Math.max(0, Math.min(1, value))
-const fitOf = (apart: number): number => clamp(1 - apart / COLOR_FAR)
+const fitOf = (apart: number): number => clamp(1 - apart / COLOR_FAR) ** NEARER
 
 /** A word that has, or calls to mind, a colour near the shade. */
 interface Near {
@@ -116,7 +120,7 @@ interface Candidate {
 /** How surely the saying is known in the name: by the new word's sound, and by all that stays. */
 function recognised(
   { value, sound, slot }: Heard,
-  { telling }: ReadyIdiom,
+  { telling, idiom }: ReadyIdiom,
   places: readonly number[],
 ) {
   const stays = telling.reduce(
@@ -128,8 +132,10 @@ function recognised(
   const twice = places.length > 1 ? SAID_TWICE : 0
   const told = clamp((stays + twice - TELLS_NOTHING) / (TELLS_ALL - TELLS_NOTHING))
   const unsure = 1 - value
+  // What everybody knows is known by less of it: hit the woad.
+  const whole = told + (idiom.known === 3 ? 0.35 * (1 - told) : 0)
   // A rhyme lives by the rest of the saying.
-  return value + unsure * (0.45 * told - (sound === 'rhyme' ? 0.7 : 0.4) * (1 - told))
+  return value + unsure * (0.45 * whole - (sound === 'rhyme' ? 0.7 : 0.4) * (1 - whole))
 }
 
 /** A number of 0–1 that is a shade's own for a name: the same each time, unlike the next shade's. */
@@ -157,22 +163,22 @@ const countedIn = (word: PlayWord, { words }: Idiom, places: readonly number[]):
  * best first: by how surely the saying is heard, how near the word's colour, or what the saying calls
  * to mind, is to the shade, how well the saying is known, and how short the name is. At most two
  * results of one saying. Nothing that implies a fibre the yarn does not hold, and no word that can be
- * read in two ways. The first call of a process takes longer: it listens to all words that suit the
- * shade.
+ * read in two ways. The first call of a process takes a second: it listens for every word in every
+ * saying.
  */
 export function playOnWords(
   shade: Lab,
   { fibers = ['wool'], limit = 40, taken = [] }: PlayWishes = {},
 ): Play[] {
-  const { words, idioms } = playLists()
+  const { idioms } = playLists()
   const called = idioms.map(({ evoked }) => nearestEvoked(evoked, shade))
   // A saying that names another colour would contradict the yarn.
   const contradicts = idioms.map(({ colors }) =>
-    colors.some((color) => deltaE00(color, shade) > COLOR_FAR),
+    colors.some((labs) => labs.every((lab) => deltaE00(lab, shade) > CONTRADICTS)),
   )
   const names = taken.map((name) => new Set(wordsOf(name)))
   const candidates: Candidate[] = []
-  for (const word of words) {
+  for (const [word, places] of allHeard()) {
     if (word.fiber && !fibers.includes(word.fiber)) continue
     let colored: number | null = null
     let ownFit = 0
@@ -184,7 +190,7 @@ export function playOnWords(
     if (ownFit === 0 && word.trade === 0) continue
     if (ownFit === 0) colored = null
     const times = names.filter((name) => name.has(word.text)).length
-    for (const heard of heardOf(word))
+    for (const heard of places)
       for (const { idiom: at, at: everywhere } of heard.slot.places) {
         const ready = idioms[at]!
         if (contradicts[at] || ready.stems.has(word.stem)) continue
