@@ -2388,7 +2388,6 @@ const LIST = `
 2 sigh:n of relief:n
 2 beyond belief:n
 3 good:j grief:n
-3 to each:x his own:n
 3 each:x to their own:n
 2 figure:n of speech:n
 2 freedom:n of speech:n

@@ -147,9 +147,14 @@ function grammarOf(word: PlayWord, slot: Slot, { sound, value }: Fit): number {
   // Done and dun, new and tinted: each can be said of a thing.
   if ((slot.role === 'vn' && word.roles.has('j')) || (slot.role === 'j' && word.roles.has('vn')))
     return 0.97
-  if (sound === 'same') return slot.role && slot.role !== 'x' ? 0.92 : 0.86
+  if (sound === 'same')
+    return !slot.role || slot.role === 'x' ? 0.86 : /^v/.test(slot.role) ? 0.89 : 0.92
   if (sound === 'rhyme') return 0.7
-  if (sound === 'within') return slot.role && slot.role !== 'x' ? 0.9 : 0.8
+  if (sound === 'within') {
+    // Olive for live, which the eye finds too; not blues for lose.
+    if (!word.text.includes(slot.text)) return 0.72
+    return slot.role && slot.role !== 'x' ? 0.9 : 0.8
+  }
   // A sentence without its verb is heard for longer than one without its adjective.
   return (slot.role === 'v' ? 0.15 : 0.25) + 0.52 * value
 }
