@@ -44,6 +44,11 @@ async function aKit(): Promise<string> {
   return (await link.getAttribute('href'))!
 }
 
+/** The address of the naming bench of a shade without a name. */
+async function benchOf(label: string): Promise<string> {
+  return (await first('shades', label)).replace('/shades/', '/names/shades/')
+}
+
 await take('sample-book', `${LINE}/shades`)
 await take('families', `${LINE}/shades/families`)
 await take('shade-table', `${LINE}/shades?view=table`)
@@ -53,6 +58,11 @@ await take('match', photograph)
 await take('board', `${LINE}/combinations`)
 await take('combination', await first('combinations', 'Low Sun, High Bracken'))
 await take('kit', await aKit())
+await take('names', `${LINE}/names`)
+await take('naming-bench', await benchOf('No. 61'))
+await take('names-dealt', `${LINE}/names/heap/deal`)
+await take('names-review', `${LINE}/names/review`)
+await take('labels', `${LINE}/names/labels`)
 await take('team', '/teasel-and-tarn/team')
 await take('activity', '/teasel-and-tarn/activity')
 await page.setViewportSize({ width: 390, height: 844 })
