@@ -5,7 +5,7 @@ import { checkName } from './check-name'
 
 /**
  * Checks a made-up name and makes some up for a mid grey, so that the first in a cold process is not
- * the slow one: dictionary, fonts and sayings are read then (about half a second). Call it once when
+ * the slow one: dictionary, fonts and sayings are read then (about a second). Call it once when
  * a process starts that answers people.
  */
 export function warmUpNames(): void {
