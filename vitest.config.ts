@@ -16,6 +16,8 @@ export default defineConfig({
           name: 'unit',
           include: ['tests/unit/**/*.test.ts'],
           environment: 'node',
+          // Proofs by brute force take their time on a busy machine.
+          testTimeout: 20_000,
         },
       },
       {

@@ -185,7 +185,11 @@ export function HeapList({ place, ideas, putBy, actions }: HeapListProps) {
                         : 'No colour comes to mind'}
                     </span>
                   )}
-                  <TextLink href={namesHref(place, `/ideas/${idea.id}`)} prefetch={false}>
+                  <TextLink
+                    href={namesHref(place, `/ideas/${idea.id}`)}
+                    prefetch={false}
+                    className="flex min-h-6 items-center pointer-coarse:min-h-11"
+                  >
                     Open<span className="sr-only"> {idea.text}</span>
                   </TextLink>
                 </p>

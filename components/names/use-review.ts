@@ -21,6 +21,9 @@ export interface Done {
   version: number
 }
 
+/** Nobody has read a name in less, milliseconds: a press that comes sooner was meant for the last. */
+const READ_IN = 400
+
 /** What a decision that is taken back at once gives as its reason. */
 const UNDO_REASON = 'Approved by mistake, and taken back at once.'
 
@@ -63,6 +66,7 @@ export function useReview(
   const [problem, setProblem] = useState<string | null>(null)
   const [comments, setComments] = useState<Record<string, string>>({})
   const focusWanted = useRef(false)
+  const shownAt = useRef(-READ_IN)
 
   const found = items.findIndex(({ idea }) => idea.id === at.id)
   const isEnd = items.length === 0 || at.id === null
@@ -97,6 +101,7 @@ export function useReview(
     focusWanted.current = !keepFocus
     const next = items.findIndex(({ idea }) => idea.id === id)
     setAt({ id, index: next < 0 ? index : next })
+    shownAt.current = performance.now()
   }
 
   function go(step: 1 | -1, terms?: { keepFocus?: boolean }) {
@@ -118,6 +123,7 @@ export function useReview(
 
   async function decide(move: ReviewMove, reason = '') {
     if (!item || pending || isTurning) return
+    if (performance.now() - shownAt.current < READ_IN) return
     const { idea, shade } = item
     const { id: ideaId, version, text } = idea
     setPending(move)

@@ -1,6 +1,6 @@
 import { expect, test as base, type BrowserContext } from '@playwright/test'
 
-export { expect, type Page } from '@playwright/test'
+export { expect, type Locator, type Page } from '@playwright/test'
 
 /** The address answered otherwise than 200, or not at all: for the test itself to judge. */
 const OF_AN_ANSWER = /^Failed to load resource: /

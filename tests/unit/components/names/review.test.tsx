@@ -180,6 +180,15 @@ describe('the review of names by keyboard', () => {
     expect(sent.at(-1)).toMatchObject(['reopen', { ideaId: 'idea-0', version: 4 }])
   })
 
+  it('takes a second press in one go for the name it was meant for', async () => {
+    const user = open()
+    await user.keyboard('a')
+    await inFront(TEXTS[1]!)
+    await user.keyboard('ap')
+    expect(sent).toHaveLength(1)
+    expect(await inFront(TEXTS[1]!)).toBeVisible()
+  })
+
   it('does not offer to take back what is locked by its approval', async () => {
     const user = open(pageOf([itemOf(TEXTS[0]!, 0), itemOf(TEXTS[1]!, 1)], { frozen: true }))
     await user.keyboard('a')
@@ -204,8 +213,10 @@ describe('the review of names by keyboard', () => {
     const user = open(pageOf([itemOf(TEXTS[0]!, 0), itemOf(TEXTS[1]!, 1)]))
     await user.keyboard('a')
     await inFront(TEXTS[1]!)
-    await user.keyboard('p')
-    expect(await inFront('Every name is decided')).toHaveFocus()
+    await waitFor(async () => {
+      await user.keyboard('p')
+      expect(screen.getByRole('heading', { name: 'Every name is decided' })).toHaveFocus()
+    })
     expect(screen.getByText(/In this sitting: 1 approved, 1 put by\./)).toBeVisible()
     expect(spoken()).toContain('No name is left.')
   })
