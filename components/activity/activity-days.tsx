@@ -1,26 +1,11 @@
 import { ChevronRight } from 'lucide-react'
 
-import { LedgerList } from '@/components/ui/ledger'
+import { DayLedger } from '@/components/ui/day-ledger'
 import type { ActivityDay, ActivityView, FieldChange } from '@/lib/activity/present'
 
 /** The record day by day, newest first; what was different in an entry is opened on demand. */
 export function ActivityDays({ days }: { days: readonly ActivityDay[] }) {
-  return (
-    <div className="space-y-8">
-      {days.map((day) => (
-        <section key={day.date} aria-labelledby={`day-${day.date}`}>
-          <h2 id={`day-${day.date}`} className="mb-2 text-lg">
-            <time dateTime={day.date}>{day.heading}</time>
-          </h2>
-          <LedgerList>
-            {day.entries.map((entry) => (
-              <Entry key={entry.id} entry={entry} />
-            ))}
-          </LedgerList>
-        </section>
-      ))}
-    </div>
-  )
+  return <DayLedger days={days}>{(entry) => <Entry key={entry.id} entry={entry} />}</DayLedger>
 }
 
 function Entry({ entry }: { entry: ActivityView }) {

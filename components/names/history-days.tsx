@@ -1,4 +1,4 @@
-import { LedgerList } from '@/components/ui/ledger'
+import { DayLedger } from '@/components/ui/day-ledger'
 import { TextLink } from '@/components/ui/text-link'
 import { MOVE_WORDS, STATE_WORDS } from '@/lib/names/constants'
 import type { MoveView, NameHistoryDay, NameHistoryEntry } from '@/lib/names/present'
@@ -17,20 +17,9 @@ export function HistoryDays({
   days: readonly NameHistoryDay[]
 }) {
   return (
-    <div className="space-y-8">
-      {days.map((day) => (
-        <section key={day.date} aria-labelledby={`day-${day.date}`}>
-          <h2 id={`day-${day.date}`} className="mb-2 text-lg">
-            <time dateTime={day.date}>{day.heading}</time>
-          </h2>
-          <LedgerList>
-            {day.entries.map((entry) => (
-              <Entry key={entry.id} place={place} entry={entry} />
-            ))}
-          </LedgerList>
-        </section>
-      ))}
-    </div>
+    <DayLedger days={days}>
+      {(entry) => <Entry key={entry.id} place={place} entry={entry} />}
+    </DayLedger>
   )
 }
 
