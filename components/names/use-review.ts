@@ -123,7 +123,8 @@ export function useReview(
 
   async function decide(move: ReviewMove, reason = '') {
     if (!item || pending || isTurning) return
-    if (performance.now() - shownAt.current < READ_IN) return
+    // A reason says enough of having read it.
+    if (!reason && performance.now() - shownAt.current < READ_IN) return
     const { idea, shade } = item
     const { id: ideaId, version, text } = idea
     setPending(move)

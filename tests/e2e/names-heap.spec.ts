@@ -54,7 +54,8 @@ test('a marketer brings a pile of names, deals them out, accepts, leaves and tak
   const dialog = page.getByRole('dialog')
   await dialog.getByRole('listitem').first().getByRole('button').click()
   await expect(moss).toHaveCount(0)
-  await page.getByRole('button', { name: 'Undo' }).click()
+  const laid = page.getByRole('listitem').filter({ hasText: /now on / })
+  await laid.getByRole('button', { name: 'Undo' }).click()
   await expect(moss).toBeVisible()
 
   // Dealt out: accepted one by one, taken back, left, and the ideas without a colour stay.
