@@ -8,7 +8,7 @@ import { copyWithoutProxy } from './without-proxy.mjs'
 import { clearReport, readPlaywright, readVitest, tallyOfCheck, tallyOfReport } from './tally.mjs'
 
 /** No step may take longer, in milliseconds. */
-const LIMIT = 9 * 60_000
+const LIMIT = 14 * 60_000
 
 const bin = (path) => join(ROOT, 'node_modules', path)
 
