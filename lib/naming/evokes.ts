@@ -17,7 +17,9 @@ const EVOKED = `
   bird 8f9aa5, birds 8f9aa5, feather b5aaa0, worm c58f80, dog 9a7650, horse 7a5236, horses 7a5236, cat 5a5652, cats 5a5652,
   beans 6b8a43, potato c0a06a, apples a8c04d, garlic ece4d0, silver c2c5c8, golden d6a92f, diamond dfe8ec, glass c5dcd8,
   old 8f8270, age 8f8270, time 8f8270, tea a5612a, kettle 4a4c50, pot 6a5a4c, wine 6b1f35, moon e0dfd3, moons e0dfd3, stars f0ead0,
-  clock a58a5a, wool e8dfcb, sheep e8dfcb, life 7fa548, new 9fc85a, fresh 9fd8b4, grave 4a4c50, shadow 5d5f69, wood 6a4f38,
+  clock a58a5a, wool e8dfcb, sheep e8dfcb,
+  fleece e8dfcb d6d3b8, ewe e8dfcb, lamb f0e8d8, ram c9bda8, flock e8dfcb, tweed 7d7160 6f6a5a, twine c9ac78, flax d8c08a, linen ded2ba,
+  life 7fa548, new 9fc85a, fresh 9fd8b4, grave 4a4c50, shadow 5d5f69, wood 6a4f38,
   music 6f5aa0, dance c0507a, song c0a040, heather 9a6f97, rainy 8b9ba8, day b5d0e6, morning f5d9a0, dawn e9b8a8,
   devil b02a20, angels f0ead8, hay d3b869, field 8fa54f, oats d9c39a, honey dd9f2e, milk f4f0e4, butter f3dd86,
   salt ecebe4, stone a09a90, stones a09a90, rock 7d7d78, rocks 7d7d78, iron 5a5c60, steel 7f8a94, gold d6a92f`

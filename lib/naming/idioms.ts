@@ -1325,7 +1325,7 @@ const LIST = `
 2 free:j will:n
 3 fill:v the bill:n
 2 goodwill:n to all:x
-3 over:x the hill:n
+2 over:x the hill:n
 2 head:v for the hills:ns
 2 just:r for the thrill:n
 2 take:v a chill:j pill:n
@@ -1552,7 +1552,7 @@ const LIST = `
 2 taking:vg your chances:ns
 2 take:v your chances:ns
 2 on edge:n
-3 over:x the edge:n
+2 over:x the edge:n
 3 cutting:j edge:n
 2 on the edge:n of your seat:n
 2 sign:v the pledge:n

@@ -15,6 +15,8 @@ export interface Heard {
   sound: PlaySound
   /** 0–1: how surely the old word is heard in the new one by itself */
   value: number
+  /** no more than one sound differs, whichever it is */
+  oneSound: boolean
   /** 0–1: what is left of the sentence's grammar */
   grammar: number
   /** where else the sentence is whole though the word plays another part; null when nowhere */
@@ -28,6 +30,10 @@ const MOST_OF_SMALL = 0.45
 /** A difference of this much is a slip of one sound: tide and dyed; in more syllables, of two. */
 const SLIP = 0.42
 const SLIP_OF_MORE = 0.55
+/** What a word is heard more surely in one that has all its consonants: wait in wheat. */
+const OF_CONSONANTS = 0.08
+/** How surely a word is heard in one that has another consonant within. */
+const OF_ONE_WITHIN = 0.7
 /** Words of this many sounds hide a slip no better and no worse than others. */
 const USUAL = 3.5
 
@@ -52,6 +58,27 @@ const dropsFirst = (one: Said, other: Said): boolean =>
   one.symbols.length + 1 === other.symbols.length &&
   !isVowel(other.symbols[0]!) &&
   one.symbols.every((symbol, at) => symbol === other.symbols[at + 1])
+
+/** One sound exchanged, or one more or less at the beginning. */
+function differsInOne(one: Said, other: Said): boolean {
+  const [long, short] =
+    one.symbols.length > other.symbols.length
+      ? [one.symbols, other.symbols]
+      : [other.symbols, one.symbols]
+  if (long.length === short.length)
+    return long.filter((symbol, at) => symbol !== short[at]).length <= 1
+  return long.length === short.length + 1 && short.every((symbol, at) => symbol === long[at + 1])
+}
+
+/** A consonant exchanged within a word of more than one syllable, which begins as it did: ochre, over. */
+const differsWithin = (one: Said, other: Said): boolean =>
+  one.syllables > 1 &&
+  one.symbols[0] === other.symbols[0] &&
+  one.syllables === other.syllables &&
+  differsInOne(one, other)
+
+const consonantsOf = ({ symbols }: Said): string =>
+  symbols.filter((symbol) => !isVowel(symbol)).join(' ')
 
 /** How alike two words look, 0–1: whoever reads coral for moral has seen most of it before. */
 function looksAlike(one: string, other: string): number {
@@ -94,7 +121,8 @@ function hearOne(word: PlayWord, one: Said, slot: Slot, other: Said): Fit | null
   const longer = Math.abs(one.symbols.length - other.symbols.length)
   const small = slot.role === null || slot.role === 'x'
   if (longer > (slot.span === 2 ? 1 : 2)) return null
-  const cost = soundCost(one.ready, other.ready, small ? MOST_OF_SMALL : MOST)
+  const within = slot.span === 1 && differsWithin(one, other)
+  const cost = soundCost(one.ready, other.ready, small && !within ? MOST_OF_SMALL : MOST)
   if (cost <= SAME * sounds) return { sound: 'same', value: 1 }
   if (standsWithin(one, other) && slot.span === 1) {
     if (word.text.endsWith(slot.text) && slot.text.length >= 3)
@@ -110,9 +138,14 @@ function hearOne(word: PlayWord, one: Said, slot: Slot, other: Said): Fit | null
     const apart = inWordOf(cost, sounds)
     if (apart <= (one.syllables > 1 ? SLIP_OF_MORE : SLIP)) {
       // What carries no sense by itself is heard only where hardly anything is changed.
-      if (small && apart > (slot.span === 2 ? 0.34 : 0.26)) return null
-      return { sound: 'near', value: 0.97 - 0.6 * apart + 0.08 * (alike - 0.5) }
+      if (small && !within && apart > (slot.span === 2 ? 0.34 : 0.26)) return null
+      const kept = consonantsOf(one) === consonantsOf(other) ? OF_CONSONANTS : 0
+      return {
+        sound: 'near',
+        value: Math.min(0.97, 0.97 - 0.6 * apart + kept) + 0.08 * (alike - 0.5),
+      }
     }
+    if (within) return { sound: 'near', value: OF_ONE_WITHIN + 0.12 * (alike - 0.5) }
     if (small) return null
     if (rhymes) {
       // Whatever it begins with, whoever hears the end of a word knows how it began.
@@ -127,13 +160,14 @@ function hearOne(word: PlayWord, one: Said, slot: Slot, other: Said): Fit | null
 }
 
 /** The way in which it is heard best. */
-function hear(word: PlayWord, slot: Slot): Fit | null {
-  let best: Fit | null = null
+function hear(word: PlayWord, slot: Slot): (Fit & { oneSound: boolean }) | null {
+  let best: ReturnType<typeof hear> = null
   for (const one of word.said)
     for (const other of slot.said) {
       if (!mayBeHeard(one, other)) continue
       const fit = hearOne(word, one, slot, other)
-      if (fit && fit.value > (best?.value ?? 0)) best = fit
+      if (fit && fit.value > (best?.value ?? 0))
+        best = { ...fit, oneSound: differsInOne(one, other) }
     }
   return best
 }
@@ -153,7 +187,7 @@ function grammarOf(word: PlayWord, slot: Slot, { sound, value }: Fit): number {
   if (sound === 'within') {
     // Olive for live, which the eye finds too; not blues for lose.
     if (!word.text.includes(slot.text)) return 0.72
-    return slot.role && slot.role !== 'x' ? 0.9 : 0.8
+    return slot.role && !/^(?:x|v)/.test(slot.role) ? 0.9 : 0.8
   }
   // A sentence without its verb is heard for longer than one without its adjective.
   return (slot.role === 'v' ? 0.15 : 0.25) + 0.52 * value

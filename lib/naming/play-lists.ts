@@ -50,6 +50,10 @@ export interface Slot {
 export interface ReadyIdiom {
   idiom: Idiom
   stems: ReadonlySet<string>
+  /** everybody knows it, and it has words enough to be known by when one of them is another */
+  firm: boolean
+  /** how each word ends */
+  rimes: readonly string[]
   /** how much each word tells of which saying it is: little for `the`, much for `glitters` */
   telling: readonly number[]
   evoked: readonly (readonly [word: string, lab: Lab])[]
@@ -63,9 +67,9 @@ const AS_COLOR: Record<ThingKind, number> = {
   dye: 1,
   plant: 1,
   fruit: 1,
-  mineral: 0.96,
+  mineral: 1,
   metal: 0.96,
-  food: 0.96,
+  food: 0.94,
   drink: 0.9,
   weather: 0.95,
   fire: 0.95,
@@ -159,6 +163,7 @@ function gatherWords(): PlayWord[] {
   for (const { word, roles, fiber, near } of TRADE_PLAY) {
     const form = wordOf(word, fiber)
     form.trade = near
+    for (const lab of evokedBy(word)) form.labs.push([lab, AS_COLOR.animal])
     form.counted = TRADE_PLAY.some((other) => other.word === plural(word))
     for (const role of roles) form.roles.add(role)
   }
@@ -183,6 +188,7 @@ function tellingOf(): (word: string) => number {
 /** What is hung on a word of a saying and stays: the ’s of a stone’s throw. */
 export const tailOf = (text: string): string => (text.length > 4 && text.endsWith("'s") ? "'s" : '')
 
+const FIRM_WORDS = 3
 /** Two words that one may stand for hold no more sounds than this. */
 const MOST_OF_TWO = 7
 
@@ -229,6 +235,8 @@ function gatherIdioms(): { idioms: ReadyIdiom[]; slots: Slot[] } {
   const idioms = IDIOMS.map((idiom): ReadyIdiom => ({
     idiom,
     stems: new Set(idiom.words.map(({ text }) => stemOf(text))),
+    firm: idiom.known === 3 && idiom.words.length >= FIRM_WORDS,
+    rimes: idiom.words.map((word) => rimeOf(soundsOf(word)[0]!)),
     telling: idiom.words.map(({ text }) => telling(text)),
     evoked: idiom.words.flatMap(({ text }) =>
       [...evokedBy(text), ...(labs.get(text) ?? labs.get(stemOf(text)) ?? [])].map(

@@ -43,6 +43,16 @@ const AGAIN = 0.03
 const LAST_FEW = 7
 /** With the same word in the place of the same other. */
 const AGAIN_OF_EXCHANGE = 0.03
+/** Within so much, in ΔE00, a word is the shade's own, and held back less the nearer it is; so little at least. */
+const OWN = 8
+const HELD_BACK = 0.15
+/** Of so many names that follow each other so many at most make the same exchange, unless no ear can tell. */
+const AMONG = 20
+const OF_ONE_EXCHANGE = 5
+/** The first of a list are what most people read: all are English, and no more than so many of one word. */
+const FIRST = 10
+const OF_ONE_WORD = 3
+const READS = 0.85
 /** And with the same saying. */
 const AGAIN_OF_IDIOM = 0.08
 /** What each further word is worth less that is of the trade and not of the shade. */
@@ -53,7 +63,7 @@ const MOST_TAKEN = 0.09
 /** From here on, in ΔE00, a word's colour is another than the shade's. */
 const COLOR_FAR = 20
 /** The very colour is worth more than one beside it by more than in proportion. */
-const NEARER = 1.4
+const NEARER = 2
 /** From here on a colour that the saying names is not the shade's. */
 const CONTRADICTS = 14
 /** What a trade word is worth that suits any shade, beside a colour word that fits. */
@@ -61,14 +71,25 @@ const NO_COLOR = 0.3
 const MOST_CALLED = 0.9
 /** What a shade's own turn among names that suit any shade may be worth. */
 const TURN = 0.07
-const WEIGHTS = { heard: 0.34, known: 0.18, fit: 0.44, short: 0.04 }
+const WEIGHTS = { heard: 0.34, known: 0.2, fit: 0.5, short: 0.1, rhymes: 0.06 }
+const MOST_SCORE = Object.values(WEIGHTS).reduce((sum, weight) => sum + weight)
 /** Names up to the first length (letters and spaces) stand well on a ball band; beyond the second, hardly. */
-const SHORT = 20
+const SHORT = 12
 const LONG = 40
 /** Less than the first tells no saying apart (`over the …`), more than the second is known at once. */
 const TELLS_NOTHING = 4
 const TELLS_ALL = 11
 const SAID_TWICE = 4
+/**
+ * How much of a saying of some words that everybody knows is known beyond what its words tell: where one
+ * sound is another, and where more are.
+ */
+const FIRM = 0.9
+const FIRM_OF_MORE = 0.5
+/** And of a shorter one. */
+const KNOWN_SHORT = 0.35
+/** How much a wrong part of speech still matters in such a saying, where one sound is another. */
+const PUT_UP_WITH = 0.1
 /** Below this a name is not worth reading. */
 const HEARD_ENOUGH = 0.5
 
@@ -107,6 +128,14 @@ function setIn(
   return name[0]!.toUpperCase() + name.slice(1)
 }
 
+/** The new word rhymes with one that stays, as a saying should: teal the deal. */
+const rhymesOn = ({ said }: PlayWord, { rimes }: ReadyIdiom, places: readonly number[]): boolean =>
+  rimes.some((rime, at) => rime === said[0]!.rime && !places.includes(at))
+
+/** A word of sense, or one long enough to be heard by itself: over, after. */
+const carries = ({ role, said }: Slot): boolean =>
+  (role !== null && role !== 'x') || said[0]!.syllables > 1
+
 interface Candidate {
   heard: Heard
   word: PlayWord
@@ -114,13 +143,15 @@ interface Candidate {
   places: readonly number[]
   colored: number | null
   called: Near | null
+  /** it reads as English, but for a word that sounds just as the right one does */
+  reads: boolean
   score: number
 }
 
 /** How surely the saying is known in the name: by the new word's sound, and by all that stays. */
 function recognised(
-  { value, sound, slot }: Heard,
-  { telling, idiom }: ReadyIdiom,
+  { value, sound, slot, oneSound }: Heard,
+  { telling, idiom, firm }: ReadyIdiom,
   places: readonly number[],
 ) {
   const stays = telling.reduce(
@@ -133,7 +164,9 @@ function recognised(
   const told = clamp((stays + twice - TELLS_NOTHING) / (TELLS_ALL - TELLS_NOTHING))
   const unsure = 1 - value
   // What everybody knows is known by less of it: hit the woad.
-  const whole = told + (idiom.known === 3 ? 0.35 * (1 - told) : 0)
+  const whole =
+    told +
+    (firm ? (oneSound ? FIRM : FIRM_OF_MORE) : idiom.known === 3 ? KNOWN_SHORT : 0) * (1 - told)
   // A rhyme lives by the rest of the saying.
   return value + unsure * (0.45 * whole - (sound === 'rhyme' ? 0.7 : 0.4) * (1 - whole))
 }
@@ -162,7 +195,7 @@ const countedIn = (word: PlayWord, { words }: Idiom, places: readonly number[]):
  * Familiar sayings with a word exchanged for a colour or trade word that suits a shade (Lab D65),
  * best first: by how surely the saying is heard, how near the word's colour, or what the saying calls
  * to mind, is to the shade, how well the saying is known, and how short the name is. At most two
- * results of one saying. Nothing that implies a fibre the yarn does not hold, and no word that can be
+ * results of one saying; the first ten all read as English. Nothing that implies a fibre the yarn does not hold, and no word that can be
  * read in two ways. The first call of a process takes a second: it listens for every word in every
  * saying.
  */
@@ -188,7 +221,7 @@ export function playOnWords(
       colored = Math.min(colored ?? Infinity, apart)
     }
     if (ownFit === 0 && word.trade === 0) continue
-    if (ownFit === 0) colored = null
+    if (ownFit <= NO_COLOR * word.trade) colored = null
     const times = names.filter((name) => name.has(word.text)).length
     for (const heard of places)
       for (const { idiom: at, at: everywhere } of heard.slot.places) {
@@ -201,20 +234,35 @@ export function playOnWords(
             : word.trade * (NO_COLOR + (near ? (MOST_CALLED - NO_COLOR) * fitOf(near.apart) : 0))
         const short = clamp((LONG - ready.idiom.phrase.length) / (LONG - SHORT))
         for (const places of placesFor(heard, everywhere)) {
-          const grammar = heard.otherwise?.(ready.idiom, places) ? 0.98 : heard.grammar
+          const parsed = heard.otherwise?.(ready.idiom, places) ? 0.98 : heard.grammar
+          // Whoever knows every word of a saying but one puts up with that one.
+          const grammar =
+            ready.firm && heard.oneSound && heard.sound !== 'within' && carries(heard.slot)
+              ? 1 - PUT_UP_WITH * (1 - parsed)
+              : parsed
           const known = recognised(heard, ready, places)
           if (known < HEARD_ENOUGH) continue
+          const counted = countedIn(word, ready.idiom, places) ? 1 : NOT_COUNTED
           const score =
             grammar *
-            (countedIn(word, ready.idiom, places) ? 1 : NOT_COUNTED) *
+            counted *
             known *
             (WEIGHTS.heard +
               WEIGHTS.known * ((ready.idiom.known - 1) / 2) +
               WEIGHTS.fit * fit +
-              WEIGHTS.short * short)
+              (WEIGHTS.short + (rhymesOn(word, ready, places) ? WEIGHTS.rhymes : 0)) * short)
           const turn = colored === null ? TURN * turnOf(shade, word, at) : 0
           const worth = score - turn - Math.min(MOST_TAKEN, TAKEN * times)
-          candidates.push({ heard, word, at, places, colored, called: near, score: worth })
+          candidates.push({
+            heard,
+            word,
+            at,
+            places,
+            colored,
+            called: near,
+            reads: parsed * counted >= READS,
+            score: worth,
+          })
         }
       }
   }
@@ -268,9 +316,19 @@ function present({ heard, word, at, places, colored, called, score }: Candidate)
     sound,
     colorApart: colored ?? called?.apart ?? null,
     why: alike + suits,
-    score,
+    score: score / MOST_SCORE,
   }
 }
+
+function countIn(lists: readonly (readonly string[])[]): (what: string) => number {
+  const counts = new Map<string, number>()
+  for (const what of lists.flat()) counts.set(what, (counts.get(what) ?? 0) + 1)
+  return (what) => counts.get(what) ?? 0
+}
+
+/** The nearer a word's colour, the less it is held back: a shade may have much of its own word. */
+const againOf = ({ colored }: Candidate): number =>
+  colored === null ? 1 : Math.max(HELD_BACK, Math.min(1, colored / OWN))
 
 /** The best, each worth a little less for every one chosen before it that is like it. */
 function choose(candidates: Candidate[], limit: number, fibers: readonly string[]): Play[] {
@@ -281,22 +339,28 @@ function choose(candidates: Candidate[], limit: number, fibers: readonly string[
   const done = new Set<Candidate>()
   const sayings = new Map<number, number>()
   const recent: string[][] = []
-  const lately = (what: string): number => recent.filter((those) => those.includes(what)).length
   const exchangeOf = ({ heard, word }: Candidate) => `${heard.slot.stem} for ${word.stem}`
   while (chosen.length < limit) {
     let best: Candidate | null = null
     let worth = -Infinity
+    const lately = countIn(recent.slice(-LAST_FEW))
+    const among = countIn(recent)
     for (const candidate of ranked) {
       if (candidate.score <= worth) break
       const times = sayings.get(candidate.at) ?? 0
       if (done.has(candidate) || times >= AT_MOST_OF_ONE_IDIOM) continue
       const now =
         candidate.score -
-        AGAIN * lately(candidate.word.stem) -
-        AGAIN_OF_EXCHANGE * lately(exchangeOf(candidate)) -
+        againOf(candidate) *
+          (AGAIN * lately(candidate.word.stem) +
+            AGAIN_OF_EXCHANGE * lately(exchangeOf(candidate))) -
         AGAIN_OF_IDIOM * times -
         (candidate.colored === null ? AGAIN_OF_TRADE * lately('trade') : 0)
       if (now <= worth) continue
+      if (chosen.length < FIRST && (!candidate.reads || among(candidate.word.stem) >= OF_ONE_WORD))
+        continue
+      if (candidate.heard.sound !== 'same' && among(exchangeOf(candidate)) >= OF_ONE_EXCHANGE)
+        continue
       worth = now
       best = candidate
     }
@@ -311,7 +375,8 @@ function choose(candidates: Candidate[], limit: number, fibers: readonly string[
     chosen.push(play)
     sayings.set(best.at, (sayings.get(best.at) ?? 0) + 1)
     recent.push([best.word.stem, exchangeOf(best), ...(best.colored === null ? ['trade'] : [])])
-    if (recent.length > LAST_FEW) recent.shift()
+    if (recent.length >= AMONG || chosen.length === FIRST)
+      recent.splice(0, chosen.length === FIRST ? FIRST : 1)
   }
   return chosen
 }
