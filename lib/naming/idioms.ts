@@ -3203,6 +3203,73 @@ const LIST = `
 2 behind bars:ns
 2 how:x are:x you:x
 2 bah:x humbug:n
+3 leave:v me alone:j
+2 the stage:n is set:vn
+2 muster:v the courage:n
+2 muster:v up courage:n
+3 at arm's length:n
+2 pay:v it forward:r
+3 every:j little helps:vz
+3 leave:v it to me
+3 made:vn my day:n
+3 all:x in the mind:n
+3 ready:j when you are
+3 day:n and night:n
+3 little:r by little:r
+3 in the making:n
+3 in a class:n of its own
+3 in seventh:j heaven:n
+3 on the house:n
+3 on the double:n
+3 on the mend:n
+3 for old:j times:ns sake:n
+3 hold:v that thought:n
+3 the cat's pyjamas:ns
+3 the plot:n thickens:vz
+3 the proof:n is in the pudding:n
+3 the ball:n is in your court:n
+3 the lap:n of luxury:n
+3 the writing:n is on the wall:n
+3 slowly:r but surely:r
+3 stay:v tuned:vn
+3 stick:v to your guns:ns
+3 tall:j tale:n
+3 tip:n of the hat:n
+3 to the letter:n
+3 to the point:n
+3 to the max:n
+3 to each his own
+3 twist:n of fate:n
+3 warm:j and fuzzy:j
+3 zero:n tolerance:n
+3 pillar:n of strength:n
+3 play:v it cool:j
+3 play:v it safe:j
+3 point:n taken:vn
+3 rough:j and tumble:n
+3 ships:ns in the night:n
+3 smooth:j as silk:n
+3 snug:j as a bug:n in a rug:n
+3 hustle:n and bustle:n
+3 hit:v the sack:n
+3 have:v a heart:n
+3 get:v the picture:n
+3 ebb:n and flow:n
+3 dead:j in the water:n
+3 catch:v you later:r
+3 cause:n for concern:n
+3 bright:j and breezy:j
+3 bite:v the bullet:n
+3 at the end:n of the day:n
+3 all:x systems:ns go:v
+3 above:x and beyond:x
+3 a taste:n of things:ns to come:v
+3 lend:v me a hand:n
+3 let:v it slide:v
+3 made:vn of sterner:j stuff:n
+3 never:r in a million years:ns
+3 no:x man's land:n
+3 once:r in a lifetime:n
 `
 
 function readIdiom(line: string): Idiom {

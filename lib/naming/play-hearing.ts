@@ -32,6 +32,8 @@ const SLIP = 0.42
 const SLIP_OF_MORE = 0.55
 /** What a word is heard more surely in one that has all its consonants: wait in wheat. */
 const OF_CONSONANTS = 0.08
+/** How surely one is heard whose only vowel is quite another, where the eye helps: rise in rose. */
+const OF_VOWEL = 0.68
 /** How surely a word is heard in one that has another consonant within. */
 const OF_ONE_WITHIN = 0.7
 /** Words of this many sounds hide a slip no better and no worse than others. */
@@ -79,6 +81,10 @@ const differsWithin = (one: Said, other: Said): boolean =>
 
 const consonantsOf = ({ symbols }: Said): string =>
   symbols.filter((symbol) => !isVowel(symbol)).join(' ')
+
+/** All the consonants are the same, and two at least. */
+const keepsConsonants = (one: Said, other: Said): boolean =>
+  consonantsOf(one) === consonantsOf(other) && consonantsOf(one).includes(' ')
 
 /** How alike two words look, 0–1: whoever reads coral for moral has seen most of it before. */
 function looksAlike(one: string, other: string): number {
@@ -139,7 +145,7 @@ function hearOne(word: PlayWord, one: Said, slot: Slot, other: Said): Fit | null
     if (apart <= (one.syllables > 1 ? SLIP_OF_MORE : SLIP)) {
       // What carries no sense by itself is heard only where hardly anything is changed.
       if (small && !within && apart > (slot.span === 2 ? 0.34 : 0.26)) return null
-      const kept = consonantsOf(one) === consonantsOf(other) ? OF_CONSONANTS : 0
+      const kept = keepsConsonants(one, other) ? OF_CONSONANTS : 0
       return {
         sound: 'near',
         value: Math.min(0.97, 0.97 - 0.6 * apart + kept) + 0.08 * (alike - 0.5),
@@ -147,6 +153,8 @@ function hearOne(word: PlayWord, one: Said, slot: Slot, other: Said): Fit | null
     }
     if (within) return { sound: 'near', value: OF_ONE_WITHIN + 0.12 * (alike - 0.5) }
     if (small) return null
+    if (one.syllables === 1 && alike >= 0.6 && keepsConsonants(one, other))
+      return { sound: 'near', value: OF_VOWEL }
     if (rhymes) {
       // Whatever it begins with, whoever hears the end of a word knows how it began.
       const more = 0.06 * (one.syllables - 1) + 0.12 * (alike - 0.5)

@@ -70,7 +70,7 @@ const CONTRADICTS = 14
 const NO_COLOR = 0.3
 const MOST_CALLED = 0.9
 /** What a shade's own turn among names that suit any shade may be worth. */
-const TURN = 0.07
+const TURN = 0.16
 const WEIGHTS = { heard: 0.34, known: 0.2, fit: 0.5, short: 0.1, rhymes: 0.06 }
 const MOST_SCORE = Object.values(WEIGHTS).reduce((sum, weight) => sum + weight)
 /** Names up to the first length (letters and spaces) stand well on a ball band; beyond the second, hardly. */
@@ -250,7 +250,9 @@ export function playOnWords(
             (WEIGHTS.heard +
               WEIGHTS.known * ((ready.idiom.known - 1) / 2) +
               WEIGHTS.fit * fit +
-              (WEIGHTS.short + (rhymesOn(word, ready, places) ? WEIGHTS.rhymes : 0)) * short)
+              (WEIGHTS.short +
+                (colored !== null && rhymesOn(word, ready, places) ? WEIGHTS.rhymes : 0)) *
+                short)
           const turn = colored === null ? TURN * turnOf(shade, word, at) : 0
           const worth = score - turn - Math.min(MOST_TAKEN, TAKEN * times)
           candidates.push({
