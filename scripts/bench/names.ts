@@ -148,7 +148,7 @@ function mustFind(name: string, what: string, heldOut = false): Figure {
       (near.length ? `, ${near.length} more within ΔE00 ${AS_SUITABLE} of it` : '') +
       (missed.length ? `; missed: ${told.join(', ')}` : ''),
     bar: `${heldOut ? 'at least half' : 'every one'} in the top ${TOP} of a suitable shade`,
-    met: heldOut ? 2 * missed.length <= plays.length : missed.length === 0,
+    met: heldOut ? plays.length > 0 && 2 * missed.length <= plays.length : missed.length === 0,
   }
 }
 
