@@ -35,8 +35,11 @@ async function test(fleet) {
   const results = new Map()
   try {
     const context = await prepare(fleet)
-    for (const step of chosen) {
-      results.set(step.name, await runStep(step, context, results))
+    const run = async (step) => results.set(step.name, await runStep(step, context, results))
+    const isBeside = ({ beside }) => chosen.some(({ name }) => name === beside)
+    for (const step of chosen.filter((each) => !isBeside(each))) {
+      const others = chosen.filter(({ beside }) => beside === step.name)
+      await Promise.all([run(step), inTurn(others, run)])
     }
   } catch (error) {
     if (fleet.isStopping) throw error
@@ -45,6 +48,10 @@ async function test(fleet) {
   }
   report(results)
   return isGood(sum([...results.values()])) ? 0 : 1
+}
+
+async function inTurn(steps, run) {
+  for (const step of steps) await run(step)
 }
 
 async function prepare(fleet) {

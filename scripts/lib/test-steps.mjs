@@ -14,17 +14,20 @@ const bin = (path) => join(ROOT, 'node_modules', path)
 
 /**
  * The steps of `npm test`, in order. `debian` is what a step needs installed, `world` whether it
- * stands on services, `after` the step without which it cannot run. `run` gives its tally; the
- * context is {fleet, env, world, local, filters}.
+ * stands on services, `after` the step without which it cannot run, `beside` the step in whose time
+ * it is done, since that one leaves a processor idle. `run` gives its tally; the context is
+ * {fleet, env, world, local, filters}.
  */
 export const STEPS = [
   {
     name: 'lint',
+    beside: 'integration',
     run: async ({ fleet, env }) =>
       tallyOfCheck(await node(fleet, env, [bin('eslint/bin/eslint.js'), '.', '--max-warnings=0'])),
   },
   {
     name: 'typecheck',
+    beside: 'integration',
     run: async ({ fleet, env }) => {
       const types = await node(fleet, env, [NEXT, 'typegen'])
       return tallyOfCheck(
