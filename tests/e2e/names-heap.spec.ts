@@ -45,7 +45,10 @@ test('a marketer brings a pile of names, deals them out, accepts, leaves and tak
   expect(file.suggestedFilename()).toMatch(/^bad-rows-.*\.csv$/)
   await page.getByRole('button', { name: 'Add 1 name' }).click()
   await expect(page).toHaveURL(new RegExp(`${HEAP}$`))
-  const moss = page.getByRole('listitem').filter({ hasText: named('Moss Likely') })
+  const moss = page
+    .locator('main')
+    .getByRole('listitem')
+    .filter({ hasText: named('Moss Likely') })
   await expect(moss).toContainText('Colour: moss')
   await expect(page.getByText(named('Far Out'))).toHaveCount(0)
 
