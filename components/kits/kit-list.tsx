@@ -1,5 +1,6 @@
 'use client'
 
+import { dayInWords } from '@/components/date-words'
 import { AppLink } from '@/components/ui/app-link'
 import { LedgerList } from '@/components/ui/ledger'
 import { LinkButton } from '@/components/ui/link-button'
@@ -13,14 +14,7 @@ import { DeleteKit, type DeleteKitAction } from './delete-kit'
 import { DownloadKit } from './download-kit'
 import { LeftOut } from './left-out'
 import { useKitStandings } from './use-kit-standings'
-import {
-  againHref,
-  askedInWords,
-  combinationsInWords,
-  dayInWords,
-  isThere,
-  sizeInWords,
-} from './words'
+import { againHref, askedInWords, combinationsInWords, isThere, sizeInWords } from './words'
 
 /** The kits of a line, newest first; those that are being built are followed. */
 export function KitList({

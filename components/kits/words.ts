@@ -1,3 +1,4 @@
+import { dayInWords } from '@/components/date-words'
 import { isUnbuilt } from '@/lib/kits/constants'
 import type { KitView } from '@/lib/kits/present'
 
@@ -9,15 +10,11 @@ export const combinationsInWords = (count: number): string =>
 export const sizeInWords = (bytes: number): string =>
   bytes < 1e6 ? `${Math.max(1, Math.round(bytes / 1e3))} kB` : `${(bytes / 1e6).toFixed(1)} MB`
 
-const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' })
 const minute = new Intl.DateTimeFormat('en-GB', {
   dateStyle: 'long',
   timeStyle: 'short',
   timeZone: 'UTC',
 })
-
-/** "20 March 2027". */
-export const dayInWords = (at: string): string => day.format(new Date(at))
 
 /** "20 March 2027 at 14:05 UTC, by Ottilie Fenn". */
 export const askedInWords = ({ askedAt, askedBy }: Pick<KitView, 'askedAt' | 'askedBy'>): string =>

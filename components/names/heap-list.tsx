@@ -18,6 +18,7 @@ import type { HeapIdeaView, NameableShade } from '@/lib/names/present'
 import { namesInWords, whatInWords, type HeapActions } from './heap-actions'
 import { IdeaState } from './idea-state'
 import { namesHref, type NamesPlace } from './names-place'
+import { nameOf } from './said-when'
 
 // Comes when the first name is to be laid on a shade.
 const HeapPlace = dynamic(() => import('./heap-place').then((it) => it.HeapPlace))
@@ -175,7 +176,7 @@ export function HeapList({ place, ideas, putBy, actions }: HeapListProps) {
                 ) : null}
                 <p className="flex flex-wrap items-center gap-x-3 gap-y-1 text-sm text-ink-faint">
                   <IdeaState state={idea.state} />
-                  <span>{idea.author?.name ?? 'Somebody who left'}</span>
+                  <span>{nameOf(idea.author)}</span>
                   {putBy ? (
                     <span>{idea.shade ? `for ${idea.shade.label}` : 'on no shade'}</span>
                   ) : (

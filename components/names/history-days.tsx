@@ -4,9 +4,7 @@ import { MOVE_WORDS, STATE_WORDS } from '@/lib/names/constants'
 import type { MoveView, NameHistoryDay, NameHistoryEntry } from '@/lib/names/present'
 
 import { namesHref, type NamesPlace } from './names-place'
-
-/** Whoever is not known any more, or never was. */
-const SOMEBODY = 'Somebody who has left'
+import { nameOf } from './said-when'
 
 /** What happened to a line's names day by day, newest first. */
 export function HistoryDays({
@@ -37,9 +35,7 @@ function Entry({
       </time>
       {'sentence' in told ? (
         <p className="max-w-measure min-w-0 grow break-words">
-          {told.byItself ? null : (
-            <span className="font-semibold">{person?.name ?? SOMEBODY} </span>
-          )}
+          {told.byItself ? null : <span className="font-semibold">{nameOf(person)} </span>}
           {told.sentence}
         </p>
       ) : (
@@ -54,8 +50,7 @@ function Entry({
             <span className="text-ink-faint">
               ({told.shade === null ? 'in the heap' : `No. ${told.shade}`})
             </span>
-            : <span className="font-semibold">{person?.name ?? SOMEBODY}</span>{' '}
-            {MOVE_WORDS[told.move.move]}
+            : <span className="font-semibold">{nameOf(person)}</span> {MOVE_WORDS[told.move.move]}
           </p>
           <p className="text-sm text-ink-soft">
             {stateInWords(told.move)}

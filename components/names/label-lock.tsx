@@ -3,7 +3,7 @@
 import { Lock, LockOpen } from 'lucide-react'
 import { useRouter } from 'next/navigation'
 
-import { dayInWords } from '@/components/kits/words'
+import { dayInWords } from '@/components/date-words'
 import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
 import { ConfirmDialog } from '@/components/ui/confirm-dialog'

@@ -1,4 +1,4 @@
-import { dayInWords } from '@/components/kits/words'
+import { dayInWords } from '@/components/date-words'
 import type { LabelSetting, SetName } from '@/lib/naming/label'
 import type { NamingSettingsView } from '@/lib/names/present'
 

@@ -1,3 +1,4 @@
+import { dayInWords } from '@/components/date-words'
 import { Note } from '@/components/layout/note'
 import { Facts } from '@/components/ui/ledger'
 import { TextLink } from '@/components/ui/text-link'
@@ -31,8 +32,6 @@ export function NamesInNumbersNote({
   )
 }
 
-const longDate = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' })
-
 /** When the label printer begins, or that names are locked for it. */
 export function PrintDateNote({
   place,
@@ -49,7 +48,7 @@ export function PrintDateNote({
         {frozen
           ? 'Approved names are locked for the label printer. An owner can unlock one, with a reason.'
           : printOn
-            ? `Labels are printed on ${longDate.format(new Date(printOn))}. From that day on approved names are locked.`
+            ? `Labels are printed on ${dayInWords(printOn)}. From that day on approved names are locked.`
             : 'No date is set yet.'}{' '}
         <TextLink href={namesHref(place, '/labels')}>See labels</TextLink>
       </p>

@@ -2,6 +2,7 @@
 
 import type { RefObject } from 'react'
 
+import { dayInWords } from '@/components/date-words'
 import { SheetSection } from '@/components/layout/sheet-header'
 import { Button } from '@/components/ui/button'
 import { TextLink } from '@/components/ui/text-link'
@@ -14,7 +15,7 @@ import { MOVE_BUTTONS, MOVE_PENDING } from './move-words'
 import { namesHref, type NamesPlace } from './names-place'
 import { ReasonForm } from './reason-form'
 import { ReviewStage } from './review-stage'
-import { dayInWords, nameOf } from './said-when'
+import { nameOf } from './said-when'
 import type { ReviewMove, useReview } from './use-review'
 
 const DECISIONS: readonly { move: ReviewMove; key: string }[] = [

@@ -5,13 +5,9 @@ const minute = new Intl.DateTimeFormat('en-GB', {
   timeStyle: 'short',
   timeZone: 'UTC',
 })
-const day = new Intl.DateTimeFormat('en-GB', { dateStyle: 'long', timeZone: 'UTC' })
 
 /** "20 Mar 2027, 14:05 UTC". */
 export const minuteInWords = (at: string): string => `${minute.format(new Date(at))} UTC`
-
-/** "20 March 2027", of a moment or of yyyy-mm-dd. */
-export const dayInWords = (at: string): string => day.format(new Date(at))
 
 /** Their name, or that they have left. */
 export const nameOf = (person: Someone): string => person?.name ?? 'Somebody who has left'

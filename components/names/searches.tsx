@@ -3,6 +3,7 @@
 import { useRef, useState } from 'react'
 import { useForm, type FieldPath } from 'react-hook-form'
 
+import { dayInWords } from '@/components/date-words'
 import { reach } from '@/components/reach'
 import { Button } from '@/components/ui/button'
 import { ConfirmDialog } from '@/components/ui/confirm-dialog'
@@ -26,7 +27,6 @@ import type { RecordedSearch } from '@/lib/names/present'
 
 import type { SearchActions } from './idea-actions'
 import type { NamesPlace } from './names-place'
-import { dayInWords } from './said-when'
 
 const OUTCOME_WORDS: Record<SearchOutcome, string> = {
   'nothing found': 'Nothing found',

@@ -52,8 +52,6 @@ export const addIdeaSchema = z.strictObject({
   note: nameNote.default(''),
   requestKey: z.uuid(),
 })
-/** What the form holds before parsing. */
-export type AddIdeaValues = z.input<typeof addIdeaSchema>
 /** A parsed new idea. */
 export type AddIdeaInput = z.output<typeof addIdeaSchema>
 
@@ -91,8 +89,6 @@ export const editIdeaSchema = z.strictObject({
   note: nameNote.optional(),
   wordingReason: reason.optional(),
 })
-/** What the form holds before parsing. */
-export type EditIdeaValues = z.input<typeof editIdeaSchema>
 /** A parsed change of words. */
 export type EditIdeaInput = z.output<typeof editIdeaSchema>
 
@@ -167,8 +163,6 @@ export const recordSearchSchema = z.strictObject({
   note: lines('the note', NAME_LIMITS.note).default(''),
   requestKey: z.uuid(),
 })
-/** What the form holds before parsing. */
-export type RecordSearchValues = z.input<typeof recordSearchSchema>
 /** A parsed search. */
 export type RecordSearchInput = z.output<typeof recordSearchSchema>
 

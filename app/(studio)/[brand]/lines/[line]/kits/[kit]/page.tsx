@@ -1,5 +1,6 @@
 import type { Metadata } from 'next'
 
+import { dayInWords } from '@/components/date-words'
 import { CopyText } from '@/components/kits/copy-text'
 import { DeleteKit } from '@/components/kits/delete-kit'
 import { DownloadKit } from '@/components/kits/download-kit'
@@ -8,7 +9,6 @@ import {
   againHref,
   askedInWords,
   combinationsInWords,
-  dayInWords,
   isThere,
   sizeInWords,
 } from '@/components/kits/words'

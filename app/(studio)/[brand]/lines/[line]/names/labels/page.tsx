@@ -1,6 +1,6 @@
 import type { Metadata } from 'next'
 
-import { dayInWords } from '@/components/kits/words'
+import { dayInWords } from '@/components/date-words'
 import { Note } from '@/components/layout/note'
 import { Sheet } from '@/components/layout/sheet'
 import { SheetHeader, SheetSection } from '@/components/layout/sheet-header'
